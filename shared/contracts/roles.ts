@@ -1,0 +1,17 @@
+import { z } from 'zod';
+
+export const role = z.enum(['owner', 'designer', 'programmer', 'operator']);
+export type Role = z.infer<typeof role>;
+
+/** What a person may do. */
+export type Act = 'manage-shop' | 'edit-frames' | 'release' | 'edit-profiles' | 'download';
+
+const MAY: Record<Act, readonly Role[]> = {
+  'manage-shop': ['owner'],
+  'edit-frames': ['owner', 'designer'],
+  release: ['owner', 'designer'],
+  'edit-profiles': ['owner', 'programmer'],
+  download: ['owner', 'designer', 'programmer', 'operator'],
+};
+
+export const may = (who: Role, act: Act): boolean => MAY[act].includes(who);

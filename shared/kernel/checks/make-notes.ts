@@ -1,0 +1,94 @@
+import type { FrameContours } from '../frame/members.ts';
+import { radiusAtHeight } from '../cutters/radius-at-height.ts';
+import type { CornerResidue } from '../line-sets/corner-residue.ts';
+import type { OpeningCut } from '../line-sets/opening-line-sets.ts';
+import type { Particulars } from '../particulars/particulars.ts';
+import { SAME } from '../tolerances.ts';
+import { formatWithUnit } from '../units/format-length.ts';
+import type { Finding } from './finding.ts';
+import { atOpening, wholeFrame } from './place-finding.ts';
+
+/** What a person should know before cutting, without having to change it. */
+export function makeNotes(p: Particulars, contours: FrameContours, cut: OpeningCut, residues: readonly CornerResidue[]): Finding[] {
+  if (contours.openings.length === 0) return notchNote(p, contours);
+  return [...heldNote(p, contours, cut), ...residueNotes(p, contours, residues), ...offcutNotes(p, contours, cut), ...notchNote(p, contours)];
+}
+
+/** Which edge is entered and which follows from the cutter. */
+function heldNote(p: Particulars, contours: FrameContours, cut: OpeningCut): Finding[] {
+  const taper = cut.atFace - cut.atBack;
+  if (taper < SAME) return [];
+  const far = cut.heldDepth === 0 ? 'back' : 'face';
+  const amount = far === 'back' ? -cut.atBack : cut.atFace;
+  return [
+    {
+      code: 'size-held',
+      level: 'note',
+      text: `Entered opening sizes are true at the ${far === 'back' ? 'face' : 'back'}; at the ${far} each opening is ${far === 'back' ? 'smaller' : 'larger'} by ${formatWithUnit(amount, p.unit)} a side.`,
+      remedy: '',
+      numbers: { heldDepth: cut.heldDepth, amount },
+      places: contours.openings.map((o) => atOpening(o)),
+    },
+  ];
+}
+
+/** One note for each way a corner comes out. */
+function residueNotes(p: Particulars, contours: FrameContours, residues: readonly CornerResidue[]): Finding[] {
+  const byAngle = new Map<string, CornerResidue[]>();
+  for (const r of residues) byAngle.set(r.angle.toFixed(6), [...(byAngle.get(r.angle.toFixed(6)) ?? []), r]);
+  return [...byAngle.values()].map((group) => {
+    const { angle, levels } = group[0]!;
+    const degrees = Number(((angle * 180) / Math.PI).toFixed(2));
+    const face = levels[0]!;
+    const middle = levels[2]!;
+    const leaves = (l: typeof face) => (l.lifted.diagonal < 1e-6 ? 'nothing' : formatWithUnit(Number(l.lifted.diagonal.toFixed(6)), p.unit));
+    const ids = new Set(group.map((r) => r.opening));
+    return {
+      code: 'corner-residue',
+      level: 'note',
+      text: `Inside corners of ${degrees}°: ${leaves(face)} is left on the diagonal at the face, ${leaves(middle)} at half the thickness.`,
+      remedy: '',
+      numbers: { angle: degrees, face: face.lifted.diagonal, half: middle.lifted.diagonal, back: levels[3]!.lifted.diagonal },
+      places: contours.openings.filter((o) => ids.has(o.id)).map((o) => atOpening(o)),
+    } satisfies Finding;
+  });
+}
+
+/** Size of the piece that comes free in each opening, at its larger face: the opening less the cutter's way on both sides. */
+function offcutNotes(p: Particulars, contours: FrameContours, cut: OpeningCut): Finding[] {
+  const kerf = cut.axisOffset + radiusAtHeight(p.cutters.opening, cut.tipDepth - p.thickness);
+  const bySize = new Map<string, { width: number; height: number; of: typeof contours.openings[number][] }>();
+  for (const o of contours.openings) {
+    const width = o.width - 2 * kerf;
+    const height = o.height - 2 * kerf;
+    if (width <= 0 || height <= 0) continue;
+    const key = `${width.toFixed(6)}/${height.toFixed(6)}`;
+    const known = bySize.get(key);
+    if (known) known.of.push(o);
+    else bySize.set(key, { width, height, of: [o] });
+  }
+  return [...bySize.values()].map(({ width, height, of }) => ({
+    code: 'offcut-free',
+    level: 'note',
+    text: `Opening${of.length > 1 ? 's' : ''} ${of.map((o) => o.label).join(', ')}: an offcut of ${formatWithUnit(width, p.unit)} × ${formatWithUnit(height, p.unit)} comes free${of.length > 1 ? ' in each' : ''}. Hold it down.`,
+    remedy: '',
+    numbers: { width, height },
+    places: of.map((o) => atOpening(o)),
+  }));
+}
+
+/** The corners of a foot notch stay round: the perimeter cutter runs outside. */
+function notchNote(p: Particulars, contours: FrameContours): Finding[] {
+  if (p.outline.kind !== 'members' || p.outline.feet === 0 || p.cutters.perimeter.kind !== 'straight') return [];
+  const radius = p.cutters.perimeter.diameter / 2;
+  return [
+    {
+      code: 'notch-corner',
+      level: 'note',
+      text: `The two inside corners between the feet keep the perimeter cutter’s radius of ${formatWithUnit(radius, p.unit)}.`,
+      remedy: '',
+      numbers: { radius },
+      places: [wholeFrame(contours, 'front')],
+    },
+  ];
+}

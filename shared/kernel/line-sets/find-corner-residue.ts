@@ -1,0 +1,68 @@
+import type { Cutter } from '../cutters/cutter.ts';
+import { canLift } from '../cutters/height-at-radius.ts';
+import { radiusAtHeight } from '../cutters/radius-at-height.ts';
+import type { Opening } from '../frame/members.ts';
+import type { CornerResidue } from './corner-residue.ts';
+import { insideCorners } from './inside-corners.ts';
+import type { OpeningCut } from './opening-line-sets.ts';
+
+/** On the diagonal, a radius ρ tangent to both sides of a corner of inside angle θ leaves ρ(1/sin(θ/2) − 1); ρ(√2 − 1) when square. */
+const diagonalShare = (angle: number) => 1 / Math.sin(angle / 2) - 1;
+
+/**
+ * What is left on the diagonal at depth z by lifting into the corner: the nearest that any stand of the cutter, tip at depth d,
+ * comes to the corner of the walls at that depth. Walls stand inside the corner's sides by ρ(D − zc) − ρ(D − z).
+ */
+function liftedDiagonal(cutter: Cutter, cut: OpeningCut, angle: number, z: number): number {
+  const { tipDepth, planeDepth } = cut;
+  const reach = 1 / Math.sin(angle / 2);
+  const wall = radiusAtHeight(cutter, tipDepth - planeDepth) - radiusAtHeight(cutter, tipDepth - z);
+  const left = (d: number) => reach * radiusAtHeight(cutter, d - planeDepth) - radiusAtHeight(cutter, d - z);
+  // One valley between the plane and full depth; golden-section search.
+  const golden = (Math.sqrt(5) - 1) / 2;
+  let [low, high] = [Math.max(z, planeDepth), tipDepth];
+  for (let i = 0; i < 50; i++) {
+    const a = high - golden * (high - low);
+    const b = low + golden * (high - low);
+    if (left(a) <= left(b)) high = b;
+    else low = a;
+  }
+  return Math.max(0, Math.min(left(low), left(Math.max(z, planeDepth)), left(tipDepth)) - reach * wall);
+}
+
+/** Residue at the face and at a quarter, half and all of the thickness, for each angle among an opening's corners. */
+export function findCornerResidue(cutter: Cutter, cut: OpeningCut, thickness: number, openings: readonly Opening[]): CornerResidue[] {
+  const byAngle = new Map<string, CornerResidue['levels']>();
+  const levelsAt = (angle: number) => {
+    const key = angle.toFixed(6);
+    const known = byAngle.get(key);
+    if (known) return known;
+    const share = diagonalShare(angle);
+    const levels = [0, thickness / 4, thickness / 2, thickness].map((depth) => {
+      const radius = radiusAtHeight(cutter, cut.tipDepth - depth);
+      const unlifted = { radius, diagonal: radius * share };
+      if (!canLift(cutter)) return { depth, lifted: unlifted, unlifted };
+      const diagonal = liftedDiagonal(cutter, cut, angle, depth);
+      return { depth, lifted: { radius: diagonal / share, diagonal }, unlifted };
+    });
+    byAngle.set(key, levels);
+    return levels;
+  };
+  const out: CornerResidue[] = [];
+  for (const opening of openings) {
+    const counts = new Map<string, CornerResidue>();
+    for (const corner of insideCorners(opening.contour)) {
+      const key = corner.angle.toFixed(6);
+      const known = counts.get(key);
+      counts.set(key, {
+        opening: opening.id,
+        angle: corner.angle,
+        place: known?.place ?? { x: corner.after.a.x, y: corner.after.a.y },
+        count: (known?.count ?? 0) + 1,
+        levels: levelsAt(corner.angle),
+      });
+    }
+    out.push(...counts.values());
+  }
+  return out;
+}

@@ -1,0 +1,106 @@
+import type { Extents } from '../contour/contour.ts';
+import type { DrawingLayer } from '../drawing/drawing.ts';
+import { placeContour, placeExtents } from '../placing/place.ts';
+import { formatLength } from '../units/format-length.ts';
+import type { WorkedFrame } from '../worked-frame.ts';
+import { boardDimensions, boardItems, dimensionAt, lineSetItems, workExtents } from './setup-items.ts';
+import type { DrawingItem, LabelSpot, PinDimension, SheetDrawing } from './sheet-drawing.ts';
+
+/** A dado as it lies in the back setup, with its tag. */
+export interface PlacedDado {
+  readonly tag: string;
+  readonly id: string;
+  readonly part: string;
+  readonly depth: number;
+  readonly extents: Extents;
+}
+
+export const placedDados = (worked: WorkedFrame): PlacedDado[] =>
+  worked.dados.map(({ id, part, depth, extents }, i) => ({ tag: `D${i + 1}`, id, part, depth, extents: placeExtents(worked.back.placement, extents) }));
+
+const upright = (e: Extents) => e.maxY - e.minY > e.maxX - e.minX;
+
+/** On the dado, else beside it, as far as the next one or the board's edge. */
+function dadoSpots(dado: PlacedDado, all: readonly PlacedDado[], board: Extents): LabelSpot[] {
+  const e = dado.extents;
+  const width = e.maxX - e.minX;
+  const height = e.maxY - e.minY;
+  const middle = { x: (e.minX + e.maxX) / 2, y: (e.minY + e.maxY) / 2 };
+  if (!upright(e)) {
+    const over = Math.min(board.maxY, ...all.map((d) => d.extents.minY).filter((y) => y >= e.maxY)) - e.maxY;
+    return [
+      { middle, width, height, onFeature: true },
+      { middle: { x: middle.x, y: e.maxY + over / 2 }, width, height: over },
+    ];
+  }
+  const right = Math.min(board.maxX, ...all.map((d) => d.extents.minX).filter((x) => x >= e.maxX)) - e.maxX;
+  const left = e.minX - Math.max(board.minX, ...all.map((d) => d.extents.maxX).filter((x) => x <= e.minX));
+  return [
+    { middle, width, height, turned: true, onFeature: true },
+    { middle: { x: e.minX - left / 2, y: middle.y }, width: left, height, turned: true },
+    { middle: { x: e.maxX + right / 2, y: middle.y }, width: right, height, turned: true },
+  ];
+}
+
+/** Squared edges and dado sides measured from the pins; a dado across the board is measured across, its ends only where they lie on the board. */
+function dadoDimensions(dados: readonly PlacedDado[], worked: WorkedFrame): { across: PinDimension[]; up: PinDimension[] } {
+  const { unit } = worked.particulars;
+  const { board } = worked.back;
+  const look = (id: string) => ({ colour: 'back', of: [id] }) as const;
+  const across: PinDimension[] = [];
+  const up: PinDimension[] = [];
+  for (const { id, extents: e } of dados) {
+    const ends = upright(e) ? [e.minY, e.maxY] : [e.minX, e.maxX];
+    const onBoard = ends.filter((v) => (upright(e) ? v > board.minY && v < board.maxY : v > board.minX && v < board.maxX));
+    const xs = upright(e) ? [e.minX, e.maxX] : onBoard;
+    const ys = upright(e) ? onBoard : [e.minY, e.maxY];
+    across.push(...xs.map((x) => dimensionAt(x, e.minY, unit, look(id))));
+    up.push(...ys.map((y) => dimensionAt(y, e.minX, unit, look(id))));
+  }
+  return { across, up };
+}
+
+/** The squared edges in the back setup: all four for "all-edges". */
+function squaredDimensions(worked: WorkedFrame): { across: PinDimension[]; up: PinDimension[] } {
+  const { unit, setup } = worked.particulars;
+  const { squaredCorner: corner, squared, flip } = worked.blank;
+  const look = { colour: 'back', of: [], always: true } as const;
+  const all = setup.squaring === 'all-edges';
+  const farX = flip === 'side-to-side' ? corner.x - squared.maxX : corner.x + squared.maxX;
+  const farY = flip === 'side-to-side' ? corner.y + squared.maxY : corner.y - squared.maxY;
+  return {
+    across: [corner.x, ...(all ? [farX] : [])].map((x) => dimensionAt(x, 0, unit, look)),
+    up: [corner.y, ...(all ? [farY] : [])].map((y) => dimensionAt(y, 0, unit, look)),
+  };
+}
+
+/** The back in its setup: board on the pins, squaring line, dados measured from the pins, and where the frame will be cut from the front. */
+export function backDrawing(worked: WorkedFrame, layers: ReadonlyMap<string, DrawingLayer>): SheetDrawing {
+  const { unit } = worked.particulars;
+  const { board, placement } = worked.back;
+  const dados = placedDados(worked);
+  const hidden = { colour: 'pencil', weight: 'thin', dash: 'dashed' } as const;
+  const frame: DrawingItem[] = [
+    { kind: 'contour', contour: placeContour(placement, worked.contours.perimeter), line: hidden, fill: 'board light', of: ['perimeter'], set: '' },
+    ...worked.contours.openings.map(
+      (o): DrawingItem => ({ kind: 'contour', contour: placeContour(placement, o.contour), line: hidden, fill: 'board', of: [o.id], set: '' }),
+    ),
+  ];
+  const labels = dados.map(
+    (d): DrawingItem => ({ kind: 'label', texts: [`${d.tag} ${d.part}`, d.tag], spots: dadoSpots(d, dados, board), colour: 'back', of: [d.id] }),
+  );
+  const size = boardDimensions(board, unit);
+  const squared = squaredDimensions(worked);
+  const measured = dadoDimensions(dados, worked);
+  return {
+    description:
+      `Back face up, ${formatLength(board.maxX, unit)} × ${formatLength(board.maxY, unit)} board with its lower left corner at the pins. ` +
+      `${dados.length} dados and the squaring line, measured from the pins. The frame is shown dashed: it is cut from the front.`,
+    unit,
+    extents: workExtents(worked.back),
+    items: [...boardItems(board), ...frame, ...lineSetItems(worked.back, layers), ...labels],
+    keepClear: dados.map((d) => d.extents),
+    across: [...size.across, ...squared.across, ...measured.across],
+    up: [...size.up, ...squared.up, ...measured.up],
+  };
+}
