@@ -46,5 +46,11 @@ export const sheetLong = byUnit(97, 97 * 25.4);
 /** Least board left under a bead or quirk above a dado. Common practice, no source. */
 export const leastUnderBead = byUnit(0.25, 6);
 
+/** Share of the quirk cutter's width by which lines side by side overlap, so that no ridge is left between them. Common practice, no source. */
+export const QUIRK_OVERLAP = 0.1;
+
 /** Greatest share of the thickness that a dado may take. Common practice, no source. */
 export const DEEPEST_DADO = 2 / 3;
+
+/** How far a cutter may cut into the entered bead, or leave it standing, before a caution. Common practice, no source. */
+export const beadShave = byUnit(0.002, 0.05);

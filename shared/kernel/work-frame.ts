@@ -1,3 +1,4 @@
+import { checkBeads } from './checks/check-beads.ts';
 import { checkBlank } from './checks/check-blank.ts';
 import { checkCutterKinds, checkFlutes } from './checks/check-cutters.ts';
 import { checkDados } from './checks/check-dados.ts';
@@ -11,9 +12,8 @@ import { membersContours } from './frame/members-contours.ts';
 import { outlineDado } from './frame/outline-dado.ts';
 import { tracedContours } from './frame/traced-contours.ts';
 import { dadoLineSets } from './line-sets/dado-line-sets.ts';
-import { findCornerResidue } from './line-sets/find-corner-residue.ts';
-import { openingLineSets } from './line-sets/opening-line-sets.ts';
-import { perimeterLineSet, squaringLineSet } from './line-sets/outer-line-sets.ts';
+import { frontLineSets } from './line-sets/front-line-sets.ts';
+import { squaringLineSet } from './line-sets/outer-line-sets.ts';
 import type { Particulars } from './particulars/particulars.ts';
 import { placeLineSets } from './placing/place-line-sets.ts';
 import { planBlank } from './placing/plan-blank.ts';
@@ -34,9 +34,7 @@ export function workFrame(particulars: Particulars): WorkedFrame {
   const dados = p.dados.map((dado, i) => outlineDado(dado, i, dadoRadius));
   const backSets = dadoLineSets(p, dados);
 
-  const { lineSets: openingSets, problems, cut } = openingLineSets(p, contours.openings);
-  const frontSets = [...openingSets, perimeterLineSet(p, contours.perimeter)];
-  const residues = findCornerResidue(p.cutters.opening, cut, p.thickness, contours.openings);
+  const front = frontLineSets(p, contours);
 
   const blank = planBlank(contours.width, contours.height, p.setup, p.blank);
   const squaring = squaringLineSet(p, squaringLine(blank, contours.width, contours.height, p.setup, radiusAtHeight(p.cutters.squaring, p.thickness)));
@@ -45,13 +43,14 @@ export function workFrame(particulars: Particulars): WorkedFrame {
     ...outlineFindings,
     ...checkOpeningPlaces(contours),
     ...checkCutterKinds(p, contours),
-    ...checkOpeningCuts(problems, cut, p.unit),
+    ...checkOpeningCuts(front.problems, front.cut, p.unit),
+    ...checkBeads(p, contours, front, dados),
     ...checkDados(p, contours, dados, dadoRadius),
-    ...checkFlutes(p, contours, [...backSets, squaring, ...frontSets]),
+    ...checkFlutes(p, contours, [...backSets, squaring, ...front.lineSets]),
     ...checkBlank(p, contours, blank),
     ...checkWalls(p, contours, dados),
     ...checkMembers(contours, p.unit),
-    ...makeNotes(p, contours, cut, residues),
+    ...makeNotes(p, contours, front.cut, front.residues),
   ];
 
   return {
@@ -60,8 +59,8 @@ export function workFrame(particulars: Particulars): WorkedFrame {
     dados,
     blank,
     back: placeLineSets('back', blank.back, blank.rough, backSets, [squaring]),
-    front: placeLineSets('front', blank.front, blank.squared, frontSets, []),
-    residues,
+    front: placeLineSets('front', blank.front, blank.squared, front.lineSets, []),
+    residues: front.residues,
     findings: findings.sort((a, b) => RANK[a.level] - RANK[b.level]),
   };
 }

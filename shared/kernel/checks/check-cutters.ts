@@ -1,4 +1,4 @@
-import type { Cutter, CutterKind, CutterRole } from '../cutters/cutter.ts';
+import type { CutterKind, CutterRole } from '../cutters/cutter.ts';
 import type { FrameContours } from '../frame/members.ts';
 import type { LineSet } from '../line-sets/line-set.ts';
 import type { Particulars } from '../particulars/particulars.ts';
@@ -7,11 +7,14 @@ import { SAME } from '../tolerances.ts';
 import type { Finding } from './finding.ts';
 import { wholeFrame } from './place-finding.ts';
 
-const FIT: Partial<Record<CutterRole, readonly CutterKind[]>> = {
+export const FIT: Record<CutterRole, readonly CutterKind[]> = {
   dado: ['straight'],
   squaring: ['straight'],
   opening: ['straight', 'tapered', 'vee'],
   perimeter: ['straight'],
+  bead: ['beading'],
+  quirk: ['straight'],
+  corner: ['vee'],
 };
 
 export const ROLE_WORDS: Record<CutterRole, string> = {
@@ -29,19 +32,21 @@ export function checkCutterKinds(p: Particulars, contours: FrameContours): Findi
   const used: CutterRole[] = ['squaring', 'perimeter'];
   if (p.dados.length > 0) used.push('dado');
   if (contours.openings.length > 0) used.push('opening');
+  if (p.edge.style === 'beaded' && contours.openings.some((o) => !o.square)) used.push('bead', 'quirk', 'corner');
+  else if (p.edge.corners === 'vee' && contours.openings.length > 0) used.push('corner');
   return used.flatMap((role) => {
-    const cutter = p.cutters[role] as Cutter;
-    const kinds = FIT[role] ?? [];
-    if (kinds.includes(cutter.kind)) return [];
+    const cutter = p.cutters[role];
+    const kinds = FIT[role];
+    if (cutter && kinds.includes(cutter.kind)) return [];
     return [
       {
         code: 'cutter-unfit',
         level: 'stop',
-        text: `The ${ROLE_WORDS[role]} cutter is ${cutter.kind === 'vee' ? 'a V-cutter' : `a ${cutter.kind} one`}; this work takes a ${kinds.join(' or ').replace('vee', 'V')} cutter.`,
+        text: `${cutter ? `The ${ROLE_WORDS[role]} cutter is ${cutter.kind === 'vee' ? 'a V-cutter' : `a ${cutter.kind} one`}` : `There is no ${ROLE_WORDS[role]} cutter`}; this work takes a ${kinds.join(' or ').replace('vee', 'V')} cutter.`,
         remedy: 'Choose another cutter for it.',
         numbers: {},
         places: [wholeFrame(contours, role === 'dado' || role === 'squaring' ? 'back' : 'front')],
-        field: `cutters.${role}.kind`,
+        field: cutter ? `cutters.${role}.kind` : `cutters.${role}`,
       } satisfies Finding,
     ];
   });

@@ -1,7 +1,8 @@
 import { containsPoint } from '../contour/contains-point.ts';
 import { findMeeting } from '../contour/find-crossing.ts';
 import type { FrameContours, Opening } from '../frame/members.ts';
-import type { OpeningCut, OpeningProblem } from '../line-sets/opening-line-sets.ts';
+import type { OpeningCut } from '../line-sets/opening-cut.ts';
+import type { OpeningProblem } from '../line-sets/opening-line-sets.ts';
 import { formatWithUnit } from '../units/format-length.ts';
 import type { Unit } from '../units/unit.ts';
 import type { Finding } from './finding.ts';

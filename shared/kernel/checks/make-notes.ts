@@ -1,7 +1,7 @@
 import type { FrameContours } from '../frame/members.ts';
 import { radiusAtHeight } from '../cutters/radius-at-height.ts';
 import type { CornerResidue } from '../line-sets/corner-residue.ts';
-import type { OpeningCut } from '../line-sets/opening-line-sets.ts';
+import type { OpeningCut } from '../line-sets/opening-cut.ts';
 import type { Particulars } from '../particulars/particulars.ts';
 import { SAME } from '../tolerances.ts';
 import { formatWithUnit } from '../units/format-length.ts';
@@ -16,17 +16,20 @@ export function makeNotes(p: Particulars, contours: FrameContours, cut: OpeningC
 
 /** Which edge is entered and which follows from the cutter. */
 function heldNote(p: Particulars, contours: FrameContours, cut: OpeningCut): Finding[] {
-  const taper = cut.atFace - cut.atBack;
-  if (taper < SAME) return [];
-  const far = cut.heldDepth === 0 ? 'back' : 'face';
-  const amount = far === 'back' ? -cut.atBack : cut.atFace;
+  if (cut.atFace - cut.atBack < SAME) return [];
+  const say = (n: number) => formatWithUnit(n, p.unit);
+  const where = cut.heldDepth === 0 ? 'the face' : cut.heldDepth === p.thickness ? 'the back' : `the bead’s base, ${say(cut.heldDepth)} below the face`;
+  const follows = [
+    ...(cut.atFace > SAME ? [`at the face each opening is larger by ${say(cut.atFace)} a side`] : []),
+    ...(cut.atBack < -SAME ? [`at the back ${cut.atFace > SAME ? '' : 'each opening is '}smaller by ${say(-cut.atBack)} a side`] : []),
+  ];
   return [
     {
       code: 'size-held',
       level: 'note',
-      text: `Entered opening sizes are true at the ${far === 'back' ? 'face' : 'back'}; at the ${far} each opening is ${far === 'back' ? 'smaller' : 'larger'} by ${formatWithUnit(amount, p.unit)} a side.`,
+      text: `Entered opening sizes are true at ${where}; ${follows.join(', ')}.`,
       remedy: '',
-      numbers: { heldDepth: cut.heldDepth, amount },
+      numbers: { heldDepth: cut.heldDepth, atFace: cut.atFace, atBack: cut.atBack },
       places: contours.openings.map((o) => atOpening(o)),
     },
   ];

@@ -9,6 +9,7 @@ import { labelsKey, nameLayers } from '../profiles/name-layers.ts';
 import { convertLength } from '../units/convert-length.ts';
 import type { WorkedFrame } from '../worked-frame.ts';
 import type { Drawing, DrawingEntity, DrawingLayer } from './drawing.ts';
+import { DrawingRefused } from './drawing-refused.ts';
 import { placeLabels } from './place-labels.ts';
 import { tidyContour, tidyPath } from './tidy-line.ts';
 
@@ -33,8 +34,8 @@ function entityExtents(entity: DrawingEntity): Extents | undefined {
  * One face as a neutral drawing in the profile's unit, decimals and origin: its line sets in cutting order, each on
  * its layer, then labels when the profile wants them. Layers without lines are left out. Conversion from inches to
  * millimetres or back happens here and nowhere else. Extents are those of the lines, crowns of arcs included;
- * text is not counted. Throws LayerClash when two line sets would share a layer, and RangeError for a line that
- * shrinks to nothing at the profile's decimals or a face without any line.
+ * text is not counted. Throws DrawingRefused when two line sets would share a layer, for a line that shrinks to
+ * nothing at the profile's decimals, and for a face without any line.
  */
 export function buildDrawing(worked: WorkedFrame, face: Face, profile: FileProfile): Drawing {
   const drawn = worked.particulars.unit;
@@ -62,7 +63,7 @@ export function buildDrawing(worked: WorkedFrame, face: Face, profile: FileProfi
     for (const shape of lineSet.shapes) entities.push(draw(shape, layer.name));
   }
   const [first, ...rest] = entities.map(entityExtents).filter((e) => e !== undefined);
-  if (first === undefined) throw new RangeError(`the ${face} face has no lines`);
+  if (first === undefined) throw new DrawingRefused(`the ${face} face has no lines`);
 
   const labels = named.get(labelsKey(face));
   if (labels !== undefined) {

@@ -1,4 +1,5 @@
 import type { Point, Point3, Vertex } from '../contour/contour.ts';
+import { DrawingRefused } from './drawing-refused.ts';
 
 /** Adding 0 turns −0 into 0 and leaves every other number as it is. */
 const plain = (value: number): number => value + 0;
@@ -12,7 +13,8 @@ const sameWritten = (a: Point, b: Point, decimals: number): boolean =>
 /**
  * Vertices of a contour without any that would repeat the next one at the file's decimals (the segment between them
  * would have no length), and without −0. The one that is kept is the later, with the bulge that leaves it; an open
- * contour keeps its first vertex. Throws when fewer than two are left, or two with nothing but a line between.
+ * contour keeps its first vertex. Throws DrawingRefused when fewer than two
+ * are left, or two with nothing but a line between.
  */
 export function tidyContour(vertices: readonly Vertex[], closed: boolean, decimals: number): Vertex[] {
   const tidy: Vertex[] = [];
@@ -26,7 +28,7 @@ export function tidyContour(vertices: readonly Vertex[], closed: boolean, decima
   const encloses = tidy.length > 2 || tidy.some((v) => v.bulge !== 0);
   if (tidy.length < 2 || (closed && !encloses)) {
     const at = vertices[0];
-    throw new RangeError(`a contour at ${at?.x}, ${at?.y} shrinks to nothing at ${decimals} decimals`);
+    throw new DrawingRefused(`a contour at ${at?.x}, ${at?.y} shrinks to nothing at ${decimals} decimals`);
   }
   return tidy;
 }
@@ -40,6 +42,6 @@ export function tidyPath(points: readonly Point3[], decimals: number): Point3[] 
     const repeats = before !== undefined && sameWritten(before, point, decimals) && written(before.z, decimals) === written(z, decimals);
     if (!repeats) tidy.push(point);
   }
-  if (tidy.length < 2) throw new RangeError(`a path at ${points[0]?.x}, ${points[0]?.y} shrinks to nothing at ${decimals} decimals`);
+  if (tidy.length < 2) throw new DrawingRefused(`a path at ${points[0]?.x}, ${points[0]?.y} shrinks to nothing at ${decimals} decimals`);
   return tidy;
 }

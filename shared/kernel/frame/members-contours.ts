@@ -114,7 +114,7 @@ function makeOpening({ part, path, extents }: SolvedOpening, index: number, unit
       field: fieldOfPath(path, 'opening.arch'),
     };
   }
-  return { id: `opening-${index}`, label, contour: openingContour(extents, arch), extents, width, height, arch, path };
+  return { id: `opening-${index}`, label, contour: openingContour(extents, arch), extents, width, height, arch, square: part.opening.edge === 'square', path };
 }
 
 /** Path of an entry of the layout tree within the particulars: steps do not say whether they are columns or rows, so both ends agree on "at". */

@@ -29,6 +29,8 @@ export interface Opening {
   /** To the top of the arch, when there is one. */
   readonly height: number;
   readonly arch: number;
+  /** Keeps a square edge even in a frame with beaded edges. */
+  readonly square: boolean;
   /** For openings of a layout tree. */
   readonly path?: LayoutPath;
 }

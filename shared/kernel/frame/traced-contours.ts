@@ -48,7 +48,7 @@ export function tracedContours(outline: TracedOutline): SolvedFrame {
     const label = openingLabel(i);
     if (!checkLine(`Opening ${label}`, `outline.openings.${i}`, `opening-${i}`, contour)) return;
     const extents = contourExtents(contour);
-    openings.push({ id: `opening-${i}`, label, contour, extents, width: extents.maxX - extents.minX, height: extents.maxY - extents.minY, arch: 0 });
+    openings.push({ id: `opening-${i}`, label, contour, extents, width: extents.maxX - extents.minX, height: extents.maxY - extents.minY, arch: 0, square: outline.squareOpenings?.includes(i) ?? false });
   });
   return { contours: { width: box.maxX - box.minX, height: box.maxY - box.minY, perimeter, openings, members: [] }, findings };
 }

@@ -4,7 +4,7 @@ import { radiusAtHeight } from '../cutters/radius-at-height.ts';
 import type { Opening } from '../frame/members.ts';
 import type { CornerResidue } from './corner-residue.ts';
 import { insideCorners } from './inside-corners.ts';
-import type { OpeningCut } from './opening-line-sets.ts';
+import type { OpeningCut } from './opening-cut.ts';
 
 /** On the diagonal, a radius ρ tangent to both sides of a corner of inside angle θ leaves ρ(1/sin(θ/2) − 1); ρ(√2 − 1) when square. */
 const diagonalShare = (angle: number) => 1 / Math.sin(angle / 2) - 1;

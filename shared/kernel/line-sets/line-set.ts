@@ -16,6 +16,7 @@ export type SetName =
   | 'OPENING'
   | 'OPENING_AXIS'
   | 'CORNER_LIFT'
+  | 'CORNER_VEE'
   | 'PERIMETER';
 
 /** Where the cutter runs beside a line. 'waste': at the right of the direction of an open line, outside a closed one. */

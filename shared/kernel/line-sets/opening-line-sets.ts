@@ -2,33 +2,14 @@ import type { Contour, Point } from '../contour/contour.ts';
 import { offsetContour } from '../contour/offset-contour.ts';
 import { canLift } from '../cutters/height-at-radius.ts';
 import { passDepths } from '../cutters/pass-depths.ts';
-import { radiusAtHeight } from '../cutters/radius-at-height.ts';
-import { throughDepth } from '../cutters/tip-depth.ts';
 import type { Opening } from '../frame/members.ts';
 import type { Particulars } from '../particulars/particulars.ts';
 import { liftChord } from '../tolerances.ts';
-import { cornerLift } from './corner-lift.ts';
-import { cornerDepth, heldDepth } from './held-depth.ts';
+import { cornerLift, type LiftSettings } from './corner-lift.ts';
 import { insideCorners } from './inside-corners.ts';
 import { liftSamples } from './lift-samples.ts';
 import type { LineSet, Shape } from './line-set.ts';
-
-/** The numbers of the cut through an opening's edge; lengths below the face, radii about the axis. */
-export interface OpeningCut {
-  /** D: depth of the tip. */
-  readonly tipDepth: number;
-  /** z0: where the entered size is true. */
-  readonly heldDepth: number;
-  /** zc: the plane in which lifted corners are square. */
-  readonly planeDepth: number;
-  /** ρ(D − z0): how far the axis runs inside the entered size. */
-  readonly axisOffset: number;
-  /** How far the edge lies outside the entered size at the face, and at the back (negative: inside). */
-  readonly atFace: number;
-  readonly atBack: number;
-  /** The same in the corners' plane. */
-  readonly atPlane: number;
-}
+import type { OpeningCut } from './opening-cut.ts';
 
 /** An opening that cannot be cut: why, where, and for an arc its radius. */
 export interface OpeningProblem {
@@ -36,17 +17,6 @@ export interface OpeningProblem {
   readonly reason: 'small' | 'arc' | 'collapse' | 'crosses';
   readonly at: Point;
   readonly radius?: number;
-}
-
-/** Depths and offsets that follow from edge, board and opening cutter. */
-export function openingCut({ edge, thickness, cutters, setup }: Particulars): OpeningCut {
-  const cutter = cutters.opening;
-  const tipDepth = throughDepth(cutter, thickness, setup.spoilboard);
-  const held = heldDepth(edge, thickness);
-  const plane = cornerDepth(edge);
-  const axisOffset = radiusAtHeight(cutter, tipDepth - held);
-  const widerAt = (depth: number) => radiusAtHeight(cutter, tipDepth - depth) - axisOffset;
-  return { tipDepth, heldDepth: held, planeDepth: plane, axisOffset, atFace: widerAt(0), atBack: widerAt(thickness), atPlane: widerAt(plane) };
 }
 
 /** The axis of an opening's cut, or why there is none. */
@@ -57,18 +27,24 @@ function axisOf(opening: Opening, cut: OpeningCut): Contour | OpeningProblem {
   return moved.ok ? moved.contour : { opening, reason: moved.reason, at: moved.at, radius: moved.radius };
 }
 
-/** The entered openings, their axes and their corner lifts, frame view; openings that cannot be cut come back as problems. */
-export function openingLineSets(particulars: Particulars, openings: readonly Opening[]): { lineSets: LineSet[]; problems: OpeningProblem[]; cut: OpeningCut } {
+/** How the cutter climbs into the corners of openings with this cut; undefined for a cutter that cannot. */
+function liftSettings({ edge, cutters: { opening: cutter }, unit }: Particulars, cut: OpeningCut): LiftSettings | undefined {
+  if (!canLift(cutter) || edge.corners === 'round') return undefined;
+  const chord = liftChord(unit);
+  return { samples: liftSamples(cutter, cut.tipDepth - cut.planeDepth, chord), widening: cut.atPlane, planeDepth: cut.planeDepth, chord };
+}
+
+/**
+ * The entered openings of one kind of edge, their axes and their corner lifts, frame view; openings that cannot be cut come
+ * back as problems. `variant` tells the sets of square openings apart in a frame that has beaded ones too.
+ */
+export function openingLineSets(particulars: Particulars, openings: readonly Opening[], cut: OpeningCut, variant: string): { lineSets: LineSet[]; problems: OpeningProblem[] } {
   const cutter = particulars.cutters.opening;
-  const cut = openingCut(particulars);
   const problems: OpeningProblem[] = [];
   const entered: Shape[] = [];
   const axes: Shape[] = [];
   const lifts: Shape[] = [];
-  const chord = liftChord(particulars.unit);
-  const climb = canLift(cutter)
-    ? { samples: liftSamples(cutter, cut.tipDepth - cut.planeDepth, chord), widening: cut.atPlane, planeDepth: cut.planeDepth, chord }
-    : undefined;
+  const climb = liftSettings(particulars, cut);
 
   for (const opening of openings) {
     const axis = axisOf(opening, cut);
@@ -87,12 +63,12 @@ export function openingLineSets(particulars: Particulars, openings: readonly Ope
     }
   }
   const passes = passDepths(cut.tipDepth, cutter.maxPass);
-  const common = { face: 'front', variant: '', cutter: 'opening', depth: cut.tipDepth } as const;
+  const common = { face: 'front', variant, cutter: 'opening', depth: cut.tipDepth } as const;
   const lineSets: LineSet[] = [];
   if (entered.length > 0) {
     lineSets.push({ ...common, set: 'OPENING', side: 'inside', passes, shapes: entered });
     lineSets.push({ ...common, set: 'OPENING_AXIS', side: 'on', passes, shapes: axes });
   }
   if (lifts.length > 0) lineSets.push({ ...common, set: 'CORNER_LIFT', side: 'on', passes: [cut.tipDepth], shapes: lifts });
-  return { lineSets, problems, cut };
+  return { lineSets, problems };
 }

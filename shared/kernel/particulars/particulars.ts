@@ -36,6 +36,8 @@ export interface TracedOutline {
   readonly kind: 'traced';
   readonly perimeter: readonly TracedVertex[];
   readonly openings: readonly (readonly TracedVertex[])[];
+  /** Places in `openings`, from 0, of those that keep a square edge in a frame with beaded edges. */
+  readonly squareOpenings?: readonly number[];
 }
 
 /** A node of the layout tree; `size` is its fixed width (in columns) or height (in rows). */
@@ -46,6 +48,8 @@ export interface OpeningPart {
     readonly label?: string;
     /** Rise of the arc that forms the head. */
     readonly arch?: number;
+    /** Keeps this opening's edge square in a frame with beaded edges. */
+    readonly edge?: 'square';
   };
   readonly size?: number;
 }
@@ -68,7 +72,18 @@ export interface RowsPart {
 
 export type SizeHeldAt = 'face' | 'back' | 'bead base';
 
-export interface SquareEdge {
+/**
+ * What is done in an opening's inside corners: 'lift' (the opening cutter climbs into them, where its shape allows), 'vee'
+ * (that, and a V-cutter after it), 'round' (neither).
+ */
+export type CornerMethod = 'lift' | 'vee' | 'round';
+
+interface EdgeCommon {
+  /** 'lift' when absent. */
+  readonly corners?: CornerMethod;
+}
+
+export interface SquareEdge extends EdgeCommon {
   readonly style: 'square';
   readonly sizeHeldAt: 'face' | 'back';
 }
@@ -81,7 +96,7 @@ export interface Bead {
   readonly quirk: number;
 }
 
-export interface BeadedEdge {
+export interface BeadedEdge extends EdgeCommon {
   readonly style: 'beaded';
   /** "bead base" when absent. */
   readonly sizeHeldAt?: SizeHeldAt;

@@ -1,6 +1,8 @@
+import type { CutterRole } from '../cutters/cutter.ts';
+import { DrawingRefused } from '../drawing/drawing-refused.ts';
 import { DEFAULT_LINE_SETS } from './default-line-sets.ts';
 import { refuseClash } from './layer-clash.ts';
-import { layerName, strayTokens } from './layer-name.ts';
+import { depthDigits, layerName, strayTokens } from './layer-name.ts';
 
 /** A line set's key and the layer name that a template gives it. */
 export interface LayerExample {
@@ -13,7 +15,7 @@ export type CheckedTemplate =
   | { readonly ok: false; readonly takes: string };
 
 /** Depths in inches, for the example only. */
-const EXAMPLE_DEPTHS: Record<string, number> = { dado: 0.25, squaring: 0.77, opening: 0.8125, perimeter: 0.77, bead: 0.1038, quirk: 0.1038, corner: 0.1038 };
+const EXAMPLE_DEPTHS: Record<CutterRole, number> = { dado: 0.25, squaring: 0.77, opening: 0.8125, perimeter: 0.77, bead: 0.1038, quirk: 0.1038, corner: 0.1038 };
 
 /**
  * Tries a layer template on every line set that a frame can have, beaded ones and labels too. A frame may still clash
@@ -25,11 +27,12 @@ export function checkLayerTemplate(template: string): CheckedTemplate {
   try {
     const example = DEFAULT_LINE_SETS.map(({ face, set, cutter }) => ({
       key: `${face}/${set}`,
-      name: layerName(template, { face, set, cutter: cutter ?? 'none', depth: cutter === null ? 0 : (EXAMPLE_DEPTHS[cutter] ?? 0) }),
+      name: layerName(template, { face, set, cutter: cutter ?? 'none', depth: depthDigits(cutter === null ? 0 : EXAMPLE_DEPTHS[cutter], 'in') }),
     }));
     refuseClash(example);
     return { ok: true, example };
   } catch (error) {
-    return { ok: false, takes: `a template that gives each line set its own name: ${(error as Error).message}` };
+    if (!(error instanceof DrawingRefused)) throw error;
+    return { ok: false, takes: `a template that gives each line set its own name: ${error.message}` };
   }
 }

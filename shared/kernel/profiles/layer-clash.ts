@@ -1,5 +1,7 @@
+import { DrawingRefused } from '../drawing/drawing-refused.ts';
+
 /** A template gave two line sets one layer name. They are never merged. */
-export class LayerClash extends Error {
+export class LayerClash extends DrawingRefused {
   readonly layer: string;
   readonly keys: readonly [string, string];
 

@@ -1,4 +1,9 @@
+import { DrawingRefused } from '../drawing/drawing-refused.ts';
 import type { Face } from '../line-sets/line-set.ts';
+import type { Unit } from '../units/unit.ts';
+
+/** {depth}: thousandths of an inch or hundredths of a millimetre, at least four digits. 0.25 in is "0250", 6.35 mm "0635". */
+export const depthDigits = (depth: number, unit: Unit): string => String(Math.round(depth * (unit === 'in' ? 1000 : 100))).padStart(4, '0');
 
 /** What a layer template may hold in braces. */
 export const LAYER_TOKENS = ['face', 'set', 'cutter', 'depth'] as const;
@@ -20,12 +25,9 @@ export interface LayerTokenValues {
   readonly set: string;
   /** The cutter's name, its number, or its task. */
   readonly cutter: string;
-  /** Unit of the file. */
-  readonly depth: number;
+  /** Digits of the depth; see depthDigits. */
+  readonly depth: string;
 }
-
-/** Depth in thousandths of the file's unit, at least four digits: 0.25 is "0250", 6.35 is "6350". */
-const depthDigits = (depth: number): string => String(Math.round(depth * 1000)).padStart(4, '0');
 
 /** Letters with marks lose them, everything else outside `[A-Z0-9_-]` becomes "_"; at most 31 characters. */
 function cleanLayerName(text: string): string {
@@ -45,20 +47,14 @@ export function strayTokens(template: string): string[] {
 
 /**
  * The layer name that a template gives for one line set: `[A-Z0-9_-]`, at most 31 characters.
- * Throws for an unknown token, and when nothing is left or the name is one that drawings keep for themselves.
+ * Throws DrawingRefused for an unknown token, and when nothing is left or the name is one that drawings keep for themselves.
  */
 export function layerName(template: string, values: LayerTokenValues): string {
   const stray = strayTokens(template);
-  if (stray.length > 0) throw new Error(`layer template "${template}" has ${stray.join(', ')}; takes {face}, {set}, {cutter} and {depth}`);
-  const texts: Record<LayerToken, string> = {
-    face: values.face,
-    set: values.set,
-    cutter: values.cutter,
-    depth: depthDigits(values.depth),
-  };
-  const name = cleanLayerName(template.replace(/\{(\w+)\}/g, (_, token: LayerToken) => texts[token]));
+  if (stray.length > 0) throw new DrawingRefused(`layer template "${template}" has ${stray.join(', ')}; takes {face}, {set}, {cutter} and {depth}`);
+  const name = cleanLayerName(template.replace(/\{(\w+)\}/g, (_, token: LayerToken) => values[token]));
   if (name === '' || TAKEN_NAMES.includes(name)) {
-    throw new Error(`layer template "${template}" gives the name "${name}"; takes one that is not empty, "0" or "DEFPOINTS"`);
+    throw new DrawingRefused(`layer template "${template}" gives the name "${name}"; takes one that is not empty, "0" or "DEFPOINTS"`);
   }
   return name;
 }

@@ -8,7 +8,7 @@ import { LABELS, layerColour } from './default-line-sets.ts';
 import type { FileProfile } from './file-profile.ts';
 import { fileUnit } from './file-unit.ts';
 import { refuseClash } from './layer-clash.ts';
-import { layerName } from './layer-name.ts';
+import { depthDigits, layerName } from './layer-name.ts';
 
 /** Key of a face's label layer in the map that nameLayers returns. */
 export const labelsKey = (face: Face): string => `${face}/${LABELS}`;
@@ -23,24 +23,24 @@ function cutterWord(worked: WorkedFrame, { cutter: role }: LineSet): string {
 /**
  * The layer of each line set that the profile carries, by lineSetKey, back before front, in cutting order; with
  * labels also 'back/LABELS' and 'front/LABELS'. A line set that is not in the map is not in the files.
- * Throws LayerClash when two sets of this frame would get one name, and for a template that is not one.
+ * Throws DrawingRefused (LayerClash) when two sets of this frame would get one name, and for a template that is not one.
  */
 export function nameLayers(worked: WorkedFrame, profile: FileProfile): Map<string, DrawingLayer> {
   const drawn = worked.particulars.unit;
   const unit = fileUnit(profile, drawn);
-  const layers = new Map<string, DrawingLayer>();
+  const layers: { key: string; name: string; colour: number }[] = [];
   for (const face of ['back', 'front'] as const) {
     for (const lineSet of carriedLineSets(worked, face, profile)) {
       const set = lineSet.variant === '' ? lineSet.set : `${lineSet.set}_${lineSet.variant}`;
-      const depth = convertLength(lineSet.depth, drawn, unit);
+      const depth = depthDigits(convertLength(lineSet.depth, drawn, unit), unit);
       const name = layerName(profile.layerTemplate, { face, set, cutter: cutterWord(worked, lineSet), depth });
-      layers.set(lineSetKey(lineSet), { name, colour: layerColour(lineSet) });
+      layers.push({ key: lineSetKey(lineSet), name, colour: layerColour(lineSet) });
     }
     if (profile.labels) {
-      const name = layerName(profile.layerTemplate, { face, set: LABELS, cutter: 'none', depth: 0 });
-      layers.set(labelsKey(face), { name, colour: layerColour({ face, set: LABELS }) });
+      const name = layerName(profile.layerTemplate, { face, set: LABELS, cutter: 'none', depth: depthDigits(0, unit) });
+      layers.push({ key: labelsKey(face), name, colour: layerColour({ face, set: LABELS }) });
     }
   }
-  refuseClash([...layers].map(([key, { name }]) => ({ key, name })));
-  return layers;
+  refuseClash(layers);
+  return new Map(layers.map(({ key, name, colour }) => [key, { name, colour }]));
 }

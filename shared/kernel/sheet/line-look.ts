@@ -13,6 +13,7 @@ const LOOKS: Record<SetName, LineLook> = {
   OPENING: { colour: 'front', weight: 'thick' },
   OPENING_AXIS: { colour: 'front', weight: 'hairline', dash: 'dashed' },
   CORNER_LIFT: { colour: 'lift', weight: 'thick' },
+  CORNER_VEE: { colour: 'lift', weight: 'thin', dash: 'dashed' },
   PERIMETER: { colour: 'ink', weight: 'thick' },
 };
 

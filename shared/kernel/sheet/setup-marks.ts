@@ -1,6 +1,6 @@
 import type { Point } from '../contour/contour.ts';
 import type { PaperShape } from './paper-picture.ts';
-import { disc, stroke } from './paper-shapes.ts';
+import { arcPath, disc, stroke } from './paper-shapes.ts';
 import type { SheetColour } from './sheet-colours.ts';
 
 const PIN_RADIUS = 1.6;
@@ -27,5 +27,5 @@ export function cornerMark(at: Point, inward: { readonly x: 1 | -1; readonly y: 
   const along = { x: at.x + inward.x * radius, y: at.y };
   const up = { x: at.x, y: at.y - inward.y * radius };
   const sweep = inward.x * inward.y > 0 ? 0 : 1;
-  return { kind: 'path', d: `M${at.x} ${at.y}L${along.x} ${along.y}A${radius} ${radius} 0 0 ${sweep} ${up.x} ${up.y}Z`, fill: colour };
+  return { kind: 'path', d: `${arcPath(along, up, radius, sweep)}L${at.x} ${at.y}Z`, fill: colour };
 }

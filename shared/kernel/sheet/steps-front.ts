@@ -1,26 +1,33 @@
+import { openingCut } from '../line-sets/opening-cut.ts';
+import { SAME } from '../tolerances.ts';
 import { formatLength, formatWithUnit } from '../units/format-length.ts';
 import type { WorkedFrame } from '../worked-frame.ts';
-import { openingCut } from './opening-cut.ts';
+
 import type { SheetLine } from './sheet-model.ts';
 
-const cutsOffcuts = (worked: WorkedFrame) => worked.contours.openings.length > 0;
+const cutsOpenings = (worked: WorkedFrame) => worked.front.lineSets.some((s) => s.set === 'OPENING' && s.shapes.length > 0);
 
-/** Where the entered size is true, and how far the cutter's axis runs inside it. */
+/** Where the entered size is true, and how far the cutter's axis runs inside it. None when no opening is cut. */
 export function sizeLines(worked: WorkedFrame, openingLines: 'entered' | 'axis' | 'both'): SheetLine[] {
-  const cut = openingCut(worked);
-  if (!cut) return [];
+  if (!cutsOpenings(worked)) return [];
   const { unit, thickness } = worked.particulars;
-  const at = cut.heldAt === 0 ? 'at the face' : cut.heldAt === thickness ? `at the back, ${formatWithUnit(thickness, unit)} below the face` : `${formatWithUnit(cut.heldAt, unit)} below the face`;
-  const taper = cut.smallerAtBack === 0 ? '' : ` At the back each opening is ${formatWithUnit(cut.smallerAtBack, unit)} smaller a side than at the face.`;
-  const entered = `with the cutter inside, its axis ${formatWithUnit(cut.axisOffset, unit)} from the line when the tip is at ${formatWithUnit(cut.tipDepth, unit)}`;
+  const cut = openingCut(worked.particulars);
+  const length = (value: number) => formatWithUnit(value, unit);
+  const at =
+    cut.heldDepth === 0 ? 'at the face' : cut.heldDepth === thickness ? `at the back, ${length(thickness)} below the face` : `${length(cut.heldDepth)} below the face`;
+  const narrowing = cut.atFace - cut.atBack;
+  const taper = narrowing < SAME ? '' : ` At the back each opening is ${length(narrowing)} smaller a side than at the face.`;
+  const offset = length(cut.axisOffset);
   const which = {
-    both: `The opening layer is the entered size, cut ${entered}. The axis layer is the same cut with that offset already in it, cut on the line. Cut one, not both.`,
-    entered: `The opening layer is the entered size: cut it ${entered}.`,
-    axis: `The axis layer has the offset of ${formatWithUnit(cut.axisOffset, unit)} already in it: cut on the line, with no offset of your own.`,
+    both:
+      `The opening layer is the entered size: run the cutter inside it, its axis ${offset} from the line. ` +
+      'The axis layer says the same cut with that offset already in it: run the cutter on the line.',
+    entered: `The opening layer is the entered size: run the cutter inside it, its axis ${offset} from the line.`,
+    axis: `The axis layer has the offset of ${offset} already in it: run the cutter on the line, with no offset of your own.`,
   }[openingLines];
   return [
-    { word: 'Entered size', text: `is true ${at} (z0 = ${formatLength(cut.heldAt, unit)}).${taper}` },
-    { word: openingLines === 'both' ? 'Cut one, not both' : 'Opening line', text: which },
+    { word: 'Entered size', text: `is true ${at} (z0 = ${formatLength(cut.heldDepth, unit)}).${taper}` },
+    { word: openingLines === 'both' ? 'Cut one, not both.' : 'Opening line.', text: which },
   ];
 }
 
@@ -29,7 +36,7 @@ export function stepsOnFront(worked: WorkedFrame): SheetLine[] {
   const lifts = worked.front.lineSets.some((s) => s.set === 'CORNER_LIFT' && s.shapes.length > 0);
   return [
     { word: 'Check', text: 'that both edges against the pins are the squared ones and that no chips lie under the board.' },
-    ...(cutsOffcuts(worked) ? [{ word: 'Cut the openings', text: 'in passes, the last one through. Each offcut comes free: hold it down.' }] : []),
+    ...(cutsOpenings(worked) ? [{ word: 'Cut the openings', text: 'in passes, the last one through. Each offcut comes free: hold it down.' }] : []),
     ...(lifts
       ? [
           {

@@ -1,0 +1,90 @@
+import compression from 'compression';
+import express, { Router, type Express, type RequestHandler } from 'express';
+import type { Logger } from 'pino';
+import { LIMITS } from '#shared/contracts/limits.ts';
+import type { Config } from './config.ts';
+import type { Database } from './db/database.ts';
+import { downloadsRoutes } from './features/downloads/downloads.routes.ts';
+import { downloadsService } from './features/downloads/downloads.service.ts';
+import { downloadsStore } from './features/downloads/downloads.store.ts';
+import { framesRoutes } from './features/frames/frames.routes.ts';
+import { jobsRoutes } from './features/jobs/jobs.routes.ts';
+import { profilesRoutes } from './features/profiles/profiles.routes.ts';
+import { profilesService } from './features/profiles/profiles.service.ts';
+import { profilesStore } from './features/profiles/profiles.store.ts';
+import { sessionRoutes } from './features/session/session.routes.ts';
+import { SignInBrake } from './features/session/sign-in-brake.ts';
+import { shopRoutes } from './features/shop/shop.routes.ts';
+import { shopService } from './features/shop/shop.service.ts';
+import { shopStore } from './features/shop/shop.store.ts';
+import { answerError, noSuchRoute } from './http/answer-error.ts';
+import { limitRequests } from './http/limit-requests.ts';
+import { logRequests } from './http/log-requests.ts';
+import { refuseCrossSite } from './http/refuse-cross-site.ts';
+import { securityHeaders } from './http/security-headers.ts';
+import type { DatabaseSessions } from './http/sessions.store.ts';
+import { useSessions } from './http/use-sessions.ts';
+import type { Makers } from './making/tasks.ts';
+import type { Services } from './services.ts';
+
+const MINUTE = 60_000;
+
+export interface AppGiven {
+  readonly config: Pick<Config, 'trustProxy' | 'signUpsPerHour' | 'requestsPerMinute'>;
+  readonly sessionSecret: string;
+  readonly database: Database;
+  readonly sessions: DatabaseSessions;
+  readonly services: Services;
+  readonly makers: Makers;
+  readonly now: () => Date;
+  readonly log: Logger;
+  /** The client comes from its sources, through Vite. */
+  readonly fromSources: boolean;
+}
+
+/** Every route under /api. */
+function apiRoutes(given: AppGiven): Router {
+  const { database, services, makers, now, config } = given;
+  const api = Router();
+  api.use(limitRequests(config.requestsPerMinute, MINUTE));
+  api.use(refuseCrossSite);
+  const people = useSessions(api, { secret: given.sessionSecret, sessions: given.sessions, findPerson: services.findPerson });
+  api.use(express.json({ limit: LIMITS.jsonBodyBytes }));
+  const limitSignUps = limitRequests(config.signUpsPerHour, 60 * MINUTE);
+  api.use(sessionRoutes({ people, service: services.session, brake: new SignInBrake(now), limitSignUps }));
+  api.use(shopRoutes(shopService(shopStore(database))));
+  api.use(profilesRoutes(profilesService(profilesStore(database), now)));
+  api.use(jobsRoutes(services.jobs));
+  api.use(framesRoutes(services.frames, services.releases));
+  api.use(downloadsRoutes(downloadsService(downloadsStore(database), makers)));
+  api.use(noSuchRoute);
+  return api;
+}
+
+/** Answers are one person's: no cache between may keep them. */
+const keepPrivate: RequestHandler = (_req, res, next) => {
+  res.setHeader('Cache-Control', 'private, no-cache');
+  next();
+};
+
+/** The server without the client: that is put on afterwards, before `finishApp`. */
+export function createApp(given: AppGiven): Express {
+  const app = express();
+  app.disable('x-powered-by');
+  app.set('trust proxy', given.config.trustProxy);
+  app.set('query parser', 'simple');
+  app.use(logRequests(given.log));
+  app.use(securityHeaders(given.fromSources));
+  app.use(compression({ filter: (req, res) => !String(res.getHeader('Content-Type')).startsWith('text/event-stream') && compression.filter(req, res) }));
+  app.get('/healthz', async (_req, res) => {
+    await given.services.checkDatabase();
+    res.json({ ok: true });
+  });
+  app.use('/api', keepPrivate, apiRoutes(given));
+  return app;
+}
+
+/** Closes the row of handlers. */
+export function finishApp(app: Express, log: Logger): void {
+  app.use(answerError(log));
+}

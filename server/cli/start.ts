@@ -1,0 +1,32 @@
+import { spawn } from 'node:child_process';
+import { constants } from 'node:os';
+import { join } from 'node:path';
+import { buildWhenChanged } from './build-product.ts';
+
+const root = join(import.meta.dirname, '../..');
+const SIGNALS = ['SIGINT', 'SIGTERM', 'SIGHUP'] as const;
+
+/** Runs the built server, hands signals on to it, and ends with its exit code. */
+function runServer(): void {
+  const child = spawn(process.execPath, ['--enable-source-maps', join(root, 'dist/server/main.js')], {
+    env: { ...process.env, NODE_ENV: 'production' },
+    stdio: 'inherit',
+  });
+  for (const signal of SIGNALS) process.on(signal, () => child.kill(signal));
+  child.once('error', (error) => {
+    console.error(`The server could not be started: ${error.message}`);
+    process.exitCode = 1;
+  });
+  child.once('exit', (code, signal) => {
+    // A server ended by a signal counts as 128 and the signal's number, as shells count it.
+    process.exit(code ?? 128 + (signal ? constants.signals[signal] : 0));
+  });
+}
+
+try {
+  await buildWhenChanged(root, console.log);
+  runServer();
+} catch (error) {
+  console.error((error as Error).message);
+  process.exitCode = 1;
+}

@@ -1,0 +1,136 @@
+import { boolean, customType, doublePrecision, index, integer, json, pgTable, primaryKey, text, timestamp, uniqueIndex } from 'drizzle-orm/pg-core';
+import { sql } from 'drizzle-orm';
+import type { FileProfile } from '#shared/kernel/profiles/file-profile.ts';
+import type { Particulars } from '#shared/kernel/particulars/particulars.ts';
+
+/** PGlite answers Uint8Array, pg answers Buffer, which is one. */
+const bytes = customType<{ data: Uint8Array; driverData: Uint8Array }>({ dataType: () => 'bytea' });
+
+const moment = (name: string) => timestamp(name, { withTimezone: true, precision: 3, mode: 'date' });
+
+export const shops = pgTable('shops', {
+  id: text().primaryKey(),
+  name: text().notNull(),
+  unit: text({ enum: ['in', 'mm'] }).notNull(),
+  paper: text({ enum: ['A4', 'Letter'] }).notNull(),
+  /** A built-in profile, or one of the shop's own. Built-in ones live in code, so there is no foreign key. */
+  defaultProfileId: text('default_profile_id').notNull(),
+  demo: boolean().notNull().default(false),
+  createdAt: moment('created_at').notNull(),
+});
+
+export const users = pgTable(
+  'users',
+  {
+    id: text().primaryKey(),
+    shopId: text('shop_id').notNull().references(() => shops.id),
+    name: text().notNull(),
+    /** Lower case. */
+    email: text().notNull(),
+    /** argon2id; null for demo people, who have no password. */
+    passwordHash: text('password_hash'),
+    role: text({ enum: ['owner', 'designer', 'programmer', 'operator'] }).notNull(),
+    createdAt: moment('created_at').notNull(),
+  },
+  (t) => [uniqueIndex('users_email').on(t.email), index('users_shop').on(t.shopId)],
+);
+
+export const sessions = pgTable(
+  'sessions',
+  {
+    /** SHA-256 of the session id, so that a copy of the table opens no session. */
+    idHash: text('id_hash').primaryKey(),
+    userId: text('user_id').references(() => users.id),
+    data: json().$type<unknown>().notNull(),
+    expiresAt: moment('expires_at').notNull(),
+  },
+  (t) => [index('sessions_user').on(t.userId), index('sessions_expiry').on(t.expiresAt)],
+);
+
+export const profiles = pgTable(
+  'profiles',
+  {
+    id: text().primaryKey(),
+    shopId: text('shop_id').notNull().references(() => shops.id),
+    name: text().notNull(),
+    profile: json().$type<FileProfile>().notNull(),
+    changedAt: moment('changed_at').notNull(),
+  },
+  (t) => [uniqueIndex('profiles_shop_name').on(t.shopId, sql`lower(${t.name})`)],
+);
+
+export const jobs = pgTable(
+  'jobs',
+  {
+    id: text().primaryKey(),
+    shopId: text('shop_id').notNull().references(() => shops.id),
+    name: text().notNull(),
+    createdAt: moment('created_at').notNull(),
+    changedAt: moment('changed_at').notNull(),
+    removed: boolean().notNull().default(false),
+  },
+  (t) => [index('jobs_shop').on(t.shopId)],
+);
+
+/** A frame and its draft. The figures of the draft are kept beside it for tables. */
+export const frames = pgTable(
+  'frames',
+  {
+    id: text().primaryKey(),
+    shopId: text('shop_id').notNull().references(() => shops.id),
+    jobId: text('job_id').notNull().references(() => jobs.id),
+    // json, not jsonb: it keeps the order of keys and every digit as written.
+    particulars: json().$type<Particulars>().notNull(),
+    version: integer().notNull(),
+    changedAt: moment('changed_at').notNull(),
+    changedBy: text('changed_by').notNull(),
+    removed: boolean().notNull().default(false),
+    /** Newest released letter, '' before the first. */
+    letter: text().notNull().default(''),
+    draftChanged: boolean('draft_changed').notNull(),
+    width: doublePrecision().notNull(),
+    height: doublePrecision().notNull(),
+    openings: integer().notNull(),
+    stops: integer().notNull(),
+    cautions: integer().notNull(),
+    notes: integer().notNull(),
+    createdAt: moment('created_at').notNull(),
+    /** Order of entry. */
+    ordinal: integer().generatedAlwaysAsIdentity().notNull(),
+  },
+  (t) => [index('frames_job').on(t.jobId), index('frames_shop').on(t.shopId)],
+);
+
+/** Recent versions of a draft, to tell a stale editor what was changed since. */
+export const draftVersions = pgTable(
+  'draft_versions',
+  {
+    frameId: text('frame_id').notNull().references(() => frames.id),
+    version: integer().notNull(),
+    particulars: json().$type<Particulars>().notNull(),
+  },
+  (t) => [primaryKey({ columns: [t.frameId, t.version] })],
+);
+
+/** Frozen particulars. A trigger refuses UPDATE, DELETE and TRUNCATE. */
+export const revisions = pgTable(
+  'revisions',
+  {
+    id: text().primaryKey(),
+    shopId: text('shop_id').notNull().references(() => shops.id),
+    frameId: text('frame_id').notNull().references(() => frames.id),
+    letter: text().notNull(),
+    /** 1 for the first letter: letters do not sort by themselves (Y, AA). */
+    ordinal: integer().notNull(),
+    note: text().notNull(),
+    author: text().notNull(),
+    authorId: text('author_id').notNull().references(() => users.id),
+    releasedAt: moment('released_at').notNull(),
+    jobName: text('job_name').notNull(),
+    shopName: text('shop_name').notNull(),
+    acknowledged: json().$type<string[]>().notNull(),
+    file: bytes().notNull(),
+    sha256: text().notNull(),
+  },
+  (t) => [uniqueIndex('revisions_frame_letter').on(t.frameId, t.letter), uniqueIndex('revisions_frame_ordinal').on(t.frameId, t.ordinal)],
+);

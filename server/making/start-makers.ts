@@ -1,0 +1,98 @@
+import { createRequire } from 'node:module';
+import { pathToFileURL } from 'node:url';
+import { Worker } from 'node:worker_threads';
+import { AppError } from '../errors.ts';
+import { toMakingError } from './making-error.ts';
+import type { Makers, TaskAnswer, TaskKind } from './tasks.ts';
+
+/** More waiting tasks than this are turned away. */
+const LONGEST_QUEUE = 64;
+/** A task that takes longer is given up and its worker replaced. */
+const TIME_CAP_MS = 60_000;
+const MEMORY_CAP_MB = 1024;
+
+interface Waiting {
+  readonly kind: TaskKind;
+  readonly input: unknown;
+  readonly signal: AbortSignal | undefined;
+  resolve(result: unknown): void;
+  reject(error: unknown): void;
+}
+
+/**
+ * Starts a worker thread on built files as they are, and on sources through tsx, which each thread must load for itself:
+ * the thread that starts it may have been set up by something else.
+ */
+function startWorker(entry: URL): Worker {
+  const resourceLimits = { maxOldGenerationSizeMb: MEMORY_CAP_MB };
+  if (!entry.pathname.endsWith('.ts')) return new Worker(entry, { execArgv: [], resourceLimits });
+  const tsx = pathToFileURL(createRequire(import.meta.url).resolve('tsx/esm/api')).href;
+  const bootstrap = `const { register } = await import(${JSON.stringify(tsx)}); register(); await import(${JSON.stringify(entry.href)});`;
+  return new Worker(new URL(`data:text/javascript,${encodeURIComponent(bootstrap)}`), { execArgv: [], resourceLimits });
+}
+
+/**
+ * A pool of at most `size` worker threads running `entry`; each is started when it is first needed and does one task at a time.
+ */
+export function startMakers(entry: URL, size: number): Makers {
+  const queue: Waiting[] = [];
+  const idle: Worker[] = [];
+  const all = new Set<Worker>();
+  let closed = false;
+
+  const start = (): Worker => {
+    const worker = startWorker(entry);
+    all.add(worker);
+    worker.once('exit', () => {
+      all.delete(worker);
+      const at = idle.indexOf(worker);
+      if (at >= 0) idle.splice(at, 1);
+    });
+    return worker;
+  };
+
+  const run = (worker: Worker, task: Waiting): void => {
+    const settle = (act: () => void, again: boolean): void => {
+      clearTimeout(cap);
+      worker.off('message', answered).off('error', broke).off('exit', left);
+      if (again && !closed) idle.push(worker);
+      else void worker.terminate();
+      act();
+      next();
+    };
+    const answered = (answer: TaskAnswer): void => {
+      settle(() => (answer.ok ? task.resolve(answer.result) : task.reject(toMakingError(task.kind, answer))), true);
+    };
+    const broke = (error: Error): void => settle(() => task.reject(new Error(`a worker broke down making ${task.kind}`, { cause: error })), false);
+    const left = (code: number): void => settle(() => task.reject(new Error(`a worker ended with ${code} making ${task.kind}`)), false);
+    const cap = setTimeout(() => {
+      const message = `This takes longer than ${TIME_CAP_MS / 1000} seconds to work out and was given up. A tracing with fewer vertices will do.`;
+      settle(() => task.reject(new AppError('too-large', `${task.kind} hit the time cap`, { message })), false);
+    }, TIME_CAP_MS);
+    worker.on('message', answered).on('error', broke).on('exit', left);
+    worker.postMessage({ kind: task.kind, input: task.input });
+  };
+
+  const next = (): void => {
+    while (queue.length > 0 && (idle.length > 0 || all.size < size)) {
+      const task = queue.shift()!;
+      if (task.signal?.aborted) task.reject(task.signal.reason);
+      else run(idle.pop() ?? start(), task);
+    }
+  };
+
+  return {
+    make: <K extends TaskKind>(kind: K, input: unknown, signal?: AbortSignal) =>
+      new Promise<never>((resolve, reject) => {
+        if (closed) throw new Error(`no ${kind} after closing`);
+        if (queue.length >= LONGEST_QUEUE) throw new AppError('too-many-requests', `${queue.length} tasks are waiting`, { retryAfter: 10 });
+        queue.push({ kind, input, signal, resolve: resolve as (result: unknown) => void, reject });
+        next();
+      }),
+    async close() {
+      closed = true;
+      for (const task of queue.splice(0)) task.reject(new Error(`closed before ${task.kind} was made`));
+      await Promise.all([...all].map((worker) => worker.terminate()));
+    },
+  };
+}

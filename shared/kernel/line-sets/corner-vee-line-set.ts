@@ -1,0 +1,42 @@
+import { offsetContour } from '../contour/offset-contour.ts';
+import { radiusAtHeight } from '../cutters/radius-at-height.ts';
+import type { Opening } from '../frame/members.ts';
+import type { Particulars } from '../particulars/particulars.ts';
+import { drawingChord } from '../tolerances.ts';
+import type { LineSet, Shape } from './line-set.ts';
+import type { OpeningCut } from './opening-cut.ts';
+import type { OpeningProblem } from './opening-line-sets.ts';
+import { veeCorners } from './vee-corners.ts';
+
+/**
+ * A V-cutter after the opening cutter, in every inside corner: sharp in the corners' plane, and leaving tan(β/2)·z a side at
+ * z below it. Its tip runs as deep as the board is thick. Nothing when the edge does not ask for it or the cutter is no V.
+ */
+export function cornerVeeLineSet(p: Particulars, openings: readonly Opening[], cut: OpeningCut, variant: string): { lineSets: LineSet[]; problems: OpeningProblem[] } {
+  const cutter = p.cutters.corner;
+  if (p.edge.corners !== 'vee' || cutter?.kind !== 'vee') return { lineSets: [], problems: [] };
+  const shapes: Shape[] = [];
+  const problems: OpeningProblem[] = [];
+  const settings = {
+    floor: p.thickness,
+    plane: cut.planeDepth,
+    filletRadius: radiusAtHeight(p.cutters.opening, cut.tipDepth - cut.planeDepth),
+    cutter,
+    chord: drawingChord(p.unit),
+  };
+  for (const opening of openings) {
+    const wall = offsetContour(opening.contour, cut.atPlane);
+    if (!wall.ok) {
+      problems.push({ opening, reason: wall.reason, at: wall.at, radius: wall.radius });
+      continue;
+    }
+    const { paths, missed } = veeCorners(wall.contour, settings);
+    for (const points of paths) shapes.push({ kind: 'climb', points, of: [opening.id] });
+    for (const at of missed) problems.push({ opening, reason: 'collapse', at });
+  }
+  if (shapes.length === 0) return { lineSets: [], problems };
+  return {
+    lineSets: [{ face: 'front', set: 'CORNER_VEE', variant, cutter: 'corner', side: 'on', depth: p.thickness, passes: [p.thickness], shapes }],
+    problems,
+  };
+}

@@ -1,0 +1,23 @@
+import { Link, Outlet, useLocation } from 'react-router';
+import { useSession } from '../features/session/api/get-session.ts';
+import { SheetChromeProvider } from '../ui/sheet-chrome.tsx';
+import { NAV } from './nav.ts';
+
+/** Pages that are open to everybody. Whoever is signed in keeps the way to the others. */
+export function OpenLayout() {
+  const { data } = useSession();
+  const { pathname } = useLocation();
+  const other = pathname === '/sign-in' ? { to: '/sign-up', label: 'Open a shop' } : { to: '/sign-in', label: 'Sign in' };
+  const account = data?.user ? (
+    data.user.name
+  ) : (
+    <Link to={other.to} className="underline underline-offset-4">
+      {other.label}
+    </Link>
+  );
+  return (
+    <SheetChromeProvider value={{ nav: data?.user ? NAV : [], account, shopName: data?.shop?.name ?? '' }}>
+      <Outlet />
+    </SheetChromeProvider>
+  );
+}

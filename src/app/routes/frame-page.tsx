@@ -1,0 +1,41 @@
+import { useQuery } from '@tanstack/react-query';
+import { useParams } from 'react-router';
+import { frameQuery } from '../../features/frame-page/api/get-frame.ts';
+import { FramePage } from '../../features/frame-page/frame-page.tsx';
+import { useProfiles } from '../../features/profiles/api/list-profiles.ts';
+import { useSignedIn } from '../../features/session/signed-in.tsx';
+import { Fetched } from '../../ui/fetched.tsx';
+import { Sheet } from '../../ui/sheet.tsx';
+
+/** /frames/:frameId */
+export function FramePageRoute() {
+  const { frameId = '' } = useParams();
+  const { shop, mayDo } = useSignedIn();
+  const frame = useQuery({ ...frameQuery(frameId), refetchOnMount: 'always' });
+  const profiles = useProfiles();
+  // Work starts from the draft as it is now: one that was fetched for a list may be older.
+  if (frame.data !== undefined && frame.isFetchedAfterMount && profiles.data !== undefined) {
+    return (
+      <FramePage
+        key={frameId}
+        frame={frame.data}
+        profiles={profiles.data}
+        defaultProfileId={shop.defaultProfileId}
+        shopName={shop.name}
+        mayEdit={mayDo('edit-frames') && !frame.data.removed}
+        mayRelease={mayDo('release') && !frame.data.removed}
+      />
+    );
+  }
+  return (
+    <Sheet title="Frame">
+      <Fetched query={frame} what="the frame">
+        {() => (
+          <Fetched query={profiles} what="the file profiles">
+            {() => null}
+          </Fetched>
+        )}
+      </Fetched>
+    </Sheet>
+  );
+}

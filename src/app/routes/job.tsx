@@ -1,0 +1,96 @@
+import { useParams } from 'react-router';
+import type { FrameRow, JobPage } from '#shared/contracts/jobs.ts';
+import { useFrame } from '../../features/frame-page/api/get-frame.ts';
+import { useJob } from '../../features/jobs/api/get-job.ts';
+import { FrameDrawing } from '../../features/jobs/frame-drawing.tsx';
+import { ImportFrameFiles } from '../../features/jobs/import-frame-files.tsx';
+import { JobDownload } from '../../features/jobs/job-download.tsx';
+import { JobFrames } from '../../features/jobs/job-frames.tsx';
+import { NewFrame } from '../../features/jobs/new-frame.tsx';
+import { RenameJob } from '../../features/jobs/rename-job.tsx';
+import { useProfiles } from '../../features/profiles/api/list-profiles.ts';
+import { useSignedIn } from '../../features/session/signed-in.tsx';
+import { Fetched } from '../../ui/fetched.tsx';
+import { plural } from '../../ui/plural.ts';
+import { Section } from '../../ui/section.tsx';
+import { Sheet } from '../../ui/sheet.tsx';
+import { TitleBlock, TitleCell } from '../../ui/title-block.tsx';
+
+/** The rows of a job carry no particulars: a frame's own answer, which its page needs next anyhow, draws it. */
+function RowDrawing({ row }: { readonly row: FrameRow }) {
+  const { data } = useFrame(row.id);
+  return data ? <FrameDrawing particulars={data.particulars} /> : null;
+}
+
+function findingsText(frames: readonly FrameRow[]): string {
+  const total = (of: (row: FrameRow) => number) => frames.reduce((sum, row) => sum + of(row), 0);
+  return `${plural(
+    total((row) => row.findings.stops),
+    'stop',
+  )}, ${plural(
+    total((row) => row.findings.cautions),
+    'caution',
+  )}`;
+}
+
+function JobTitleBlock({ page, jobId }: { readonly page: JobPage | undefined; readonly jobId: string }) {
+  const { shop, mayDo } = useSignedIn();
+  const mayEdit = mayDo('edit-frames') && page !== undefined;
+  const released = page?.frames.filter((row) => row.revision !== '').length ?? 0;
+  return (
+    <TitleBlock action={mayEdit ? <NewFrame wide jobId={jobId} unit={shop.unit} /> : undefined} actionNote={mayEdit ? 'or import frame files' : undefined}>
+      <TitleCell label="Shop">{shop.name}</TitleCell>
+      <TitleCell label="Job" main>
+        {page?.job.name ?? 'fetching'}
+      </TitleCell>
+      <TitleCell label="Findings">{page ? findingsText(page.frames) : 'fetching'}</TitleCell>
+      <TitleCell label="Revision" detail={page && plural(page.frames.length, 'frame')}>
+        {page ? `${released} released` : 'fetching'}
+      </TitleCell>
+    </TitleBlock>
+  );
+}
+
+export function JobRoute() {
+  const { jobId = '' } = useParams();
+  const { shop, mayDo } = useSignedIn();
+  const query = useJob(jobId);
+  const profiles = useProfiles();
+  const name = query.data?.job.name ?? 'Job';
+  const mayEdit = mayDo('edit-frames');
+  return (
+    <Sheet
+      title={name}
+      crumbs={[{ label: 'Jobs', to: '/jobs' }, { label: name }]}
+      aside={mayEdit && query.data ? <RenameJob job={query.data.job} /> : undefined}
+      titleBlock={<JobTitleBlock page={query.data} jobId={jobId} />}
+    >
+      <Fetched query={query} what="the job">
+        {({ frames }) => (
+          <div className="grid gap-x-8 gap-y-6 xl:grid-cols-[minmax(0,1fr)_20rem] print:block">
+            <div className="min-w-0">
+              <JobFrames
+              frames={frames}
+              mayEdit={mayEdit}
+              drawing={(row) => <RowDrawing row={row} />}
+              newFrame={<NewFrame jobId={jobId} unit={shop.unit} />}
+            />
+            </div>
+            <aside className="grid content-start gap-x-8 sm:grid-cols-2 xl:grid-cols-1 print:hidden">
+              <Section heading="Layer sets of the job">
+                <Fetched query={profiles} what="the file profiles">
+                  {(list) => <JobDownload jobId={jobId} frames={frames} profiles={list} defaultProfileId={shop.defaultProfileId} />}
+                </Fetched>
+              </Section>
+              {mayEdit && (
+                <Section heading="Import frame files">
+                  <ImportFrameFiles jobId={jobId} />
+                </Section>
+              )}
+            </aside>
+          </div>
+        )}
+      </Fetched>
+    </Sheet>
+  );
+}

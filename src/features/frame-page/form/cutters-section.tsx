@@ -1,0 +1,72 @@
+import { memo } from 'react';
+import type { Cutter, CutterKind, CutterRole } from '#shared/kernel/cutters/cutter.ts';
+import { changeCutterKind } from '#shared/kernel/particulars/change-cutter-kind.ts';
+import { setField } from '#shared/kernel/particulars/set-field.ts';
+import { Section } from '../../../ui/section.tsx';
+import { Select } from '../../../ui/select.tsx';
+import { useDesk, useEditor } from '../model/desk.ts';
+import { Entry } from './entry.tsx';
+
+const ROLES: readonly { readonly role: CutterRole; readonly heading: string }[] = [
+  { role: 'dado', heading: 'Dados' },
+  { role: 'squaring', heading: 'Squaring edge' },
+  { role: 'opening', heading: 'Openings' },
+  { role: 'perimeter', heading: 'Perimeter' },
+];
+
+const KINDS: readonly { readonly value: CutterKind; readonly label: string }[] = [
+  { value: 'straight', label: 'Straight' },
+  { value: 'tapered', label: 'Tapered' },
+  { value: 'vee', label: 'V' },
+];
+
+/** The numbers that give a kind of cutter its shape. */
+const SHAPES: Record<CutterKind, readonly { readonly key: string; readonly label: string; readonly kind: 'length' | 'number'; readonly suffix?: string }[]> = {
+  straight: [{ key: 'diameter', label: 'Diameter', kind: 'length' }],
+  tapered: [
+    { key: 'tipRadius', label: 'Tip radius', kind: 'length' },
+    { key: 'sideAngle', label: 'Angle of a side', kind: 'number', suffix: '°' },
+  ],
+  vee: [{ key: 'includedAngle', label: 'Included angle', kind: 'number', suffix: '°' }],
+  beading: [
+    { key: 'profileRadius', label: 'Profile radius', kind: 'length' },
+    { key: 'tipFlat', label: 'Tip flat', kind: 'length' },
+  ],
+};
+
+const CutterEntries = memo(function CutterEntries({ role, heading }: { readonly role: CutterRole; readonly heading: string }) {
+  const { editor, readOnly } = useDesk();
+  const kind = useEditor((s) => s.history.present.cutters[role]?.kind);
+  const path = `cutters.${role}`;
+  if (kind === undefined) return null;
+  function changeKind(wanted: CutterKind) {
+    const { present } = editor.store.get().history;
+    const cutter = present.cutters[role] as Cutter;
+    editor.apply(setField(present, path, changeCutterKind(cutter, wanted, present.unit)), `${heading}, kind of cutter`);
+  }
+  return (
+    <Section heading={heading} level={3}>
+      <div data-entry={`${path}.kind`}>
+        <Select label="Kind" layout="row" options={KINDS} value={kind} onValue={changeKind} disabled={readOnly} />
+      </div>
+      {SHAPES[kind].map(({ key, ...entry }) => (
+        <Entry key={key} path={`${path}.${key}`} {...entry} />
+      ))}
+      <Entry path={`${path}.fluteLength`} label="Flute length" />
+      <Entry path={`${path}.maxPass`} label="Deepest pass" optional placeholder="all at once" />
+      <Entry path={`${path}.name`} label="Name" kind="text" optional />
+      <Entry path={`${path}.number`} label="Place in changer" kind="number" optional />
+    </Section>
+  );
+});
+
+/** The cutter of each role. */
+export function CuttersSection() {
+  return (
+    <Section heading="Cutters">
+      {ROLES.map((entry) => (
+        <CutterEntries key={entry.role} {...entry} />
+      ))}
+    </Section>
+  );
+}

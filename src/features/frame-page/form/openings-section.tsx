@@ -1,0 +1,36 @@
+import { formatLength } from '#shared/kernel/units/format-length.ts';
+import { Section } from '../../../ui/section.tsx';
+import { useEditor } from '../model/desk.ts';
+import { LightsUp } from './lights-up.tsx';
+import { PartRow } from './part-rows.tsx';
+
+/** Openings of a traced outline, to read. */
+function TracedOpenings() {
+  const openings = useEditor((s) => s.worked.contours.openings);
+  const unit = useEditor((s) => s.history.present.unit);
+  return (
+    <ol>
+      {openings.map((opening) => (
+        <li key={opening.id}>
+          <LightsUp of={() => [opening.id]} className="flex justify-between border-b border-rule py-1">
+            <span>{opening.label}</span>
+            <span>
+              {formatLength(opening.width, unit)} × {formatLength(opening.height, unit)}
+            </span>
+          </LightsUp>
+        </li>
+      ))}
+    </ol>
+  );
+}
+
+/** The layout tree; by keyboard alone, each part can be labelled, sized, arched, split, joined by another and removed. */
+export function OpeningsSection() {
+  const traced = useEditor((s) => s.history.present.outline.kind === 'traced');
+  const count = useEditor((s) => s.worked.contours.openings.length);
+  return (
+    <Section heading="Openings" aside={String(count)}>
+      {traced ? <TracedOpenings /> : <PartRow field="outline.layout" />}
+    </Section>
+  );
+}

@@ -1,0 +1,71 @@
+import { useEffect, useState } from 'react';
+import { readField } from '#shared/kernel/particulars/read-field.ts';
+import { useDesk, useEditor } from '../model/desk.ts';
+
+export type ReadText = { readonly ok: true; readonly value: unknown } | { readonly ok: false; readonly takes: string };
+
+interface Typed {
+  readonly text: string;
+  /** The entry's value when this was typed, or what it became by it. */
+  readonly value: unknown;
+  readonly epoch: number;
+  /** '' or what the entry takes. */
+  readonly takes: string;
+}
+
+export interface Entry {
+  readonly value: unknown;
+  readonly text: string;
+  /** Said after a pause in typing or on leaving; '' while nothing is wrong. */
+  readonly error: string;
+  readonly change: (text: string) => void;
+  readonly leave: () => void;
+}
+
+/** How long a person may stop within an unfinished entry, such as "30 1/", before it is called wrong. */
+const PATIENCE_MS = 700;
+
+/**
+ * One typed entry of the particulars. Each keystroke that can be read and fits the contract goes to the frame at
+ * once; a wrong text stays as typed and changes nothing. Undo, import and the like put the frame's value in its place.
+ */
+export function useEntry(path: string, read: (text: string) => ReadText, format: (value: unknown) => string): Entry {
+  const { editor } = useDesk();
+  const value = useEditor((s) => readField(s.history.present, path));
+  const epoch = useEditor((s) => s.epoch);
+  const [typed, setTyped] = useState<Typed | null>(null);
+  const [settled, setSettled] = useState(true);
+
+  const kept = typed !== null && typed.epoch === epoch && Object.is(typed.value, value) ? typed : null;
+  const takes = kept?.takes ?? '';
+
+  useEffect(() => {
+    if (takes === '' || settled) return;
+    const timer = setTimeout(() => setSettled(true), PATIENCE_MS);
+    return () => clearTimeout(timer);
+  }, [takes, settled, kept]);
+
+  useEffect(() => () => editor.setWrong(path, ''), [editor, path]);
+
+  function change(text: string) {
+    const now = read(text);
+    const problem = now.ok ? editor.edit(path, now.value) : now.takes;
+    editor.setWrong(path, problem);
+    setTyped({ text, value: now.ok && problem === '' ? now.value : value, epoch, takes: problem });
+    setSettled(false);
+  }
+
+  function leave() {
+    setSettled(true);
+    if (takes === '') setTyped(null);
+    editor.leaveEntry();
+  }
+
+  return {
+    value,
+    text: kept?.text ?? format(value),
+    error: takes !== '' && settled ? `Got ${kept?.text.trim() ? `“${kept.text.trim()}”` : 'nothing'}; takes ${takes}.` : '',
+    change,
+    leave,
+  };
+}

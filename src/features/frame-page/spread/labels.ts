@@ -1,0 +1,79 @@
+import type { Point } from '#shared/kernel/contour/contour.ts';
+import type { Face } from '#shared/kernel/line-sets/line-set.ts';
+import { placePoint, unplace } from '#shared/kernel/placing/place.ts';
+import { formatLength } from '#shared/kernel/units/format-length.ts';
+import type { WorkedFrame } from '#shared/kernel/worked-frame.ts';
+
+/** Words on a page, at a place of frame view. */
+export interface Label {
+  readonly key: string;
+  readonly text: string;
+  readonly at: Point;
+  /** Pixels on the page from there, X right, Y down. */
+  readonly dx: number;
+  readonly dy: number;
+  readonly turned: boolean;
+  readonly colour: 'back' | 'front' | 'ink' | 'pencil';
+  /** Length in frame's unit that the words must fit into; Infinity when they stand free. */
+  readonly room: number;
+  readonly hiddenWith: string;
+}
+
+const free = { dx: 0, dy: 0, turned: false, room: Infinity, hiddenWith: '' } as const;
+
+function backLabels(worked: WorkedFrame): Label[] {
+  const { particulars, back, contours } = worked;
+  const { unit } = particulars;
+  const dados = worked.dados.map((dado): Label => {
+    const { extents: e } = dado;
+    const given = particulars.dados[dado.index]!;
+    const upright = given.runs === 'vertical';
+    const middle = { x: (e.minX + e.maxX) / 2, y: (e.minY + e.maxY) / 2 };
+    // Words stand on the side towards the middle of the frame, where there is board beside the dado.
+    const towards = upright ? (middle.x > contours.width / 2 ? -1 : 1) : middle.y > contours.height / 2 ? -1 : 1;
+    const width = formatLength(upright ? e.maxX - e.minX : e.maxY - e.minY, unit);
+    return {
+      ...free,
+      key: dado.id,
+      text: `${dado.part} ${width} × ${formatLength(dado.depth, unit)}`,
+      at: upright ? { x: towards > 0 ? e.maxX : e.minX, y: middle.y } : { x: middle.x, y: towards > 0 ? e.maxY : e.minY },
+      dx: upright ? towards * back.placement.sx * 10 : 0,
+      dy: upright ? 0 : -towards * back.placement.sy * 10,
+      turned: upright,
+      colour: 'back',
+      room: upright ? e.maxY - e.minY : e.maxX - e.minX,
+      hiddenWith: 'DADO',
+    };
+  });
+  return dados;
+}
+
+function frontLabels({ contours, particulars }: WorkedFrame): Label[] {
+  const { unit } = particulars;
+  const openings = contours.openings.flatMap((o): Label[] => {
+    const at = { x: (o.extents.minX + o.extents.maxX) / 2, y: (o.extents.minY + o.extents.maxY) / 2 };
+    const common = { ...free, at, colour: 'front' as const, room: o.width, hiddenWith: 'OPENING' };
+    const arch = o.arch > 0 ? `, arch ${formatLength(o.arch, unit)}` : '';
+    return [
+      { ...common, key: `${o.id}-label`, text: o.label, dy: -9 },
+      { ...common, key: `${o.id}-size`, text: `${formatLength(o.width, unit)} × ${formatLength(o.height, unit)}${arch}`, dy: 9 },
+    ];
+  });
+  return [
+    ...openings,
+    { ...free, key: 'width', text: formatLength(contours.width, unit), at: { x: contours.width / 2, y: contours.height }, dy: -12, colour: 'ink', room: contours.width },
+  ];
+}
+
+/** Words for what is fixed to the board itself: pins and the squaring edge. */
+function boardLabels(worked: WorkedFrame, face: Face): Label[] {
+  const { placement, board } = worked[face];
+  const toFrame = (p: Point): Point => placePoint(unplace(placement), p);
+  const pins: Label = { ...free, key: 'pins', text: 'pins', at: toFrame({ x: 0, y: 0 }), dx: 28, dy: 20, colour: 'pencil' };
+  if (face === 'front') return [pins];
+  const squaring: Label = { ...free, key: 'squaring', text: 'squaring edge', at: toFrame({ x: board.maxX * 0.65, y: worked.blank.squaredCorner.y }), dy: worked.blank.flip === 'side-to-side' ? 20 : -14, colour: 'back', hiddenWith: 'SQUARING' };
+  return [pins, squaring];
+}
+
+/** All words of a face. */
+export const labelsOf = (worked: WorkedFrame, face: Face): Label[] => [...(face === 'back' ? backLabels(worked) : frontLabels(worked)), ...boardLabels(worked, face)];

@@ -1,0 +1,42 @@
+import { memo } from 'react';
+import type { Placement } from '#shared/kernel/placing/placement.ts';
+import { toPage, type PageSize, type View } from '../model/view.ts';
+import type { Label } from './labels.ts';
+
+/** Width of a character of the 11 px type, and a little on either side of the words. */
+const CHARACTER_PX = 6.6;
+const SPARE_PX = 6;
+
+const COLOURS: Record<Label['colour'], string> = { back: 'fill-back', front: 'fill-front', ink: 'fill-ink', pencil: 'fill-pencil' };
+
+const Words = memo(function Words({ x, y, turned, text, look }: { x: number; y: number; turned: boolean; text: string; look: string }) {
+  return (
+    <text x={x} y={y} transform={turned ? `rotate(-90 ${x} ${y})` : undefined} textAnchor="middle" dominantBaseline="central" className={look}>
+      {text}
+    </text>
+  );
+});
+
+interface PageLabelsProps {
+  readonly labels: readonly Label[];
+  readonly view: View;
+  readonly placement: Placement;
+  readonly page: PageSize;
+  /** Names of line sets that are switched off: their words go with them. */
+  readonly hiddenSets: ReadonlySet<string>;
+}
+
+/** Words of a page at a size that does not grow with the board; left out where they would not fit. */
+export function PageLabels({ labels, view, placement, page, hiddenSets }: PageLabelsProps) {
+  return (
+    <g aria-hidden="true" className="text-11 pointer-events-none">
+      {labels.map((label) => {
+        const fits = label.text.length * CHARACTER_PX + SPARE_PX <= label.room * view.scale;
+        if (!fits || hiddenSets.has(label.hiddenWith)) return null;
+        const { x, y } = toPage(view, placement, page, label.at);
+        // Whole pixels keep the type sharp, and unchanged words unchanged.
+        return <Words key={label.key} x={Math.round(x + label.dx)} y={Math.round(y + label.dy)} turned={label.turned} text={label.text} look={COLOURS[label.colour]} />;
+      })}
+    </g>
+  );
+}

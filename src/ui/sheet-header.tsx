@@ -1,0 +1,52 @@
+import { Fragment } from 'react';
+import { Link, NavLink } from 'react-router';
+import { useSheetChrome } from './sheet-chrome.tsx';
+
+export interface Crumb {
+  readonly label: string;
+  readonly to?: string;
+}
+
+/** Name of the product, where one can go, and the steps to this page. */
+export function SheetHeader({ crumbs }: { readonly crumbs: readonly Crumb[] }) {
+  const { nav, account } = useSheetChrome();
+  return (
+    <header className="flex min-h-11 flex-wrap items-stretch gap-x-6 border-b border-ink px-4 print:hidden">
+      <Link to="/" className="flex items-center text-16 font-bold">
+        Stilepost
+      </Link>
+      {nav.length > 0 && (
+        <nav aria-label="Main" className="flex flex-wrap gap-x-6">
+          {nav.map((entry) => (
+            <NavLink
+              key={entry.to}
+              to={entry.to}
+              className="flex min-h-11 items-center border-y-3 border-transparent hover:border-b-rule aria-[current=page]:border-b-back"
+            >
+              {entry.label}
+            </NavLink>
+          ))}
+        </nav>
+      )}
+      <div className="ml-auto flex min-h-11 min-w-0 flex-wrap items-center gap-x-6 gap-y-1 py-1">
+        {crumbs.length > 0 && (
+          <nav aria-label="Where you are" className="min-w-0 wrap-anywhere">
+            {crumbs.map((crumb, i) => (
+              <Fragment key={i}>
+                {i > 0 && <span aria-hidden="true"> / </span>}
+                {crumb.to ? (
+                  <Link to={crumb.to} className="underline decoration-rule underline-offset-4 hover:decoration-ink">
+                    {crumb.label}
+                  </Link>
+                ) : (
+                  <span aria-current="page">{crumb.label}</span>
+                )}
+              </Fragment>
+            ))}
+          </nav>
+        )}
+        {account}
+      </div>
+    </header>
+  );
+}

@@ -1,0 +1,49 @@
+import type { ReactNode } from 'react';
+import { classNames } from './class-names.ts';
+
+interface TitleCellProps {
+  readonly label: string;
+  /** What the cell says; large when it names the page. */
+  readonly children: ReactNode;
+  /** A second line, in the same size as other cells. */
+  readonly detail?: ReactNode;
+  /** True for the cell that names the page. */
+  readonly main?: boolean;
+  /** Share of the width, against 1 for a usual cell. */
+  readonly wide?: boolean;
+}
+
+/** One ruled cell of a title block. */
+export function TitleCell({ label, children, detail, main = false, wide = main }: TitleCellProps) {
+  return (
+    <div className={classNames('min-w-32 border-r border-b border-ink px-2.5 py-1.5 roomy:border-b-0', wide ? 'flex-[2]' : 'flex-1')}>
+      <dt className="text-11 text-pencil">{label}</dt>
+      <dd className={classNames('wrap-anywhere', main ? 'text-16 font-bold' : 'text-13')}>{children}</dd>
+      {detail !== undefined && <dd className="text-13 wrap-anywhere">{detail}</dd>}
+    </div>
+  );
+}
+
+interface TitleBlockProps {
+  /** TitleCells. */
+  readonly children: ReactNode;
+  /** The page's one main action: a main Button, or words that say why there is none. */
+  readonly action?: ReactNode;
+  /** Under the action, small: what comes next. */
+  readonly actionNote?: ReactNode;
+}
+
+/** Along the bottom edge of each sheet: says where one is, and holds the page's one main action. */
+export function TitleBlock({ children, action, actionNote }: TitleBlockProps) {
+  return (
+    <footer aria-label="Title block" className="flex shrink-0 flex-wrap border-t border-ink break-inside-avoid roomy:flex-nowrap">
+      <dl className="flex min-w-0 flex-1 flex-wrap roomy:min-h-20 roomy:flex-nowrap">{children}</dl>
+      {(action !== undefined || actionNote !== undefined) && (
+        <div className="flex w-full flex-col gap-1 p-2.5 roomy:w-auto roomy:min-w-64 print:hidden">
+          {action}
+          {actionNote !== undefined && <p className="text-center text-11 text-pencil">{actionNote}</p>}
+        </div>
+      )}
+    </footer>
+  );
+}
