@@ -10,7 +10,7 @@ export default defineConfig({
   test: {
     maxWorkers: 2,
     projects: [
-      { test: { name: 'shared', environment: 'node', include: ['tests/shared/**/*.test.ts'] } },
+      { test: { name: 'shared', environment: 'node', include: ['tests/shared/**/*.test.ts'], testTimeout: 60_000 } },
       {
         test: {
           name: 'server',

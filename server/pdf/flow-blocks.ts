@@ -3,8 +3,8 @@ import type { PageRoom } from './page-frame.ts';
 import { drawText, type Pen } from './pen.ts';
 import type { PlacedBlock } from './piece.ts';
 
-const TITLE_SIZE = 3;
-const TITLE = 6;
+export const TITLE_SIZE = 3;
+export const TITLE = 6;
 /** Free space above a block. */
 const GAP = 2.5;
 

@@ -1,22 +1,15 @@
-import { layOutDrawing } from '#shared/kernel/sheet/lay-out-drawing.ts';
+import type { SheetColour } from '#shared/kernel/sheet/sheet-colours.ts';
 import type { SheetBlock } from '#shared/kernel/sheet/sheet-model.ts';
-import { drawPicture } from './draw-picture.ts';
 import { blockHeight } from './flow-blocks.ts';
 import type { PageRoom } from './page-frame.ts';
 import type { PlacedBlock } from './piece.ts';
+import { placeDrawing, type ListBlock } from './place-drawing.ts';
 import { placeList } from './place-list.ts';
 import { placePictures } from './place-pictures.ts';
 import { placeSignOff } from './place-sign-off.ts';
 import { placeTable } from './place-table.ts';
 
-/** A drawing takes what the rest of its page leaves, within these heights in millimetres. */
-const LEAST_DRAWING = 96;
-const MOST_DRAWING = 165;
-
-type Drawing = Extract<SheetBlock, { kind: 'drawing' }>;
-type Other = Exclude<SheetBlock, Drawing>;
-
-function placeOther(block: Other, width: number): PlacedBlock {
+function placeBlock(block: Exclude<SheetBlock, { kind: 'drawing' }>, width: number): PlacedBlock {
   const { title } = block;
   switch (block.kind) {
     case 'table': {
@@ -32,17 +25,21 @@ function placeOther(block: Other, width: number): PlacedBlock {
   }
 }
 
-function placeDrawing(block: Drawing, width: number, height: number): PlacedBlock {
-  const { picture } = layOutDrawing(block.drawing, { width, height });
-  return { title: block.title, pieces: [{ height: picture.height, draw: (pen, x, y) => drawPicture(pen, picture, x, y) }] };
-}
+const height = (blocks: Iterable<PlacedBlock>): number => [...blocks].reduce((sum, b) => sum + (b.pieces.length > 0 ? blockHeight(b) : 0), 0);
 
-/** A page's blocks as pieces of known height; empty ones are left out. Its drawing is made as large as the others allow. */
-export function placeBlocks(blocks: readonly SheetBlock[], room: PageRoom): PlacedBlock[] {
-  const others = new Map(blocks.flatMap((b) => (b.kind === 'drawing' ? [] : [[b, placeOther(b, room.width)] as const])));
-  const taken = [...others.values()].reduce((sum, b) => sum + blockHeight(b), 0);
-  const free = Math.min(MOST_DRAWING, Math.max(LEAST_DRAWING, room.bottom - room.top - taken));
+/**
+ * A page's blocks as pieces of known height; empty ones are left out. The drawing is made as large as the others allow,
+ * with a list beside it where that lets it be larger.
+ */
+export function placeBlocks(blocks: readonly SheetBlock[], room: PageRoom, colour: SheetColour): PlacedBlock[] {
+  const placed = new Map(blocks.flatMap((b) => (b.kind === 'drawing' ? [] : [[b, placeBlock(b, room.width)] as const])));
+  const drawing = blocks.find((b) => b.kind === 'drawing');
+  if (!drawing) return [...placed.values()].filter((b) => b.pieces.length > 0);
+  const list = blocks.find((b): b is ListBlock => b.kind === 'list' && b.beside === true);
+  const free = room.bottom - room.top - height(placed.values());
+  const drawn = placeDrawing(drawing, list && { list, height: blockHeight(placed.get(list)!) }, { width: room.width, height: free }, colour);
   return blocks
-    .map((b) => (b.kind === 'drawing' ? placeDrawing(b, room.width, free) : others.get(b)!))
+    .filter((b) => !(drawn.holdsList && b === list))
+    .map((b) => (b.kind === 'drawing' ? drawn.block : placed.get(b)!))
     .filter((b) => b.pieces.length > 0);
 }

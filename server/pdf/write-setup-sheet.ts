@@ -27,7 +27,7 @@ export async function writeSetupSheet(model: SheetModel, paper: Paper): Promise<
   const room = pageRoom(paper);
   const colours: SheetColour[] = [];
   for (const page of sheet.pages) {
-    flowBlocks(pen, placeBlocks(page.blocks, room), room, page.colour, (first) => {
+    flowBlocks(pen, placeBlocks(page.blocks, room, page.colour), room, page.colour, (first) => {
       addPage(pen);
       colours.push(page.colour);
       drawPageHead(pen, paper, { ...page, title: first ? page.title : `${page.title}, continued` });

@@ -11,7 +11,7 @@ const SECRET = /password/i;
 export function fieldMessages(errors: readonly FieldError[]): FieldMessages {
   const messages: Record<string, string> = {};
   for (const { path, got, takes } of errors) {
-    messages[path] ??= SECRET.test(path) ? `Takes ${takes}.` : `Got ${got}; takes ${takes}.`;
+    messages[path] ??= SECRET.test(path) ? `Takes ${takes}.` : `Got ${got === '""' ? 'nothing' : got}; takes ${takes}.`;
   }
   return messages;
 }

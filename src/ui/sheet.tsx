@@ -10,7 +10,7 @@ interface SheetProps {
   readonly crumbs?: readonly Crumb[];
   /** False where the title block alone shows the name; the heading then stays for screen readers only. */
   readonly showTitle?: boolean;
-  /** Beside the heading, at the far end. */
+  /** Beside the heading. */
   readonly aside?: ReactNode;
   /** A TitleBlock. */
   readonly titleBlock?: ReactNode;
@@ -45,7 +45,7 @@ export function Sheet({ title, crumbs = [], showTitle = true, aside, titleBlock,
               bare ? 'flex flex-col' : 'overflow-y-auto px-4 py-6 roomy:px-6 print:overflow-visible print:p-0',
             )}
           >
-            <div className={classNames(showTitle ? 'mb-4 flex flex-wrap items-baseline justify-between gap-x-8 gap-y-2' : 'sr-only')}>
+            <div className={classNames(showTitle ? 'mb-4 flex flex-wrap items-baseline gap-x-6 gap-y-2' : 'sr-only')}>
               <h1 ref={heading} tabIndex={-1} className="text-22 font-bold wrap-anywhere">
                 {title}
               </h1>

@@ -61,7 +61,7 @@ export function Table<Row>({ caption, columns, rows, rowKey }: TableProps<Row>) 
                   {column.sortBy === undefined ? (
                     <span className={column.hideHead ? 'sr-only' : undefined}>{column.head}</span>
                   ) : (
-                    <button type="button" onClick={() => press(column.key)} className="min-h-6 hover:underline">
+                    <button type="button" onClick={() => press(column.key)} className="min-h-6 whitespace-nowrap hover:underline">
                       {column.head}
                       <span aria-hidden="true" className="inline-block w-[1ch] pl-1">
                         {direction === 'ascending' ? '↑' : direction === 'descending' ? '↓' : ''}

@@ -20,26 +20,33 @@ export const placedDados = (worked: WorkedFrame): PlacedDado[] =>
 
 const upright = (e: Extents) => e.maxY - e.minY > e.maxX - e.minX;
 
-/** On the dado, else beside it, as far as the next one or the board's edge. */
-function dadoSpots(dado: PlacedDado, all: readonly PlacedDado[], board: Extents): LabelSpot[] {
-  const e = dado.extents;
-  const width = e.maxX - e.minX;
-  const height = e.maxY - e.minY;
-  const middle = { x: (e.minX + e.maxX) / 2, y: (e.minY + e.maxY) / 2 };
-  if (!upright(e)) {
-    const over = Math.min(board.maxY, ...all.map((d) => d.extents.minY).filter((y) => y >= e.maxY)) - e.maxY;
-    return [
-      { middle, width, height, onFeature: true },
-      { middle: { x: middle.x, y: e.maxY + over / 2 }, width, height: over },
-    ];
-  }
-  const right = Math.min(board.maxX, ...all.map((d) => d.extents.minX).filter((x) => x >= e.maxX)) - e.maxX;
-  const left = e.minX - Math.max(board.minX, ...all.map((d) => d.extents.maxX).filter((x) => x <= e.minX));
-  return [
-    { middle, width, height, turned: true, onFeature: true },
-    { middle: { x: e.minX - left / 2, y: middle.y }, width: left, height, turned: true },
-    { middle: { x: e.maxX + right / 2, y: middle.y }, width: right, height, turned: true },
-  ];
+/** On the dado, else close beside it where there is most room up to the next dado or the board's edge. */
+function dadoSpots({ extents: e }: PlacedDado, all: readonly PlacedDado[], board: Extents): LabelSpot[] {
+  const turned = upright(e);
+  const others = all.map((d) => d.extents).filter((o) => upright(o) === turned);
+  const beside: LabelSpot[] = turned
+    ? [
+        { turned, close: 'right', area: { ...e, minX: Math.max(board.minX, ...others.map((o) => o.maxX).filter((x) => x <= e.minX)), maxX: e.minX } },
+        { turned, close: 'left', area: { ...e, minX: e.maxX, maxX: Math.min(board.maxX, ...others.map((o) => o.minX).filter((x) => x >= e.maxX)) } },
+      ]
+    : [
+        { close: 'bottom', area: { ...e, minY: e.maxY, maxY: Math.min(board.maxY, ...others.map((o) => o.minY).filter((y) => y >= e.maxY)) } },
+        { close: 'top', area: { ...e, minY: Math.max(board.minY, ...others.map((o) => o.maxY).filter((y) => y <= e.minY)), maxY: e.minY } },
+      ];
+  const room = ({ area }: LabelSpot) => (turned ? area.maxX - area.minX : area.maxY - area.minY);
+  beside.sort((a, b) => room(b) - room(a));
+  return [{ area: e, turned, onFeature: true }, ...beside.flatMap((spot) => along(spot, turned))];
+}
+
+/** The middle of a long spot, then its ends, where a crossing dado may leave room. */
+function along(spot: LabelSpot, turned: boolean): LabelSpot[] {
+  const { area } = spot;
+  const [low, high] = turned ? [area.minY, area.maxY] : [area.minX, area.maxX];
+  const part = (from: number, to: number): LabelSpot => {
+    const [a, b] = [low + from * (high - low), low + to * (high - low)];
+    return { ...spot, area: turned ? { ...area, minY: a, maxY: b } : { ...area, minX: a, maxX: b } };
+  };
+  return [part(0, 1), part(0, 0.5), part(0.5, 1), part(0, 0.3), part(0.7, 1)];
 }
 
 /** Squared edges and dado sides measured from the pins; a dado across the board is measured across, its ends only where they lie on the board. */

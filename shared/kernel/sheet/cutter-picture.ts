@@ -9,7 +9,7 @@ import { linePath, stroke } from './paper-shapes.ts';
 
 const WIDTH = 40;
 const ROOM = { width: 22, height: 34 };
-const TOP = 5;
+const TOP = 3;
 /** Steps up a curved profile. */
 const STEPS = 64;
 

@@ -30,7 +30,7 @@ export function describeBack(worked: WorkedFrame, context: SheetContext, layers:
         after: [fileLine(worked, 'back', context.profile)],
       },
       { kind: 'table', id: 'dados', title: 'Dados, measured from the pins', table: dadoTable(worked), after: [] },
-      { kind: 'list', id: 'before-turning', title: 'Before the board is turned over', ordered: true, items: stepsBeforeTurning(worked) },
+      { kind: 'list', id: 'before-turning', title: 'Before the board is turned over', ordered: true, beside: true, items: stepsBeforeTurning(worked) },
       ...(context.note === ''
         ? []
         : [{ kind: 'list', id: 'note', title: 'Note with this revision', ordered: false, items: [{ text: context.note }] } as const]),

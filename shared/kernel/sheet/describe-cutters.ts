@@ -64,7 +64,7 @@ export function describeCutters(worked: WorkedFrame, context: SheetContext, grou
       { kind: 'pictures', id: 'cutter-pictures', title: 'Cutters', pictures: groups.map((g) => ({ caption: '', picture: cutterPicture(g, unit) })) },
       { kind: 'table', id: 'cutters', title: '', table: cutterTable(groups, unit), after: [] },
       { kind: 'table', id: 'box-parts', title: 'Box parts that plug in', table: boxPartTable(worked), after: [] },
-      { kind: 'table', id: 'residue', title: 'What is left in the corners of the openings, lifted and not', table: residueTable(worked), after: [] },
+      { kind: 'table', id: 'residue', title: 'What is left in the corners of the openings', table: residueTable(worked), after: [] },
       { kind: 'list', id: 'offcuts', title: 'Offcuts that come free', ordered: false, items: offcuts.length > 0 ? offcuts : [{ text: 'None but the rim.' }] },
       { kind: 'list', id: 'findings', title: 'Findings', ordered: false, items: findings.length > 0 ? findings : [{ text: 'None.' }] },
       proofBlock(context.proof),

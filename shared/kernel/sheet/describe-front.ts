@@ -30,7 +30,7 @@ export function describeFront(worked: WorkedFrame, context: SheetContext, layers
       },
       { kind: 'list', id: 'sizes', title: 'Which line, which size', ordered: false, items: sizeLines(worked, context.profile.openingLines) },
       { kind: 'table', id: 'openings', title: 'Openings, measured from the pins', table: openingTable(worked), after: [] },
-      { kind: 'list', id: 'front-steps', title: 'On the front', ordered: true, items: stepsOnFront(worked) },
+      { kind: 'list', id: 'front-steps', title: 'On the front', ordered: true, beside: true, items: stepsOnFront(worked) },
     ],
   };
 }

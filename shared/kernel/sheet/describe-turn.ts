@@ -1,5 +1,5 @@
 import type { WorkedFrame } from '../worked-frame.ts';
-import type { SheetCell, SheetLine, SheetPage, SheetTable } from './sheet-model.ts';
+import type { SheetBlock, SheetCell, SheetLine, SheetPage, SheetTable } from './sheet-model.ts';
 import { movingEdge, squaredCornerPlaces, turnedEdges, type TurnedEdge } from './turn-edges.ts';
 import { turnPicture } from './turn-picture.ts';
 import { turnSection } from './turn-section.ts';
@@ -14,6 +14,17 @@ function edgeTable(edges: readonly TurnedEdge[], allSquared: boolean): SheetTabl
   ]);
   const columns = ['Edge', 'Lies, back up', 'Lies, front up', 'Is', 'Then'].map((heading) => ({ key: heading, heading, align: 'left' }) as const);
   return { columns, rows, whenEmpty: '' };
+}
+
+/** The spread and the same turn seen along the fold: one below the other, or side by side when the spread is upright. */
+function turnPictures(worked: WorkedFrame): SheetBlock[] {
+  const { flip } = worked.blank;
+  const sideToSide = flip === 'side-to-side';
+  const spread = { caption: 'Not to scale. Heavy lines: squared edges. Filled corner: where they meet. Black letters: edges that go to the pins.', picture: turnPicture(worked) };
+  const from = sideToSide ? 'bottom' : 'left';
+  const section = { caption: `The same turn seen along the fold, from the ${from} edge of the machine. Then slide the board back to the pins.`, picture: turnSection(flip, sideToSide ? 44 : 28) };
+  const block = (id: string, pictures: (typeof spread)[]): SheetBlock => ({ kind: 'pictures', id, title: '', pictures });
+  return sideToSide ? [block('turn-picture', [spread]), block('turn-section', [section])] : [block('turn-picture', [spread, section])];
 }
 
 /** Page 2: how the board is turned over, so that nobody can take it the other way. */
@@ -46,13 +57,7 @@ export function describeTurn(worked: WorkedFrame): SheetPage {
       ? `Like a page of a book: the left edge goes over to the right. The squared corner moves from ${corner.before} to ${corner.after}.`
       : `Like a page of a wall calendar: the top edge comes down to the bottom. The squared corner moves from ${corner.before} to ${corner.after}.`,
     blocks: [
-      { kind: 'pictures', id: 'turn-picture', title: '', pictures: [{ caption: 'Not to scale. Heavy lines: squared edges. Filled corner: where they meet. Black letters: edges that go to the pins.', picture: turnPicture(worked) }] },
-      {
-        kind: 'pictures',
-        id: 'turn-section',
-        title: '',
-        pictures: [{ caption: `The same turn seen along the fold, from the ${sideToSide ? 'bottom' : 'left'} edge of the machine. Then slide the board back to the pins.`, picture: turnSection(flip) }],
-      },
+      ...turnPictures(worked),
       { kind: 'list', id: 'turn-steps', title: 'How', ordered: true, items: steps },
       { kind: 'table', id: 'turn-edges', title: 'Where each edge goes', table: edgeTable(edges, allSquared), after: [] },
     ],

@@ -44,9 +44,9 @@ export function frontDrawing(worked: WorkedFrame, layers: ReadonlyMap<string, Dr
 
   const labels = openings.map(({ id, label, tag, extents: e, width, height }): DrawingItem => {
     const words = `${formatLength(width, unit)} × ${formatLength(height, unit)}`;
-    const room = { middle: { x: (e.minX + e.maxX) / 2, y: (e.minY + e.maxY) / 2 }, width: width * 0.94, height: height * 0.94, onFeature: true };
+    const area = { minX: e.minX + 0.03 * width, maxX: e.maxX - 0.03 * width, minY: e.minY + 0.03 * height, maxY: e.maxY - 0.03 * height };
     const texts = [`${label}\n${words}`, label, tag];
-    return { kind: 'label', texts, spots: [room, { ...room, turned: true }], colour: 'front', bold: true, of: [id] };
+    return { kind: 'label', texts, spots: [{ area, onFeature: true }, { area, onFeature: true, turned: true }], colour: 'front', bold: true, of: [id] };
   });
   const filled: DrawingItem[] = [
     { kind: 'contour', contour: perimeter, fill: 'board light', of: ['perimeter'], set: '' },

@@ -20,32 +20,44 @@ const overlaps = (a: Extents, b: Extents) => a.minX < b.maxX && b.minX < a.maxX 
  */
 export function layOutLabels(labels: readonly Label[], keepClear: readonly Extents[], to: OnPaper): PaperShape[] {
   const taken: Extents[] = [];
-  const clear = keepClear.map((e) => boxOnPaper(to, (e.minX + e.maxX) / 2, (e.minY + e.maxY) / 2, (e.maxX - e.minX) * to.scale, (e.maxY - e.minY) * to.scale));
+  const clear = keepClear.map((e) => areaOnPaper(to, e));
+  const isFree = (box: Extents, onFeature: boolean) => !taken.some((t) => overlaps(t, box)) && (onFeature || !clear.some((c) => overlaps(c, box)));
   return labels.flatMap((label) => {
-    for (const [i, text] of label.texts.entries())
-      for (const size of i === label.texts.length - 1 ? [...SIZES, LEAST_SIZE] : SIZES)
-        for (const spot of label.spots) {
-          const lines = text.split('\n');
-          const long = Math.max(...lines.map(countCharacters)) * CHARACTER_WIDTH * size + 2 * MARGIN;
-          const high = lines.length * size * LINE;
-          const [width, height] = spot.turned ? [high, long] : [long, high];
-          if (width > spot.width * to.scale || height > spot.height * to.scale) continue;
-          const area = boxOnPaper(to, spot.middle.x, spot.middle.y, width, height);
-          if (taken.some((t) => overlaps(t, area)) || (!spot.onFeature && clear.some((c) => overlaps(c, area)))) continue;
-          taken.push(area);
-          return drawLabel(label, lines, size, spot, to);
-        }
+    for (const [lines, size, spot] of choices(label)) {
+      const box = boxIn(areaOnPaper(to, spot.area), lines, size, spot);
+      if (!box || !isFree(box, spot.onFeature === true)) continue;
+      taken.push(box);
+      return drawLabel(label, lines, size, spot, box);
+    }
     return [];
   });
 }
 
-function boxOnPaper(to: OnPaper, x: number, y: number, width: number, height: number): Extents {
-  const middle = pointOnPaper(to, { x, y });
-  return { minX: middle.x - width / 2, maxX: middle.x + width / 2, minY: middle.y - height / 2, maxY: middle.y + height / 2 };
+/** Wordings, each at every size and spot, best first. */
+function* choices(label: Label): Generator<[readonly string[], number, LabelSpot]> {
+  for (const [i, text] of label.texts.entries())
+    for (const size of i === label.texts.length - 1 ? [...SIZES, LEAST_SIZE] : SIZES) for (const spot of label.spots) yield [text.split('\n'), size, spot];
 }
 
-function drawLabel(label: Label, lines: readonly string[], size: number, spot: LabelSpot, to: OnPaper): PaperShape[] {
-  const middle = pointOnPaper(to, spot.middle);
+function areaOnPaper(to: OnPaper, e: Extents): Extents {
+  const low = pointOnPaper(to, { x: e.minX, y: e.minY });
+  const high = pointOnPaper(to, { x: e.maxX, y: e.maxY });
+  return { minX: low.x, maxX: high.x, minY: high.y, maxY: low.y };
+}
+
+/** The words' box on paper within an area, or undefined when they do not fit. */
+function boxIn(area: Extents, lines: readonly string[], size: number, { turned, close }: LabelSpot): Extents | undefined {
+  const long = Math.max(...lines.map(countCharacters)) * CHARACTER_WIDTH * size + 2 * MARGIN;
+  const high = lines.length * size * LINE;
+  const [width, height] = turned ? [high, long] : [long, high];
+  if (width > area.maxX - area.minX || height > area.maxY - area.minY) return undefined;
+  const left = close === 'left' ? area.minX : close === 'right' ? area.maxX - width : (area.minX + area.maxX - width) / 2;
+  const top = close === 'top' ? area.minY : close === 'bottom' ? area.maxY - height : (area.minY + area.maxY - height) / 2;
+  return { minX: left, maxX: left + width, minY: top, maxY: top + height };
+}
+
+function drawLabel(label: Label, lines: readonly string[], size: number, spot: LabelSpot, box: Extents): PaperShape[] {
+  const middle = { x: (box.minX + box.maxX) / 2, y: (box.minY + box.maxY) / 2 };
   return lines.map((text, i) => {
     const off = (i - (lines.length - 1) / 2) * size * LINE + 0.365 * size;
     const place = spot.turned ? { x: middle.x + off, y: middle.y } : { x: middle.x, y: middle.y + off };

@@ -41,10 +41,10 @@ export function residueTable(worked: WorkedFrame): SheetTable {
   const columns = [
     { key: 'corners', heading: 'Corners', align: 'left' } as const,
     right('depth', 'Below the face'),
-    right('lifted', 'Radius'),
-    right('liftedDiagonal', 'on the diagonal'),
-    right('unlifted', 'Radius unlifted'),
-    right('unliftedDiagonal', 'on the diagonal'),
+    right('lifted', 'Lifted: radius'),
+    right('liftedDiagonal', 'diagonal'),
+    right('unlifted', 'Not lifted: radius'),
+    right('unliftedDiagonal', 'diagonal'),
   ];
   return { columns, rows, whenEmpty: 'No inside corners.' };
 }

@@ -25,13 +25,13 @@ export interface PinDimension {
   readonly of: readonly FeatureId[];
 }
 
-/** Room for a label about its middle, in the setup's coordinates. */
+/** Room for a label, in the setup's coordinates. */
 export interface LabelSpot {
-  readonly middle: Point;
-  readonly width: number;
-  readonly height: number;
+  readonly area: Extents;
   /** Reads upwards. */
   readonly turned?: boolean;
+  /** The side of the area that it stands close to, so that it is seen whose it is; the middle when absent. */
+  readonly close?: 'left' | 'right' | 'bottom' | 'top';
   /** May lie over keep-clear places: it stands on its own feature. */
   readonly onFeature?: boolean;
 }

@@ -67,7 +67,15 @@ export type SheetBlock =
   | { readonly kind: 'drawing'; readonly id: string; readonly title: string; readonly drawing: SheetDrawing }
   | { readonly kind: 'pictures'; readonly id: string; readonly title: string; readonly pictures: readonly { readonly caption: string; readonly picture: PaperPicture }[] }
   | { readonly kind: 'table'; readonly id: string; readonly title: string; readonly table: SheetTable; readonly after: readonly string[] }
-  | { readonly kind: 'list'; readonly id: string; readonly title: string; readonly ordered: boolean; readonly items: readonly SheetLine[] }
+  | {
+      readonly kind: 'list';
+      readonly id: string;
+      readonly title: string;
+      readonly ordered: boolean;
+      readonly items: readonly SheetLine[];
+      /** May stand beside the page's drawing, where that leaves room for a larger one. */
+      readonly beside?: boolean;
+    }
   | { readonly kind: 'sign-off'; readonly id: string; readonly title: string; readonly boxes: readonly SignOffBox[] };
 
 /** A line of a list; `word` stands before it in bold and in colour ('Stop', 'Caution', 'Note' …). */

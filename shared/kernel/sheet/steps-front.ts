@@ -1,4 +1,7 @@
-import { openingCut } from '../line-sets/opening-cut.ts';
+import { edgeOfOpening } from '../line-sets/held-depth.ts';
+import type { LineSet } from '../line-sets/line-set.ts';
+import { openingCut, type OpeningCut } from '../line-sets/opening-cut.ts';
+import type { FileProfile } from '../profiles/file-profile.ts';
 import { SAME } from '../tolerances.ts';
 import { formatLength, formatWithUnit } from '../units/format-length.ts';
 import type { WorkedFrame } from '../worked-frame.ts';
@@ -7,28 +10,38 @@ import type { SheetLine } from './sheet-model.ts';
 
 const cutsOpenings = (worked: WorkedFrame) => worked.front.lineSets.some((s) => s.set === 'OPENING' && s.shapes.length > 0);
 
-/** Where the entered size is true, and how far the cutter's axis runs inside it. None when no opening is cut. */
-export function sizeLines(worked: WorkedFrame, openingLines: 'entered' | 'axis' | 'both'): SheetLine[] {
-  if (!cutsOpenings(worked)) return [];
+/** Where an edge's entered size is true, and how far the cutter's axis runs inside it. `which` says which openings when there are several kinds. */
+function sizeOf(worked: WorkedFrame, cut: OpeningCut, which: string, openingLines: FileProfile['openingLines']): SheetLine[] {
   const { unit, thickness } = worked.particulars;
-  const cut = openingCut(worked.particulars);
   const length = (value: number) => formatWithUnit(value, unit);
   const at =
     cut.heldDepth === 0 ? 'at the face' : cut.heldDepth === thickness ? `at the back, ${length(thickness)} below the face` : `${length(cut.heldDepth)} below the face`;
   const narrowing = cut.atFace - cut.atBack;
   const taper = narrowing < SAME ? '' : ` At the back each opening is ${length(narrowing)} smaller a side than at the face.`;
   const offset = length(cut.axisOffset);
-  const which = {
+  const lines = {
     both:
       `The opening layer is the entered size: run the cutter inside it, its axis ${offset} from the line. ` +
       'The axis layer says the same cut with that offset already in it: run the cutter on the line.',
     entered: `The opening layer is the entered size: run the cutter inside it, its axis ${offset} from the line.`,
     axis: `The axis layer has the offset of ${offset} already in it: run the cutter on the line, with no offset of your own.`,
-  }[openingLines];
+  };
   return [
-    { word: 'Entered size', text: `is true ${at} (z0 = ${formatLength(cut.heldDepth, unit)}).${taper}` },
-    { word: openingLines === 'both' ? 'Cut one, not both.' : 'Opening line.', text: which },
+    { word: `Entered size${which}`, text: `is true ${at} (z0 = ${formatLength(cut.heldDepth, unit)}).${taper}` },
+    { word: openingLines === 'both' ? `Cut one, not both${which}.` : `Opening line${which}.`, text: lines[openingLines] },
   ];
+}
+
+/** What each kind of opening's lines mean. None when no opening is cut. */
+export function sizeLines(worked: WorkedFrame, openingLines: FileProfile['openingLines']): SheetLine[] {
+  const sets = worked.front.lineSets.filter((s) => s.set === 'OPENING' && s.shapes.length > 0);
+  const isSquare = (set: LineSet) => worked.contours.openings.some((o) => o.square && set.shapes[0]!.of.includes(o.id));
+  return sets.flatMap((set) => {
+    const { particulars } = worked;
+    const square = isSquare(set);
+    const cut = openingCut(particulars, edgeOfOpening(particulars.edge, { square }));
+    return sizeOf(worked, cut, sets.length === 1 ? '' : square ? ' of square openings' : ' of beaded openings', openingLines);
+  });
 }
 
 /** What is done on the front, in order; the perimeter last. */

@@ -138,7 +138,7 @@ function foldAndArrow(before: Board, after: Board, sideToSide: boolean, width: n
       stroke([{ x, y: before.y - 16 }, { x, y: height }], fold),
       { kind: 'path', d: arcPath(from, to, radius, 1), line: arrow },
       arrowHead(to, 0.48, 5, 'ink'),
-      words('turn over about this line', x, 3, 2.8, 'ink'),
+      words('fold', x + 6, height - 1, 2.8, 'ink'),
     ];
   }
   const y = (before.y + before.height + after.y) / 2;
@@ -149,7 +149,7 @@ function foldAndArrow(before: Board, after: Board, sideToSide: boolean, width: n
     stroke([{ x: 0, y }, { x: width, y }], fold),
     { kind: 'path', d: arcPath(from, to, radius, 1), line: arrow },
     arrowHead(to, Math.PI / 2 + 0.48, 5, 'ink'),
-    words('turn over about this line', before.x + before.width + 44, y - 1.2, 2.8, 'ink'),
+    words('fold', 4, y - 1.2, 2.8, 'ink'),
   ];
 }
 
@@ -161,7 +161,7 @@ export function turnPicture(worked: WorkedFrame): PaperPicture {
     `The board before and after the turn. Back up: the squared corner is ${cornerBefore}. Front up: it is ${cornerAfter}, at the pins. ` +
     turnedEdges(worked.blank.flip, worked.blank.squaredEdges).map((e) => `Edge ${e.letter}: ${e.before}, then ${e.after}.`).join(' ');
   if (sideToSide) {
-    const room = { width: 70, height: 72 };
+    const room = { width: 70, height: 60 };
     const size = boardSize(worked.back.board, room);
     const y = HEAD + AROUND;
     const before = { x: AROUND + room.width - size.width, y, ...size };
@@ -170,10 +170,10 @@ export function turnPicture(worked: WorkedFrame): PaperPicture {
     const height = y + size.height + AROUND;
     return { width, height, description, shapes: [...foldAndArrow(before, after, true, width, height), ...beforeBoard(worked, before), ...afterBoard(worked, after)] };
   }
-  const room = { width: 92, height: 50 };
+  const room = { width: 62, height: 52 };
   const size = boardSize(worked.back.board, room);
-  const width = 185;
-  const before = { x: (width - size.width) / 2 - 8, y: AROUND, ...size };
+  const width = 104;
+  const before = { x: AROUND + (room.width - size.width) / 2, y: AROUND, ...size };
   const after = { ...before, y: before.y + size.height + 2 * AROUND + FOLD };
   const height = after.y + size.height + AROUND;
   return { width, height, description, shapes: [...foldAndArrow(before, after, false, width, height), ...beforeBoard(worked, before), ...afterBoard(worked, after)] };

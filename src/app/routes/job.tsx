@@ -77,16 +77,16 @@ export function JobRoute() {
             />
             </div>
             <aside className="grid content-start gap-x-8 sm:grid-cols-2 xl:grid-cols-1 print:hidden">
-              <Section heading="Layer sets of the job">
-                <Fetched query={profiles} what="the file profiles">
-                  {(list) => <JobDownload jobId={jobId} frames={frames} profiles={list} defaultProfileId={shop.defaultProfileId} />}
-                </Fetched>
-              </Section>
               {mayEdit && (
                 <Section heading="Import frame files">
                   <ImportFrameFiles jobId={jobId} />
                 </Section>
               )}
+              <Section heading="Layer sets of the job">
+                <Fetched query={profiles} what="the file profiles">
+                  {(list) => <JobDownload jobId={jobId} frames={frames} profiles={list} defaultProfileId={shop.defaultProfileId} />}
+                </Fetched>
+              </Section>
             </aside>
           </div>
         )}

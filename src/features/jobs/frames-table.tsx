@@ -68,7 +68,7 @@ export function FramesTable({ frames, drawing, onCopy, onPutAway }: FramesTableP
       head: 'Actions',
       hideHead: true,
       cell: (row) => (
-        <div className="flex flex-wrap justify-end gap-x-4">
+        <div className="flex flex-col items-end gap-x-4 2xl:flex-row 2xl:justify-end">
           {row.revision !== '' && (
             <ButtonLink kind="quiet" to={`/frames/${row.id}/sheet?revision=${row.revision}`} label={`Setup sheet of ${row.name}`}>
               Setup sheet

@@ -6,6 +6,7 @@ import { sayError } from '../../lib/say-error.ts';
 import { Button } from '../../ui/button.tsx';
 import { Notice } from '../../ui/notice.tsx';
 import { TextField } from '../../ui/text-field.tsx';
+import { useFocusOnWrong } from '../../ui/use-focus-on-wrong.ts';
 import { useSignIn } from './api/sign-in.ts';
 
 interface SignInFormProps {
@@ -17,6 +18,7 @@ export function SignInForm({ email: knownEmail = '' }: SignInFormProps) {
   const [email, setEmail] = useState(knownEmail);
   const [password, setPassword] = useState('');
   const [wrong, setWrong] = useState<FieldMessages>({});
+  const form = useFocusOnWrong(wrong);
   const signIn = useSignIn();
 
   function submit(event: FormEvent) {
@@ -28,7 +30,7 @@ export function SignInForm({ email: knownEmail = '' }: SignInFormProps) {
   }
 
   return (
-    <form onSubmit={submit} noValidate>
+    <form ref={form} onSubmit={submit} noValidate>
       {signIn.isError && (
         <Notice level="stop" word="Not signed in" live>
           {sayError(signIn.error)}

@@ -8,6 +8,7 @@ import { Button } from '../../ui/button.tsx';
 import { Choice } from '../../ui/choice.tsx';
 import { Notice } from '../../ui/notice.tsx';
 import { TextField } from '../../ui/text-field.tsx';
+import { useFocusOnWrong } from '../../ui/use-focus-on-wrong.ts';
 import { useSignUp } from './api/sign-up.ts';
 
 const BLANK: SignUpRequest = { shopName: '', name: '', email: '', password: '', unit: 'in' };
@@ -16,6 +17,7 @@ const BLANK: SignUpRequest = { shopName: '', name: '', email: '', password: '', 
 export function SignUpForm() {
   const [entry, setEntry] = useState(BLANK);
   const [wrong, setWrong] = useState<FieldMessages>({});
+  const form = useFocusOnWrong(wrong);
   const signUp = useSignUp();
   const set = (key: keyof SignUpRequest) => (value: string) => setEntry((now) => ({ ...now, [key]: value }));
 
@@ -28,7 +30,7 @@ export function SignUpForm() {
   }
 
   return (
-    <form onSubmit={submit} noValidate>
+    <form ref={form} onSubmit={submit} noValidate>
       {signUp.isError && (
         <Notice level="stop" word="No shop opened" live>
           {sayError(signUp.error)}

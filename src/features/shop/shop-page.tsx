@@ -13,6 +13,7 @@ import { Select } from '../../ui/select.tsx';
 import { Sheet } from '../../ui/sheet.tsx';
 import { TextField } from '../../ui/text-field.tsx';
 import { TitleBlock, TitleCell } from '../../ui/title-block.tsx';
+import { useFocusOnWrong } from '../../ui/use-focus-on-wrong.ts';
 import { useChangeShop } from './api/change-shop.ts';
 
 interface ShopPageProps {
@@ -30,6 +31,7 @@ export function ShopPage({ shop, profiles, mayManage }: ShopPageProps) {
   const saved: Entry = { name: shop.name, unit: shop.unit, paper: shop.paper, defaultProfileId: shop.defaultProfileId };
   const [entry, setEntry] = useState(saved);
   const [wrong, setWrong] = useState<FieldMessages>({});
+  const form = useFocusOnWrong(wrong);
   const change = useChangeShop();
   const set = <K extends keyof Entry>(key: K, value: Entry[K]) => setEntry((now) => ({ ...now, [key]: value }));
   const unsaved = (Object.keys(saved) as (keyof Entry)[]).some((key) => entry[key] !== saved[key]);
@@ -75,7 +77,7 @@ export function ShopPage({ shop, profiles, mayManage }: ShopPageProps) {
           {sayError(change.error)}
         </Notice>
       )}
-      <form id={FORM} onSubmit={submit} noValidate className="max-w-xl">
+      <form ref={form} id={FORM} onSubmit={submit} noValidate className="max-w-xl">
         <Section heading="Name">
           <TextField
             label="Name of the shop"
