@@ -43,7 +43,8 @@ export const USAGE = `Writes the layer set of a frame: both DXF files, setup she
   --help             this text
 
 Exit code: 0 written, paths on standard output; 1 a stop or the proof forbids, findings on standard error, nothing
-written; 2 the command, the frame file or the profile cannot be read or is not valid, or the files cannot be written.
+written; 2 the command, the frame file or the profile cannot be read or is not valid, or the files cannot be written;
+3 a mistake of the program.
 `;
 
 const OPTIONS = {
@@ -61,7 +62,10 @@ const OPTIONS = {
 } as const;
 
 function readDate(text: string): string {
-  const isDay = /^\d{4}-\d{2}-\d{2}$/.test(text) && !Number.isNaN(Date.parse(text)) && new Date(text).toISOString().startsWith(text);
+  const isDay =
+    /^\d{4}-\d{2}-\d{2}$/.test(text) &&
+    !Number.isNaN(Date.parse(text)) &&
+    new Date(text).toISOString().startsWith(text);
   if (!isDay) throw new UsageError(`--date: got "${text}", takes a day as YYYY-MM-DD`);
   return text;
 }
@@ -82,9 +86,11 @@ export function readFrameOptions(args: readonly string[], today: string): FrameO
   const { values, positionals } = parsed;
   if (values.help) return 'help';
   const [file, ...more] = positionals;
-  if (file === undefined || more.length > 0) throw new UsageError(`got ${positionals.length} files, takes one frame file, or - for standard input`);
+  if (file === undefined || more.length > 0)
+    throw new UsageError(`got ${positionals.length} files, takes one frame file, or - for standard input`);
   const { out, profile, zip, revision, job, shop, author, note } = values;
-  if (!/^[A-Z]{0,4}$/.test(revision)) throw new UsageError(`--revision: got "${revision}", takes capital letters such as A`);
+  if (!/^[A-Z]{0,4}$/.test(revision))
+    throw new UsageError(`--revision: got "${revision}", takes capital letters such as A`);
   if (out === '') throw new UsageError('--out: got "", takes a folder');
   const date = readDate(values.date ?? today);
   return { file, out, profile, zip, revision, job, shop, author, note, date, paper: readPaper(values.paper) };

@@ -15,8 +15,13 @@ export function loadFrame(path: string): Particulars {
   } catch (error) {
     throw new InputError(`${name}: cannot be read (${(error as Error).message})`);
   }
-  if (bytes.length > LIMITS.frameFileBytes) throw new InputError(`${name}: got ${bytes.length} bytes, takes at most ${LIMITS.frameFileBytes}`);
+  if (bytes.length > LIMITS.frameFileBytes)
+    throw new InputError(`${name}: got ${bytes.length} bytes, takes at most ${LIMITS.frameFileBytes}`);
   const read = parseFrameFile(bytes.toString('utf8'));
-  if (!read.ok) throw new InputError(`${name}: ${read.message}`, read.fields.map((f) => f.message));
+  if (!read.ok)
+    throw new InputError(
+      `${name}: ${read.message}`,
+      read.fields.map((f) => f.message),
+    );
   return read.particulars;
 }

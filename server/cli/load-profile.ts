@@ -15,11 +15,16 @@ function parseProfile(text: string, path: string): FileProfile {
   }
   const read = fileProfile.safeParse(data);
   if (!read.success) {
-    throw new InputError(`${path}: not a valid file profile`, fieldErrors(read.error, data).map((f) => f.message));
+    throw new InputError(
+      `${path}: not a valid file profile`,
+      fieldErrors(read.error, data).map((f) => f.message),
+    );
   }
   const template = checkLayerTemplate(read.data.layerTemplate);
   if (!template.ok) {
-    throw new InputError(`${path}: not a valid file profile`, [`layerTemplate: got ${JSON.stringify(read.data.layerTemplate)}, takes ${template.takes}`]);
+    throw new InputError(`${path}: not a valid file profile`, [
+      `layerTemplate: got ${JSON.stringify(read.data.layerTemplate)}, takes ${template.takes}`,
+    ]);
   }
   return read.data;
 }
@@ -34,7 +39,9 @@ export function loadProfile(nameOrPath: string): FileProfile {
     text = readFileSync(nameOrPath, 'utf8');
   } catch (error) {
     const names = BUILTIN_PROFILES.map((p) => p.id).join(', ');
-    throw new InputError(`--profile: got "${nameOrPath}", takes ${names} or the path of a profile file (${(error as Error).message})`);
+    throw new InputError(
+      `--profile: got "${nameOrPath}", takes ${names} or the path of a profile file (${(error as Error).message})`,
+    );
   }
   return parseProfile(text, nameOrPath);
 }

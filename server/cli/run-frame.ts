@@ -56,7 +56,8 @@ export async function runFrame(args: readonly string[], today: string, output: O
       return 2;
     }
     if (!(error instanceof ProofFailed)) throw error;
-    for (const { name, got, wanted } of error.proof.checks.filter((c) => !c.ok)) output.err(`proof: ${name}: got ${got}, wanted ${wanted}\n`);
+    for (const { name, got, wanted } of error.proof.checks.filter((c) => !c.ok))
+      output.err(`proof: ${name}: got ${got}, wanted ${wanted}\n`);
     return 1;
   }
 }

@@ -4,15 +4,27 @@ import { join } from 'node:path';
 import { buildWhenChanged } from './build-product.ts';
 
 const root = join(import.meta.dirname, '../..');
-const SIGNALS = ['SIGINT', 'SIGTERM', 'SIGHUP'] as const;
+
+/** A key pressed in a terminal reaches this process more than once: from the terminal and from the program that started it. */
+const SAME_PRESS_MS = 500;
 
 /** Runs the built server, hands signals on to it, and ends with its exit code. */
 function runServer(): void {
   const child = spawn(process.execPath, ['--enable-source-maps', join(root, 'dist/server/main.js')], {
     env: { ...process.env, NODE_ENV: 'production' },
     stdio: 'inherit',
+    // A group of its own, or the terminal would send it every signal a second time, which it takes for impatience.
+    detached: true,
   });
-  for (const signal of SIGNALS) process.on(signal, () => child.kill(signal));
+  let handedOn = -Infinity;
+  const handOn = (signal: 'SIGINT' | 'SIGTERM') => () => {
+    if (performance.now() - handedOn < SAME_PRESS_MS) return;
+    handedOn = performance.now();
+    child.kill(signal);
+  };
+  process.on('SIGINT', handOn('SIGINT'));
+  process.on('SIGTERM', handOn('SIGTERM'));
+  process.on('SIGHUP', handOn('SIGTERM'));
   child.once('error', (error) => {
     console.error(`The server could not be started: ${error.message}`);
     process.exitCode = 1;

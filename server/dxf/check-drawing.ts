@@ -22,9 +22,11 @@ function checkNumbers(of: object, keys: readonly string[], what: string): void {
 function checkLayers(drawing: Drawing): Set<string> {
   const names = new Set<string>();
   for (const { name, colour } of drawing.layers) {
-    if (!LAYER_NAME.test(name) || name === '0') throw new RangeError(`drawing: layer "${name}", takes 1 to 31 of A-Z 0-9 _ -, and not "0"`);
+    if (!LAYER_NAME.test(name) || name === '0')
+      throw new RangeError(`drawing: layer "${name}", takes 1 to 31 of A-Z 0-9 _ -, and not "0"`);
     if (names.has(name)) throw new RangeError(`drawing: layer "${name}" is there twice`);
-    if (!Number.isInteger(colour) || colour < 1 || colour > 255) throw new RangeError(`drawing: colour of layer "${name}" is ${colour}, takes 1 to 255`);
+    if (!Number.isInteger(colour) || colour < 1 || colour > 255)
+      throw new RangeError(`drawing: colour of layer "${name}" is ${colour}, takes 1 to 255`);
     names.add(name);
   }
   return names;
@@ -40,7 +42,8 @@ function checkEntity(entity: DrawingEntity): void {
     return;
   }
   const points = entity.kind === 'polyline' ? entity.vertices : entity.points;
-  if (points.length < 2) throw new RangeError(`drawing: a line on layer "${layer}" has ${points.length} vertices, takes at least 2`);
+  if (points.length < 2)
+    throw new RangeError(`drawing: a line on layer "${layer}" has ${points.length} vertices, takes at least 2`);
   const what = `a vertex on layer "${layer}"`;
   const keys = entity.kind === 'polyline' ? FLAT : CLIMBING;
   for (const point of points) checkNumbers(point, keys, what);
@@ -53,7 +56,8 @@ function checkEntity(entity: DrawingEntity): void {
  */
 export function checkDrawing(drawing: Drawing): void {
   const { unit, decimals, extents } = drawing;
-  if (unit !== 'in' && unit !== 'mm') throw new RangeError(`drawing: unit is ${JSON.stringify(unit)}, takes "in" or "mm"`);
+  if (unit !== 'in' && unit !== 'mm')
+    throw new RangeError(`drawing: unit is ${JSON.stringify(unit)}, takes "in" or "mm"`);
   if (![4, 5, 6].includes(decimals)) throw new RangeError(`drawing: decimals is ${decimals}, takes 4, 5 or 6`);
   checkNumbers(extents, ['minX', 'minY', 'maxX', 'maxY'], 'the extents');
   const layers = checkLayers(drawing);

@@ -22,5 +22,7 @@ function differenceOf(a: Loop, b: Loop): number {
 
 /** Loops against the wanted ones, in order: largest difference of each pair, Infinity for one too many or too few. */
 export function compareContours(got: readonly Loop[], wanted: readonly Loop[]): number[] {
-  return Array.from({ length: Math.max(got.length, wanted.length) }, (_, i) => differenceOf(got[i] ?? [], wanted[i] ?? []));
+  return Array.from({ length: Math.max(got.length, wanted.length) }, (_, i) =>
+    differenceOf(got[i] ?? [], wanted[i] ?? []),
+  );
 }

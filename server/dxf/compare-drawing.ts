@@ -37,7 +37,11 @@ const shapesOf = (entities: readonly DrawingEntity[]) =>
   entities.map((e) => `${placesOf(e).length}${e.kind === 'polyline' && e.closed ? 'c' : 'o'}`);
 
 /** Differences of the given numbers of each place, entity by entity; NaN where the file has no such place or number. */
-function differences(read: readonly DrawingEntity[], intended: readonly DrawingEntity[], of: readonly ('x' | 'y' | 'z' | 'bulge')[]): number[] {
+function differences(
+  read: readonly DrawingEntity[],
+  intended: readonly DrawingEntity[],
+  of: readonly ('x' | 'y' | 'z' | 'bulge')[],
+): number[] {
   return intended.flatMap((entity, i) => {
     const places = read[i] === undefined ? [] : placesOf(read[i]);
     return placesOf(entity).flatMap((wanted, j) =>
@@ -81,24 +85,40 @@ function extentsChecks(face: string, read: ReadDxf, intended: Drawing, most: num
     ...corner(read.header.$LIMMIN, [e.minX, e.minY]),
     ...corner(read.header.$LIMMAX, [e.maxX, e.maxY]),
   ];
-  const boxes = read.entities.filter(isLine).map((l) => (l.kind === 'polyline' ? contourExtents(l) : pointExtents(l.points)));
+  const boxes = read.entities
+    .filter(isLine)
+    .map((l) => (l.kind === 'polyline' ? contourExtents(l) : pointExtents(l.points)));
   const [first, ...rest] = boxes;
   return [
     withinCheck(`${face}: extents in the header`, header, most),
-    withinCheck(`${face}: extents of the lines`, first ? sides(joinExtents(first, ...rest), e) : [NaN], most + longestChord(intended) * PROOF),
+    withinCheck(
+      `${face}: extents of the lines`,
+      first ? sides(joinExtents(first, ...rest), e) : [NaN],
+      most + longestChord(intended) * PROOF,
+    ),
   ];
 }
 
-/** A file read back, held against the drawing it was written from. */
-export function compareDrawing(face: string, read: ReadDxf, intended: Drawing, flavour: FileProfile['flavour']): ProofCheck[] {
+/** A file read back, held against the drawing it was written from. `oneCut`: the layers that say the same cut. */
+export function compareDrawing(
+  face: string,
+  read: ReadDxf,
+  intended: Drawing,
+  flavour: FileProfile['flavour'],
+): ProofCheck[] {
   const most = proofTolerance(intended.decimals);
   const wanted = inLayerOrder(intended);
   const { unit } = intended;
-  const texts = (entities: readonly DrawingEntity[]) => entities.flatMap((e) => (e.kind === 'text' ? [e.text] : [])).join(', ') || 'none';
-  const twins = findTwins(read.entities, most);
+  const texts = (entities: readonly DrawingEntity[]) =>
+    entities.flatMap((e) => (e.kind === 'text' ? [e.text] : [])).join(', ') || 'none';
+  const twins = findTwins(read.entities, most, oneCut);
   return [
     sameCheck(`${face}: flavour`, String(read.header.$ACADVER), VERSIONS[flavour]),
-    sameCheck(`${face}: unit`, `${read.header.$INSUNITS}/${read.header.$MEASUREMENT}`, `${INSUNITS[unit]}/${MEASUREMENT[unit]}`),
+    sameCheck(
+      `${face}: unit`,
+      `${read.header.$INSUNITS}/${read.header.$MEASUREMENT}`,
+      `${INSUNITS[unit]}/${MEASUREMENT[unit]}`,
+    ),
     sameCheck(`${face}: layers and colours`, layerWords(read.layers), layerWords(intended.layers)),
     sameCheck(`${face}: lines on each layer`, countsByLayer(read.entities), countsByLayer(wanted)),
     otherwiseCheck(`${face}: open or closed, number of vertices`, shapesOf(read.entities), shapesOf(wanted)),

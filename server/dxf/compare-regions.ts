@@ -32,7 +32,11 @@ function spansInside(outlines: readonly (readonly Point[])[], x: number): Span[]
  * two neighbouring corners in x nothing changes, so one upright line in each such strip tells all.
  * Returns the differences of where those lines go in and out; Infinity where their number differs.
  */
-export function compareRegions(outlines: readonly (readonly Point[])[], rectangles: readonly Extents[], tolerance: number): number[] {
+export function compareRegions(
+  outlines: readonly (readonly Point[])[],
+  rectangles: readonly Extents[],
+  tolerance: number,
+): number[] {
   const gap = 2 * tolerance;
   const xs = [...outlines.flat().map((p) => p.x), ...rectangles.flatMap((r) => [r.minX, r.maxX])].sort((a, b) => a - b);
   const differences: number[] = [];
@@ -41,7 +45,10 @@ export function compareRegions(outlines: readonly (readonly Point[])[], rectangl
     if (xs[i + 1]! - xs[i]! <= gap) continue;
     const x = (xs[i]! + xs[i + 1]!) / 2;
     const got = joinSpans(spansInside(outlines, x), gap);
-    const wanted = joinSpans(rectangles.filter((r) => r.minX < x && x < r.maxX).map((r): Span => [r.minY, r.maxY]), gap);
+    const wanted = joinSpans(
+      rectangles.filter((r) => r.minX < x && x < r.maxX).map((r): Span => [r.minY, r.maxY]),
+      gap,
+    );
     if (got.length !== wanted.length) differences.push(Infinity);
     else wanted.forEach(([from, to], j) => differences.push(got[j]![0] - from, got[j]![1] - to));
   }

@@ -30,9 +30,35 @@ export function headerValues(drawing: Drawing): readonly (readonly [name: string
   const n = (value: number) => formatNumber(value, decimals);
   return [
     ['MEASUREMENT', [[70, String(MEASUREMENT[unit])]]],
-    ['EXTMIN', [[10, n(e.minX)], [20, n(e.minY)], [30, n(minZ)]]],
-    ['EXTMAX', [[10, n(e.maxX)], [20, n(e.maxY)], [30, n(maxZ)]]],
-    ['LIMMIN', [[10, n(e.minX)], [20, n(e.minY)]]],
-    ['LIMMAX', [[10, n(e.maxX)], [20, n(e.maxY)]]],
+    [
+      'EXTMIN',
+      [
+        [10, n(e.minX)],
+        [20, n(e.minY)],
+        [30, n(minZ)],
+      ],
+    ],
+    [
+      'EXTMAX',
+      [
+        [10, n(e.maxX)],
+        [20, n(e.maxY)],
+        [30, n(maxZ)],
+      ],
+    ],
+    [
+      'LIMMIN',
+      [
+        [10, n(e.minX)],
+        [20, n(e.minY)],
+      ],
+    ],
+    [
+      'LIMMAX',
+      [
+        [10, n(e.maxX)],
+        [20, n(e.maxY)],
+      ],
+    ],
   ];
 }

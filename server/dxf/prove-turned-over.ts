@@ -48,16 +48,28 @@ function turnOver(turn: Turn, origin: FileProfile['origin'], p: Point): Point {
 }
 
 const contoursOn = (read: ReadDxf, layer: string | undefined) =>
-  read.entities.filter((e): e is Extract<DrawingEntity, { kind: 'polyline' }> => e.kind === 'polyline' && e.layer === layer);
+  read.entities.filter(
+    (e): e is Extract<DrawingEntity, { kind: 'polyline' }> => e.kind === 'polyline' && e.layer === layer,
+  );
 
-const sideDifferences = (got: Extents, wanted: Extents): number[] => [got.minX - wanted.minX, got.minY - wanted.minY, got.maxX - wanted.maxX, got.maxY - wanted.maxY];
+const sideDifferences = (got: Extents, wanted: Extents): number[] => [
+  got.minX - wanted.minX,
+  got.minY - wanted.minY,
+  got.maxX - wanted.maxX,
+  got.maxY - wanted.maxY,
+];
 
 /** The squared edges of the turned board against the pins at x = 0 and y = 0. */
 function squaredEdges(lines: readonly (readonly Point[])[], turn: Turn): number[] {
   if (lines.length !== 1) return [NaN];
   const line = lines[0]!;
   if (turn.squaring === 'all-edges') {
-    return sideDifferences(pointExtents(line), { minX: 0, minY: 0, maxX: turn.width + 2 * turn.k, maxY: turn.height + 2 * turn.k });
+    return sideDifferences(pointExtents(line), {
+      minX: 0,
+      minY: 0,
+      maxX: turn.width + 2 * turn.k,
+      maxY: turn.height + 2 * turn.k,
+    });
   }
   const toCorner = Math.min(...line.map((p) => Math.hypot(p.x, p.y)));
   const offEdges = line.map((p) => Math.min(Math.abs(p.x), Math.abs(p.y)));
@@ -71,13 +83,19 @@ function squaredEdges(lines: readonly (readonly Point[])[], turn: Turn): number[
  * The two files against each other by way of frame view: the back, turned over about the fold and laid on the pins,
  * must put each dado and the squared edges where the particulars say; the front its perimeter and openings.
  */
-export function proveTurnedOver(worked: WorkedFrame, profile: FileProfile, back: ReadDxf, front: ReadDxf): ProofCheck[] {
+export function proveTurnedOver(
+  worked: WorkedFrame,
+  profile: FileProfile,
+  back: ReadDxf,
+  front: ReadDxf,
+): ProofCheck[] {
   const turn = turnOf(worked, profile);
   const { length, k } = turn;
   const most = proofTolerance(profile.decimals);
   const layers = nameLayers(worked, profile);
   const layerOf = (lineSet: LineSet) => layers.get(lineSetKey(lineSet))?.name;
-  const setsOf = (face: 'back' | 'front', set: LineSet['set']) => worked[face].lineSets.filter((s) => s.set === set && layers.has(lineSetKey(s)));
+  const setsOf = (face: 'back' | 'front', set: LineSet['set']) =>
+    worked[face].lineSets.filter((s) => s.set === set && layers.has(lineSetKey(s)));
   const turned = (vertices: readonly Vertex[]) => vertices.map((v) => turnOver(turn, profile.origin, v));
 
   const dadoSets = setsOf('back', 'DADO');
@@ -89,17 +107,25 @@ export function proveTurnedOver(worked: WorkedFrame, profile: FileProfile, back:
   const dadoDifferences = depths.flatMap((depth) => {
     const wanted = worked.dados
       .filter((d) => Math.abs(d.depth - depth) < SAME)
-      .map(({ extents: e }) => ({ minX: length(e.minX) + k, minY: length(e.minY) + k, maxX: length(e.maxX) + k, maxY: length(e.maxY) + k }));
+      .map(({ extents: e }) => ({
+        minX: length(e.minX) + k,
+        minY: length(e.minY) + k,
+        maxX: length(e.maxX) + k,
+        maxY: length(e.maxY) + k,
+      }));
     return compareRegions(outlinesAt(depth), wanted, most);
   });
-  const squaring = setsOf('back', 'SQUARING').flatMap((s) => contoursOn(back, layerOf(s)).map(({ vertices }) => turned(vertices)));
+  const squaring = setsOf('back', 'SQUARING').flatMap((s) =>
+    contoursOn(back, layerOf(s)).map(({ vertices }) => turned(vertices)),
+  );
 
   const shift = profile.origin === 'pins' ? k : 0;
   const frameView = (vertices: readonly Vertex[]) => {
     const shifted = vertices.map((v) => ({ x: length(v.x) + shift, y: length(v.y) + shift, bulge: v.bulge }));
     return tidyContour(shifted, true, profile.decimals);
   };
-  const onFront = (set: LineSet['set']) => setsOf('front', set).flatMap((s) => contoursOn(front, layerOf(s)).map(({ vertices }) => vertices));
+  const onFront = (set: LineSet['set']) =>
+    setsOf('front', set).flatMap((s) => contoursOn(front, layerOf(s)).map(({ vertices }) => vertices));
   const perimeter = [frameView(worked.contours.perimeter.vertices)];
   const openings = worked.contours.openings.map(({ contour }) => frameView(contour.vertices));
 
@@ -109,6 +135,14 @@ export function proveTurnedOver(worked: WorkedFrame, profile: FileProfile, back:
     withinCheck('back turned over: dados where frame view has them', dadoDifferences, twice),
     withinCheck('back turned over: squared edges on the pins', squaredEdges(squaring, turn), twice),
     withinCheck('front: perimeter where frame view has it', compareContours(onFront('PERIMETER'), perimeter), twice),
-    ...(profile.openingLines === 'axis' ? [] : [withinCheck('front: openings where frame view has them', compareContours(onFront('OPENING'), openings), twice)]),
+    ...(profile.openingLines === 'axis'
+      ? []
+      : [
+          withinCheck(
+            'front: openings where frame view has them',
+            compareContours(onFront('OPENING'), openings),
+            twice,
+          ),
+        ]),
   ];
 }

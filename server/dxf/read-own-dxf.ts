@@ -30,11 +30,17 @@ function readPolyline(entity: Loose<IPolylineEntity>, strays: string[]): Drawing
   const stray = vertices.find((v) => v.layer !== layer);
   if (stray) throw new Error(`a vertex of a line on ${layer} lies on ${stray.layer}`);
   if (entity.is3dPolyline) {
-    if (!vertices.every((v) => v.threeDPolylineVertex)) throw new Error(`a climbing line on ${layer} has a vertex without flag 32`);
+    if (!vertices.every((v) => v.threeDPolylineVertex))
+      throw new Error(`a climbing line on ${layer} has a vertex without flag 32`);
     return { kind: 'polyline3d', layer, points: vertices.map(({ x, y, z }): Point3 => ({ x, y, z })) };
   }
   if (extrusionDirection || vertices.some((v) => v.z !== 0)) strays.push(`a line on ${layer} is off the plane`);
-  return { kind: 'polyline', layer, closed: shape, vertices: vertices.map(({ x, y, bulge = 0 }: Loose<Point3> & { bulge?: number }) => ({ x: x!, y: y!, bulge })) };
+  return {
+    kind: 'polyline',
+    layer,
+    closed: shape,
+    vertices: vertices.map(({ x, y, bulge = 0 }: Loose<Point3> & { bulge?: number }) => ({ x: x!, y: y!, bulge })),
+  };
 }
 
 function readText({ layer = '', startPoint, textHeight, text = '' }: Loose<ITextEntity>): DrawingEntity {
@@ -53,10 +59,12 @@ function refuseTorn(text: string): void {
 export function readOwnDxf(text: string): ReadDxf {
   refuseTorn(text);
   const file = new DxfParser().parse(text);
-  if (!file?.header || !file.tables?.layer || !file.entities) throw new Error('a section is missing: takes HEADER, TABLES with LAYER, ENTITIES');
+  if (!file?.header || !file.tables?.layer || !file.entities)
+    throw new Error('a section is missing: takes HEADER, TABLES with LAYER, ENTITIES');
   const strays: string[] = [];
   const entities = file.entities.map((entity) => {
-    if ((entity.colorIndex ?? BY_LAYER) !== BY_LAYER) strays.push(`a ${entity.type} on ${entity.layer} has colour ${entity.colorIndex}`);
+    if ((entity.colorIndex ?? BY_LAYER) !== BY_LAYER)
+      strays.push(`a ${entity.type} on ${entity.layer} has colour ${entity.colorIndex}`);
     switch (entity.type as string) {
       case 'LWPOLYLINE':
         return readLwPolyline(entity as Loose<ILwpolylineEntity>, strays);

@@ -76,7 +76,11 @@ export function writeR12(drawing: Drawing): string {
   };
 
   section('HEADER', () => {
-    const variables = [['ACADVER', [[1, 'AC1009']]], ['INSUNITS', [[70, INSUNITS[drawing.unit]]]], ...headerValues(drawing)] as const;
+    const variables = [
+      ['ACADVER', [[1, 'AC1009']]],
+      ['INSUNITS', [[70, INSUNITS[drawing.unit]]]],
+      ...headerValues(drawing),
+    ] as const;
     for (const [name, values] of variables) {
       tag(9, `$${name}`);
       for (const [code, value] of values) tag(code, value);

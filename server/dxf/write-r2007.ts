@@ -40,13 +40,16 @@ export function writeR2007(drawing: Drawing): string {
   for (const { name, colour } of drawing.layers) file.addLayer(name, colour, 'CONTINUOUS');
 
   const n = (value: number) => formatNumber(value, drawing.decimals);
-  const fixed = (code: number, value: string | number) => (typeof value === 'number' && isReal(code) ? n(value) : value);
+  const fixed = (code: number, value: string | number) =>
+    typeof value === 'number' && isReal(code) ? n(value) : value;
   const lastShape = (layer: string) => file.layers[layer]!.getShapes().at(-1)!;
 
   const draw = (entity: DrawingEntity) => {
     file.setActiveLayer(entity.layer);
     if (entity.kind === 'polyline') {
-      const points = entity.vertices.map((v) => (v.bulge === 0 ? [n(v.x), n(v.y)] : [n(v.x), n(v.y), formatNumber(v.bulge, BULGE_DECIMALS)]));
+      const points = entity.vertices.map((v) =>
+        v.bulge === 0 ? [n(v.x), n(v.y)] : [n(v.x), n(v.y), formatNumber(v.bulge, BULGE_DECIMALS)],
+      );
       file.drawPolyline(points, entity.closed);
     } else if (entity.kind === 'polyline3d') {
       file.drawPolyline3d(entity.points.map((p) => [n(p.x), n(p.y), n(p.z)]));

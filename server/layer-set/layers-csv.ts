@@ -11,7 +11,13 @@ import { csvLine } from './csv-line.ts';
 
 const COLUMNS = ['face', 'layer', 'colour', 'cutter', 'side of line', 'depth', 'passes', 'entities', 'length', 'unit'];
 
-const SIDES: Record<CutterSide, string> = { inside: 'inside', outside: 'outside', on: 'on the line', waste: 'waste side', none: 'not cut' };
+const SIDES: Record<CutterSide, string> = {
+  inside: 'inside',
+  outside: 'outside',
+  on: 'on the line',
+  waste: 'waste side',
+  none: 'not cut',
+};
 
 function cutterText(worked: WorkedFrame, { cutter: role }: LineSet): string {
   const cutter = role === null ? undefined : worked.particulars.cutters[role];
@@ -21,10 +27,15 @@ function cutterText(worked: WorkedFrame, { cutter: role }: LineSet): string {
   return `${number}${name}${describeCutter(cutter, worked.particulars.unit)}`;
 }
 
-const lengthOf = (e: DrawingEntity): number => (e.kind === 'polyline' ? contourLength(e) : e.kind === 'polyline3d' ? pathLength(e.points) : 0);
+const lengthOf = (e: DrawingEntity): number =>
+  e.kind === 'polyline' ? contourLength(e) : e.kind === 'polyline3d' ? pathLength(e.points) : 0;
 
 /** The layers of both files as CSV (RFC 4180, UTF-8), in cutting order; lengths and depths in the files' unit, passes with blanks between. */
-export function layersCsv(worked: WorkedFrame, profile: FileProfile, drawings: Readonly<Record<Face, Drawing>>): string {
+export function layersCsv(
+  worked: WorkedFrame,
+  profile: FileProfile,
+  drawings: Readonly<Record<Face, Drawing>>,
+): string {
   const layers = nameLayers(worked, profile);
   const lines = [csvLine(COLUMNS)];
   for (const face of ['back', 'front'] as const) {
@@ -38,7 +49,18 @@ export function layersCsv(worked: WorkedFrame, profile: FileProfile, drawings: R
       const lies = on(name);
       const length = number(lies.reduce((sum, e) => sum + lengthOf(e), 0));
       const deep = set.cutter === null ? '' : depth(set.depth);
-      const cells = [face, name, String(colour), cutterText(worked, set), SIDES[set.side], deep, set.passes.map(depth).join(' '), String(lies.length), length, unit];
+      const cells = [
+        face,
+        name,
+        String(colour),
+        cutterText(worked, set),
+        SIDES[set.side],
+        deep,
+        set.passes.map(depth).join(' '),
+        String(lies.length),
+        length,
+        unit,
+      ];
       lines.push(csvLine(cells));
       seen.add(name);
     }

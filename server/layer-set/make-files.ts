@@ -16,11 +16,15 @@ import { ProofFailed, type LayerSetFile, type LayerSetInput } from './layer-set.
 import { layersCsv } from './layers-csv.ts';
 
 /** A proof that failed before there were files to read back. */
-const refused = (name: string, got: string, wanted: string): Proof => ({ ok: false, checks: [{ name, ok: false, got, wanted }] });
+const refused = (name: string, got: string, wanted: string): Proof => ({
+  ok: false,
+  checks: [{ name, ok: false, got, wanted }],
+});
 
 function refuseStops({ particulars, findings }: WorkedFrame): void {
   const stops = findings.filter((f) => f.level === 'stop').map((f) => f.text);
-  if (stops.length > 0) throw new ProofFailed(particulars.name, refused('frame: stops among the findings', stops.join('; '), 'none'));
+  if (stops.length > 0)
+    throw new ProofFailed(particulars.name, refused('frame: stops among the findings', stops.join('; '), 'none'));
 }
 
 function draw(worked: WorkedFrame, profile: FileProfile): Record<Face, Drawing> {
@@ -28,7 +32,10 @@ function draw(worked: WorkedFrame, profile: FileProfile): Record<Face, Drawing> 
     return { back: buildDrawing(worked, 'back', profile), front: buildDrawing(worked, 'front', profile) };
   } catch (error) {
     if (!(error instanceof DrawingRefused)) throw error;
-    throw new ProofFailed(worked.particulars.name, refused('frame: drawn as the file profile asks', error.message, 'lines, each set on its own layer'));
+    throw new ProofFailed(
+      worked.particulars.name,
+      refused('frame: drawn as the file profile asks', error.message, 'lines, each set on its own layer'),
+    );
   }
 }
 
@@ -62,6 +69,7 @@ export async function makeFiles(input: LayerSetInput, frame: string): Promise<{ 
 
 /** How a revision stands in a file name: "rev-A", or "draft". Throws for what is no revision letter. */
 export function revisionWord(revision: string): string {
-  if (!/^[A-Z]{0,4}$/.test(revision)) throw new RangeError(`revision: got ${JSON.stringify(revision)}, takes capital letters, or nothing for a draft`);
+  if (!/^[A-Z]{0,4}$/.test(revision))
+    throw new RangeError(`revision: got ${JSON.stringify(revision)}, takes capital letters, or nothing for a draft`);
   return revision === '' ? 'draft' : `rev-${revision}`;
 }

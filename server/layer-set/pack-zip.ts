@@ -15,5 +15,10 @@ export function packZip(files: readonly LayerSetFile[], date: string): Promise<U
   for (const { name, bytes } of files) {
     zip.file(name, bytes, { date: new Date(Math.max(moment, EARLIEST)), createFolders: false, binary: true });
   }
-  return zip.generateAsync({ type: 'uint8array', compression: 'DEFLATE', compressionOptions: { level: 9 }, platform: 'DOS' });
+  return zip.generateAsync({
+    type: 'uint8array',
+    compression: 'DEFLATE',
+    compressionOptions: { level: 9 },
+    platform: 'DOS',
+  });
 }

@@ -5,14 +5,34 @@ const LONGEST = 40;
 const DEVICES = /^(con|prn|aux|nul|com\d|lpt\d|conin|conout|clock)$/i;
 
 // Letters that no decomposition turns into plain ones.
-const PLAIN: Record<string, string> = { ß: 'ss', æ: 'ae', Æ: 'AE', ø: 'o', Ø: 'O', œ: 'oe', Œ: 'OE', đ: 'd', Đ: 'D', ł: 'l', Ł: 'L', þ: 'th', Þ: 'Th', ð: 'd', Ð: 'D', ı: 'i' };
+const PLAIN: Record<string, string> = {
+  ß: 'ss',
+  æ: 'ae',
+  Æ: 'AE',
+  ø: 'o',
+  Ø: 'O',
+  œ: 'oe',
+  Œ: 'OE',
+  đ: 'd',
+  Đ: 'D',
+  ł: 'l',
+  Ł: 'L',
+  þ: 'th',
+  Þ: 'Th',
+  ð: 'd',
+  Ð: 'D',
+  ı: 'i',
+};
 
 /**
  * A name as part of a file name that any system takes: ASCII letters, digits and hyphens, at most 40 characters,
  * never empty (`otherwise` stands in) and never a device of Windows.
  */
 export function safeName(name: string, otherwise: string): string {
-  const plain = name.replace(/[^\x00-\x7f]/g, (c) => PLAIN[c] ?? c).normalize('NFKD').replace(/\p{M}/gu, '');
+  const plain = name
+    .replace(/[^\x00-\x7f]/g, (c) => PLAIN[c] ?? c)
+    .normalize('NFKD')
+    .replace(/\p{M}/gu, '');
   const safe = plain
     .replace(/[^A-Za-z0-9]+/g, '-')
     .replace(/^-/, '')

@@ -4,19 +4,17 @@ import { drawText, type Pen } from './pen.ts';
 import type { PlacedBlock } from './piece.ts';
 
 export const TITLE_SIZE = 3;
-export const TITLE = 6;
-/** Free space above a block. */
-const GAP = 2.5;
+export const TITLE = 5.6;
 
-export const blockHeight = (block: PlacedBlock): number =>
-  GAP + (block.title === '' ? 0 : TITLE) + (block.head?.height ?? 0) + block.pieces.reduce((sum, p) => sum + p.height, 0);
+export const blockHeight = (block: PlacedBlock, gap: number): number =>
+  gap + (block.title === '' ? 0 : TITLE) + (block.head?.height ?? 0) + block.pieces.reduce((sum, p) => sum + p.height, 0);
 
 /**
  * Places blocks one under the other and goes on to a new page where they do not fit: a block begins only where its title,
  * head and first piece fit together, and says its title and head again overleaf. Nothing is clipped: a piece higher than a
  * page stands alone on one. `newPage` begins a page; one is begun before the first block.
  */
-export function flowBlocks(pen: Pen, blocks: readonly PlacedBlock[], room: PageRoom, colour: SheetColour, newPage: (first: boolean) => void): void {
+export function flowBlocks(pen: Pen, blocks: readonly PlacedBlock[], room: PageRoom, { colour, gap }: { readonly colour: SheetColour; readonly gap: number }, newPage: (first: boolean) => void): void {
   newPage(true);
   let y = room.top;
   const over = (height: number) => y > room.top && y + height > room.bottom + 1e-6;
@@ -30,10 +28,10 @@ export function flowBlocks(pen: Pen, blocks: readonly PlacedBlock[], room: PageR
   };
   for (const block of blocks) {
     const first = (block.title === '' ? 0 : TITLE) + (block.head?.height ?? 0) + (block.pieces[0]?.height ?? 0);
-    if (over(GAP + first)) {
+    if (over(gap + first)) {
       newPage(false);
       y = room.top;
-    } else if (y > room.top) y += GAP;
+    } else if (y > room.top) y += gap;
     begin(block, false);
     for (const piece of block.pieces) {
       if (over(piece.height)) {

@@ -87,7 +87,7 @@ export function drawTitleBlock(pen: Pen, paper: Paper, block: SheetTitleBlock, s
 function drawCell(pen: Pen, cell: Cell, x: number, top: number, width: number): void {
   drawText(pen, cell.label, x + 1.5, top + 2.6, { size: 1.9, colour: 'pencil' });
   if (cell.value === '') return;
-  const { lines, size } = fitText(cell.value, width - 3, ROW - 3.2, cell.sizes ?? SIZES);
+  const { lines, size } = fitText(cell.value, width - 3, ROW - 4, cell.sizes ?? SIZES);
   lines.forEach((line, i) => drawText(pen, line, x + 1.5, top + 3.4 + size * (0.95 + i * LINE_HEIGHT), { size, bold: cell.bold, colour: cell.colour ?? 'ink' }));
 }
 

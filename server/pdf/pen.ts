@@ -45,12 +45,31 @@ const drawRun = (doc: PDFKit.PDFDocument, text: string, x: number, y: number): v
   doc.text(text, x, y, { ...PLAIN, features: PLAIN.features });
 };
 
-/** "≈", which JetBrains Mono's subsets lack: two tildes one above the other, read out and copied as the sign it is. */
+/** "≈", which JetBrains Mono's subsets lack: two tildes one above the other, read out and copied as the one sign it is. */
 function drawAlmostEqual(doc: PDFKit.PDFDocument, x: number, y: number, size: number): void {
-  doc.markContent('Span', { actual: '≈' });
-  drawRun(doc, '~', x, y - 0.11 * size);
-  drawRun(doc, '~', x, y + 0.11 * size);
-  doc.endMarkedContent();
+  readAs(doc, '≈', () => drawRun(doc, '~', x, y - 0.11 * size));
+  readAs(doc, '', () => drawRun(doc, '~', x, y + 0.11 * size));
+}
+
+/**
+ * What `draw` writes is read out and copied as `text` (ActualText, ISO 32000-1, 14.9.4). Readers place such text by the
+ * coordinates in force where the mark ends, and pdfkit turns those over around each word: so the mark has to stand inside,
+ * next to the text object itself.
+ */
+function readAs(doc: PDFKit.PDFDocument, text: string, draw: () => void): void {
+  const utf16 = [...text].map((c) => c.charCodeAt(0).toString(16).padStart(4, '0')).join('');
+  const add = doc.addContent.bind(doc);
+  doc.addContent = (data: string) => {
+    if (data === 'BT') add(`/Span <</ActualText <feff${utf16}>>> BDC`);
+    add(data);
+    if (data === 'ET') add('EMC');
+    return doc;
+  };
+  try {
+    draw();
+  } finally {
+    doc.addContent = add;
+  }
 }
 
 interface Run {

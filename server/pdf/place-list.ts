@@ -5,10 +5,9 @@ import { drawText, textWidth } from './pen.ts';
 import type { Piece } from './piece.ts';
 
 export const LIST_SIZE = 2.6;
-const LINE = LIST_SIZE * 1.32;
 
 /** Lines of text, numbered or not, the first word bold; one piece a printed line, so that long lists break anywhere. */
-export function placeList(items: readonly SheetLine[], ordered: boolean, width: number): Piece[] {
+export function placeList(items: readonly SheetLine[], ordered: boolean, width: number, linePitch: number): Piece[] {
   const indent = ordered ? textWidth(`${items.length} `, LIST_SIZE) : 0;
   return items.flatMap((item, i) => {
     const word = item.word ?? '';
@@ -17,7 +16,7 @@ export function placeList(items: readonly SheetLine[], ordered: boolean, width: 
     const leads = word !== '' && lines[0]!.startsWith(word);
     return lines.map((line, n): Piece => {
       const first = n === 0;
-      const height = LINE + (n === lines.length - 1 ? 0.7 : 0);
+      const height = linePitch * LIST_SIZE + (n === lines.length - 1 ? 0.6 : 0);
       const draw: Piece['draw'] = (pen, x, y) => {
         const base = y + LIST_SIZE;
         if (ordered && first) drawText(pen, String(i + 1), x, base, { size: LIST_SIZE, bold: true, colour: 'ink' });

@@ -37,8 +37,8 @@ function placeRow(row: readonly Captioned[], width: number): Piece {
   const height = pictureHeight + Math.max(...scaled.map((s) => s.caption.length)) * LINE + 1.5;
   const draw: Piece['draw'] = (pen, x, y) => {
     let left = row.length === 1 ? x + (width - row[0]!.picture.width * scaled[0]!.scale) / 2 : x;
-    for (const { picture, scale, caption } of scaled) {
-      drawPicture(pen, picture, left, y, scale);
+    for (const { picture, scale, caption, height } of scaled) {
+      drawPicture(pen, picture, left, y + (pictureHeight - height) / 2, scale);
       caption.forEach((line, i) => drawText(pen, line, row.length === 1 ? x : left, y + pictureHeight + CAPTION + i * LINE, { size: CAPTION, colour: 'pencil' }));
       left += picture.width * scale;
     }

@@ -6,7 +6,7 @@ import { rule } from './page-frame.ts';
 import { drawText, type Pen } from './pen.ts';
 import type { Piece } from './piece.ts';
 
-const HEIGHT = 17;
+const HEIGHT = 16;
 
 /** Boxes to sign in, side by side: what was done, name, date. */
 export function placeSignOff(boxes: readonly SignOffBox[], width: number): Piece {
@@ -17,10 +17,10 @@ export function placeSignOff(boxes: readonly SignOffBox[], width: number): Piece
 function drawBox(pen: Pen, { what, name, date }: SignOffBox, x: number, y: number, width: number): void {
   pen.doc.undash().lineWidth(LINE_WEIGHT.thin).rect(x, y, width, HEIGHT).stroke(SHEET_COLOURS.ink);
   drawText(pen, what, x + 1.5, y + 4, { size: 2.8, bold: true, colour: 'ink' });
-  rule(pen, x, y + 5.5, x + width, y + 5.5);
-  rule(pen, x, y + 11.5, x + width, y + 11.5);
-  field(pen, 'Name', name, x, y + 5.5, width);
-  field(pen, 'Date', date, x, y + 11.5, width);
+  rule(pen, x, y + 5, x + width, y + 5);
+  rule(pen, x, y + 10.5, x + width, y + 10.5);
+  field(pen, 'Name', name, x, y + 5, width);
+  field(pen, 'Date', date, x, y + 10.5, width);
 }
 
 function field(pen: Pen, label: string, value: string, x: number, y: number, width: number): void {

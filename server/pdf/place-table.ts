@@ -8,8 +8,7 @@ import { drawText, textWidth, type Pen } from './pen.ts';
 import type { Piece } from './piece.ts';
 
 export const TABLE_SIZE = 2.45;
-const LINE = TABLE_SIZE * 1.28;
-const PADDING = 0.9;
+const LINE = TABLE_SIZE * 1.25;
 const GUTTER = 2.4;
 /** A swatch and the space after it. */
 export const SWATCH = 5;
@@ -17,25 +16,34 @@ export const SWATCH = 5;
 const columnsIn = (width: number) => (width + 1e-6) / (CHARACTER_WIDTH * TABLE_SIZE);
 
 /** A table's head and rows as pieces, columns as wide as their words need, wrapped where the page is too narrow. */
-export function placeTable(table: SheetTable, width: number): { head?: Piece; pieces: Piece[] } {
-  if (table.rows.length === 0) return { pieces: table.whenEmpty === '' ? [] : [row([{ text: table.whenEmpty }], [width], ['left'], false)] };
+export function placeTable(table: SheetTable, width: number, padding: number): { head?: Piece; pieces: Piece[] } {
+  if (table.rows.length === 0) return { pieces: table.whenEmpty === '' ? [] : [row([{ text: table.whenEmpty }], { widths: [width], aligns: ['left'], padding, heavy: false })] };
   const widths = columnWidths(table, width, GUTTER);
   const aligns = table.columns.map((c) => c.align);
   const heading = table.columns.map((c): SheetCell => ({ text: c.heading, colour: 'pencil' }));
-  return { head: row(heading, widths, aligns, true), pieces: table.rows.map((cells) => row(cells, widths, aligns, false)) };
+  const look = { widths, aligns, padding };
+  return { head: row(heading, { ...look, heavy: true }), pieces: table.rows.map((cells) => row(cells, { ...look, heavy: false })) };
 }
 
-function row(cells: readonly SheetCell[], widths: readonly number[], aligns: readonly ('left' | 'right')[], heavy: boolean): Piece {
+interface RowLook {
+  readonly widths: readonly number[];
+  readonly aligns: readonly ('left' | 'right')[];
+  readonly padding: number;
+  /** Ruled off strongly: a head. */
+  readonly heavy: boolean;
+}
+
+function row(cells: readonly SheetCell[], { widths, aligns, padding, heavy }: RowLook): Piece {
   const lines = cells.map((cell, i) => wrapText(cell.text, columnsIn(widths[i]! - (cell.swatch ? SWATCH : 0))));
-  const height = Math.max(...lines.map((l) => l.length)) * LINE + 2 * PADDING;
+  const height = Math.max(...lines.map((l) => l.length)) * LINE + 2 * padding;
   const total = widths.reduce((a, b) => a + b, 0) + GUTTER * (widths.length - 1);
   const draw = (pen: Pen, x: number, y: number) => {
     let left = x;
     cells.forEach((cell, i) => {
-      if (cell.swatch) drawSwatch(pen, cell.swatch, left, y + PADDING);
+      if (cell.swatch) drawSwatch(pen, cell.swatch, left, y + padding);
       const start = aligns[i] === 'right' ? left + widths[i]! : left + (cell.swatch ? SWATCH : 0);
       lines[i]!.forEach((line, n) =>
-        drawText(pen, line, start, y + PADDING + TABLE_SIZE * 0.95 + n * LINE, {
+        drawText(pen, line, start, y + padding + TABLE_SIZE * 0.95 + n * LINE, {
           size: TABLE_SIZE,
           bold: cell.bold,
           colour: cell.colour ?? 'ink',

@@ -32,7 +32,7 @@ export function printableText(text: string, has: (codePoint: number) => boolean)
     else if (SILENT.test(character)) continue;
     else out += has(character.codePointAt(0)!) ? character : UNPRINTABLE;
   }
-  return out;
+  return out.replace(/ {2,}/g, ' ');
 }
 
 /** A value with every string in it made printable; everything else stays as it is. */

@@ -4,7 +4,7 @@ import { flowBlocks } from './flow-blocks.ts';
 import { loadFonts } from './load-fonts.ts';
 import { drawDraftMark, drawPageHead, drawTitleBlock, pageRoom } from './page-frame.ts';
 import { addPage, closeDocument, openDocument, type Paper } from './pdf-document.ts';
-import { placeBlocks } from './place-blocks.ts';
+import { placePage } from './place-page.ts';
 import { printableDeep } from './printable-text.ts';
 
 /**
@@ -27,7 +27,8 @@ export async function writeSetupSheet(model: SheetModel, paper: Paper): Promise<
   const room = pageRoom(paper);
   const colours: SheetColour[] = [];
   for (const page of sheet.pages) {
-    flowBlocks(pen, placeBlocks(page.blocks, room, page.colour), room, page.colour, (first) => {
+    const { blocks, gap } = placePage(page.blocks, room, page.colour);
+    flowBlocks(pen, blocks, room, { colour: page.colour, gap }, (first) => {
       addPage(pen);
       colours.push(page.colour);
       drawPageHead(pen, paper, { ...page, title: first ? page.title : `${page.title}, continued` });

@@ -1,7 +1,7 @@
 import { z } from 'zod';
 import { particulars } from './particulars.ts';
 import { LIMITS } from './limits.ts';
-import { lines } from './words.ts';
+import { lines, words } from './words.ts';
 
 /** POST /api/jobs/:jobId/frames. Answers a frame. */
 export const frameRequest = z.strictObject({ particulars });
@@ -60,7 +60,7 @@ export type StaleDraft = z.infer<typeof staleDraft>;
 export const releaseRequest = z.strictObject({
   version: z.number().int().min(1),
   note: lines(LIMITS.noteLength).default(''),
-  acknowledged: z.array(z.string()).default([]),
+  acknowledged: z.array(words(100)).max(100).default([]),
 });
 export type ReleaseRequest = z.input<typeof releaseRequest>;
 
@@ -101,4 +101,4 @@ export type FrameFilesTaken = z.infer<typeof frameFilesTaken>;
  *   GET /api/frames/:frameId/draft/frame-file
  *   GET /api/jobs/:jobId/layer-sets.zip?profile=ID        newest revision of each frame that has one
  */
-export const downloadQuery = z.strictObject({ profile: z.string().optional() });
+export const downloadQuery = z.strictObject({ profile: words(100).optional() });

@@ -38,7 +38,7 @@ export const shopChange = z.strictObject({
   name: name.optional(),
   unit: z.enum(['in', 'mm']).optional(),
   paper: paper.optional(),
-  defaultProfileId: z.string().optional(),
+  defaultProfileId: words(100).optional(),
 });
 export type ShopChange = z.input<typeof shopChange>;
 

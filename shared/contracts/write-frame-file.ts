@@ -24,12 +24,15 @@ function entriesInOrder(value: object): [string, unknown][] {
 
 function write(value: unknown, indent: string, whole = false): string {
   if (value === null || typeof value !== 'object') {
-    if (typeof value === 'number' && !Number.isFinite(value)) throw new RangeError(`frame file: got the number ${value}, takes a finite one`);
+    if (typeof value === 'number' && !Number.isFinite(value))
+      throw new RangeError(`frame file: got the number ${value}, takes a finite one`);
     return JSON.stringify(value);
   }
   const deeper = `${indent}  `;
   const isList = Array.isArray(value);
-  const parts = isList ? value.map((v) => write(v, deeper)) : entriesInOrder(value).map(([k, v]) => `${JSON.stringify(k)}: ${write(v, deeper)}`);
+  const parts = isList
+    ? value.map((v) => write(v, deeper))
+    : entriesInOrder(value).map(([k, v]) => `${JSON.stringify(k)}: ${write(v, deeper)}`);
   const [open, close, pad] = isList ? ['[', ']', ''] : ['{', '}', ' '];
   if (parts.length === 0) return `${open}${close}`;
   const line = `${open}${pad}${parts.join(', ')}${pad}${close}`;

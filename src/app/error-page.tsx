@@ -8,7 +8,8 @@ import { Sheet } from '../ui/sheet.tsx';
 function say(error: unknown): string {
   if (isRouteErrorResponse(error)) return `${error.status} ${error.statusText}`;
   // Browsers word it differently; a page file that is gone means that the product was updated meanwhile.
-  if (error instanceof TypeError && /import|module/i.test(error.message)) return 'A part of this page could not be fetched. Reload the page.';
+  if (error instanceof TypeError && /import|module/i.test(error.message))
+    return 'A part of this page could not be fetched. Reload the page.';
   return sayError(error);
 }
 
@@ -29,7 +30,9 @@ export function ErrorPage() {
           </Button>
           <ButtonLink to="/jobs">To the jobs</ButtonLink>
         </div>
-        {technical !== '' && <pre className="border border-rule p-3 text-12 whitespace-pre-wrap wrap-anywhere">{technical}</pre>}
+        {technical !== '' && (
+          <pre className="border border-rule p-3 text-12 whitespace-pre-wrap wrap-anywhere">{technical}</pre>
+        )}
       </div>
     </Sheet>
   );

@@ -7,7 +7,8 @@ import { NAV } from './nav.ts';
 export function OpenLayout() {
   const { data } = useSession();
   const { pathname } = useLocation();
-  const other = pathname === '/sign-in' ? { to: '/sign-up', label: 'Open a shop' } : { to: '/sign-in', label: 'Sign in' };
+  const other =
+    pathname === '/sign-in' ? { to: '/sign-up', label: 'Open a shop' } : { to: '/sign-in', label: 'Sign in' };
   const account = data?.user ? (
     data.user.name
   ) : (

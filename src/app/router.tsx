@@ -27,9 +27,18 @@ export const routes: RouteObject[] = [
             children: [
               { path: 'jobs', lazy: async () => ({ Component: (await import('./routes/jobs.tsx')).JobsRoute }) },
               { path: 'jobs/:jobId', lazy: async () => ({ Component: (await import('./routes/job.tsx')).JobRoute }) },
-              { path: 'frames/:frameId', lazy: async () => ({ Component: (await import('./routes/frame-page.tsx')).FramePageRoute }) },
-              { path: 'frames/:frameId/sheet', lazy: async () => ({ Component: (await import('./routes/setup-sheet.tsx')).SetupSheetRoute }) },
-              { path: 'profiles', lazy: async () => ({ Component: (await import('./routes/profiles.tsx')).ProfilesRoute }) },
+              {
+                path: 'frames/:frameId',
+                lazy: async () => ({ Component: (await import('./routes/frame-page.tsx')).FramePageRoute }),
+              },
+              {
+                path: 'frames/:frameId/sheet',
+                lazy: async () => ({ Component: (await import('./routes/setup-sheet.tsx')).SetupSheetRoute }),
+              },
+              {
+                path: 'profiles',
+                lazy: async () => ({ Component: (await import('./routes/profiles.tsx')).ProfilesRoute }),
+              },
               { path: 'shop', lazy: async () => ({ Component: (await import('./routes/shop.tsx')).ShopRoute }) },
             ],
           },

@@ -35,7 +35,9 @@ export function SignedInLayout() {
   }
   return (
     <SignedInProvider value={signedIn}>
-      <SheetChromeProvider value={{ nav: NAV, account: <Account user={signedIn.user} />, shopName: signedIn.shop.name }}>
+      <SheetChromeProvider
+        value={{ nav: NAV, account: <Account user={signedIn.user} />, shopName: signedIn.shop.name }}
+      >
         {/* Another person's page must not keep the state of the one before. */}
         <Outlet key={signedIn.user.id} />
         {now === null && <SignInAgain email={signedIn.user.email} />}

@@ -12,7 +12,13 @@ export class ApiError extends Error {
   /** By code, see the contract of the call. */
   readonly details: unknown;
 
-  constructor(status: number, code: ClientErrorCode, message: string, fields: readonly FieldError[] = [], details?: unknown) {
+  constructor(
+    status: number,
+    code: ClientErrorCode,
+    message: string,
+    fields: readonly FieldError[] = [],
+    details?: unknown,
+  ) {
     super(message);
     this.name = 'ApiError';
     this.status = status;
@@ -22,4 +28,5 @@ export class ApiError extends Error {
   }
 }
 
-export const isCode = (error: unknown, code: ClientErrorCode): error is ApiError => error instanceof ApiError && error.code === code;
+export const isCode = (error: unknown, code: ClientErrorCode): error is ApiError =>
+  error instanceof ApiError && error.code === code;

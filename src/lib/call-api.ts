@@ -23,7 +23,10 @@ async function send({ method = 'GET', path, body, signal, keepalive }: ApiCall<u
       signal,
       keepalive,
       credentials: 'same-origin',
-      headers: { accept: 'application/json', ...(body !== undefined && !isForm ? { 'content-type': 'application/json' } : {}) },
+      headers: {
+        accept: 'application/json',
+        ...(body !== undefined && !isForm ? { 'content-type': 'application/json' } : {}),
+      },
       body: body === undefined ? undefined : isForm ? body : JSON.stringify(body),
     });
   } catch (error) {

@@ -8,9 +8,18 @@ export async function decodeError(response: Response): Promise<ApiError> {
   try {
     data = JSON.parse(text);
   } catch {
-    return new ApiError(response.status, 'unexpected-answer', `The server answered ${response.status} and not in JSON.`);
+    return new ApiError(
+      response.status,
+      'unexpected-answer',
+      `The server answered ${response.status} and not in JSON.`,
+    );
   }
   const read = errorBody.safeParse(data);
-  if (!read.success) return new ApiError(response.status, 'unexpected-answer', `The server answered ${response.status} without a code that is known.`);
+  if (!read.success)
+    return new ApiError(
+      response.status,
+      'unexpected-answer',
+      `The server answered ${response.status} without a code that is known.`,
+    );
   return new ApiError(response.status, read.data.code, read.data.message, read.data.fields ?? [], read.data.details);
 }

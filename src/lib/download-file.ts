@@ -40,10 +40,11 @@ export async function downloadFile({ path, signal, onBytes }: DownloadCall): Pro
   }
   if (!response.ok) throw await decodeError(response);
   const name = nameFromDisposition(response.headers.get('content-disposition'));
-  if (name === undefined || response.body === null) throw new ApiError(response.status, 'unexpected-answer', `${path} answered no file`);
+  if (name === undefined || response.body === null)
+    throw new ApiError(response.status, 'unexpected-answer', `${path} answered no file`);
   const parts: Uint8Array<ArrayBuffer>[] = [];
   let bytes = 0;
-  for (const reader = response.body.getReader(); ; ) {
+  for (const reader = response.body.getReader(); ;) {
     const { done, value } = await reader.read();
     if (done) break;
     parts.push(value);

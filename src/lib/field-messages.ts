@@ -17,4 +17,5 @@ export function fieldMessages(errors: readonly FieldError[]): FieldMessages {
 }
 
 /** Field messages of a failed call; empty when it failed for another reason. */
-export const fieldMessagesOf = (error: unknown): FieldMessages => (error instanceof ApiError ? fieldMessages(error.fields) : {});
+export const fieldMessagesOf = (error: unknown): FieldMessages =>
+  error instanceof ApiError ? fieldMessages(error.fields) : {};

@@ -2,7 +2,8 @@ import { MutationCache, QueryCache, QueryClient } from '@tanstack/react-query';
 import { ApiError, isCode } from './api-error.ts';
 
 /** Failures that may pass by themselves. */
-const mayPass = (error: unknown): boolean => error instanceof ApiError && (error.code === 'unreachable' || error.status >= 502);
+const mayPass = (error: unknown): boolean =>
+  error instanceof ApiError && (error.code === 'unreachable' || error.status >= 502);
 
 /** `onSignedOut` is told when any call finds that the session has ended. */
 export function createQueryClient(onSignedOut: () => void): QueryClient {

@@ -18,7 +18,16 @@ interface ButtonLinkProps {
 }
 
 /** A link that looks like a button. */
-export function ButtonLink({ to, kind = 'plain', wide = false, download = false, newTab = false, describedBy, label, children }: ButtonLinkProps) {
+export function ButtonLink({
+  to,
+  kind = 'plain',
+  wide = false,
+  download = false,
+  newTab = false,
+  describedBy,
+  label,
+  children,
+}: ButtonLinkProps) {
   const look = buttonLook(kind, wide);
   if (download || newTab) {
     return (

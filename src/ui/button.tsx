@@ -10,7 +10,15 @@ interface ButtonProps extends Omit<ButtonHTMLAttributes<HTMLButtonElement>, 'cla
   readonly ref?: Ref<HTMLButtonElement>;
 }
 
-export function Button({ kind = 'plain', busy = '', wide = false, type = 'button', onClick, children, ...rest }: ButtonProps) {
+export function Button({
+  kind = 'plain',
+  busy = '',
+  wide = false,
+  type = 'button',
+  onClick,
+  children,
+  ...rest
+}: ButtonProps) {
   const working = busy !== '';
   return (
     <button

@@ -21,9 +21,20 @@ interface ChoiceProps<T extends string> {
 }
 
 /** A switch between two or three options, all in sight: a radio group, walked with the arrow keys. */
-export function Choice<T extends string>({ label, options, value, onValue, hint, error = '', hideLabel = false, disabled = false }: ChoiceProps<T>) {
+export function Choice<T extends string>({
+  label,
+  options,
+  value,
+  onValue,
+  hint,
+  error = '',
+  hideLabel = false,
+  disabled = false,
+}: ChoiceProps<T>) {
   const id = useId();
-  const says = [error !== '' && `${id}-error`, hint !== undefined && `${id}-hint`].filter((part) => part !== false).join(' ');
+  const says = [error !== '' && `${id}-error`, hint !== undefined && `${id}-hint`]
+    .filter((part) => part !== false)
+    .join(' ');
   return (
     <fieldset disabled={disabled} aria-describedby={says || undefined} className="mb-1.5 min-w-0">
       <legend className={hideLabel ? 'sr-only' : 'mb-0.5'}>{label}</legend>

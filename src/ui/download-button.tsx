@@ -33,7 +33,11 @@ export function DownloadButton({ path, kind, wide, children, disabled }: Downloa
     running.current = control;
     setState({ at: 'working', bytes: 0 });
     try {
-      const { name } = await downloadFile({ path, signal: control.signal, onBytes: (bytes) => setState({ at: 'working', bytes }) });
+      const { name } = await downloadFile({
+        path,
+        signal: control.signal,
+        onBytes: (bytes) => setState({ at: 'working', bytes }),
+      });
       setState({ at: 'saved', name });
     } catch (error) {
       setState(control.signal.aborted ? { at: 'idle' } : { at: 'failed', error });
@@ -42,7 +46,13 @@ export function DownloadButton({ path, kind, wide, children, disabled }: Downloa
 
   return (
     <div className="flex flex-col items-stretch gap-2">
-      <Button kind={kind} wide={wide} disabled={disabled} busy={state.at === 'working' ? 'Writing the files' : ''} onClick={() => void start()}>
+      <Button
+        kind={kind}
+        wide={wide}
+        disabled={disabled}
+        busy={state.at === 'working' ? 'Writing the files' : ''}
+        onClick={() => void start()}
+      >
         {children}
       </Button>
       {state.at === 'working' && (
@@ -53,7 +63,9 @@ export function DownloadButton({ path, kind, wide, children, disabled }: Downloa
             </Button>
           }
         >
-          {state.bytes === 0 ? 'The server writes and proves the files.' : `${Math.ceil(state.bytes / 1024)} KB so far.`}
+          {state.bytes === 0
+            ? 'The server writes and proves the files.'
+            : `${Math.ceil(state.bytes / 1024)} KB so far.`}
         </ProgressText>
       )}
       {state.at === 'saved' && (

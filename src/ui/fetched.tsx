@@ -29,7 +29,12 @@ export function Fetched<T>({ query, what, children }: FetchedProps<T>) {
   // An answer that no contract knows is a fault of the product, and belongs to the boundary.
   if (isCode(query.error, 'unexpected-answer')) throw query.error;
   return (
-    <Notice level="stop" word="Not fetched" live action={<Button onClick={() => void query.refetch()}>Try again</Button>}>
+    <Notice
+      level="stop"
+      word="Not fetched"
+      live
+      action={<Button onClick={() => void query.refetch()}>Try again</Button>}
+    >
       {sayError(query.error)}
     </Notice>
   );

@@ -24,7 +24,9 @@ export interface FieldProps {
 export function Field(props: FieldProps & { readonly children: (wiring: FieldWiring) => ReactNode }) {
   const { label, error = '', hint, layout = 'stack', hideLabel = false, children } = props;
   const id = useId();
-  const says = [error !== '' && `${id}-error`, hint !== undefined && `${id}-hint`].filter((part) => part !== false).join(' ');
+  const says = [error !== '' && `${id}-error`, hint !== undefined && `${id}-hint`]
+    .filter((part) => part !== false)
+    .join(' ');
   const row = layout === 'row' && !hideLabel;
   return (
     <div className={classNames(layout === 'stack' && !hideLabel && 'mb-3')}>

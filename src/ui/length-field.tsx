@@ -19,9 +19,21 @@ export function LengthField({ unit, least, most, above = false, ...rest }: Lengt
     const read = parseLength(text, unit);
     if (!read.ok) return read;
     const tooSmall = least !== undefined && (above ? read.value <= least : read.value < least);
-    if (tooSmall) return { ok: false, takes: above ? `a length above ${formatLength(least, unit)}` : `a length from ${formatLength(least, unit)}` };
-    if (most !== undefined && read.value > most) return { ok: false, takes: `a length up to ${formatLength(most, unit)}` };
+    if (tooSmall)
+      return {
+        ok: false,
+        takes: above ? `a length above ${formatLength(least, unit)}` : `a length from ${formatLength(least, unit)}`,
+      };
+    if (most !== undefined && read.value > most)
+      return { ok: false, takes: `a length up to ${formatLength(most, unit)}` };
     return read;
   }
-  return <ParsedField {...rest} parse={parse} format={(value) => formatLength(value, unit)} title={formatOther(rest.value, unit)} />;
+  return (
+    <ParsedField
+      {...rest}
+      parse={parse}
+      format={(value) => formatLength(value, unit)}
+      title={formatOther(rest.value, unit)}
+    />
+  );
 }

@@ -1,6 +1,7 @@
 import type { KeyboardEvent } from 'react';
 
-const FIELDS = 'input:not([type=hidden], [type=radio], :disabled), input[type=radio]:checked:not(:disabled), select:not(:disabled), textarea:not(:disabled)';
+const FIELDS =
+  'input:not([type=hidden], [type=radio], :disabled), input[type=radio]:checked:not(:disabled), select:not(:disabled), textarea:not(:disabled)';
 
 /**
  * Moves focus from a field to the next one on the page, in the nearest ancestor marked `data-fields`, else form, else main.

@@ -12,7 +12,9 @@ export function NumberField({ least, most, whole = false, ...rest }: NumberField
   function parse(text: string): Parsed {
     const value = /^\s*[+-]?(\d+\.?\d*|\.\d+)\s*$/.test(text) ? Number(text) : Number.NaN;
     const fits = value >= least && value <= most && (!whole || Number.isInteger(value));
-    return fits ? { ok: true, value } : { ok: false, takes: `a ${whole ? 'whole ' : ''}number from ${least} to ${most}` };
+    return fits
+      ? { ok: true, value }
+      : { ok: false, takes: `a ${whole ? 'whole ' : ''}number from ${least} to ${most}` };
   }
   return <ParsedField {...rest} parse={parse} format={String} />;
 }

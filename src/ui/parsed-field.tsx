@@ -30,13 +30,29 @@ const PATIENCE_MS = 700;
  * is said after a pause or on leaving. A value that changes from outside (undo) replaces the text.
  */
 export function ParsedField(props: ParsedFieldProps) {
-  const { label, error = '', hint, layout = 'row', hideLabel, value, onValue, parse, format, title, suffix, onFocus, onBlur, ...rest } = props;
+  const {
+    label,
+    error = '',
+    hint,
+    layout = 'row',
+    hideLabel,
+    value,
+    onValue,
+    parse,
+    format,
+    title,
+    suffix,
+    onFocus,
+    onBlur,
+    ...rest
+  } = props;
   const [typed, setTyped] = useState<{ text: string; value: number } | null>(null);
   const [settled, setSettled] = useState(true);
 
   const kept = typed !== null && Object.is(typed.value, value) ? typed.text : null;
   const read = kept === null ? null : parse(kept);
-  const wrong = read !== null && !read.ok ? `Got ${kept?.trim() ? `“${kept.trim()}”` : 'nothing'}; takes ${read.takes}.` : '';
+  const wrong =
+    read !== null && !read.ok ? `Got ${kept?.trim() ? `“${kept.trim()}”` : 'nothing'}; takes ${read.takes}.` : '';
 
   useEffect(() => {
     if (wrong === '' || settled) return;
@@ -58,7 +74,13 @@ export function ParsedField(props: ParsedFieldProps) {
   }
 
   return (
-    <Field label={label} error={wrong !== '' && settled ? wrong : error} hint={hint} layout={layout} hideLabel={hideLabel}>
+    <Field
+      label={label}
+      error={wrong !== '' && settled ? wrong : error}
+      hint={hint}
+      layout={layout}
+      hideLabel={hideLabel}
+    >
       {(wiring) => (
         <span className="flex shrink-0 items-baseline gap-1">
           <input

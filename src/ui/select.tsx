@@ -11,7 +11,17 @@ interface SelectProps<T extends string> extends FieldProps {
 }
 
 /** One of many, in the browser's own list. */
-export function Select<T extends string>({ label, error, hint, layout = 'row', hideLabel, options, value, onValue, disabled }: SelectProps<T>) {
+export function Select<T extends string>({
+  label,
+  error,
+  hint,
+  layout = 'row',
+  hideLabel,
+  options,
+  value,
+  onValue,
+  disabled,
+}: SelectProps<T>) {
   return (
     <Field label={label} error={error} hint={hint} layout={layout} hideLabel={hideLabel}>
       {(wiring) => (

@@ -28,9 +28,13 @@ export function SheetHeader({ crumbs }: { readonly crumbs: readonly Crumb[] }) {
           ))}
         </nav>
       )}
-      <div className="ml-auto flex min-h-11 min-w-0 flex-wrap items-center gap-x-6 gap-y-1 py-1">
+      <div className="flex min-h-11 min-w-0 flex-1 basis-96 items-center justify-end gap-x-6 py-1">
         {crumbs.length > 0 && (
-          <nav aria-label="Where you are" className="min-w-0 wrap-anywhere">
+          <nav
+            aria-label="Where you are"
+            title={crumbs.map((crumb) => crumb.label).join(' / ')}
+            className="min-w-0 truncate"
+          >
             {crumbs.map((crumb, i) => (
               <Fragment key={i}>
                 {i > 0 && <span aria-hidden="true"> / </span>}

@@ -42,7 +42,10 @@ function inOrder<Row>(rows: readonly Row[], columns: readonly Column<Row>[], ord
 export function Table<Row>({ caption, columns, rows, rowKey }: TableProps<Row>) {
   const [order, setOrder] = useState<Order | null>(null);
   const press = (key: string) =>
-    setOrder((now) => ({ key, direction: now?.key === key && now.direction === 'ascending' ? 'descending' : 'ascending' }));
+    setOrder((now) => ({
+      key,
+      direction: now?.key === key && now.direction === 'ascending' ? 'descending' : 'ascending',
+    }));
   return (
     <div className="overflow-x-auto print:overflow-visible">
       <table className="w-full border-collapse text-left">
@@ -56,12 +59,19 @@ export function Table<Row>({ caption, columns, rows, rowKey }: TableProps<Row>) 
                   key={column.key}
                   scope="col"
                   aria-sort={direction}
-                  className={classNames('px-2 py-1 align-bottom text-11 font-normal text-pencil first:pl-0 last:pr-0', column.align === 'right' && 'text-right')}
+                  className={classNames(
+                    'px-2 py-1 align-bottom text-11 font-normal text-pencil first:pl-0 last:pr-0',
+                    column.align === 'right' && 'text-right',
+                  )}
                 >
                   {column.sortBy === undefined ? (
                     <span className={column.hideHead ? 'sr-only' : undefined}>{column.head}</span>
                   ) : (
-                    <button type="button" onClick={() => press(column.key)} className="min-h-6 whitespace-nowrap hover:underline">
+                    <button
+                      type="button"
+                      onClick={() => press(column.key)}
+                      className="min-h-6 whitespace-nowrap hover:underline"
+                    >
                       {column.head}
                       <span aria-hidden="true" className="inline-block w-[1ch] pl-1">
                         {direction === 'ascending' ? '↑' : direction === 'descending' ? '↓' : ''}
@@ -77,7 +87,10 @@ export function Table<Row>({ caption, columns, rows, rowKey }: TableProps<Row>) 
           {inOrder(rows, columns, order).map((row) => (
             <tr key={rowKey(row)} className="break-inside-avoid border-b border-rule hover:bg-board-light">
               {columns.map((column) => {
-                const look = classNames('px-2 py-1.5 font-normal first:pl-0 last:pr-0', column.align === 'right' && 'text-right');
+                const look = classNames(
+                  'px-2 py-1.5 font-normal first:pl-0 last:pr-0',
+                  column.align === 'right' && 'text-right',
+                );
                 return column.names ? (
                   <th key={column.key} scope="row" className={look}>
                     {column.cell(row)}

@@ -22,7 +22,20 @@ interface TextFieldProps extends FieldProps {
 }
 
 export function TextField(props: TextFieldProps) {
-  const { label, error, hint, layout, hideLabel, value, onValue, enterMoves = false, lines = 1, type = 'text', ref, ...rest } = props;
+  const {
+    label,
+    error,
+    hint,
+    layout,
+    hideLabel,
+    value,
+    onValue,
+    enterMoves = false,
+    lines = 1,
+    type = 'text',
+    ref,
+    ...rest
+  } = props;
   return (
     <Field label={label} error={error} hint={hint} layout={layout} hideLabel={hideLabel}>
       {(wiring) =>

@@ -6,7 +6,10 @@ export function WhenSeen({ className, children }: { readonly className: string; 
   const [seen, setSeen] = useState(false);
   useEffect(() => {
     if (seen || place.current === null) return;
-    const watch = new IntersectionObserver((entries) => entries.some((entry) => entry.isIntersecting) && setSeen(true), { rootMargin: '200px' });
+    const watch = new IntersectionObserver(
+      (entries) => entries.some((entry) => entry.isIntersecting) && setSeen(true),
+      { rootMargin: '200px' },
+    );
     watch.observe(place.current);
     return () => watch.disconnect();
   }, [seen]);

@@ -21,11 +21,29 @@ function thousandContours(): Drawing {
     const x = (i % 40) * 1.7 + i / 64;
     const y = Math.floor(i / 40) * 1.3 + i / 96;
     const corners = [
-      [0.1, 0, 0], [0.9, 0, quarter], [1, 0.1, 0], [1, 0.7, quarter], [0.9, 0.8, 0], [0.1, 0.8, quarter], [0, 0.7, 0], [0, 0.1, quarter],
-    ] as const; // prettier-ignore
-    return { kind: 'polyline', layer: 'BACK_DADO', closed: true, vertices: corners.map(([dx, dy, bulge]) => ({ x: x + dx, y: y + dy, bulge })) };
+      [0.1, 0, 0],
+      [0.9, 0, quarter],
+      [1, 0.1, 0],
+      [1, 0.7, quarter],
+      [0.9, 0.8, 0],
+      [0.1, 0.8, quarter],
+      [0, 0.7, 0],
+      [0, 0.1, quarter],
+    ] as const;
+    return {
+      kind: 'polyline',
+      layer: 'BACK_DADO',
+      closed: true,
+      vertices: corners.map(([dx, dy, bulge]) => ({ x: x + dx, y: y + dy, bulge })),
+    };
   });
-  return { unit: 'in', decimals: 6, layers: [{ name: 'BACK_DADO', colour: 1 }], entities, extents: { minX: 0, minY: 0, maxX: 84, maxY: 44 } };
+  return {
+    unit: 'in',
+    decimals: 6,
+    layers: [{ name: 'BACK_DADO', colour: 1 }],
+    entities,
+    extents: { minX: 0, minY: 0, maxX: 84, maxY: 44 },
+  };
 }
 
 /** The same contours with dxf-writer and nothing else: numbers as they come, no header, handles as they come. */

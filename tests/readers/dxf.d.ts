@@ -5,7 +5,10 @@ declare module 'dxf' {
     readonly entities: readonly { readonly type: string; readonly layer: string; readonly closed?: boolean }[];
   }
   interface Polylines {
-    readonly polylines: readonly { readonly layer?: { readonly name: string }; readonly vertices: readonly (readonly number[])[] }[];
+    readonly polylines: readonly {
+      readonly layer?: { readonly name: string };
+      readonly vertices: readonly (readonly number[])[];
+    }[];
   }
   export function parseString(text: string): ReadFile;
   export function toPolylines(file: ReadFile): Polylines;

@@ -11,6 +11,9 @@ export function readWithDxf(text: string): { readonly types: readonly string[]; 
   const file = parseString(text);
   if (file.entities.length === 0) throw new Error('npm dxf finds no entities');
   const types = file.entities.map((e) => e.type);
-  const lines = toPolylines(file).polylines.map(({ layer, vertices }) => ({ layer: layer?.name ?? '', points: vertices }));
+  const lines = toPolylines(file).polylines.map(({ layer, vertices }) => ({
+    layer: layer?.name ?? '',
+    points: vertices,
+  }));
   return { types, lines };
 }

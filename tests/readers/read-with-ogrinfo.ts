@@ -14,7 +14,10 @@ export function readWithOgrinfo(path: string): OgrFeature[] {
   return features.map((text) => {
     const layer = /^\s*Layer \(String\) = (.*)$/m.exec(text)?.[1] ?? '';
     const [, kind = '', places = ''] = /^\s*([A-Z]+)(?: Z)? (\(.*\))$/m.exec(text) ?? [];
-    const points = places.replace(/[()]/g, '').split(',').map((p) => p.trim().split(/\s+/).map(Number));
+    const points = places
+      .replace(/[()]/g, '')
+      .split(',')
+      .map((p) => p.trim().split(/\s+/).map(Number));
     return { layer, kind, points };
   });
 }

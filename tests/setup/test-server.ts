@@ -32,11 +32,10 @@ interface Options {
   readonly trustProxy?: number;
 }
 
-/** The whole server on a port of its own, on a database that is a copy of the migrated one. Its clock starts on 31 March 2026, 9:00 UTC, and stands. */
-export async function startTestServer(options: Options = {}): Promise<TestServer> {
+/** The whole server on a port of its own, on a database that is a copy of the migrated one. Its clock starts on 31 March 2026, 9:00 UTC, and stands. `beside`: on the database of that server. */
+export async function startTestServer(options: Options = {}, beside?: TestServer): Promise<TestServer> {
   const root = join(import.meta.dirname, '../..');
-  const dump = new Blob([await readFile(inject('migratedDatabase'))]);
-  const database = await openInMemory(join(root, 'drizzle'), dump);
+  const database = beside?.database ?? (await openInMemory(join(root, 'drizzle'), new Blob([await readFile(inject('migratedDatabase'))])));
   const makers = startMakers(new URL('../../server/workers/make.ts', import.meta.url), 1);
   let clock = Date.UTC(2026, 2, 31, 9);
   const now = () => new Date(clock);
@@ -62,7 +61,7 @@ export async function startTestServer(options: Options = {}): Promise<TestServer
         server.closeAllConnections();
       });
       await makers.close();
-      await database.close();
+      if (!beside) await database.close();
     },
   };
 }

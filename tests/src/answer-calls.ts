@@ -10,7 +10,11 @@ export interface SeenCall {
 export function answerCalls(answer: (call: SeenCall) => Response | undefined): SeenCall[] {
   const seen: SeenCall[] = [];
   vi.stubGlobal('fetch', (path: string, init: RequestInit = {}) => {
-    const call = { method: init.method ?? 'GET', path, body: typeof init.body === 'string' ? (JSON.parse(init.body) as unknown) : init.body };
+    const call = {
+      method: init.method ?? 'GET',
+      path,
+      body: typeof init.body === 'string' ? (JSON.parse(init.body) as unknown) : init.body,
+    };
     seen.push(call);
     const response = answer(call);
     return response ? Promise.resolve(response) : Promise.reject(new Error(`nobody answers ${call.method} ${path}`));
@@ -18,6 +22,7 @@ export function answerCalls(answer: (call: SeenCall) => Response | undefined): S
   return seen;
 }
 
-export const json = (data: unknown, status = 200): Response => new Response(JSON.stringify(data), { status, headers: { 'content-type': 'application/json' } });
+export const json = (data: unknown, status = 200): Response =>
+  new Response(JSON.stringify(data), { status, headers: { 'content-type': 'application/json' } });
 
 afterEach(() => vi.unstubAllGlobals());

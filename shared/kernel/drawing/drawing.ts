@@ -10,9 +10,20 @@ export interface DrawingLayer {
 }
 
 export type DrawingEntity =
-  | { readonly kind: 'polyline'; readonly layer: string; readonly closed: boolean; readonly vertices: readonly Vertex[] }
+  | {
+      readonly kind: 'polyline';
+      readonly layer: string;
+      readonly closed: boolean;
+      readonly vertices: readonly Vertex[];
+    }
   | { readonly kind: 'polyline3d'; readonly layer: string; readonly points: readonly Point3[] }
-  | { readonly kind: 'text'; readonly layer: string; readonly at: Point; readonly height: number; readonly text: string };
+  | {
+      readonly kind: 'text';
+      readonly layer: string;
+      readonly at: Point;
+      readonly height: number;
+      readonly text: string;
+    };
 
 /** What a DXF holds, before any flavour: the neutral drawing that writers take and the proof holds files against. */
 export interface Drawing {

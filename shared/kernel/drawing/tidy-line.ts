@@ -39,9 +39,13 @@ export function tidyPath(points: readonly Point3[], decimals: number): Point3[] 
   for (const { x, y, z } of points) {
     const before = tidy.at(-1);
     const point = { x: plain(x), y: plain(y), z: plain(z) };
-    const repeats = before !== undefined && sameWritten(before, point, decimals) && written(before.z, decimals) === written(z, decimals);
+    const repeats =
+      before !== undefined &&
+      sameWritten(before, point, decimals) &&
+      written(before.z, decimals) === written(z, decimals);
     if (!repeats) tidy.push(point);
   }
-  if (tidy.length < 2) throw new DrawingRefused(`a path at ${points[0]?.x}, ${points[0]?.y} shrinks to nothing at ${decimals} decimals`);
+  if (tidy.length < 2)
+    throw new DrawingRefused(`a path at ${points[0]?.x}, ${points[0]?.y} shrinks to nothing at ${decimals} decimals`);
   return tidy;
 }

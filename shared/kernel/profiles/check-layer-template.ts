@@ -11,11 +11,18 @@ export interface LayerExample {
 }
 
 export type CheckedTemplate =
-  | { readonly ok: true; readonly example: readonly LayerExample[] }
-  | { readonly ok: false; readonly takes: string };
+  { readonly ok: true; readonly example: readonly LayerExample[] } | { readonly ok: false; readonly takes: string };
 
 /** Depths in inches, for the example only. */
-const EXAMPLE_DEPTHS: Record<CutterRole, number> = { dado: 0.25, squaring: 0.77, opening: 0.8125, perimeter: 0.77, bead: 0.1038, quirk: 0.1038, corner: 0.1038 };
+const EXAMPLE_DEPTHS: Record<CutterRole, number> = {
+  dado: 0.25,
+  squaring: 0.77,
+  opening: 0.8125,
+  perimeter: 0.77,
+  bead: 0.1038,
+  quirk: 0.1038,
+  corner: 0.1038,
+};
 
 /**
  * Tries a layer template on every line set that a frame can have, beaded ones and labels too. A frame may still clash
@@ -23,11 +30,17 @@ const EXAMPLE_DEPTHS: Record<CutterRole, number> = { dado: 0.25, squaring: 0.77,
  */
 export function checkLayerTemplate(template: string): CheckedTemplate {
   const stray = strayTokens(template);
-  if (stray.length > 0) return { ok: false, takes: `{face}, {set}, {cutter} and {depth} in braces, not ${stray.join(', ')}` };
+  if (stray.length > 0)
+    return { ok: false, takes: `{face}, {set}, {cutter} and {depth} in braces, not ${stray.join(', ')}` };
   try {
     const example = DEFAULT_LINE_SETS.map(({ face, set, cutter }) => ({
       key: `${face}/${set}`,
-      name: layerName(template, { face, set, cutter: cutter ?? 'none', depth: depthDigits(cutter === null ? 0 : EXAMPLE_DEPTHS[cutter], 'in') }),
+      name: layerName(template, {
+        face,
+        set,
+        cutter: cutter ?? 'none',
+        depth: depthDigits(cutter === null ? 0 : EXAMPLE_DEPTHS[cutter], 'in'),
+      }),
     }));
     refuseClash(example);
     return { ok: true, example };

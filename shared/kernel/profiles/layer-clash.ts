@@ -6,7 +6,9 @@ export class LayerClash extends DrawingRefused {
   readonly keys: readonly [string, string];
 
   constructor(layer: string, keys: readonly [string, string]) {
-    super(`${keys[0]} and ${keys[1]} would both be on layer ${layer}; tell them apart with {face}, {set}, {cutter} or {depth}`);
+    super(
+      `${keys[0]} and ${keys[1]} would both be on layer ${layer}; tell them apart with {face}, {set}, {cutter} or {depth}`,
+    );
     this.name = 'LayerClash';
     this.layer = layer;
     this.keys = keys;

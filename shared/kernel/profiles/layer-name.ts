@@ -3,7 +3,8 @@ import type { Face } from '../line-sets/line-set.ts';
 import type { Unit } from '../units/unit.ts';
 
 /** {depth}: thousandths of an inch or hundredths of a millimetre, at least four digits. 0.25 in is "0250", 6.35 mm "0635". */
-export const depthDigits = (depth: number, unit: Unit): string => String(Math.round(depth * (unit === 'in' ? 1000 : 100))).padStart(4, '0');
+export const depthDigits = (depth: number, unit: Unit): string =>
+  String(Math.round(depth * (unit === 'in' ? 1000 : 100))).padStart(4, '0');
 
 /** What a layer template may hold in braces. */
 export const LAYER_TOKENS = ['face', 'set', 'cutter', 'depth'] as const;
@@ -51,10 +52,15 @@ export function strayTokens(template: string): string[] {
  */
 export function layerName(template: string, values: LayerTokenValues): string {
   const stray = strayTokens(template);
-  if (stray.length > 0) throw new DrawingRefused(`layer template "${template}" has ${stray.join(', ')}; takes {face}, {set}, {cutter} and {depth}`);
+  if (stray.length > 0)
+    throw new DrawingRefused(
+      `layer template "${template}" has ${stray.join(', ')}; takes {face}, {set}, {cutter} and {depth}`,
+    );
   const name = cleanLayerName(template.replace(/\{(\w+)\}/g, (_, token: LayerToken) => values[token]));
   if (name === '' || TAKEN_NAMES.includes(name)) {
-    throw new DrawingRefused(`layer template "${template}" gives the name "${name}"; takes one that is not empty, "0" or "DEFPOINTS"`);
+    throw new DrawingRefused(
+      `layer template "${template}" gives the name "${name}"; takes one that is not empty, "0" or "DEFPOINTS"`,
+    );
   }
   return name;
 }

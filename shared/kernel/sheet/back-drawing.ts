@@ -1,9 +1,10 @@
 import type { Extents } from '../contour/contour.ts';
+import { rectangle } from '../contour/make-contour.ts';
 import type { DrawingLayer } from '../drawing/drawing.ts';
 import { placeContour, placeExtents } from '../placing/place.ts';
 import { formatLength } from '../units/format-length.ts';
 import type { WorkedFrame } from '../worked-frame.ts';
-import { boardDimensions, boardItems, dimensionAt, lineSetItems, workExtents } from './setup-items.ts';
+import { boardDimensions, boardItems, dimensionAt, lineSetItems, squaredOnBack, workExtents } from './setup-items.ts';
 import type { DrawingItem, LabelSpot, PinDimension, SheetDrawing } from './sheet-drawing.ts';
 
 /** A dado as it lies in the back setup, with its tag. */
@@ -70,14 +71,13 @@ function dadoDimensions(dados: readonly PlacedDado[], worked: WorkedFrame): { ac
 /** The squared edges in the back setup: all four for "all-edges". */
 function squaredDimensions(worked: WorkedFrame): { across: PinDimension[]; up: PinDimension[] } {
   const { unit, setup } = worked.particulars;
-  const { squaredCorner: corner, squared, flip } = worked.blank;
+  const { squaredCorner: corner } = worked.blank;
+  const lines = squaredOnBack(worked.blank);
   const look = { colour: 'back', of: [], always: true } as const;
   const all = setup.squaring === 'all-edges';
-  const farX = flip === 'side-to-side' ? corner.x - squared.maxX : corner.x + squared.maxX;
-  const farY = flip === 'side-to-side' ? corner.y + squared.maxY : corner.y - squared.maxY;
   return {
-    across: [corner.x, ...(all ? [farX] : [])].map((x) => dimensionAt(x, 0, unit, look)),
-    up: [corner.y, ...(all ? [farY] : [])].map((y) => dimensionAt(y, 0, unit, look)),
+    across: (all ? [lines.minX, lines.maxX] : [corner.x]).map((x) => dimensionAt(x, 0, unit, look)),
+    up: (all ? [lines.minY, lines.maxY] : [corner.y]).map((y) => dimensionAt(y, 0, unit, look)),
   };
 }
 
@@ -90,11 +90,13 @@ export function backDrawing(worked: WorkedFrame, layers: ReadonlyMap<string, Dra
   const frame: DrawingItem[] = [
     { kind: 'contour', contour: placeContour(placement, worked.contours.perimeter), line: hidden, fill: 'board light', of: ['perimeter'], set: '' },
     ...worked.contours.openings.map(
-      (o): DrawingItem => ({ kind: 'contour', contour: placeContour(placement, o.contour), line: hidden, fill: 'board', of: [o.id], set: '' }),
+      (o): DrawingItem => ({ kind: 'contour', contour: placeContour(placement, o.contour), line: hidden, of: [o.id], set: '' }),
     ),
   ];
+  // Filled one by one: merged outlines may hold islands, which are board.
+  const filled = dados.map((d): DrawingItem => ({ kind: 'contour', contour: rectangle(d.extents), fill: 'back light', of: [d.id], set: '' }));
   const labels = dados.map(
-    (d): DrawingItem => ({ kind: 'label', texts: [`${d.tag} ${d.part}`, d.tag], spots: dadoSpots(d, dados, board), colour: 'back', of: [d.id] }),
+    (d): DrawingItem => ({ kind: 'label', texts: [`${d.tag} ${d.part}`, d.tag], spots: dadoSpots(d, dados, board), ground: 'board light', colour: 'back', of: [d.id] }),
   );
   const size = boardDimensions(board, unit);
   const squared = squaredDimensions(worked);
@@ -105,7 +107,7 @@ export function backDrawing(worked: WorkedFrame, layers: ReadonlyMap<string, Dra
       `${dados.length} dados and the squaring line, measured from the pins. The frame is shown dashed: it is cut from the front.`,
     unit,
     extents: workExtents(worked.back),
-    items: [...boardItems(board), ...frame, ...lineSetItems(worked.back, layers), ...labels],
+    items: [...boardItems(board), ...frame, ...filled, ...lineSetItems(worked.back, layers), ...labels],
     keepClear: dados.map((d) => d.extents),
     across: [...size.across, ...squared.across, ...measured.across],
     up: [...size.up, ...squared.up, ...measured.up],

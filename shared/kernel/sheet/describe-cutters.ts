@@ -7,9 +7,9 @@ import { CAUTIONS } from './cautions.ts';
 import type { CutterGroup } from './cutter-groups.ts';
 import { cutterPicture } from './cutter-picture.ts';
 import { findingLines, offcutLines } from './finding-lines.ts';
-import type { Proof } from './proof.ts';
+import { proofLines } from './proof-lines.ts';
 import { residueTable } from './residue-table.ts';
-import type { SheetBlock, SheetCell, SheetContext, SheetPage, SheetTable } from './sheet-model.ts';
+import type { SheetCell, SheetContext, SheetPage, SheetTable } from './sheet-model.ts';
 import { dayOf } from './title-block.ts';
 
 function cutterTable(groups: readonly CutterGroup[], unit: Unit): SheetTable {
@@ -36,20 +36,6 @@ function cutterTable(groups: readonly CutterGroup[], unit: Unit): SheetTable {
   return { columns, rows, whenEmpty: 'No cutters.' };
 }
 
-function proofBlock(proof: Proof | null): SheetBlock {
-  const title = 'Proof: the files read back and held against the intended lines';
-  if (proof === null) return { kind: 'list', id: 'proof', title, ordered: false, items: [{ word: 'Not proved.', text: 'No files have been written for this sheet.' }] };
-  const failed = proof.checks.filter((c) => !c.ok);
-  const passed = proof.checks.filter((c) => c.ok);
-  const items = [
-    proof.ok
-      ? { word: 'Passed.', text: `${passed.length} of ${proof.checks.length} checks hold: ${passed.map((c) => c.name).join('; ')}.` }
-      : { word: 'Failed.', colour: 'stop' as const, text: `${failed.length} of ${proof.checks.length} checks do not hold. Do not cut.` },
-    ...failed.map((c) => ({ word: c.name, colour: 'stop' as const, text: `wanted ${c.wanted}, got ${c.got}` })),
-  ];
-  return { kind: 'list', id: 'proof', title, ordered: false, items };
-}
-
 /** Page 4: cutters, box parts, what comes free, what the checks and the proof say, cautions, and who signs. */
 export function describeCutters(worked: WorkedFrame, context: SheetContext, groups: readonly CutterGroup[]): SheetPage {
   const { unit, thickness } = worked.particulars;
@@ -61,13 +47,13 @@ export function describeCutters(worked: WorkedFrame, context: SheetContext, grou
     title: 'Cutters, parts and sign-off',
     lead: `Board ${formatWithUnit(thickness, unit)} thick. Check every cutter in your hand against these numbers.`,
     blocks: [
-      { kind: 'pictures', id: 'cutter-pictures', title: 'Cutters', pictures: groups.map((g) => ({ caption: '', picture: cutterPicture(g, unit) })) },
+      { kind: 'pictures', id: 'cutter-pictures', title: '', pictures: groups.map((g) => ({ caption: '', picture: cutterPicture(g, unit) })) },
       { kind: 'table', id: 'cutters', title: '', table: cutterTable(groups, unit), after: [] },
       { kind: 'table', id: 'box-parts', title: 'Box parts that plug in', table: boxPartTable(worked), after: [] },
       { kind: 'table', id: 'residue', title: 'What is left in the corners of the openings', table: residueTable(worked), after: [] },
       { kind: 'list', id: 'offcuts', title: 'Offcuts that come free', ordered: false, items: offcuts.length > 0 ? offcuts : [{ text: 'None but the rim.' }] },
       { kind: 'list', id: 'findings', title: 'Findings', ordered: false, items: findings.length > 0 ? findings : [{ text: 'None.' }] },
-      proofBlock(context.proof),
+      { kind: 'list', id: 'proof', title: 'Proof: the files read back and held against the intended lines', ordered: false, items: proofLines(context.proof) },
       { kind: 'list', id: 'cautions', title: 'Cautions', ordered: false, items: [{ text: CAUTIONS.join(' ') }] },
       {
         kind: 'sign-off',

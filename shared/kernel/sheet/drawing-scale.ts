@@ -3,10 +3,11 @@ import { MM_PER_INCH, type Unit } from '../units/unit.ts';
 /**
  * Denominators of the scales drawings are made to, within one decade or (inches) one run.
  * ISO 5455 recommends 1, 2, 5, 10, 20, 50 … and lets intermediate ones stand where those would waste the sheet;
- * the ones between are, for millimetres, those that GB/T 14690 lists (from memory), and for inches those an inch
- * rule reads directly: 4, 8, 16, 32 (quarters to thirty-seconds) and 6, 12, 24 (feet in inches).
+ * the ones between are, for millimetres, those that GB/T 14690 lists (from memory) and 8, because from 6 to 10 a drawing
+ * would lose two fifths of its size at one step; for inches those an inch rule reads directly: 4, 8, 16, 32 (quarters to
+ * thirty-seconds) and 6, 12, 24 (feet in inches).
  */
-const IN_MILLIMETRES = [1, 1.5, 2, 2.5, 3, 4, 5, 6];
+const IN_MILLIMETRES = [1, 1.5, 2, 2.5, 3, 4, 5, 6, 8];
 const IN_INCHES = [1, 2, 3, 4, 5, 6, 8, 10, 12, 16, 20, 24, 32, 40, 48, 50, 64, 80];
 
 /** The scale's denominators in rising order, without end. */

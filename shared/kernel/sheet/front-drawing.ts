@@ -38,6 +38,8 @@ export function frontDrawing(worked: WorkedFrame, layers: ReadonlyMap<string, Dr
   const openings = placedOpenings(worked);
   const perimeter = placeContour(placement, worked.contours.perimeter);
   const around = placeExtents(placement, { minX: 0, minY: 0, maxX: worked.contours.width, maxY: worked.contours.height });
+  // A notch between feet is measured too; a traced perimeter may have any number of corners, so only its extents are.
+  const edges = worked.particulars.outline.kind === 'members' ? perimeter.vertices : rectangle(around).vertices;
   const of = (id: string) => ({ colour: 'front', of: [id] }) as const;
   const frameSize = { colour: 'ink', of: ['perimeter'], always: true } as const;
   const size = boardDimensions(board, unit);
@@ -71,14 +73,12 @@ export function frontDrawing(worked: WorkedFrame, layers: ReadonlyMap<string, Dr
     keepClear: [],
     across: [
       ...size.across,
-      dimensionAt(around.minX, around.minY, unit, frameSize),
-      dimensionAt(around.maxX, around.minY, unit, frameSize),
+      ...edges.map((v) => dimensionAt(v.x, v.y, unit, frameSize)),
       ...openings.flatMap(({ id, extents: e }) => [e.minX, e.maxX].map((x) => dimensionAt(x, e.minY, unit, of(id)))),
     ],
     up: [
       ...size.up,
-      dimensionAt(around.minY, around.minX, unit, frameSize),
-      dimensionAt(around.maxY, around.minX, unit, frameSize),
+      ...edges.map((v) => dimensionAt(v.y, v.x, unit, frameSize)),
       ...openings.flatMap(({ id, extents: e, arch }) => [e.minY, ...(arch > 0 ? [e.maxY - arch] : []), e.maxY].map((y) => dimensionAt(y, e.minX, unit, of(id)))),
     ],
   };

@@ -9,8 +9,8 @@ import { countCharacters } from './wrap-text.ts';
 export const DIMENSION_SIZE = 2.4;
 const PITCH = 3;
 /** From the board: clear of the pins, then the bend that leads a line to its figure, then the figure. */
-const PIN_CLEAR = 5;
-const BEND = 4;
+const PIN_CLEAR = 4.4;
+const BEND = 3.4;
 const GAP = 1;
 
 /** How far figures reach out from the board, in millimetres. */

@@ -1,6 +1,6 @@
 import type { Extents } from '../contour/contour.ts';
 import { CHARACTER_WIDTH, type PaperShape } from './paper-picture.ts';
-import { pointOnPaper, type OnPaper } from './paper-shapes.ts';
+import { box, pointOnPaper, type OnPaper } from './paper-shapes.ts';
 import type { DrawingItem, LabelSpot } from './sheet-drawing.ts';
 import { countCharacters } from './wrap-text.ts';
 
@@ -21,13 +21,13 @@ const overlaps = (a: Extents, b: Extents) => a.minX < b.maxX && b.minX < a.maxX 
 export function layOutLabels(labels: readonly Label[], keepClear: readonly Extents[], to: OnPaper): PaperShape[] {
   const taken: Extents[] = [];
   const clear = keepClear.map((e) => areaOnPaper(to, e));
-  const isFree = (box: Extents, onFeature: boolean) => !taken.some((t) => overlaps(t, box)) && (onFeature || !clear.some((c) => overlaps(c, box)));
+  const isFree = (place: Extents, onFeature: boolean) => !taken.some((t) => overlaps(t, place)) && (onFeature || !clear.some((c) => overlaps(c, place)));
   return labels.flatMap((label) => {
     for (const [lines, size, spot] of choices(label)) {
-      const box = boxIn(areaOnPaper(to, spot.area), lines, size, spot);
-      if (!box || !isFree(box, spot.onFeature === true)) continue;
-      taken.push(box);
-      return drawLabel(label, lines, size, spot, box);
+      const place = boxIn(areaOnPaper(to, spot.area), lines, size, spot);
+      if (!place || !isFree(place, spot.onFeature === true)) continue;
+      taken.push(place);
+      return [...groundUnder(label, spot, place), ...drawLabel(label, lines, size, spot, place)];
     }
     return [];
   });
@@ -56,11 +56,17 @@ function boxIn(area: Extents, lines: readonly string[], size: number, { turned, 
   return { minX: left, maxX: left + width, minY: top, maxY: top + height };
 }
 
-function drawLabel(label: Label, lines: readonly string[], size: number, spot: LabelSpot, box: Extents): PaperShape[] {
-  const middle = { x: (box.minX + box.maxX) / 2, y: (box.minY + box.maxY) / 2 };
+function groundUnder(label: Label, spot: LabelSpot, area: Extents): PaperShape[] {
+  if (!label.ground || spot.onFeature) return [];
+  const inset = 0.2;
+  return [box(area.minX + inset, area.minY + inset, area.maxX - area.minX - 2 * inset, area.maxY - area.minY - 2 * inset, { fill: label.ground })];
+}
+
+function drawLabel(label: Label, lines: readonly string[], size: number, spot: LabelSpot, area: Extents): PaperShape[] {
+  const middle = { x: (area.minX + area.maxX) / 2, y: (area.minY + area.maxY) / 2 };
   return lines.map((text, i) => {
     const off = (i - (lines.length - 1) / 2) * size * LINE + 0.365 * size;
-    const place = spot.turned ? { x: middle.x + off, y: middle.y } : { x: middle.x, y: middle.y + off };
-    return { kind: 'text', text, ...place, size, anchor: 'middle', turned: spot.turned ?? false, bold: label.bold ?? false, colour: label.colour, of: label.of };
+    const base = spot.turned ? { x: middle.x + off, y: middle.y } : { x: middle.x, y: middle.y + off };
+    return { kind: 'text', text, ...base, size, anchor: 'middle', turned: spot.turned ?? false, bold: label.bold ?? false, colour: label.colour, of: label.of };
   });
 }

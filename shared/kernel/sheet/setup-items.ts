@@ -3,6 +3,7 @@ import { joinExtents, contourExtents, pointExtents } from '../contour/contour-ex
 import { rectangle } from '../contour/make-contour.ts';
 import type { DrawingLayer } from '../drawing/drawing.ts';
 import { lineSetKey, type LineSet } from '../line-sets/line-set.ts';
+import type { BlankPlan } from '../placing/blank-plan.ts';
 import type { FaceWork } from '../worked-frame.ts';
 import { formatLength } from '../units/format-length.ts';
 import type { Unit } from '../units/unit.ts';
@@ -30,7 +31,7 @@ export function lineSetItems(work: FaceWork, layers: ReadonlyMap<string, Drawing
 
 function shapeItem(set: LineSet, shape: LineSet['shapes'][number]): DrawingItem {
   const contour = shape.kind === 'contour' ? shape.contour : { closed: false, vertices: shape.points.map(({ x, y }) => ({ x, y, bulge: 0 })) };
-  return { kind: 'contour', contour, line: lineLook(set.set), fill: set.set === 'DADO' ? 'back light' : undefined, of: shape.of, set: lineSetKey(set) };
+  return { kind: 'contour', contour, line: lineLook(set.set), of: shape.of, set: lineSetKey(set) };
 }
 
 /** Around the board and every line on it. */
@@ -38,6 +39,13 @@ export const workExtents = (work: FaceWork): Extents =>
   work.lineSets
     .flatMap((s) => s.shapes.map((shape) => (shape.kind === 'contour' ? contourExtents(shape.contour) : pointExtents(shape.points))))
     .reduce((a, b) => joinExtents(a, b), work.board);
+
+/** Where the squaring lines run in the back setup; edges that are not squared are the board's own. */
+export function squaredOnBack({ flip, squaredCorner: { x, y }, squared }: BlankPlan): Extents {
+  return flip === 'side-to-side'
+    ? { minX: x - squared.maxX, maxX: x, minY: y, maxY: y + squared.maxY }
+    : { minX: x, maxX: x + squared.maxX, minY: y - squared.maxY, maxY: y };
+}
 
 /** A place's dimension from the pins, with the length as people read it. */
 export const dimensionAt = (at: number, from: number, unit: Unit, rest: Pick<PinDimension, 'colour' | 'of' | 'always'>): PinDimension => ({

@@ -55,6 +55,8 @@ export type DrawingItem =
       readonly texts: readonly string[];
       /** Tried in order. */
       readonly spots: readonly LabelSpot[];
+      /** Laid under words that do not stand on their own feature, so that lines stop at them. */
+      readonly ground?: SheetColour;
       readonly colour: SheetColour;
       readonly bold?: boolean;
       readonly of: readonly FeatureId[];

@@ -38,7 +38,10 @@ function JobTitleBlock({ page, jobId }: { readonly page: JobPage | undefined; re
   const mayEdit = mayDo('edit-frames') && page !== undefined;
   const released = page?.frames.filter((row) => row.revision !== '').length ?? 0;
   return (
-    <TitleBlock action={mayEdit ? <NewFrame wide jobId={jobId} unit={shop.unit} /> : undefined} actionNote={mayEdit ? 'or import frame files' : undefined}>
+    <TitleBlock
+      action={mayEdit ? <NewFrame wide jobId={jobId} unit={shop.unit} /> : undefined}
+      actionNote={mayEdit ? 'or import frame files' : undefined}
+    >
       <TitleCell label="Shop">{shop.name}</TitleCell>
       <TitleCell label="Job" main>
         {page?.job.name ?? 'fetching'}
@@ -70,11 +73,11 @@ export function JobRoute() {
           <div className="grid gap-x-8 gap-y-6 xl:grid-cols-[minmax(0,1fr)_20rem] print:block">
             <div className="min-w-0">
               <JobFrames
-              frames={frames}
-              mayEdit={mayEdit}
-              drawing={(row) => <RowDrawing row={row} />}
-              newFrame={<NewFrame jobId={jobId} unit={shop.unit} />}
-            />
+                frames={frames}
+                mayEdit={mayEdit}
+                drawing={(row) => <RowDrawing row={row} />}
+                newFrame={<NewFrame jobId={jobId} unit={shop.unit} />}
+              />
             </div>
             <aside className="grid content-start gap-x-8 sm:grid-cols-2 xl:grid-cols-1 print:hidden">
               {mayEdit && (
@@ -84,7 +87,14 @@ export function JobRoute() {
               )}
               <Section heading="Layer sets of the job">
                 <Fetched query={profiles} what="the file profiles">
-                  {(list) => <JobDownload jobId={jobId} frames={frames} profiles={list} defaultProfileId={shop.defaultProfileId} />}
+                  {(list) => (
+                    <JobDownload
+                      jobId={jobId}
+                      frames={frames}
+                      profiles={list}
+                      defaultProfileId={shop.defaultProfileId}
+                    />
+                  )}
                 </Fetched>
               </Section>
             </aside>

@@ -18,7 +18,10 @@ export function JobsRoute() {
     <Sheet
       title="Jobs"
       titleBlock={
-        <TitleBlock action={mayEdit ? <NewJob wide /> : undefined} actionNote={mayEdit ? 'then put frames in it' : undefined}>
+        <TitleBlock
+          action={mayEdit ? <NewJob wide /> : undefined}
+          actionNote={mayEdit ? 'then put frames in it' : undefined}
+        >
           <TitleCell label="Shop">{shop.name}</TitleCell>
           <TitleCell label="Page" main>
             Jobs
@@ -26,7 +29,9 @@ export function JobsRoute() {
           <TitleCell label="Frames" detail={jobs && `${plural(sum(jobs.map((job) => job.frames)), 'frame')}`}>
             {jobs ? plural(jobs.length, 'job') : 'fetching'}
           </TitleCell>
-          <TitleCell label="Findings">{jobs ? `${plural(sum(jobs.map((job) => job.withStops)), 'frame')} with stops` : 'fetching'}</TitleCell>
+          <TitleCell label="Findings">
+            {jobs ? `${plural(sum(jobs.map((job) => job.withStops)), 'frame')} with stops` : 'fetching'}
+          </TitleCell>
         </TitleBlock>
       }
     >

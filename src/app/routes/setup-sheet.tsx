@@ -9,6 +9,7 @@ import { useFrame } from '../../features/frame-page/api/get-frame.ts';
 import { useProfiles } from '../../features/profiles/api/list-profiles.ts';
 import { useSignedIn } from '../../features/session/signed-in.tsx';
 import { useRevision } from '../../features/setup-sheet/api/get-revision.ts';
+import { sayProof } from '../../features/setup-sheet/say-proof.ts';
 import { SetupSheetPage } from '../../features/setup-sheet/setup-sheet-page.tsx';
 import { Fetched } from '../../ui/fetched.tsx';
 import { Sheet } from '../../ui/sheet.tsx';
@@ -26,20 +27,19 @@ function ShownSheet({ frame, revision, stored }: ShownSheetProps) {
   const { shop } = useSignedIn();
   const [search] = useSearchParams();
   const particulars = revision?.particulars ?? frame.particulars;
-  const model = useMemo(
-    () =>
-      describeSheet(workFrame(particulars), {
-        shopName: shop.name,
-        jobName: frame.jobName,
-        revision: revision?.letter ?? '',
-        author: revision?.author ?? frame.changedBy,
-        releasedAt: revision?.releasedAt ?? frame.changedAt,
-        note: revision?.note ?? '',
-        profile: stored.profile,
-        proof: null,
-      }),
-    [particulars, shop.name, frame, revision, stored],
-  );
+  const model = useMemo(() => {
+    const described = describeSheet(workFrame(particulars), {
+      shopName: shop.name,
+      jobName: frame.jobName,
+      revision: revision?.letter ?? '',
+      author: revision?.author ?? frame.changedBy,
+      releasedAt: revision?.releasedAt ?? frame.changedAt,
+      note: revision?.note ?? '',
+      profile: stored.profile,
+      proof: null,
+    });
+    return revision === null ? described : sayProof(described);
+  }, [particulars, shop.name, frame, revision, stored]);
   const newest = frame.revisions[0]?.letter ?? '';
   const at = `/api/frames/${encodeURIComponent(frame.id)}`;
   const of = revision === null ? 'draft' : `revisions/${encodeURIComponent(revision.letter)}`;
@@ -62,7 +62,15 @@ function ShownSheet({ frame, revision, stored }: ShownSheetProps) {
 }
 
 /** Fetches the revision, which the draft's sheet does without. */
-function RevisionSheet({ frame, letter, stored }: { readonly frame: Frame; readonly letter: string; readonly stored: StoredProfile }) {
+function RevisionSheet({
+  frame,
+  letter,
+  stored,
+}: {
+  readonly frame: Frame;
+  readonly letter: string;
+  readonly stored: StoredProfile;
+}) {
   const revision = useRevision(frame.id, letter);
   if (revision.data !== undefined) return <ShownSheet frame={frame} revision={revision.data} stored={stored} />;
   return (

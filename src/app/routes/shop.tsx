@@ -7,7 +7,8 @@ import { Sheet } from '../../ui/sheet.tsx';
 export function ShopRoute() {
   const { shop, mayDo } = useSignedIn();
   const profiles = useProfiles();
-  if (profiles.data !== undefined) return <ShopPage shop={shop} profiles={profiles.data} mayManage={mayDo('manage-shop')} />;
+  if (profiles.data !== undefined)
+    return <ShopPage shop={shop} profiles={profiles.data} mayManage={mayDo('manage-shop')} />;
   return (
     <Sheet title="Shop">
       <Fetched query={profiles} what="the settings">

@@ -111,6 +111,7 @@ export function FramePage({ frame, profiles, defaultProfileId, shopName, mayEdit
           <FrameTitleBlock
             frame={frame}
             shopName={shopName}
+            hasChanges={hasChanges}
             savingCell={<SavingCell autosave={autosave} copyKept={copyKept} onChoose={() => setLater(false)} />}
             action={action}
             actionNote={canRelease ? 'then download' : hasChanges ? '' : 'nothing has changed since'}
@@ -123,7 +124,7 @@ export function FramePage({ frame, profiles, defaultProfileId, shopName, mayEdit
             <FormBar>
               <FrameFileButtons />
             </FormBar>
-            <div className="min-h-0 flex-1 overflow-y-auto px-4 pt-4">
+            <div className="relative min-h-0 flex-1 overflow-y-auto px-4 pt-4 contain-content">
               {mayEdit && <EarlierCopyNotice frame={frame} editor={editor} onConflict={setEarlier} />}
               <ParticularsForm />
             </div>

@@ -1,11 +1,14 @@
 import type { ReactNode } from 'react';
 import type { Frame } from '#shared/contracts/frames.ts';
+import type { FindingLevel } from '#shared/kernel/checks/finding.ts';
 import { UNIT_WORDS, MM_PER_INCH, type Unit } from '#shared/kernel/units/unit.ts';
 import { Button } from '../../ui/button.tsx';
 import { plural } from '../../ui/plural.ts';
 import { TitleBlock, TitleCell } from '../../ui/title-block.tsx';
 import { useDesk, useEditor } from './model/desk.ts';
+import type { EditorState } from './model/frame-editor.ts';
 import { useStore } from './model/store.ts';
+import { useSettled } from './model/use-settled.ts';
 
 /** A CSS pixel is 1/96 in by definition (CSS Values and Units, absolute lengths); screens come near to it. */
 const PX_PER_INCH = 96;
@@ -16,11 +19,13 @@ function scaleWords(pxPerUnit: number, unit: Unit): string {
   return ratio >= 1 ? `≈ 1 : ${rounded(ratio)}` : `≈ ${rounded(1 / ratio)} : 1`;
 }
 
+function countWords({ worked }: EditorState): string {
+  const count = (level: FindingLevel) => worked.findings.filter((f) => f.level === level).length;
+  return `${plural(count('stop'), 'stop')}, ${plural(count('caution'), 'caution')}|${plural(count('note'), 'note')}`;
+}
+
 function FindingsCell() {
-  const words = useEditor((s) => {
-    const count = (level: string) => s.worked.findings.filter((f) => f.level === level).length;
-    return `${plural(count('stop'), 'stop')}, ${plural(count('caution'), 'caution')}|${plural(count('note'), 'note')}`;
-  });
+  const words = useSettled(countWords);
   const [first = '', second] = words.split('|');
   return (
     <TitleCell label="Findings" detail={second}>
@@ -43,6 +48,8 @@ function ScaleCell() {
 interface FrameTitleBlockProps {
   readonly frame: Frame;
   readonly shopName: string;
+  /** The draft differs from the newest revision. */
+  readonly hasChanges: boolean;
   readonly savingCell: ReactNode;
   readonly action: ReactNode;
   readonly actionNote: string;
@@ -50,7 +57,7 @@ interface FrameTitleBlockProps {
 }
 
 /** Along the bottom of the frame page: where one is, how it stands, and the main action. */
-export function FrameTitleBlock({ frame, shopName, savingCell, action, actionNote, onFiles }: FrameTitleBlockProps) {
+export function FrameTitleBlock({ frame, shopName, hasChanges, savingCell, action, actionNote, onFiles }: FrameTitleBlockProps) {
   const name = useEditor((s) => s.history.present.name);
   const [newest] = frame.revisions;
   return (
@@ -70,7 +77,7 @@ export function FrameTitleBlock({ frame, shopName, savingCell, action, actionNot
       >
         {newest === undefined ? (
           <strong>draft</strong>
-        ) : frame.draftChanged ? (
+        ) : hasChanges ? (
           <>
             <strong>draft</strong> after {newest.letter}
           </>

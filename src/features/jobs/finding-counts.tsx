@@ -5,7 +5,7 @@ import { plural } from '../../ui/plural.ts';
 export function FindingCounts({ counts: { stops, cautions, notes } }: { readonly counts: Counts }) {
   if (stops + cautions + notes === 0) return <>none</>;
   return (
-    <ul>
+    <ul className="whitespace-nowrap">
       {stops > 0 && <li className="font-bold text-stop">{plural(stops, 'stop')}</li>}
       {cautions > 0 && <li className="text-caution">{plural(cautions, 'caution')}</li>}
       {notes > 0 && <li className="text-pencil">{plural(notes, 'note')}</li>}

@@ -19,7 +19,12 @@ export function FrameDrawing({ particulars }: { readonly particulars: Particular
       <g transform="scale(1,-1)" strokeWidth="1" vectorEffect="non-scaling-stroke">
         <path d={svgPath(perimeter)} className="fill-board-light stroke-ink" vectorEffect="non-scaling-stroke" />
         {openings.map((opening) => (
-          <path key={opening.id} d={svgPath(opening.contour)} className="fill-paper stroke-front" vectorEffect="non-scaling-stroke" />
+          <path
+            key={opening.id}
+            d={svgPath(opening.contour)}
+            className="fill-paper stroke-front"
+            vectorEffect="non-scaling-stroke"
+          />
         ))}
       </g>
     </svg>

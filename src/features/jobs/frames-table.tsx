@@ -37,7 +37,10 @@ const COLUMNS: readonly Column<FrameRow>[] = [
     names: true,
     sortBy: (row) => row.name,
     cell: (row) => (
-      <Link to={`/frames/${row.id}`} className="inline-block py-1 font-bold underline decoration-rule underline-offset-4 wrap-anywhere hover:decoration-ink">
+      <Link
+        to={`/frames/${row.id}`}
+        className="inline-block min-w-36 py-1 font-bold underline decoration-rule underline-offset-4 wrap-anywhere hover:decoration-ink"
+      >
         {row.name}
       </Link>
     ),
@@ -48,9 +51,12 @@ const COLUMNS: readonly Column<FrameRow>[] = [
     align: 'right',
     sortBy: (row) => row.width * row.height * (row.unit === 'in' ? 25.4 ** 2 : 1),
     cell: (row) => (
-      <span className="whitespace-nowrap">
-        <Length value={row.width} unit={row.unit} /> × <Length value={row.height} unit={row.unit} /> {row.unit}
-      </span>
+      <>
+        <Length value={row.width} unit={row.unit} /> ×{' '}
+        <span className="whitespace-nowrap">
+          <Length value={row.height} unit={row.unit} /> {row.unit}
+        </span>
+      </>
     ),
   },
   { key: 'openings', head: 'Openings', align: 'right', sortBy: (row) => row.openings, cell: (row) => row.openings },
@@ -61,7 +67,12 @@ const COLUMNS: readonly Column<FrameRow>[] = [
 
 export function FramesTable({ frames, drawing, onCopy, onPutAway }: FramesTableProps) {
   const columns: Column<FrameRow>[] = [
-    { key: 'drawing', head: 'Front', hideHead: true, cell: (row) => <WhenSeen className="h-14 w-18">{drawing(row)}</WhenSeen> },
+    {
+      key: 'drawing',
+      head: 'Front',
+      hideHead: true,
+      cell: (row) => <WhenSeen className="h-14 w-18">{drawing(row)}</WhenSeen>,
+    },
     ...COLUMNS,
     {
       key: 'actions',
@@ -70,7 +81,11 @@ export function FramesTable({ frames, drawing, onCopy, onPutAway }: FramesTableP
       cell: (row) => (
         <div className="flex flex-col items-end gap-x-4 2xl:flex-row 2xl:justify-end">
           {row.revision !== '' && (
-            <ButtonLink kind="quiet" to={`/frames/${row.id}/sheet?revision=${row.revision}`} label={`Setup sheet of ${row.name}`}>
+            <ButtonLink
+              kind="quiet"
+              to={`/frames/${row.id}/sheet?revision=${row.revision}`}
+              label={`Setup sheet of ${row.name}`}
+            >
               Setup sheet
             </ButtonLink>
           )}

@@ -47,7 +47,8 @@ export function ImportFrameFiles({ jobId }: { readonly jobId: string }) {
         className={classNames('border border-dashed p-3', over ? 'border-front bg-board-light' : 'border-pencil')}
       >
         <p id={id} className="mb-2 text-12">
-          Drop frame files here (<span className="whitespace-nowrap">*.frame.json</span>), up to {LIMITS.frameFilesAtOnce} at once.
+          Drop frame files here (<span className="whitespace-nowrap">*.frame.json</span>), up to{' '}
+          {LIMITS.frameFilesAtOnce} at once.
         </p>
         <Button aria-describedby={id} onClick={() => input.current?.click()}>
           Choose files
@@ -80,7 +81,8 @@ export function ImportFrameFiles({ jobId }: { readonly jobId: string }) {
         )}
         {(refusal !== '' || take.isError) && (
           <Notice level={cancelled ? 'note' : 'stop'} word={cancelled ? 'Cancelled' : 'Not taken'} live>
-            {refusal || (cancelled ? 'Files that the server had read already may be in the list.' : sayError(take.error))}
+            {refusal ||
+              (cancelled ? 'Files that the server had read already may be in the list.' : sayError(take.error))}
           </Notice>
         )}
         {take.data && <ImportResults result={take.data} onClear={() => take.reset()} />}

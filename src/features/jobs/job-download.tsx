@@ -27,8 +27,14 @@ export function JobDownload({ jobId, frames, profiles, defaultProfileId }: JobDo
           ? 'No frame has a released revision yet. Open a frame and release one; then all of them come in one zip.'
           : `Newest revision of ${plural(released.length, 'frame')}, a folder each, with a cover sheet.`}
       </p>
-      {released.length > 0 && left > 0 && <p className="text-12">Not in it, because never released: {plural(left, 'frame')}.</p>}
-      {behind.length > 0 && <p className="text-12">Draft changes since the release are not in it: {behind.map((frame) => frame.name).join(', ')}.</p>}
+      {released.length > 0 && left > 0 && (
+        <p className="text-12">Not in it, because never released: {plural(left, 'frame')}.</p>
+      )}
+      {behind.length > 0 && (
+        <p className="text-12">
+          Draft changes since the release are not in it: {behind.map((frame) => frame.name).join(', ')}.
+        </p>
+      )}
       <Select
         label="File profile"
         layout="stack"

@@ -25,8 +25,10 @@ export function JobFrames({ frames, mayEdit, drawing, newFrame }: JobFramesProps
   const copy = useCopyFrame();
   const failed = change.error ?? copy.error;
 
-  const away = ({ id, name }: FrameRow) => change.mutate({ frameId: id, change: { removed: true } }, { onSuccess: () => setPutAway({ id, name }) });
-  const back = (frameId: string) => change.mutate({ frameId, change: { removed: false } }, { onSuccess: () => setPutAway(null) });
+  const away = ({ id, name }: FrameRow) =>
+    change.mutate({ frameId: id, change: { removed: true } }, { onSuccess: () => setPutAway({ id, name }) });
+  const back = (frameId: string) =>
+    change.mutate({ frameId, change: { removed: false } }, { onSuccess: () => setPutAway(null) });
   const copyRow = ({ id, name }: FrameRow) =>
     copy.mutate({
       frameId: id,
@@ -50,10 +52,16 @@ export function JobFrames({ frames, mayEdit, drawing, newFrame }: JobFramesProps
         </UndoNotice>
       )}
       {frames.length > 0 ? (
-        <FramesTable frames={frames} drawing={drawing} onCopy={mayEdit ? copyRow : undefined} onPutAway={mayEdit ? away : undefined} />
+        <FramesTable
+          frames={frames}
+          drawing={drawing}
+          onCopy={mayEdit ? copyRow : undefined}
+          onPutAway={mayEdit ? away : undefined}
+        />
       ) : mayEdit ? (
         <Empty title="No frames yet" actions={newFrame}>
-          A new frame begins as a two-opening base frame that can be cut as it stands; change its size and openings on its page. Frame files can be imported too.
+          A new frame begins as a two-opening base frame that can be cut as it stands; change its size and openings on
+          its page. Frame files can be imported too.
         </Empty>
       ) : (
         <Empty title="No frames yet">A designer or the owner of the shop puts them in.</Empty>

@@ -19,7 +19,8 @@ interface JobsPageProps {
 export function JobsPage({ jobs, mayEdit, unit }: JobsPageProps) {
   const [putAway, setPutAway] = useState<{ id: string; name: string } | null>(null);
   const change = useChangeJob();
-  const bringBack = (jobId: string) => change.mutate({ jobId, change: { removed: false } }, { onSuccess: () => setPutAway(null) });
+  const bringBack = (jobId: string) =>
+    change.mutate({ jobId, change: { removed: false } }, { onSuccess: () => setPutAway(null) });
   const here = jobs.filter((job) => !job.removed);
   return (
     <>
@@ -39,11 +40,19 @@ export function JobsPage({ jobs, mayEdit, unit }: JobsPageProps) {
         <JobsTable
           jobs={here}
           onPutAway={
-            mayEdit ? (job) => change.mutate({ jobId: job.id, change: { removed: true } }, { onSuccess: () => setPutAway({ id: job.id, name: job.name }) }) : undefined
+            mayEdit
+              ? (job) =>
+                  change.mutate(
+                    { jobId: job.id, change: { removed: true } },
+                    { onSuccess: () => setPutAway({ id: job.id, name: job.name }) },
+                  )
+              : undefined
           }
         />
       )}
-      {mayEdit && <PutAwayJobs jobs={jobs.filter((job) => job.removed && job.id !== putAway?.id)} onBringBack={bringBack} />}
+      {mayEdit && (
+        <PutAwayJobs jobs={jobs.filter((job) => job.removed && job.id !== putAway?.id)} onBringBack={bringBack} />
+      )}
     </>
   );
 }

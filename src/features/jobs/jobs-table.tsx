@@ -21,18 +21,32 @@ export function JobsTable({ jobs, onPutAway }: JobsTableProps) {
       names: true,
       sortBy: (job) => job.name,
       cell: (job) => (
-        <Link to={`/jobs/${job.id}`} className="inline-block py-1 font-bold underline decoration-rule underline-offset-4 wrap-anywhere hover:decoration-ink">
+        <Link
+          to={`/jobs/${job.id}`}
+          className="inline-block min-w-36 py-1 font-bold underline decoration-rule underline-offset-4 wrap-anywhere hover:decoration-ink"
+        >
           {job.name}
         </Link>
       ),
     },
     { key: 'frames', head: 'Frames', align: 'right', sortBy: (job) => job.frames, cell: (job) => job.frames },
-    { key: 'released', head: 'Released', align: 'right', sortBy: (job) => job.released, cell: (job) => `${job.released} of ${job.frames}` },
+    {
+      key: 'released',
+      head: 'Released',
+      align: 'right',
+      sortBy: (job) => job.released,
+      cell: (job) => `${job.released} of ${job.frames}`,
+    },
     {
       key: 'stops',
       head: 'Findings',
       sortBy: (job) => job.withStops,
-      cell: (job) => (job.withStops > 0 ? <span className="text-stop">{`${plural(job.withStops, 'frame')} with stops`}</span> : 'no stops'),
+      cell: (job) =>
+        job.withStops > 0 ? (
+          <span className="text-stop">{`${plural(job.withStops, 'frame')} with stops`}</span>
+        ) : (
+          'no stops'
+        ),
     },
     { key: 'changed', head: 'Changed', sortBy: (job) => job.changedAt, cell: (job) => <When iso={job.changedAt} /> },
   ];

@@ -29,7 +29,8 @@ export function NameDialog(props: NameDialogProps) {
   const [name, setName] = useState(given);
   const [empty, setEmpty] = useState(false);
   const fields = fieldMessagesOf(error);
-  const wrong = empty && name.trim() === '' ? 'Got nothing; takes a name.' : (fields.name ?? fields['particulars.name']);
+  const wrong =
+    empty && name.trim() === '' ? 'Got nothing; takes a name.' : (fields.name ?? fields['particulars.name']);
 
   function submit(event: FormEvent) {
     event.preventDefault();
@@ -45,7 +46,15 @@ export function NameDialog(props: NameDialogProps) {
             {sayError(error)}
           </Notice>
         )}
-        <TextField label="Name" value={name} onValue={setName} error={wrong} hint={hint} maxLength={LIMITS.nameLength} autoComplete="off" />
+        <TextField
+          label="Name"
+          value={name}
+          onValue={setName}
+          error={wrong}
+          hint={hint}
+          maxLength={LIMITS.nameLength}
+          autoComplete="off"
+        />
         {children}
         <div className="mt-4 flex gap-3">
           <Button kind="main" type="submit" busy={busy ? working : ''}>

@@ -22,7 +22,10 @@ export function NewFrame({ jobId, unit: shopUnit, wide = false }: NewFrameProps)
   const create = useCreateFrame();
   const navigate = useNavigate();
   const make = (name: string) =>
-    create.mutate({ jobId, ...asFrameRequest(newFrame(unit, name)) }, { onSuccess: (frame) => void navigate(`/frames/${frame.id}`) });
+    create.mutate(
+      { jobId, ...asFrameRequest(newFrame(unit, name)) },
+      { onSuccess: (frame) => void navigate(`/frames/${frame.id}`) },
+    );
   return (
     <>
       <Button kind="main" wide={wide} onClick={() => setOpen(true)}>

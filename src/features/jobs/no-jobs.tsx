@@ -30,13 +30,17 @@ export function NoJobs({ mayEdit, unit }: NoJobsProps) {
         actions={
           <>
             <NewJob />
-            <Button busy={sample.isPending ? 'Creating the sample' : ''} onClick={() => sample.mutate(unit, { onSuccess: (job) => void navigate(`/jobs/${job.id}`) })}>
+            <Button
+              busy={sample.isPending ? 'Creating the sample' : ''}
+              onClick={() => sample.mutate(unit, { onSuccess: (job) => void navigate(`/jobs/${job.id}`) })}
+            >
               Begin with a sample
             </Button>
           </>
         }
       >
-        A job is one customer's work: a list of face frames. Create one and put frames in it, or begin with a sample job that holds a two-door base frame.
+        A job is one customer's work: a list of face frames. Create one and put frames in it, or begin with a sample job
+        that holds a two-door base frame.
       </Empty>
     </>
   );

@@ -20,7 +20,11 @@ export function DeleteProfileDialog({ stored: { id, profile }, onDeleted, onClos
       onClose={onClose}
       actions={
         <>
-          <Button kind="main" busy={remove.isPending ? 'Deleting' : ''} onClick={() => remove.mutate(id, { onSuccess: onDeleted })}>
+          <Button
+            kind="main"
+            busy={remove.isPending ? 'Deleting' : ''}
+            onClick={() => remove.mutate(id, { onSuccess: onDeleted })}
+          >
             {`Delete ${profile.name}`}
           </Button>
           <Button onClick={onClose}>Keep it</Button>
@@ -33,8 +37,8 @@ export function DeleteProfileDialog({ stored: { id, profile }, onDeleted, onClos
         </Notice>
       )}
       <p>
-        Delete the file profile <strong className="font-bold wrap-anywhere">{profile.name}</strong>? It cannot be undone. Released revisions stay; they
-        download in another profile.
+        Delete the file profile <strong className="font-bold wrap-anywhere">{profile.name}</strong>? It cannot be
+        undone. Released revisions stay; they download in another profile.
       </p>
     </Dialog>
   );

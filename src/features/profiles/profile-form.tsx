@@ -38,6 +38,17 @@ export function ProfileForm({ profile, onProfile, wrong }: ProfileFormProps) {
           enterMoves
         />
       </Section>
+      <Section heading="Layer names">
+        <TextField
+          label="Template"
+          value={profile.layerTemplate}
+          onValue={(value) => set('layerTemplate', value)}
+          error={templateProblem(profile.layerTemplate, wrong.layerTemplate)}
+          hint="Takes {face}, {set}, {cutter}, {depth} (thousandths) and words of your own. Letters become capitals; at most 31 are kept."
+          autoComplete="off"
+          enterMoves
+        />
+      </Section>
       <Section heading="File">
         <Choice
           label="DXF flavour"
@@ -46,14 +57,24 @@ export function ProfileForm({ profile, onProfile, wrong }: ProfileFormProps) {
           onValue={(value) => set('flavour', value)}
           hint="R12 for programs that read nothing newer."
         />
-        <Choice label="Unit" options={optionsOf(UNIT_WORDS)} value={profile.unit} onValue={(value) => set('unit', value)} />
+        <Choice
+          label="Unit"
+          options={optionsOf(UNIT_WORDS)}
+          value={profile.unit}
+          onValue={(value) => set('unit', value)}
+        />
         <Choice
           label="Digits behind the point"
           options={optionsOf({ '4': '4', '5': '5', '6': '6' })}
           value={String(profile.decimals) as keyof typeof DECIMALS}
           onValue={(value) => set('decimals', DECIMALS[value])}
         />
-        <Choice label="Where 0, 0 lies" options={optionsOf(ORIGIN_WORDS)} value={profile.origin} onValue={(value) => set('origin', value)} />
+        <Choice
+          label="Where 0, 0 lies"
+          options={optionsOf(ORIGIN_WORDS)}
+          value={profile.origin}
+          onValue={(value) => set('origin', value)}
+        />
       </Section>
       <Section heading="Lines">
         <Choice
@@ -68,17 +89,6 @@ export function ProfileForm({ profile, onProfile, wrong }: ProfileFormProps) {
           checked={profile.labels}
           onChecked={(checked) => set('labels', checked)}
           hint="Opening labels and part names on a layer of their own."
-        />
-      </Section>
-      <Section heading="Layer names">
-        <TextField
-          label="Template"
-          value={profile.layerTemplate}
-          onValue={(value) => set('layerTemplate', value)}
-          error={templateProblem(profile.layerTemplate, wrong.layerTemplate)}
-          hint="Takes {face}, {set}, {cutter}, {depth} (thousandths) and words of your own. Letters become capitals; at most 31 are kept."
-          autoComplete="off"
-          enterMoves
         />
       </Section>
     </div>

@@ -40,7 +40,11 @@ export function ProfileList(props: ProfileListProps) {
         <Entries {...props} profiles={props.profiles.filter(({ builtIn }) => builtIn)} />
       </Section>
       <Section heading="Your own">
-        {own.length > 0 ? <Entries {...props} profiles={own} /> : <p className="text-pencil">None yet. Copy one and change the copy.</p>}
+        {own.length > 0 ? (
+          <Entries {...props} profiles={own} />
+        ) : (
+          <p className="text-pencil">None yet. Copy one and change the copy.</p>
+        )}
       </Section>
     </nav>
   );

@@ -47,7 +47,13 @@ export function ProfilePage({ stored, mayEdit, shopName, list }: ProfilePageProp
         <TitleBlock
           action={
             editable ? (
-              <Button kind="main" wide disabled={!editor.unsaved} busy={editor.saving ? 'Saving' : ''} onClick={editor.save}>
+              <Button
+                kind="main"
+                wide
+                disabled={!editor.unsaved}
+                busy={editor.saving ? 'Saving' : ''}
+                onClick={editor.save}
+              >
                 Save the file profile
               </Button>
             ) : mayEdit ? (
@@ -56,7 +62,13 @@ export function ProfilePage({ stored, mayEdit, shopName, list }: ProfilePageProp
               </Button>
             ) : undefined
           }
-          actionNote={editable ? 'holds for downloads from now on' : mayEdit ? 'then change the copy' : 'Programmers and the owner change file profiles'}
+          actionNote={
+            editable
+              ? 'holds for downloads from now on'
+              : mayEdit
+                ? 'then change the copy'
+                : 'Programmers and the owner change file profiles'
+          }
         >
           <TitleCell label="Shop">{shopName}</TitleCell>
           <TitleCell label="File profile" main>
@@ -102,7 +114,11 @@ export function ProfilePage({ stored, mayEdit, shopName, list }: ProfilePageProp
         </div>
       </div>
       {deleting && (
-        <DeleteProfileDialog stored={stored} onClose={() => setDeleting(false)} onDeleted={() => void navigate('/profiles', { replace: true })} />
+        <DeleteProfileDialog
+          stored={stored}
+          onClose={() => setDeleting(false)}
+          onDeleted={() => void navigate('/profiles', { replace: true })}
+        />
       )}
       <LeaveUnsavedDialog name={stored.profile.name} unsaved={editable && editor.unsaved} />
     </Sheet>

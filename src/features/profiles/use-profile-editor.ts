@@ -6,7 +6,8 @@ import { checkForm } from '../../lib/check-form.ts';
 import { fieldMessagesOf, type FieldMessages } from '../../lib/field-messages.ts';
 import { useSaveProfile } from './api/save-profile.ts';
 
-const same = (a: FileProfile, b: FileProfile): boolean => (Object.keys(a) as (keyof FileProfile)[]).every((key) => a[key] === b[key]);
+const same = (a: FileProfile, b: FileProfile): boolean =>
+  (Object.keys(a) as (keyof FileProfile)[]).every((key) => a[key] === b[key]);
 
 /** One profile being edited: what is entered, whether it differs from what is saved, and saving it. Key the caller by the profile's id. */
 export function useProfileEditor(stored: StoredProfile) {

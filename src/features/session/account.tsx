@@ -9,8 +9,8 @@ export function Account({ user }: Pick<SignedIn, 'user'>) {
   const navigate = useNavigate();
   const signOut = useSignOut(() => void navigate('/sign-in'));
   return (
-    <div className="flex min-w-0 items-center gap-4 text-12">
-      <span className="min-w-0 text-pencil wrap-anywhere">
+    <div className="flex shrink-0 items-center gap-4 text-12">
+      <span title={`${user.name}, ${user.role}`} className="max-w-60 truncate text-pencil">
         {user.name}, {user.role}
       </span>
       <Button kind="quiet" busy={signOut.isPending ? 'Signing out' : ''} onClick={() => signOut.mutate()}>

@@ -29,7 +29,12 @@ export function DemoEntry() {
         Open the demo shop
       </Button>
       <div className="mt-3 text-12 text-pencil">
-        <Select label="as" options={role.options.map((value) => ({ value, label: ROLE_WORDS[value] }))} value={as} onValue={setAs} />
+        <Select
+          label="as"
+          options={role.options.map((value) => ({ value, label: ROLE_WORDS[value] }))}
+          value={as}
+          onValue={setAs}
+        />
       </div>
     </div>
   );

@@ -36,8 +36,24 @@ export function SignInForm({ email: knownEmail = '' }: SignInFormProps) {
           {sayError(signIn.error)}
         </Notice>
       )}
-      <TextField label="E-mail" type="email" name="email" autoComplete="username" value={email} onValue={setEmail} error={wrong.email} />
-      <TextField label="Password" type="password" name="password" autoComplete="current-password" value={password} onValue={setPassword} error={wrong.password} />
+      <TextField
+        label="E-mail"
+        type="email"
+        name="email"
+        autoComplete="username"
+        value={email}
+        onValue={setEmail}
+        error={wrong.email}
+      />
+      <TextField
+        label="Password"
+        type="password"
+        name="password"
+        autoComplete="current-password"
+        value={password}
+        onValue={setPassword}
+        error={wrong.password}
+      />
       <Button kind="main" type="submit" wide busy={signIn.isPending ? 'Signing in' : ''}>
         Sign in
       </Button>

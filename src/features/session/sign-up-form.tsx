@@ -36,9 +36,32 @@ export function SignUpForm() {
           {sayError(signUp.error)}
         </Notice>
       )}
-      <TextField label="Name of the shop" name="organization" autoComplete="organization" value={entry.shopName} onValue={set('shopName')} error={wrong.shopName} />
-      <TextField label="Your name" name="name" autoComplete="name" value={entry.name} onValue={set('name')} error={wrong.name} hint="Stands on setup sheets that you release." />
-      <TextField label="E-mail" type="email" name="email" autoComplete="username" value={entry.email} onValue={set('email')} error={wrong.email} />
+      <TextField
+        label="Name of the shop"
+        name="organization"
+        autoComplete="organization"
+        value={entry.shopName}
+        onValue={set('shopName')}
+        error={wrong.shopName}
+      />
+      <TextField
+        label="Your name"
+        name="name"
+        autoComplete="name"
+        value={entry.name}
+        onValue={set('name')}
+        error={wrong.name}
+        hint="Stands on setup sheets that you release."
+      />
+      <TextField
+        label="E-mail"
+        type="email"
+        name="email"
+        autoComplete="username"
+        value={entry.email}
+        onValue={set('email')}
+        error={wrong.email}
+      />
       <TextField
         label="Password"
         type="password"

@@ -1,12 +1,13 @@
 import { useState } from 'react';
 import { Button } from '../../ui/button.tsx';
+import { TitleCell } from '../../ui/title-block.tsx';
 import { useWakeLock, type WakeState } from './use-wake-lock.ts';
 
 const WORDS: Record<WakeState, string> = {
-  asleep: 'Screen may sleep',
-  awake: 'Screen stays awake',
-  unavailable: 'This browser lets the screen sleep',
-  refused: 'The device would not keep the screen awake',
+  asleep: 'may sleep',
+  awake: 'stays awake',
+  unavailable: 'may sleep in this browser',
+  refused: 'sleeps: the device insists',
 };
 
 /** Says whether the screen stays on, and switches it. */
@@ -14,15 +15,17 @@ export function KeepAwake() {
   const [wanted, setWanted] = useState(true);
   const state = useWakeLock(wanted);
   return (
-    <div className="flex flex-wrap items-center gap-x-4 text-12 print:hidden">
-      <span role="status" className="text-pencil">
-        {WORDS[state]}
-      </span>
-      {state !== 'unavailable' && (
-        <Button kind="quiet" onClick={() => setWanted(!wanted)}>
-          {wanted ? 'Let it sleep' : 'Keep it awake'}
-        </Button>
-      )}
-    </div>
+    <TitleCell
+      label="Screen"
+      detail={
+        state !== 'unavailable' && (
+          <Button kind="quiet" onClick={() => setWanted(!wanted)}>
+            {wanted ? 'Let it sleep' : 'Keep it awake'}
+          </Button>
+        )
+      }
+    >
+      <span role="status">{WORDS[state]}</span>
+    </TitleCell>
   );
 }

@@ -34,7 +34,11 @@ export function SetupSheetPage({ model, frame, job, newerRevision, pdf, shown, a
     <Sheet
       title={`Setup sheet of ${frame.name}`}
       showTitle={false}
-      crumbs={[{ label: job.name, to: `/jobs/${job.id}` }, { label: frame.name, to: `/frames/${frame.id}` }, { label: 'Setup sheet' }]}
+      crumbs={[
+        { label: job.name, to: `/jobs/${job.id}` },
+        { label: frame.name, to: `/frames/${frame.id}` },
+        { label: 'Setup sheet' },
+      ]}
       titleBlock={
         <TitleBlock
           action={
@@ -51,12 +55,10 @@ export function SetupSheetPage({ model, frame, job, newerRevision, pdf, shown, a
           <TitleCell label="Revision" detail={titleBlock.dateOfIssue}>
             <span className="font-bold">{titleBlock.revision}</span>
           </TitleCell>
+          <KeepAwake />
         </TitleBlock>
       }
     >
-      <div className="mb-2 flex justify-end">
-        <KeepAwake />
-      </div>
       {model.draft && (
         <Notice level="stop" word="Draft, not for cutting">
           This has not been released. Release a revision on the frame's page, then cut by that.
@@ -66,7 +68,11 @@ export function SetupSheetPage({ model, frame, job, newerRevision, pdf, shown, a
         <Notice
           level="caution"
           word="Not the newest"
-          action={<ButtonLink to={`/frames/${frame.id}/sheet?revision=${encodeURIComponent(newerRevision)}`}>{`Open revision ${newerRevision}`}</ButtonLink>}
+          action={
+            <ButtonLink
+              to={`/frames/${frame.id}/sheet?revision=${encodeURIComponent(newerRevision)}`}
+            >{`Open revision ${newerRevision}`}</ButtonLink>
+          }
         >
           {`Revision ${newerRevision} has been released since.`}
         </Notice>

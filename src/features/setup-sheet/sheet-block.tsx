@@ -7,16 +7,31 @@ import type { SheetBlock as Block, SheetLine, SignOffBox } from '#shared/kernel/
 import { SheetSvg } from './sheet-svg.tsx';
 import { SheetTable } from './sheet-table.tsx';
 
-/** CSS pixels for a millimetre of the drawing's paper: its 2.4 mm figures then stand 17 px high, to be read at arm's length. */
-const PIXELS_PER_MM = 7;
-/** A drawing higher than this would not be seen whole on a tablet. */
-const MOST_HEIGHT_MM = 100;
-const LEAST_WIDTH_MM = 70;
+/** CSS pixels for a millimetre of the sheet's paper: its smallest figures then stand 15 px high, to be read at arm's length. */
+const PIXELS_PER_MM = 6;
+/** Share of the window's height that a drawing may take, so that it is seen whole above the title block. */
+const SHARE_OF_HEIGHT = 0.75;
+/** Room in millimetres of paper that any drawing needs with its figures. */
+const LEAST_ROOM = { width: 70, height: 60 };
 
 function Drawing({ drawing, width }: { readonly drawing: SheetDrawing; readonly width: number }) {
-  const room = Math.max(LEAST_WIDTH_MM, Math.round(width / PIXELS_PER_MM));
-  const svg = useMemo(() => sheetDrawingSvg(drawing, { width: room, height: MOST_HEIGHT_MM }), [drawing, room]);
+  const across = Math.max(LEAST_ROOM.width, Math.round(width / PIXELS_PER_MM));
+  const up = Math.max(LEAST_ROOM.height, Math.round((window.innerHeight * SHARE_OF_HEIGHT) / PIXELS_PER_MM));
+  const svg = useMemo(() => sheetDrawingSvg(drawing, { width: across, height: up }), [drawing, across, up]);
   return <SheetSvg svg={svg} />;
+}
+
+function Pictures({ pictures }: Pick<Extract<Block, { kind: 'pictures' }>, 'pictures'>) {
+  return (
+    <div className="flex flex-wrap gap-x-8 gap-y-6">
+      {pictures.map(({ caption, picture }, i) => (
+        <figure key={i} className="max-w-full" style={{ width: picture.width * PIXELS_PER_MM }}>
+          <SheetSvg svg={pictureSvg(picture)} />
+          {caption !== '' && <figcaption className="mt-1">{caption}</figcaption>}
+        </figure>
+      ))}
+    </div>
+  );
 }
 
 function Line({ line: { text, word, colour } }: { readonly line: SheetLine }) {
@@ -24,7 +39,8 @@ function Line({ line: { text, word, colour } }: { readonly line: SheetLine }) {
     <>
       {word !== undefined && (
         <strong className="font-bold" style={{ color: colour && SHEET_COLOURS[colour] }}>
-          {word}:{' '}
+          {word}
+          {/[.:]$/.test(word) ? ' ' : ': '}
         </strong>
       )}
       {text}
@@ -57,22 +73,13 @@ function Content({ block, width }: SheetBlockProps) {
     case 'drawing':
       return <Drawing drawing={block.drawing} width={width} />;
     case 'pictures':
-      return (
-        <div className="grid gap-6 md:grid-cols-2">
-          {block.pictures.map(({ caption, picture }) => (
-            <figure key={caption}>
-              <SheetSvg svg={pictureSvg(picture)} className="max-w-xl" />
-              <figcaption className="mt-1">{caption}</figcaption>
-            </figure>
-          ))}
-        </div>
-      );
+      return <Pictures pictures={block.pictures} />;
     case 'table':
       return (
         <>
           <SheetTable title={block.title} table={block.table} width={width} />
-          {block.after.map((text) => (
-            <p key={text} className="mt-2">
+          {block.after.map((text, i) => (
+            <p key={i} className="mt-2">
               {text}
             </p>
           ))}
@@ -95,13 +102,16 @@ function Content({ block, width }: SheetBlockProps) {
   }
 }
 
-/** One part of a page of the setup sheet, in large type. */
+/** One part of a page of the setup sheet, in large type. Drawings under the page's own heading have no title. */
 export function SheetBlock({ block, width }: SheetBlockProps) {
+  const id = `block-${block.id}`;
   return (
-    <section aria-labelledby={`block-${block.id}`} className="mb-8">
-      <h3 id={`block-${block.id}`} className="mb-2 border-b border-rule pb-1 text-16 font-bold">
-        {block.title}
-      </h3>
+    <section aria-labelledby={block.title === '' ? undefined : id} className="mb-8">
+      {block.title !== '' && (
+        <h3 id={id} className="mb-2 border-b border-rule pb-1 text-16 font-bold">
+          {block.title}
+        </h3>
+      )}
       <Content block={block} width={width} />
     </section>
   );

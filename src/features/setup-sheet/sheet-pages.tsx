@@ -9,6 +9,14 @@ import { useWidth } from './use-width.ts';
 /** A tablet on its side, for the moment before the page is laid out. */
 const WIDTH_BEFORE = 960;
 
+/** Short, so that each stays on one line of a tablet. */
+const STEP_WORDS: Record<SheetPage['id'], string> = {
+  back: 'Back',
+  turn: 'Turn over',
+  front: 'Front',
+  cutters: 'Cutters',
+};
+
 interface SheetPagesProps {
   readonly model: SheetModel;
   readonly shown: SheetPage['id'];
@@ -19,7 +27,10 @@ interface SheetPagesProps {
 /** Links big enough for gloves. */
 function Steps({ model, shown, addressOf }: SheetPagesProps) {
   return (
-    <nav aria-label="Pages of the setup sheet" className="mb-4 grid grid-cols-2 border border-ink sm:grid-cols-4 print:hidden">
+    <nav
+      aria-label="Pages of the setup sheet"
+      className="mb-4 grid grid-cols-2 border border-ink sm:grid-cols-4 print:hidden"
+    >
       {model.pages.map((page, i) => (
         <Link
           key={page.id}
@@ -27,7 +38,7 @@ function Steps({ model, shown, addressOf }: SheetPagesProps) {
           aria-current={page.id === shown ? 'step' : undefined}
           className="flex min-h-12 items-center justify-center border-ink px-2 py-1 text-center text-13 font-bold outline-offset-[-4px] aria-[current]:bg-ink aria-[current]:text-paper max-sm:even:border-l max-sm:nth-[n+3]:border-t sm:not-first:border-l"
         >
-          {i + 1} {page.title}
+          {i + 1} {STEP_WORDS[page.id]}
         </Link>
       ))}
     </nav>
@@ -59,7 +70,10 @@ export function SheetPages(props: SheetPagesProps) {
       ))}
       <div className="print:hidden">
         {next && (
-          <Link to={addressOf(next.id)} className="mb-6 flex min-h-14 items-center justify-center border border-ink bg-ink px-4 py-2 text-center font-bold text-paper">
+          <Link
+            to={addressOf(next.id)}
+            className="mb-6 flex min-h-14 items-center justify-center border border-ink bg-ink px-4 py-2 text-center font-bold text-paper"
+          >
             Next: {next.title}
           </Link>
         )}

@@ -1,4 +1,6 @@
 /** An SVG made by the kernel, which escapes every text in it; scales to the width it is given. */
 export function SheetSvg({ svg, className }: { readonly svg: string; readonly className?: string }) {
-  return <div className={`[&>svg]:h-auto [&>svg]:w-full ${className ?? ''}`} dangerouslySetInnerHTML={{ __html: svg }} />;
+  return (
+    <div className={`[&>svg]:h-auto [&>svg]:w-full ${className ?? ''}`} dangerouslySetInnerHTML={{ __html: svg }} />
+  );
 }

@@ -55,7 +55,14 @@ export function ShopPage({ shop, profiles, mayManage }: ShopPageProps) {
         <TitleBlock
           action={
             mayManage ? (
-              <Button kind="main" wide type="submit" form={FORM} disabled={!unsaved} busy={change.isPending ? 'Saving' : ''}>
+              <Button
+                kind="main"
+                wide
+                type="submit"
+                form={FORM}
+                disabled={!unsaved}
+                busy={change.isPending ? 'Saving' : ''}
+              >
                 Save the settings
               </Button>
             ) : undefined

@@ -31,7 +31,8 @@ const numbersOf = (e: DrawingEntity): number[][] => {
 };
 
 /** Entities in the order of the layer table, which is how they are written. */
-const inOrder = ({ drawing }: WrittenFile) => drawing.layers.flatMap(({ name }) => drawing.entities.filter((e) => e.layer === name));
+const inOrder = ({ drawing }: WrittenFile) =>
+  drawing.layers.flatMap(({ name }) => drawing.entities.filter((e) => e.layer === name));
 
 function farthest(got: readonly (readonly number[])[], wanted: readonly (readonly number[])[]): number {
   expect(got.length).toBe(wanted.length);
@@ -97,8 +98,24 @@ describe('When ezdxf reads the files', () => {
     each(({ drawing: { extents: e, decimals, entities } }, seen) => {
       const depths = entities.flatMap((x) => (x.kind === 'polyline3d' ? x.points.map((p) => p.z) : []));
       const [low, high] = [Math.min(0, ...depths), Math.max(0, ...depths)];
-      expect(farthest([seen.extmin, seen.extmax], [[e.minX, e.minY, low], [e.maxX, e.maxY, high]])).toBeLessThanOrEqual(rounding(decimals));
-      expect(farthest([seen.limmin, seen.limmax], [[e.minX, e.minY], [e.maxX, e.maxY]])).toBeLessThanOrEqual(rounding(decimals));
+      expect(
+        farthest(
+          [seen.extmin, seen.extmax],
+          [
+            [e.minX, e.minY, low],
+            [e.maxX, e.maxY, high],
+          ],
+        ),
+      ).toBeLessThanOrEqual(rounding(decimals));
+      expect(
+        farthest(
+          [seen.limmin, seen.limmax],
+          [
+            [e.minX, e.minY],
+            [e.maxX, e.maxY],
+          ],
+        ),
+      ).toBeLessThanOrEqual(rounding(decimals));
     });
   });
 });
@@ -109,7 +126,10 @@ test("When npm's dxf reads the files, then it finds each line on its layer, with
     const wanted = inOrder(file).filter((e) => e.kind !== 'text');
     const drawn = lines.filter((l) => l.points.length > 0);
     expect(drawn.map((l) => l.layer)).toEqual(wanted.map((e) => e.layer));
-    reaches(file, drawn.flatMap((l) => l.points));
+    reaches(
+      file,
+      drawn.flatMap((l) => l.points),
+    );
   });
 });
 
@@ -119,8 +139,14 @@ test("When GDAL's ogrinfo reads the files, then it finds each line on its layer,
   expect(plain.length).toBe(28);
   for (const file of plain) {
     const features = readWithOgrinfo(file.path);
-    expect(features.map((f) => f.layer), file.name).toEqual(inOrder(file).map((e) => e.layer));
-    reaches(file, features.flatMap((f) => f.points));
+    expect(
+      features.map((f) => f.layer),
+      file.name,
+    ).toEqual(inOrder(file).map((e) => e.layer));
+    reaches(
+      file,
+      features.flatMap((f) => f.points),
+    );
   }
 }, 120_000);
 
@@ -139,7 +165,10 @@ function reaches({ drawing: { extents: e, unit } }: WrittenFile, points: readonl
 test('When LibreCAD plots the files, then there is something on the paper', () => {
   const plain = files.filter((f) => /^(worked example, end|an arched|traced).*, (r2007|r12), /.test(f.name));
   expect(plain.length).toBe(12);
-  const dark = plotWithLibrecad(plain.map((f) => f.path), folder);
+  const dark = plotWithLibrecad(
+    plain.map((f) => f.path),
+    folder,
+  );
   // An empty drawing plots none; the outline of a board alone is more than a hundred dots long.
   dark.forEach((dots, i) => expect(dots, plain[i]!.name).toBeGreaterThan(500));
 }, 120_000);

@@ -31,7 +31,18 @@ const traced: Particulars = workedExample({
       [[1100, 600], [1500, 600], [1500, 780], [1450, 830, QUARTER], [1150, 830]],
     ], // prettier-ignore
   },
-  dados: [dado({ part: 'Left end', at: 20, panel: 18, clearance: 0.3, depth: 6, from: 0, to: 400, ends: ['open', 'stopped'] })],
+  dados: [
+    dado({
+      part: 'Left end',
+      at: 20,
+      panel: 18,
+      clearance: 0.3,
+      depth: 6,
+      from: 0,
+      to: 400,
+      ends: ['open', 'stopped'],
+    }),
+  ],
   setup: { flip: 'side-to-side', allowance: 25, trim: 6, squaring: 'two-edges', spoilboard: 0.5 },
   cutters: {
     dado: { kind: 'straight', diameter: 10, fluteLength: 32 },
@@ -44,9 +55,18 @@ const traced: Particulars = workedExample({
 export const SITUATIONS: readonly Situation[] = [
   { name: 'worked example, side to side', particulars: example },
   { name: 'worked example, end over end', particulars: workedExample({ setup: turned({ flip: 'end-over-end' }) }) },
-  { name: 'all edges squared, end over end', particulars: workedExample({ setup: turned({ flip: 'end-over-end', squaring: 'all-edges' }) }) },
-  { name: 'an arched opening', particulars: workedExample({ outline: { ...example.outline, layout: columns } as Particulars['outline'] }) },
-  { name: 'feet', particulars: workedExample({ outline: { ...example.outline, feet: 4 } as Particulars['outline'], dados: [] }) },
+  {
+    name: 'all edges squared, end over end',
+    particulars: workedExample({ setup: turned({ flip: 'end-over-end', squaring: 'all-edges' }) }),
+  },
+  {
+    name: 'an arched opening',
+    particulars: workedExample({ outline: { ...example.outline, layout: columns } as Particulars['outline'] }),
+  },
+  {
+    name: 'feet',
+    particulars: workedExample({ outline: { ...example.outline, feet: 4 } as Particulars['outline'], dados: [] }),
+  },
   {
     name: 'dados of two depths, sharp cutter',
     particulars: workedExample({

@@ -13,7 +13,13 @@ export const R12 = BUILTIN_PROFILES.find((p) => p.id === 'r12')!.profile;
 export const AXIS_ONLY = BUILTIN_PROFILES.find((p) => p.id === 'axis-only')!.profile;
 
 /** Everything that a profile can change, at once. */
-const OTHERWISE: Partial<FileProfile> = { decimals: 4, origin: 'frame', labels: true, openingLines: 'entered', layerTemplate: '{depth}-{set}-{face}' };
+const OTHERWISE: Partial<FileProfile> = {
+  decimals: 4,
+  origin: 'frame',
+  labels: true,
+  openingLines: 'entered',
+  layerTemplate: '{depth}-{set}-{face}',
+};
 
 /** The built-in profiles, and each flavour with everything changed, in the other unit than the frame's. */
 const profilesFor = ({ particulars }: Situation): Record<string, FileProfile> => {

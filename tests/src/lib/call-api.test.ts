@@ -7,7 +7,8 @@ import { answerCalls, json } from '../answer-calls.ts';
 const failure = (call: Promise<unknown>): Promise<ApiError> =>
   call.then(
     () => Promise.reject(new Error('the call did not fail')),
-    (error: unknown) => (error instanceof ApiError ? error : Promise.reject(new Error(`not an ApiError: ${String(error)}`))),
+    (error: unknown) =>
+      error instanceof ApiError ? error : Promise.reject(new Error(`not an ApiError: ${String(error)}`)),
   );
 
 describe('callApi', () => {
@@ -25,7 +26,9 @@ describe('callApi', () => {
   });
 
   it('When the server refuses, then code, fields and details are decoded', async () => {
-    const fields = [{ path: 'name', message: 'name: got nothing, takes some text', got: 'nothing', takes: 'some text' }];
+    const fields = [
+      { path: 'name', message: 'name: got nothing, takes some text', got: 'nothing', takes: 'some text' },
+    ];
     answerCalls(() => json({ code: 'invalid-input', message: '1 entry to mend', fields, details: { a: 1 } }, 422));
     const error = await failure(callApi({ method: 'POST', path: '/api/jobs', body: {} }));
     expect(error).toMatchObject({ status: 422, code: 'invalid-input', fields, details: { a: 1 } });

@@ -24,7 +24,13 @@ describe('fieldMessages', () => {
   });
 
   it('When the field is a password, then what was typed is not shown', () => {
-    const checked = checkForm(signUpRequest, { shopName: 'Tern', name: 'Ada', email: 'ada@example.com', password: 'otter', unit: 'in' });
+    const checked = checkForm(signUpRequest, {
+      shopName: 'Tern',
+      name: 'Ada',
+      email: 'ada@example.com',
+      password: 'otter',
+      unit: 'in',
+    });
     expect(checked).toEqual({ ok: false, fields: { password: 'Takes at least 10 characters.' } });
   });
 });

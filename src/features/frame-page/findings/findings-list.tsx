@@ -1,23 +1,14 @@
 import { memo } from 'react';
 import type { Finding, FindingLevel } from '#shared/kernel/checks/finding.ts';
-import type { Extents } from '#shared/kernel/contour/contour.ts';
 import { Button } from '../../../ui/button.tsx';
-import { light, useDesk, useEditor } from '../model/desk.ts';
+import { light, useDesk } from '../model/desk.ts';
 import { entryOf, goToEntry } from '../model/find-entry.ts';
-import { fitTo } from '../model/view.ts';
+import type { EditorState } from '../model/frame-editor.ts';
+import { useSettled } from '../model/use-settled.ts';
+import { viewOfPlaces } from '../model/view-of-places.ts';
 
 const WORDS: Record<FindingLevel, string> = { stop: 'Stop', caution: 'Caution', note: 'Note' };
 const COLOURS: Record<FindingLevel, string> = { stop: 'text-stop', caution: 'text-caution', note: 'text-ink' };
-
-/** Share of the page that a place takes when it is gone to, so that one sees where on the board it is. */
-const PLACE_SHARE = 0.25;
-
-const around = (all: readonly Extents[]): Extents => ({
-  minX: Math.min(...all.map((e) => e.minX)),
-  minY: Math.min(...all.map((e) => e.minY)),
-  maxX: Math.max(...all.map((e) => e.maxX)),
-  maxY: Math.max(...all.map((e) => e.maxY)),
-});
 
 interface RowProps {
   readonly index: number;
@@ -42,24 +33,18 @@ const FindingRow = memo(function FindingRow({ index, level, text, remedy, hasEnt
   };
   const off = () => light(lit, []);
   function zoomThere() {
+    const { drawn } = editor.store.get();
     const places = finding()?.places ?? [];
-    if (places.length === 0) return;
-    const e = around(places.map((place) => place.extents));
-    const size = page.get();
-    const whole = fitTo(e, size, (Math.min(size.width, size.height) * (1 - PLACE_SHARE)) / 2);
-    const { worked } = editor.store.get();
-    // No nearer than a quarter of the frame's height fills the page: a corner alone says nothing.
-    const nearest = (4 * Math.min(size.width, size.height)) / Math.max(worked.contours.height, worked.contours.width);
-    view.set({ ...whole, scale: Math.min(whole.scale, nearest) });
+    if (places.length > 0) view.set(viewOfPlaces(drawn, places.map((place) => place.extents), page.get()));
   }
   function goThere() {
     const field = finding()?.field;
     if (field !== undefined) goToEntry(entryOf(editor.store.get().history.present, field));
   }
   return (
-    <li onPointerEnter={on} onPointerLeave={off} onFocus={on} onBlur={off} className="flex items-baseline gap-3 border-b border-rule px-4 py-1 last:border-b-0 hover:bg-board-light">
-      <strong className={`w-16 shrink-0 ${COLOURS[level]}`}>{WORDS[level]}</strong>
-      <p className="min-w-0 flex-1 wrap-anywhere">
+    <li onPointerEnter={on} onPointerLeave={off} onFocus={on} onBlur={off} className="flex flex-wrap items-baseline gap-x-3 border-b border-rule px-4 py-1 last:border-b-0 hover:bg-board-light @xl:flex-nowrap">
+      <strong className={`w-16 flex-1 @xl:flex-none ${COLOURS[level]}`}>{WORDS[level]}</strong>
+      <p className="order-last basis-full wrap-anywhere @xl:order-none @xl:min-w-0 @xl:flex-1">
         {text} {remedy !== '' && <span className="text-pencil">{remedy}</span>}
       </p>
       {hasPlace && (
@@ -76,11 +61,13 @@ const FindingRow = memo(function FindingRow({ index, level, text, remedy, hasEnt
   );
 });
 
+const findingsOf = (s: EditorState): readonly Finding[] => s.worked.findings;
+
 /** What the checks say, stops first. Each lights up its place on both faces; it leads to the place and to the entry to change. */
 export function FindingsList({ className }: { readonly className: string }) {
-  const findings = useEditor((s) => s.worked.findings);
+  const findings = useSettled(findingsOf);
   return (
-    <section aria-labelledby="findings-heading" className={`overflow-y-auto ${className}`}>
+    <section aria-labelledby="findings-heading" className={`@container relative overflow-y-auto ${className}`}>
       <h2 id="findings-heading" className="sr-only">
         Findings
       </h2>

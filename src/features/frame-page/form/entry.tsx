@@ -5,7 +5,8 @@ import type { Unit } from '#shared/kernel/units/unit.ts';
 import { entryLook } from '../../../ui/entry-look.ts';
 import { Field } from '../../../ui/field.tsx';
 import { enterMovesOn } from '../../../ui/move-to-next-field.ts';
-import { useDesk, useEditor } from '../model/desk.ts';
+import { useDesk } from '../model/desk.ts';
+import { useFormFacts } from './form-facts.ts';
 import { useEntry, type ReadText } from './use-entry.ts';
 
 interface EntryProps {
@@ -41,7 +42,7 @@ function formatValue(kind: NonNullable<EntryProps['kind']>, unit: Unit, value: u
 export const Entry = memo(function Entry(props: EntryProps) {
   const { path, label, kind = 'length', optional = false, placeholder, layout = 'row', suffix } = props;
   const { readOnly } = useDesk();
-  const unit = useEditor((s) => s.history.present.unit);
+  const { unit } = useFormFacts();
   const entry = useEntry(
     path,
     (text) => readText(kind, optional, unit, text),

@@ -1,10 +1,12 @@
-import { memo, useState } from 'react';
+import { memo, useCallback, useState } from 'react';
 import { childrenOf } from '#shared/kernel/particulars/layout-parts.ts';
 import type { LayoutPart } from '#shared/kernel/particulars/particulars.ts';
 import { readField } from '#shared/kernel/particulars/read-field.ts';
 import { formatLength } from '#shared/kernel/units/format-length.ts';
 import { Button } from '../../../ui/button.tsx';
 import { useDesk, useEditor } from '../model/desk.ts';
+import type { EditorState } from '../model/frame-editor.ts';
+import { useSettled } from '../model/use-settled.ts';
 import { Entry } from './entry.tsx';
 import { betweensOf, layoutPathOf, openingsUnder, solvedSize } from './layout-words.ts';
 import { LightsUp } from './lights-up.tsx';
@@ -25,35 +27,32 @@ const useKind = (field: string): 'opening' | 'columns' | 'rows' | 'none' =>
 /** Fixed size of a part among its neighbours; empty, it shares what is left, which the placeholder shows. */
 function SizeEntry({ field }: PartProps) {
   const along = /columns\.\d+$/.test(field) ? 'width' : 'height';
-  const placeholder = useEditor((s) => {
-    const size = solvedSize(s.worked, layoutPathOf(field), along);
-    return size === null ? '' : formatLength(size, s.history.present.unit);
-  });
-  return <Entry path={`${field}.size`} label={along === 'width' ? 'Width' : 'Height'} layout="cell" optional placeholder={placeholder} />;
+  const words = useCallback(
+    (s: EditorState) => {
+      const size = solvedSize(s.worked, layoutPathOf(field), along);
+      return size === null ? '' : formatLength(size, s.worked.particulars.unit);
+    },
+    [field, along],
+  );
+  return <Entry path={`${field}.size`} label={along === 'width' ? 'Width' : 'Height'} layout="cell" optional placeholder={useSettled(words)} />;
 }
 
-function PartButtons({ field, divided }: PartProps & { readonly divided: boolean }) {
+function PartButtons({ field, kind }: PartProps & { readonly kind: 'opening' | 'columns' | 'rows' }) {
   const edits = useLayoutEdits();
   const [problem, setProblem] = useState('');
   const path = layoutPathOf(field);
+  const button = (words: string, act: () => string) => (
+    <Button kind="quiet" onClick={() => setProblem(act())}>
+      {words}
+    </Button>
+  );
   return (
     <div className="flex flex-wrap gap-x-3 text-12">
-      {divided && (
-        <Button kind="quiet" onClick={() => setProblem(edits.add(path))}>
-          Add
-        </Button>
-      )}
-      <Button kind="quiet" onClick={() => setProblem(edits.split(path, 'columns'))}>
-        {divided ? 'Column beside' : 'Columns'}
-      </Button>
-      <Button kind="quiet" onClick={() => setProblem(edits.split(path, 'rows'))}>
-        {divided ? 'Row below' : 'Rows'}
-      </Button>
-      {path.length > 0 && (
-        <Button kind="quiet" onClick={() => setProblem(edits.remove(path))}>
-          Remove
-        </Button>
-      )}
+      {kind === 'columns' && button('Add column', () => edits.add(path))}
+      {kind === 'rows' && button('Add row', () => edits.add(path))}
+      {kind !== 'columns' && button(kind === 'opening' ? 'Into columns' : 'Column beside', () => edits.split(path, 'columns'))}
+      {kind !== 'rows' && button(kind === 'opening' ? 'Into rows' : 'Row below', () => edits.split(path, 'rows'))}
+      {path.length > 0 && button('Remove', () => edits.remove(path))}
       {problem !== '' && <p className="w-full text-stop">Takes {problem}.</p>}
     </div>
   );
@@ -69,7 +68,7 @@ const OpeningRow = memo(function OpeningRow({ field }: PartProps) {
         {path.length > 0 ? <SizeEntry field={field} /> : <span />}
         <Entry path={`${field}.opening.arch`} label="Arch" layout="cell" optional placeholder="none" />
       </div>
-      {!readOnly && <PartButtons field={field} divided={false} />}
+      {!readOnly && <PartButtons field={field} kind="opening" />}
     </LightsUp>
   );
 });
@@ -87,7 +86,7 @@ const DividedRow = memo(function DividedRow({ field, kind }: PartProps & { reado
           {path.length > 0 ? <SizeEntry field={field} /> : <span />}
           <Entry path={`${field}.between`} label={kind === 'columns' ? 'Mid-stile' : 'Mid-rail'} layout="cell" />
         </div>
-        {!readOnly && <PartButtons field={field} divided />}
+        {!readOnly && <PartButtons field={field} kind={kind} />}
       </LightsUp>
       <div className="border-l border-rule pl-2">
         {Array.from({ length: count }, (_, i) => (

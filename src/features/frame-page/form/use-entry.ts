@@ -1,6 +1,7 @@
 import { useEffect, useState } from 'react';
 import { readField } from '#shared/kernel/particulars/read-field.ts';
 import { useDesk, useEditor } from '../model/desk.ts';
+import { useFormFacts } from './form-facts.ts';
 
 export type ReadText = { readonly ok: true; readonly value: unknown } | { readonly ok: false; readonly takes: string };
 
@@ -32,7 +33,7 @@ const PATIENCE_MS = 700;
 export function useEntry(path: string, read: (text: string) => ReadText, format: (value: unknown) => string): Entry {
   const { editor } = useDesk();
   const value = useEditor((s) => readField(s.history.present, path));
-  const epoch = useEditor((s) => s.epoch);
+  const { epoch } = useFormFacts();
   const [typed, setTyped] = useState<Typed | null>(null);
   const [settled, setSettled] = useState(true);
 

@@ -1,3 +1,4 @@
+import type { FieldError } from '#shared/contracts/error-codes.ts';
 import { fieldErrors } from '#shared/contracts/field-errors.ts';
 import { particulars as contract } from '#shared/contracts/particulars.ts';
 import type { Particulars } from '#shared/kernel/particulars/particulars.ts';
@@ -37,6 +38,18 @@ export interface FrameEditor {
 /** Geometry cannot be laid out at all: openings and lines are missing, so the last good drawing stays. */
 const isDrawable = (worked: WorkedFrame): boolean => !worked.findings.some((f) => f.code === 'members-do-not-add-up');
 
+/**
+ * What the contract finds wrong in the first level of the particulars that `path` leads into ('dados' for
+ * 'dados.0.depth'): what lies beside it was held against the contract before. '' reads all.
+ */
+function errorsNear(candidate: Particulars, path: string): FieldError[] {
+  const key = path.split('.')[0] as keyof typeof contract.shape | '';
+  const read = key === '' ? contract.safeParse(candidate) : contract.shape[key].safeParse(candidate[key]);
+  if (read.success) return [];
+  const errors = fieldErrors(read.error, key === '' ? candidate : candidate[key]);
+  return key === '' ? errors : errors.map((error) => ({ ...error, path: error.path === '' ? key : `${key}.${error.path}` }));
+}
+
 const NOTHING_WRONG: ReadonlyMap<string, string> = new Map();
 
 export function createFrameEditor(initial: Particulars): FrameEditor {
@@ -45,12 +58,11 @@ export function createFrameEditor(initial: Particulars): FrameEditor {
 
   /** What is wrong with particulars, said for the entry at `path`; '' when nothing is. */
   function problem(candidate: Particulars, path: string): string {
-    const read = contract.safeParse(candidate);
-    if (read.success) return '';
-    const errors = fieldErrors(read.error, candidate);
-    const own = errors.find((error) => error.path === path);
+    const errors = errorsNear(candidate, path);
     const [first] = errors;
-    return own ? own.takes : `what fits “${describeField(candidate, first!.path)}”: that takes ${first!.takes}`;
+    if (first === undefined) return '';
+    const own = errors.find((error) => error.path === path);
+    return own ? own.takes : `what fits “${describeField(candidate, first.path)}”: that takes ${first.takes}`;
   }
 
   function put(history: History, typed: boolean): void {

@@ -3,7 +3,9 @@ import type { Face, LineSet, SetName } from '#shared/kernel/line-sets/line-set.t
 import { lineSetKey } from '#shared/kernel/line-sets/line-set.ts';
 import type { WorkedFrame } from '#shared/kernel/worked-frame.ts';
 import { useDesk } from '../model/desk.ts';
+import type { EditorState } from '../model/frame-editor.ts';
 import { useStore } from '../model/store.ts';
+import { useSettled } from '../model/use-settled.ts';
 import { frameTransform, setupTransform, type PageSize, type View } from '../model/view.ts';
 import { Board, LineSets } from './board.tsx';
 import { describeFace } from './describe-face.ts';
@@ -31,6 +33,18 @@ const hiddenSetNames = (lineSets: readonly LineSet[], hidden: ReadonlySet<string
   const shown = new Set<SetName>(lineSets.filter((s) => !hidden.has(lineSetKey(s))).map((s) => s.set));
   return new Set(lineSets.map((s) => s.set).filter((set) => !shown.has(set)));
 };
+
+const drawnOf = (s: EditorState): WorkedFrame => s.drawn;
+
+/** The page in words, for people who do not see the drawing. */
+const Description = memo(function Description({ id, face }: { readonly id: string; readonly face: Face }) {
+  const worked = useSettled(drawnOf);
+  return (
+    <p id={id} className="sr-only">
+      {describeFace(worked, face)}
+    </p>
+  );
+});
 
 /** The drawing of one page. */
 function Drawing({ face, worked, view, page }: Pick<FacePageProps, 'face' | 'worked' | 'view' | 'page'>) {
@@ -69,9 +83,7 @@ function Drawing({ face, worked, view, page }: Pick<FacePageProps, 'face' | 'wor
         <PageLabels labels={labels} view={view} placement={placement} page={page} hiddenSets={hiddenSets} />
         {measuring && <MeasureMarks measuring={measuring} view={view} placement={placement} page={page} />}
       </svg>
-      <p id={id} className="sr-only">
-        {describeFace(worked, face)}
-      </p>
+      <Description id={id} face={face} />
     </>
   );
 }
@@ -85,7 +97,7 @@ export const FacePage = memo(function FacePage({ face, worked, view, page, legen
         <h2>{heading}</h2>
         <p>{aside}</p>
       </div>
-      <div data-drawing-area="" className="relative min-h-0 flex-1 overflow-hidden">
+      <div data-drawing-area="" className="relative min-h-0 flex-1 overflow-hidden contain-strict">
         <Drawing face={face} worked={worked} view={view} page={page} />
       </div>
       <FaceLegend entries={legend} face={face} />

@@ -1,6 +1,6 @@
 import type { Point } from '#shared/kernel/contour/contour.ts';
 import type { Face } from '#shared/kernel/line-sets/line-set.ts';
-import { placePoint, unplace } from '#shared/kernel/placing/place.ts';
+import { placeExtents, placePoint, unplace } from '#shared/kernel/placing/place.ts';
 import { formatLength } from '#shared/kernel/units/format-length.ts';
 import type { WorkedFrame } from '#shared/kernel/worked-frame.ts';
 
@@ -16,19 +16,24 @@ export interface Label {
   readonly colour: 'back' | 'front' | 'ink' | 'pencil';
   /** Length in frame's unit that the words must fit into; Infinity when they stand free. */
   readonly room: number;
+  /** Name of the line set that it belongs to, with which it is switched off; '' for none. */
   readonly hiddenWith: string;
+  /** Lies across lines on the board. */
+  readonly onBoard: boolean;
 }
 
-const free = { dx: 0, dy: 0, turned: false, room: Infinity, hiddenWith: '' } as const;
+const free = { dx: 0, dy: 0, turned: false, room: Infinity, hiddenWith: '', onBoard: false } as const;
 
 function backLabels(worked: WorkedFrame): Label[] {
   const { particulars, back, contours } = worked;
   const { unit } = particulars;
-  const dados = worked.dados.map((dado): Label => {
+  return worked.dados.map((dado): Label => {
     const { extents: e } = dado;
     const given = particulars.dados[dado.index]!;
     const upright = given.runs === 'vertical';
-    const middle = { x: (e.minX + e.maxX) / 2, y: (e.minY + e.maxY) / 2 };
+    // Off the middle, where a dado that crosses is least likely to be.
+    const along = upright ? 0.62 : 0.25;
+    const middle = { x: upright ? (e.minX + e.maxX) / 2 : e.minX + along * (e.maxX - e.minX), y: upright ? e.minY + along * (e.maxY - e.minY) : (e.minY + e.maxY) / 2 };
     // Words stand on the side towards the middle of the frame, where there is board beside the dado.
     const towards = upright ? (middle.x > contours.width / 2 ? -1 : 1) : middle.y > contours.height / 2 ? -1 : 1;
     const width = formatLength(upright ? e.maxX - e.minX : e.maxY - e.minY, unit);
@@ -41,15 +46,16 @@ function backLabels(worked: WorkedFrame): Label[] {
       dy: upright ? 0 : -towards * back.placement.sy * 10,
       turned: upright,
       colour: 'back',
-      room: upright ? e.maxY - e.minY : e.maxX - e.minX,
+      room: upright ? 2 * (1 - along) * (e.maxY - e.minY) : 2 * along * (e.maxX - e.minX),
       hiddenWith: 'DADO',
+      onBoard: true,
     };
   });
-  return dados;
 }
 
-function frontLabels({ contours, particulars }: WorkedFrame): Label[] {
+function frontLabels({ contours, particulars, front }: WorkedFrame): Label[] {
   const { unit } = particulars;
+  const board = placeExtents(unplace(front.placement), front.board);
   const openings = contours.openings.flatMap((o): Label[] => {
     const at = { x: (o.extents.minX + o.extents.maxX) / 2, y: (o.extents.minY + o.extents.maxY) / 2 };
     const common = { ...free, at, colour: 'front' as const, room: o.width, hiddenWith: 'OPENING' };
@@ -61,7 +67,8 @@ function frontLabels({ contours, particulars }: WorkedFrame): Label[] {
   });
   return [
     ...openings,
-    { ...free, key: 'width', text: formatLength(contours.width, unit), at: { x: contours.width / 2, y: contours.height }, dy: -12, colour: 'ink', room: contours.width },
+    { ...free, key: 'width', text: `${formatLength(contours.width, unit)} frame`, at: { x: contours.width / 2, y: board.maxY }, dy: -12, colour: 'ink' },
+    { ...free, key: 'height', text: `${formatLength(contours.height, unit)} frame`, at: { x: board.maxX, y: contours.height / 2 }, dx: 14, turned: true, colour: 'ink' },
   ];
 }
 
@@ -71,7 +78,7 @@ function boardLabels(worked: WorkedFrame, face: Face): Label[] {
   const toFrame = (p: Point): Point => placePoint(unplace(placement), p);
   const pins: Label = { ...free, key: 'pins', text: 'pins', at: toFrame({ x: 0, y: 0 }), dx: 28, dy: 20, colour: 'pencil' };
   if (face === 'front') return [pins];
-  const squaring: Label = { ...free, key: 'squaring', text: 'squaring edge', at: toFrame({ x: board.maxX * 0.65, y: worked.blank.squaredCorner.y }), dy: worked.blank.flip === 'side-to-side' ? 20 : -14, colour: 'back', hiddenWith: 'SQUARING' };
+  const squaring: Label = { ...free, key: 'squaring', text: 'squaring edge', at: toFrame({ x: board.maxX * 0.65, y: worked.blank.squaredCorner.y }), dy: worked.blank.flip === 'side-to-side' ? 20 : -14, colour: 'back', room: board.maxX / 2, hiddenWith: 'SQUARING' };
   return [pins, squaring];
 }
 

@@ -7,11 +7,14 @@ import type { Label } from './labels.ts';
 const CHARACTER_PX = 6.6;
 const SPARE_PX = 6;
 
+/** A halo of the board's colour keeps words readable across lines. */
+const HALO = 'stroke-board [paint-order:stroke] [stroke-width:4]';
 const COLOURS: Record<Label['colour'], string> = { back: 'fill-back', front: 'fill-front', ink: 'fill-ink', pencil: 'fill-pencil' };
 
 const Words = memo(function Words({ x, y, turned, text, look }: { x: number; y: number; turned: boolean; text: string; look: string }) {
+  // Moved by transform and not by x and y, which would have the browser lay the words out again.
   return (
-    <text x={x} y={y} transform={turned ? `rotate(-90 ${x} ${y})` : undefined} textAnchor="middle" dominantBaseline="central" className={look}>
+    <text transform={turned ? `translate(${x} ${y}) rotate(-90)` : `translate(${x} ${y})`} textAnchor="middle" dominantBaseline="central" className={look}>
       {text}
     </text>
   );
@@ -35,7 +38,7 @@ export function PageLabels({ labels, view, placement, page, hiddenSets }: PageLa
         if (!fits || hiddenSets.has(label.hiddenWith)) return null;
         const { x, y } = toPage(view, placement, page, label.at);
         // Whole pixels keep the type sharp, and unchanged words unchanged.
-        return <Words key={label.key} x={Math.round(x + label.dx)} y={Math.round(y + label.dy)} turned={label.turned} text={label.text} look={COLOURS[label.colour]} />;
+        return <Words key={label.key} x={Math.round(x + label.dx)} y={Math.round(y + label.dy)} turned={label.turned} text={label.text} look={label.onBoard ? `${COLOURS[label.colour]} ${HALO}` : COLOURS[label.colour]} />;
       })}
     </g>
   );

@@ -40,7 +40,7 @@ function Readout({ worked }: { readonly worked: WorkedFrame }) {
             .filter(Boolean)
             .join('; ');
   return (
-    <p data-readout="" role={b ? 'status' : undefined} className="min-w-0 flex-1 text-11 text-pencil">
+    <p data-readout="" role={b ? 'status' : undefined} className="h-8 min-w-0 flex-1 basis-60 content-center overflow-hidden text-11 text-pencil max-lg:basis-full">
       {words}
     </p>
   );
@@ -57,9 +57,9 @@ export function SpreadBar({ worked, view, onMeasure }: SpreadBarProps) {
   const desk = useDesk();
   const isMeasuring = useStore(desk.measuring, (value) => value !== null);
   return (
-    <div className="flex min-h-7 flex-wrap items-center gap-x-3 border-t border-rule px-4 print:hidden">
+    <div className="flex flex-wrap items-center gap-x-3 border-t border-rule px-4 print:hidden">
       <Readout worked={worked} />
-      <div role="group" aria-label="View" className="flex gap-x-3.5 text-11">
+      <div role="group" aria-label="View" className="flex gap-x-3.5 pb-0.5">
         <Button kind="quiet" onClick={() => desk.view.set(zoomView(view, KEY_ZOOM))}>
           Zoom in +
         </Button>

@@ -14,5 +14,8 @@ async function createSampleJob(unit: Unit) {
 /** A job with one valid frame in it, to begin from. */
 export function useCreateSampleJob() {
   const client = useQueryClient();
-  return useMutation({ mutationFn: createSampleJob, onSettled: () => client.invalidateQueries({ queryKey: ['jobs'] }) });
+  return useMutation({
+    mutationFn: createSampleJob,
+    onSettled: () => client.invalidateQueries({ queryKey: ['jobs'] }),
+  });
 }

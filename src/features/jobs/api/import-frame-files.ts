@@ -11,11 +11,20 @@ interface ImportCall {
 function importFrameFiles({ jobId, files, signal }: ImportCall) {
   const body = new FormData();
   for (const file of files) body.append('files', file, file.name);
-  return callApi({ method: 'POST', path: `/api/jobs/${encodeURIComponent(jobId)}/frame-files`, body, answer: frameFilesTaken, signal });
+  return callApi({
+    method: 'POST',
+    path: `/api/jobs/${encodeURIComponent(jobId)}/frame-files`,
+    body,
+    answer: frameFilesTaken,
+    signal,
+  });
 }
 
 /** Sends frame files; each is taken whole or refused with what is wrong in it. */
 export function useImportFrameFiles() {
   const client = useQueryClient();
-  return useMutation({ mutationFn: importFrameFiles, onSettled: () => client.invalidateQueries({ queryKey: ['jobs'] }) });
+  return useMutation({
+    mutationFn: importFrameFiles,
+    onSettled: () => client.invalidateQueries({ queryKey: ['jobs'] }),
+  });
 }

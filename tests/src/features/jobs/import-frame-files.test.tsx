@@ -16,7 +16,14 @@ describe('ImportFrameFiles', () => {
           {
             file: 'bad.frame.json',
             message: 'not a valid frame file: 1 entry to mend',
-            fields: [{ path: 'thickness', message: 'thickness: got -1, takes a length above 0', got: '-1', takes: 'a length above 0' }],
+            fields: [
+              {
+                path: 'thickness',
+                message: 'thickness: got -1, takes a length above 0',
+                got: '-1',
+                takes: 'a length above 0',
+              },
+            ],
           },
         ],
       }),
@@ -25,7 +32,10 @@ describe('ImportFrameFiles', () => {
     await user.upload(screen.getByLabelText('Frame files'), [file('good.frame.json'), file('bad.frame.json')]);
     expect((await screen.findByRole('link', { name: 'B33 two-door base' })).getAttribute('href')).toBe('/frames/f1');
     expect(screen.getByText('thickness: got -1, takes a length above 0')).toBeTruthy();
-    expect((seen[0]?.body as FormData).getAll('files').map((part) => (part as File).name)).toEqual(['good.frame.json', 'bad.frame.json']);
+    expect((seen[0]?.body as FormData).getAll('files').map((part) => (part as File).name)).toEqual([
+      'good.frame.json',
+      'bad.frame.json',
+    ]);
   });
 
   it('When more files are dropped than are taken at once, then it says how many and sends none', () => {
@@ -33,7 +43,9 @@ describe('ImportFrameFiles', () => {
     show(<ImportFrameFiles jobId="j1" />);
     const files = Array.from({ length: LIMITS.frameFilesAtOnce + 1 }, (_, i) => file(`${i}.frame.json`));
     fireEvent.drop(screen.getByText(/Drop frame files here/), { dataTransfer: { files } });
-    expect(screen.getByRole('alert').textContent).toContain(`Got ${files.length} files; takes up to ${LIMITS.frameFilesAtOnce} at once.`);
+    expect(screen.getByRole('alert').textContent).toContain(
+      `Got ${files.length} files; takes up to ${LIMITS.frameFilesAtOnce} at once.`,
+    );
     expect(seen).toEqual([]);
   });
 });

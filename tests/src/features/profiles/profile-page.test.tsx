@@ -20,9 +20,15 @@ const STORED: StoredProfile = {
   },
 };
 
-const page = (stored = STORED, mayEdit = true) => <ProfilePage stored={stored} mayEdit={mayEdit} shopName="Tern & Alder Joinery" list={null} />;
+const page = (stored = STORED, mayEdit = true) => (
+  <ProfilePage stored={stored} mayEdit={mayEdit} shopName="Tern & Alder Joinery" list={null} />
+);
 const template = () => screen.getByLabelText<HTMLInputElement>('Template');
-const layers = () => within(screen.getByRole('table')).getAllByRole('row').slice(1).map((row) => row.lastElementChild?.textContent);
+const layers = () =>
+  within(screen.getByRole('table'))
+    .getAllByRole('row')
+    .slice(1)
+    .map((row) => row.lastElementChild?.textContent);
 
 describe('ProfilePage', () => {
   it('When the template changes, then the example follows', async () => {
@@ -45,11 +51,17 @@ describe('ProfilePage', () => {
   });
 
   it('When a change is saved, then the whole profile goes to its address', async () => {
-    const seen = answerCalls(({ method, body }) => (method === 'PUT' ? json({ ...STORED, profile: body }) : json({ profiles: [STORED] })));
+    const seen = answerCalls(({ method, body }) =>
+      method === 'PUT' ? json({ ...STORED, profile: body }) : json({ profiles: [STORED] }),
+    );
     const { user } = show(page());
     await user.click(screen.getByRole('radio', { name: 'R2007' }));
     await user.click(screen.getByRole('button', { name: 'Save the file profile' }));
-    expect(seen[0]).toMatchObject({ method: 'PUT', path: '/api/profiles/own', body: { ...STORED.profile, flavour: 'R2007' } });
+    expect(seen[0]).toMatchObject({
+      method: 'PUT',
+      path: '/api/profiles/own',
+      body: { ...STORED.profile, flavour: 'R2007' },
+    });
   });
 
   it('When a profile is to be deleted, then it asks with the name', async () => {

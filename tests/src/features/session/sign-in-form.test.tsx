@@ -20,7 +20,9 @@ describe('SignInForm', () => {
     const { user } = show(<SignInForm />);
     await user.type(screen.getByLabelText('E-mail'), 'ada@example.com');
     await user.type(screen.getByLabelText('Password'), 'wrong words{Enter}');
-    expect((await screen.findByRole('alert')).textContent).toContain('No account with this e-mail address and password');
+    expect((await screen.findByRole('alert')).textContent).toContain(
+      'No account with this e-mail address and password',
+    );
     expect(screen.getByLabelText<HTMLInputElement>('E-mail').value).toBe('ada@example.com');
   });
 });

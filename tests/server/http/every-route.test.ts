@@ -1,0 +1,148 @@
+import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { role as roles, type Role } from '../../../shared/contracts/roles.ts';
+import { BUILTIN_PROFILES } from '../../../shared/kernel/profiles/builtin-profiles.ts';
+import { writeFrameFile } from '../../../shared/contracts/write-frame-file.ts';
+import { aFrame } from '../../builders/particulars.ts';
+import { addFrame, addJob, addPerson, expectStatus, openShop, releaseFrame, type SignedInVisitor } from '../../builders/shops.ts';
+import type { HttpClient } from '../../setup/http-client.ts';
+import { listRoutes } from '../../setup/list-routes.ts';
+import { startTestServer, type TestServer } from '../../setup/test-server.ts';
+
+/** Things of a shop that paths and bodies may name. A fresh set for each request, so that one request cannot spoil the next. */
+interface Things {
+  readonly jobId: string;
+  readonly frameId: string;
+  readonly profileId: string;
+}
+
+interface Row {
+  /** Who may: anybody, anybody signed in, or these roles. */
+  readonly who: 'anybody' | 'signed in' | readonly Role[];
+  /** Status for those who may, with the shop's own things. */
+  readonly answers: number;
+  readonly body?: (things: Things) => unknown;
+  readonly query?: (things: Things) => string;
+  /** Names nothing of a shop, so there is nothing of another shop to ask for. */
+  readonly nobodys?: true;
+}
+
+const EDITORS: readonly Role[] = ['owner', 'designer'];
+const PROFILE_EDITORS: readonly Role[] = ['owner', 'programmer'];
+
+let names = 0;
+const aProfile = () => ({ ...BUILTIN_PROFILES[0]!.profile, name: `Profile ${++names}` });
+const aFileForm = () => {
+  const form = new FormData();
+  form.append('files', new Blob([writeFrameFile(aFrame())]), 'a.frame.json');
+  return form;
+};
+const ofProfile = ({ profileId }: Things) => `?profile=${profileId}`;
+
+// A route that is missing here fails the first test. The spec's table of who may do what stands in shared/contracts/roles.ts;
+// it is written out once more here, so that a slip in either shows.
+const TABLE: Record<string, Row> = {
+  'GET /healthz': { who: 'anybody', answers: 200, nobodys: true },
+  'GET /api/session': { who: 'anybody', answers: 200, nobodys: true },
+  'POST /api/sign-up': { who: 'anybody', answers: 400, nobodys: true, body: () => ({}) },
+  'POST /api/sign-in': { who: 'anybody', answers: 400, nobodys: true, body: () => ({}) },
+  'POST /api/demo-sign-in': { who: 'anybody', answers: 404, nobodys: true, body: () => ({}) },
+  'POST /api/sign-out': { who: 'anybody', answers: 204, nobodys: true },
+  'POST /api/sign-out-everywhere': { who: 'signed in', answers: 204, nobodys: true },
+  'PATCH /api/shop': { who: ['owner'], answers: 200, body: ({ profileId }) => ({ defaultProfileId: profileId }) },
+  'GET /api/profiles': { who: 'signed in', answers: 200, nobodys: true },
+  'POST /api/profiles': { who: PROFILE_EDITORS, answers: 201, nobodys: true, body: aProfile },
+  'PUT /api/profiles/:profileId': { who: PROFILE_EDITORS, answers: 200, body: aProfile },
+  'DELETE /api/profiles/:profileId': { who: PROFILE_EDITORS, answers: 204 },
+  'GET /api/jobs': { who: 'signed in', answers: 200, nobodys: true },
+  'POST /api/jobs': { who: EDITORS, answers: 201, nobodys: true, body: () => ({ name: 'Another job' }) },
+  'GET /api/jobs/:jobId': { who: 'signed in', answers: 200 },
+  'PATCH /api/jobs/:jobId': { who: EDITORS, answers: 200, body: () => ({ name: 'Renamed' }) },
+  'POST /api/jobs/:jobId/frames': { who: EDITORS, answers: 201, body: () => ({ particulars: aFrame() }) },
+  'POST /api/jobs/:jobId/frame-files': { who: EDITORS, answers: 200, body: aFileForm },
+  'GET /api/jobs/:jobId/layer-sets.zip': { who: 'signed in', answers: 200, query: ofProfile },
+  'GET /api/frames/:frameId': { who: 'signed in', answers: 200 },
+  'PATCH /api/frames/:frameId': { who: EDITORS, answers: 200, body: () => ({ removed: true }) },
+  'PUT /api/frames/:frameId/draft': { who: EDITORS, answers: 200, body: () => ({ version: 1, particulars: aFrame({ 'outline.width': 34 }) }) },
+  'GET /api/frames/:frameId/draft/frame-file': { who: 'signed in', answers: 200 },
+  'GET /api/frames/:frameId/draft/setup-sheet.pdf': { who: 'signed in', answers: 200, query: ofProfile },
+  'POST /api/frames/:frameId/revisions': { who: EDITORS, answers: 422, body: () => ({ version: 1 }) },
+  'GET /api/frames/:frameId/revisions/:letter': { who: 'signed in', answers: 200 },
+  'GET /api/frames/:frameId/revisions/:letter/frame-file': { who: 'signed in', answers: 200 },
+  'GET /api/frames/:frameId/revisions/:letter/layer-set.zip': { who: 'signed in', answers: 200, query: ofProfile },
+  'GET /api/frames/:frameId/revisions/:letter/setup-sheet.pdf': { who: 'signed in', answers: 200, query: ofProfile },
+};
+const ROWS = Object.entries(TABLE);
+const isOpen = ([, row]: [string, Row]) => row.who === 'anybody';
+
+let server: TestServer;
+let mine: SignedInVisitor;
+let theirs: SignedInVisitor;
+let theirThings: Things;
+const people = new Map<Role, HttpClient>();
+
+async function things(visitor: HttpClient): Promise<Things> {
+  const job = await addJob(visitor);
+  const frame = await addFrame(visitor, job.id);
+  await releaseFrame(visitor, frame);
+  const profile = expectStatus(await visitor.post('/api/profiles', aProfile()), 201).json<{ id: string }>();
+  return { jobId: job.id, frameId: frame.id, profileId: profile.id };
+}
+
+const ask = (visitor: HttpClient, route: string, row: Row, named: Things, queried = named) => {
+  const [method = '', pattern = ''] = route.split(' ');
+  const path = pattern.replace(':jobId', named.jobId).replace(':frameId', named.frameId).replace(':profileId', named.profileId).replace(':letter', 'A');
+  return visitor.send(method, `${path}${row.query?.(queried) ?? ''}`, { body: row.body?.(named) });
+};
+
+beforeAll(async () => {
+  server = await startTestServer();
+  mine = await openShop(server, { shopName: 'Mine' });
+  theirs = await openShop(server, { shopName: 'Theirs' });
+  theirThings = await things(theirs.visitor);
+  people.set('owner', mine.visitor);
+  for (const role of roles.options) if (role !== 'owner') people.set(role, (await addPerson(server, mine.session.shop.id, role)).visitor);
+});
+afterAll(() => server.close());
+
+describe('Every route', () => {
+  it('When the routes are listed, then each one stands in the table of this test, and no other', () => {
+    expect(listRoutes(server.app)).toEqual(ROWS.map(([route]) => route).sort());
+  });
+
+  it.each(ROWS.filter((r) => !isOpen(r)))('When nobody is signed in, then %s answers 401', async (route, row) => {
+    const answer = await ask(server.visitor(), route, row, theirThings);
+    expect(answer.status).toBe(401);
+    expect(answer.json().code).toBe('not-signed-in');
+  });
+
+  it.each(ROWS.filter(([, row]) => !row.nobodys))('When an id is of another shop, then %s answers 404 and changes nothing', async (route, row) => {
+    const before = (await theirs.visitor.get(`/api/jobs/${theirThings.jobId}`)).json();
+    const answer = await ask(mine.visitor, route, row, theirThings);
+    expect(answer.status).toBe(404);
+    expect(answer.json()).toEqual({ code: 'not-found', message: 'There is nothing here, or it is not yours to see.' });
+    expect((await theirs.visitor.get(`/api/jobs/${theirThings.jobId}`)).json()).toEqual(before);
+  });
+
+  it.each(ROWS.filter(([, row]) => row.query))("When only the profile is another shop's, then %s answers 404", async (route, row) => {
+    const answer = await ask(mine.visitor, route, row, await things(mine.visitor), theirThings);
+    expect(answer.status).toBe(404);
+  });
+
+  describe.each(roles.options)('When a person is %s', (role) => {
+    it.each(ROWS.filter((r) => !isOpen(r) && r[0] !== 'POST /api/sign-out-everywhere'))('then %s lets in or answers 403, as the table says', async (route, row) => {
+      const allowed = row.who === 'signed in' || row.who.includes(role);
+      const answer = await ask(people.get(role)!, route, row, await things(mine.visitor));
+      expect(answer.status).toBe(allowed ? row.answers : 403);
+      if (!allowed) expect(answer.json().code).toBe('not-allowed');
+    });
+  });
+
+  it.each(ROWS.filter(isOpen))('When nobody is signed in, then %s answers as the table says', async (route, row) => {
+    expect((await ask(server.visitor(), route, row, theirThings)).status).toBe(row.answers);
+  });
+
+  it('When a person signs out everywhere, then the table holds for that too', async () => {
+    const { visitor } = await addPerson(server, mine.session.shop.id, 'operator');
+    expect((await ask(visitor, 'POST /api/sign-out-everywhere', TABLE['POST /api/sign-out-everywhere']!, theirThings)).status).toBe(204);
+  });
+});
