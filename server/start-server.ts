@@ -4,14 +4,12 @@ import { pino } from 'pino';
 import { createApp, finishApp } from './app.ts';
 import type { Config } from './config.ts';
 import { openDatabase } from './db/open-database.ts';
-import { makeDemo } from './features/demo/demo.service.ts';
-import { demoStore } from './features/demo/demo.store.ts';
 import type { ServeClient } from './http/serve-client.ts';
 import { DatabaseSessions } from './http/sessions.store.ts';
 import { startMakers } from './making/start-makers.ts';
-import { summarizeFrame } from './making/summarize-frame.ts';
 import { wireServices } from './services.ts';
 import { sessionSecret } from './session-secret.ts';
+import { startDemo } from './start-demo.ts';
 
 const HOUR = 60 * 60_000;
 /** Requests under way get this long to end when the server is asked to stop. */
@@ -46,20 +44,7 @@ export async function startServer(
   };
   try {
     const services = wireServices(database, makers, now);
-    if (config.demo) {
-      await makeDemo(
-        {
-          store: demoStore(database),
-          openDemoShop: (shop, people) => services.session.openDemoShop(shop, people),
-          addJob: services.jobs.add,
-          addFrame: (who, jobId, particulars) => services.frames.add(who, jobId, particulars),
-          findings: async (particulars) => summarizeFrame(particulars).findings,
-          release: (who, frameId, request) => services.releases.release(who, frameId, request),
-        },
-        places.samples,
-        say,
-      );
-    }
+    if (config.demo) await startDemo(database, services, places.samples, say);
     const sessions = new DatabaseSessions(database, now);
     const sweep = setInterval(() => sessions.sweep().catch((error: unknown) => log.error({ err: error }, 'sessions could not be swept')), HOUR);
     sweep.unref();

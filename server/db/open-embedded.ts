@@ -58,7 +58,7 @@ function markMade(path: string): void {
 
 /** A database in memory, from a dump of a migrated one or new: for tests and tools. */
 export async function openInMemory(migrationsFolder: string, dump?: Blob): Promise<Database & { dump(): Promise<Blob> }> {
-  const client = await PGlite.create(dump ? { loadDataDir: dump, noInitDb: true } : {});
+  const client = await PGlite.create(dump ? { loadDataDir: dump } : {});
   const database = await migrated(client, migrationsFolder, () => client.close());
   return Object.assign(database, { dump: () => client.dumpDataDir('none') });
 }

@@ -105,6 +105,7 @@ export function compareDrawing(
   read: ReadDxf,
   intended: Drawing,
   flavour: FileProfile['flavour'],
+  oneCut: ReadonlySet<string>,
 ): ProofCheck[] {
   const most = proofTolerance(intended.decimals);
   const wanted = inLayerOrder(intended);

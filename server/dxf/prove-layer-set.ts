@@ -1,5 +1,6 @@
 import { buildDrawing } from '#shared/kernel/drawing/build-drawing.ts';
 import type { FileProfile } from '#shared/kernel/profiles/file-profile.ts';
+import { nameLayers } from '#shared/kernel/profiles/name-layers.ts';
 import type { Proof, ProofCheck } from '#shared/kernel/sheet/proof.ts';
 import type { WorkedFrame } from '#shared/kernel/worked-frame.ts';
 import { compareDrawing } from './compare-drawing.ts';
@@ -30,8 +31,11 @@ export function proveLayerSet(worked: WorkedFrame, profile: FileProfile, files: 
   };
   const back = read('back');
   const front = read('front');
-  if (back) checks.push(...compareDrawing('back', back, buildDrawing(worked, 'back', profile), profile.flavour));
-  if (front) checks.push(...compareDrawing('front', front, buildDrawing(worked, 'front', profile), profile.flavour));
+  const { flavour } = profile;
+  const layers = nameLayers(worked, profile);
+  const oneCut = new Set(['front/OPENING', 'front/OPENING_AXIS'].flatMap((key) => layers.get(key)?.name ?? []));
+  if (back) checks.push(...compareDrawing('back', back, buildDrawing(worked, 'back', profile), flavour, oneCut));
+  if (front) checks.push(...compareDrawing('front', front, buildDrawing(worked, 'front', profile), flavour, oneCut));
   if (back && front) checks.push(...proveTurnedOver(worked, profile, back, front));
   return { ok: checks.every((c) => c.ok), checks };
 }

@@ -41,11 +41,18 @@ function draw(worked: WorkedFrame, profile: FileProfile): Record<Face, Drawing> 
 
 const utf8 = (name: string, text: string): LayerSetFile => ({ name, bytes: new TextEncoder().encode(text) });
 
+/** The files of one frame's layer set, SHA256SUMS last, their proof, and what they were made from. */
+export interface FrameFiles {
+  readonly files: readonly LayerSetFile[];
+  readonly proof: Proof;
+  readonly worked: WorkedFrame;
+}
+
 /**
- * The files of one frame's layer set, SHA256SUMS last, and their proof. `frame` is the frame's name as it stands in
+ * Makes the files of one frame's layer set and proves them. `frame` is the frame's name as it stands in
  * file names. Throws ProofFailed when the frame has a stop, cannot be drawn as the profile asks, or fails its proof.
  */
-export async function makeFiles(input: LayerSetInput, frame: string): Promise<{ files: LayerSetFile[]; proof: Proof }> {
+export async function makeFiles(input: LayerSetInput, frame: string): Promise<FrameFiles> {
   const { particulars, profile, paper, revision } = input;
   const worked = workFrame(particulars);
   refuseStops(worked);
@@ -64,7 +71,7 @@ export async function makeFiles(input: LayerSetInput, frame: string): Promise<{ 
     utf8(`${stem}.frame.json`, writeFrameFile(particulars)),
     utf8('layers.csv', layersCsv(worked, profile, drawings)),
   ];
-  return { files: [...files, checksums(files)], proof };
+  return { files: [...files, checksums(files)], proof, worked };
 }
 
 /** How a revision stands in a file name: "rev-A", or "draft". Throws for what is no revision letter. */

@@ -42,14 +42,17 @@ export function safeName(name: string, otherwise: string): string {
   return DEVICES.test(safe) ? `${otherwise}-${safe}` : safe;
 }
 
-/** Safe names for several things side by side, no two the same on a system that does not tell capitals apart: later ones get -2, -3 … */
-export function safeNames(names: readonly string[], otherwise: string): string[] {
-  const taken = new Set<string>();
+/**
+ * Safe names for several things side by side, no two the same on a system that does not tell capitals apart, and none
+ * the same as `taken`: later ones get -2, -3 …
+ */
+export function safeNames(names: readonly string[], otherwise: string, taken: readonly string[] = []): string[] {
+  const used = new Set(taken.map((name) => name.toLowerCase()));
   return names.map((name) => {
     const safe = safeName(name, otherwise);
     let unique = safe;
-    for (let n = 2; taken.has(unique.toLowerCase()); n++) unique = `${safe}-${n}`;
-    taken.add(unique.toLowerCase());
+    for (let n = 2; used.has(unique.toLowerCase()); n++) unique = `${safe}-${n}`;
+    used.add(unique.toLowerCase());
     return unique;
   });
 }

@@ -35,7 +35,8 @@ export function drawPageHead(pen: Pen, paper: Paper, head: { readonly title: str
   doc.undash().lineWidth(LINE_WEIGHT.hairline).rect(OUTER, OUTER, width - 2 * OUTER, height - 2 * OUTER).stroke(SHEET_COLOURS.ink);
   doc.lineWidth(LINE_WEIGHT.thick).rect(INNER, INNER, width - 2 * INNER, height - 2 * INNER).stroke(SHEET_COLOURS.ink);
   const left = INNER + PADDING;
-  drawText(pen, head.title, left, INNER + 7.2, { size: 5.6, bold: true, colour: head.colour });
+  const title = fitText(head.title, width - 2 * left, 6, [5.6, 4.6, 3.8, 3.1, 2.5]);
+  drawText(pen, title.lines[0]!, left, INNER + 7.2, { size: title.size, bold: true, colour: head.colour });
   const lead = fitText(head.lead, width - 2 * left, 6, [2.8, 2.5, 2.2, 1.8]);
   lead.lines.forEach((line, i) => drawText(pen, line, left, INNER + 11.8 + i * lead.size * LINE_HEIGHT, { size: lead.size, colour: 'ink' }));
   rule(pen, INNER, INNER + HEADER, width - INNER, INNER + HEADER, head.colour, 'thick');

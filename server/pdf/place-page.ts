@@ -2,7 +2,7 @@ import type { SheetColour } from '#shared/kernel/sheet/sheet-colours.ts';
 import type { SheetBlock } from '#shared/kernel/sheet/sheet-model.ts';
 import { blockHeight } from './flow-blocks.ts';
 import type { PageRoom } from './page-frame.ts';
-import type { PlacedBlock } from './piece.ts';
+import type { Piece, PlacedBlock } from './piece.ts';
 import { placeDrawing, type ListBlock } from './place-drawing.ts';
 import { placeList } from './place-list.ts';
 import { placePictures } from './place-pictures.ts';
@@ -10,12 +10,16 @@ import { placeSignOff } from './place-sign-off.ts';
 import { EASY, TIGHT, type Spacing } from './spacing.ts';
 import { placeTable } from './place-table.ts';
 
+/** Between a table and what is said under it. */
+const SPACE: Piece = { height: 0.9, draw: () => undefined };
+
 function placeBlock(block: Exclude<SheetBlock, { kind: 'drawing' }>, width: number, { row, line }: Spacing): PlacedBlock {
   const { title } = block;
   switch (block.kind) {
     case 'table': {
       const { head, pieces } = placeTable(block.table, width, row);
-      return { title, head, pieces: [...pieces, ...placeList(block.after.map((text) => ({ text })), false, width, line)] };
+      const after = placeList(block.after.map((text) => ({ text })), false, width, line);
+      return { title, head, pieces: after.length === 0 ? pieces : [...pieces, SPACE, ...after] };
     }
     case 'list':
       return { title, pieces: placeList(block.items, block.ordered, width, line) };

@@ -20,6 +20,8 @@ export interface CutPart {
   readonly back: HeightField;
   /** GONE, PART or LOOSE. */
   readonly standing: Uint8Array;
+  /** How many pieces have come free. */
+  readonly loosePieces: number;
 }
 
 /** What is thinner than this share of the board is no board: depths are 32-bit numbers. */
@@ -121,5 +123,7 @@ export function combineFaces(front: HeightField, back: HeightField, stage: Stage
   const isPart = choosePart(pieces, count, grid, keptWithin(stage), whole);
   const standing = new Uint8Array(pieces.length);
   for (let at = 0; at < pieces.length; at++) standing[at] = pieces[at] === 0 ? GONE : isPart[pieces[at]!] === 1 ? PART : LOOSE;
-  return { grid, thickness, front, back, standing };
+  let loosePieces = 0;
+  for (let piece = 1; piece <= count; piece++) loosePieces += 1 - isPart[piece]!;
+  return { grid, thickness, front, back, standing, loosePieces };
 }

@@ -5,6 +5,7 @@ import { SAME } from '../tolerances.ts';
 import type { WorkedFrame } from '../worked-frame.ts';
 import type { PaperPicture, PaperShape } from './paper-picture.ts';
 import { arcPath, arrowHead, box, disc, stroke } from './paper-shapes.ts';
+import { squaredOnBack } from './setup-items.ts';
 import { cornerMark, originMark, pinMark } from './setup-marks.ts';
 import type { SheetColour } from './sheet-colours.ts';
 import type { LineLook } from './sheet-drawing.ts';
@@ -93,6 +94,12 @@ function features(worked: WorkedFrame, b: Board, board: Extents, placement: Plac
   ];
 }
 
+/** The board within its squared edges: strips are drawn wider than they are, so what lies inside has to make room for them. */
+function withinStrips(b: Board, squared: readonly EdgeSide[]): Board {
+  const strip = (side: EdgeSide) => (squared.includes(side) ? STRIP : 0);
+  return { x: b.x + strip('left'), y: b.y + strip('top'), width: b.width - strip('left') - strip('right'), height: b.height - strip('top') - strip('bottom') };
+}
+
 function beforeBoard(worked: WorkedFrame, b: Board): PaperShape[] {
   const { blank, back } = worked;
   const all = worked.particulars.setup.squaring === 'all-edges';
@@ -101,7 +108,7 @@ function beforeBoard(worked: WorkedFrame, b: Board): PaperShape[] {
   const corner = sideToSide ? { x: b.x + b.width - STRIP, y: b.y + b.height - STRIP } : { x: b.x + STRIP, y: b.y + STRIP };
   return [
     box(b.x, b.y, b.width, b.height, { fill: 'board', line: { colour: 'pencil', weight: 'thin' } }),
-    ...features(worked, b, back.board, back.placement, 'back'),
+    ...features(worked, withinStrips(b, squared), squaredOnBack(blank), back.placement, 'back'),
     ...squared.map((side) => sideLine(b, side, STRIP, 'back')),
     cornerMark(corner, sideToSide ? { x: -1, y: 1 } : { x: 1, y: -1 }, 'back', 9),
     ...pins(b),
@@ -138,7 +145,7 @@ function foldAndArrow(before: Board, after: Board, sideToSide: boolean, width: n
       stroke([{ x, y: before.y - 16 }, { x, y: height }], fold),
       { kind: 'path', d: arcPath(from, to, radius, 1), line: arrow },
       arrowHead(to, 0.48, 5, 'ink'),
-      words('fold', x + 6, height - 1, 2.8, 'ink'),
+      words('fold', x + 5, before.y + before.height * 0.16, 2.8, 'ink'),
     ];
   }
   const y = (before.y + before.height + after.y) / 2;

@@ -7,8 +7,7 @@ import { plural } from '../../ui/plural.ts';
 import { TitleBlock, TitleCell } from '../../ui/title-block.tsx';
 import { useDesk, useEditor } from './model/desk.ts';
 import type { EditorState } from './model/frame-editor.ts';
-import { useStore } from './model/store.ts';
-import { useSettled } from './model/use-settled.ts';
+import { useSettled, useSettledStore } from './model/use-settled.ts';
 
 /** A CSS pixel is 1/96 in by definition (CSS Values and Units, absolute lengths); screens come near to it. */
 const PX_PER_INCH = 96;
@@ -34,10 +33,12 @@ function FindingsCell() {
   );
 }
 
+const same = (scale: number): number => scale;
+
 function ScaleCell() {
   const desk = useDesk();
   const unit = useEditor((s) => s.history.present.unit);
-  const words = useStore(desk.scale, (scale) => scaleWords(scale, unit));
+  const words = scaleWords(useSettledStore(desk.scale, same), unit);
   return (
     <TitleCell label="Scale" detail={UNIT_WORDS[unit]}>
       {words}

@@ -21,6 +21,14 @@ describe('When two lines of a file coincide, then both layers are named', () => 
   ])('%s', (_, a, b) => expect(findTwins([a, b], NEAR)).toEqual(['A and B']));
 });
 
+test('When two layers say one cut, then they may coincide with each other and not within themselves', () => {
+  const other = line('B', true, [0, 0], [2, 0], [2, 2], [0, 2]);
+  const oneCut = new Set(['A', 'B']);
+  expect(findTwins([square, other], NEAR, oneCut)).toEqual([]);
+  expect(findTwins([square, square], NEAR, oneCut)).toEqual(['A and A']);
+  expect(findTwins([square, { ...other, layer: 'C' }], NEAR, oneCut)).toEqual(['A and C']);
+});
+
 describe('When they do not, then nothing is named', () => {
   test.each<[string, DrawingEntity, DrawingEntity]>([
     ['another place', square, line('B', true, [0, 0], [2, 0], [2, 2.001], [0, 2])],

@@ -1,3 +1,4 @@
+import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
 import { buildDrawing } from '#shared/kernel/drawing/build-drawing.ts';
 import type { LineSet, Shape } from '#shared/kernel/line-sets/line-set.ts';
@@ -6,6 +7,9 @@ import { workFrame } from '#shared/kernel/work-frame.ts';
 import type { WorkedFrame } from '#shared/kernel/worked-frame.ts';
 import { proveLayerSet, type DxfPair } from '../../../server/dxf/prove-layer-set.ts';
 import { writeDxf } from '../../../server/dxf/write-dxf.ts';
+import { arbitraryFrame } from '../../builders/arbitrary-frame.ts';
+import { lineSet } from '../../builders/line-sets.ts';
+import { workedExample } from '../../builders/worked-example.ts';
 import { SITUATIONS } from './situations.ts';
 import { AXIS_ONLY, R12, R2007 } from './written-files.ts';
 
@@ -42,6 +46,43 @@ describe.each(SITUATIONS)('When the files of a frame are as written ($name)', ({
   ])('then they pass: %s', (_, profile) => {
     expect(failedIn(worked, profile, filesOf(worked, profile))).toEqual([]);
   });
+});
+
+test('When a sharp cutter runs on the line itself, then both layers of the cut may lie on each other', () => {
+  const { setup, cutters } = workedExample();
+  const particulars = workedExample({
+    edge: { style: 'square', sizeHeldAt: 'back' },
+    setup: { ...setup, spoilboard: 0 },
+    cutters: { ...cutters, opening: { kind: 'vee', includedAngle: 60, fluteLength: 3 } },
+  });
+  const worked = workFrame(particulars);
+  const placesOn = (name: LineSet['set']) =>
+    lineSet(worked.front, name).shapes.map((s) => (s.kind === 'contour' ? s.contour.vertices : []));
+  expect(placesOn('OPENING_AXIS')).toEqual(placesOn('OPENING'));
+  expect(failedIn(worked, R2007, filesOf(worked, R2007))).toEqual([]);
+});
+
+test('When frames of all kinds are written in profiles of all kinds, then all that may be released pass', () => {
+  const profile = fc.record({
+    flavour: fc.constantFrom('R2007', 'R12'),
+    unit: fc.constantFrom('as drawn', 'mm'),
+    decimals: fc.constantFrom(4, 5, 6),
+    origin: fc.constantFrom('pins', 'frame'),
+    openingLines: fc.constantFrom('entered', 'axis', 'both'),
+    labels: fc.boolean(),
+  });
+  let released = 0;
+  fc.assert(
+    fc.property(arbitraryFrame, profile, (particulars, changes) => {
+      const worked = workFrame(particulars);
+      if (worked.findings.some((f) => f.level === 'stop')) return;
+      released++;
+      const asked = { ...R2007, ...changes } as FileProfile;
+      expect(failedIn(worked, asked, filesOf(worked, asked))).toEqual([]);
+    }),
+    { numRuns: 60 },
+  );
+  expect(released).toBeGreaterThan(5);
 });
 
 type Tags = [code: string, value: string][];

@@ -58,3 +58,7 @@ describe('When several frames lie in one zip', () => {
     );
   });
 });
+
+test('When a name is taken by something else in the zip, then the frame gets another', () => {
+  expect(safeNames(['sha256sums', 'Base'], 'frame', ['SHA256SUMS'])).toEqual(['sha256sums-2', 'Base']);
+});

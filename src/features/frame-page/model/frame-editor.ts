@@ -1,6 +1,7 @@
 import type { FieldError } from '#shared/contracts/error-codes.ts';
 import { fieldErrors } from '#shared/contracts/field-errors.ts';
 import { particulars as contract } from '#shared/contracts/particulars.ts';
+import { openingParts } from '#shared/kernel/particulars/layout-parts.ts';
 import type { Particulars } from '#shared/kernel/particulars/particulars.ts';
 import { setField } from '#shared/kernel/particulars/set-field.ts';
 import { workFrame } from '#shared/kernel/work-frame.ts';
@@ -35,8 +36,9 @@ export interface FrameEditor {
   readonly redo: () => void;
 }
 
-/** Geometry cannot be laid out at all: openings and lines are missing, so the last good drawing stays. */
-const isDrawable = (worked: WorkedFrame): boolean => !worked.findings.some((f) => f.code === 'members-do-not-add-up');
+/** Whether every opening could be laid out: where members do not add up some are missing, and the last good drawing stays. */
+const isDrawable = ({ particulars: { outline }, contours }: WorkedFrame): boolean =>
+  contours.openings.length === (outline.kind === 'members' ? openingParts(outline.layout).length : outline.openings.length);
 
 /**
  * What the contract finds wrong in the first level of the particulars that `path` leads into ('dados' for

@@ -93,9 +93,10 @@ export const FacePage = memo(function FacePage({ face, worked, view, page, legen
   const colour = face === 'back' ? 'text-back' : 'text-front';
   return (
     <section aria-label={heading} className={`min-h-0 min-w-0 px-4 pt-2 pb-1 ${className}`}>
-      <div className={`flex flex-wrap justify-between gap-x-3 font-bold ${colour}`}>
+      {/* Of a size that its words do not change, so that new words are laid out here and nowhere else. */}
+      <div className={`flex h-5 justify-between gap-x-3 overflow-hidden font-bold whitespace-nowrap contain-strict ${colour}`}>
         <h2>{heading}</h2>
-        <p>{aside}</p>
+        <p className="min-w-0 truncate">{aside}</p>
       </div>
       <div data-drawing-area="" className="relative min-h-0 flex-1 overflow-hidden contain-strict">
         <Drawing face={face} worked={worked} view={view} page={page} />
