@@ -12,7 +12,7 @@ import type { ReadDxf } from './read-own-dxf.ts';
 
 const VERSIONS: Record<FileProfile['flavour'], string> = { R2007: 'AC1021', R12: 'AC1009' };
 
-/** How far a coordinate read back may lie from the intended one: 1e-6 at six decimals, tenfold for each digit less. Unit of the file. */
+/** How far a coordinate read back may lie from the intended one: PROOF at six decimals, tenfold for each digit less. Unit of the file. */
 export const proofTolerance = (decimals: number): number => PROOF * 10 ** (6 - decimals);
 
 type Line = Exclude<DrawingEntity, { kind: 'text' }>;

@@ -1,5 +1,6 @@
 import { describeSheet } from '#shared/kernel/sheet/describe-sheet.ts';
 import { workFrame } from '#shared/kernel/work-frame.ts';
+import { buildJobSet } from '../layer-set/build-job-set.ts';
 import { buildLayerSet } from '../layer-set/build-layer-set.ts';
 import { safeName } from '../layer-set/safe-name.ts';
 import { writeSetupSheet } from '../pdf/write-setup-sheet.ts';
@@ -13,7 +14,6 @@ const RUN: { [K in TaskKind]: (input: Tasks[K]['input']) => Promise<Tasks[K]['re
   },
 
   'job-set': async (input) => {
-    const { buildJobSet } = await import('../layer-set/build-job-set.ts');
     const set = await buildJobSet(input);
     return { name: set.zipName, bytes: set.zip };
   },

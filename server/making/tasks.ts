@@ -3,6 +3,7 @@ import type { Finding } from '#shared/kernel/checks/finding.ts';
 import type { FileProfile } from '#shared/kernel/profiles/file-profile.ts';
 import type { Proof } from '#shared/kernel/sheet/proof.ts';
 import type { Paper } from '#shared/contracts/session.ts';
+import type { JobSetInput } from '../layer-set/build-job-set.ts';
 import type { LayerSetInput } from '../layer-set/layer-set.ts';
 
 /** A file ready to be sent. */
@@ -35,7 +36,7 @@ export interface Tasks {
   /** The zip of one revision; fails with the proof when it does not pass. */
   'layer-set': { input: LayerSetInput; result: MadeFile };
   /** One zip for the revisions of a whole job. */
-  'job-set': { input: { jobName: string; shopName: string; paper: Paper; sets: readonly LayerSetInput[] }; result: MadeFile };
+  'job-set': { input: JobSetInput; result: MadeFile };
   /** The setup sheet as it lies in the layer set. */
   'setup-sheet': { input: LayerSetInput; result: MadeFile };
   'draft-sheet': { input: DraftSheetInput; result: MadeFile };

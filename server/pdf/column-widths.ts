@@ -1,5 +1,5 @@
 import type { SheetTable } from '#shared/kernel/sheet/sheet-model.ts';
-import { cellWidth } from './place-table.ts';
+import { cellWidth } from './table-measures.ts';
 
 /** A column is never narrower than this many millimetres, or its widest word if that is less. */
 const LEAST = 14;
@@ -9,7 +9,9 @@ const LEAST = 14;
  * until all fit, what is left over shared out evenly.
  */
 export function columnWidths(table: SheetTable, width: number, gutter: number): number[] {
-  const wanted = table.columns.map((column, i) => Math.max(cellWidth({ text: column.heading }), ...table.rows.map((r) => (r[i] ? cellWidth(r[i]) : 0))));
+  const wanted = table.columns.map((column, i) =>
+    Math.max(cellWidth({ text: column.heading }), ...table.rows.map((r) => (r[i] ? cellWidth(r[i]) : 0))),
+  );
   const free = width - gutter * (wanted.length - 1);
   const total = wanted.reduce((a, b) => a + b, 0);
   if (total <= free) return spareTo(wanted, free - total);

@@ -23,6 +23,12 @@ export function fitText(text: string, width: number, height: number, sizes: read
   const lines = at(size).slice(0, rows(size));
   const last = lines[lines.length - 1]!;
   const columns = Math.max(1, Math.floor(width / (CHARACTER_WIDTH * size)));
-  lines[lines.length - 1] = `${countCharacters(last) < columns ? last : Array.from(last).slice(0, columns - 1).join('')}…`;
+  lines[lines.length - 1] = `${
+    countCharacters(last) < columns
+      ? last
+      : Array.from(last)
+          .slice(0, columns - 1)
+          .join('')
+  }…`;
   return { lines, size };
 }

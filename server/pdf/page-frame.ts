@@ -21,24 +21,50 @@ export interface PageRoom {
 
 export function pageRoom(paper: Paper): PageRoom {
   const { width, height } = PAPER_SIZE[paper];
-  return { left: INNER + PADDING, top: INNER + HEADER + 2, width: width - 2 * (INNER + PADDING), bottom: height - INNER - 2 * ROW - 2 };
+  return {
+    left: INNER + PADDING,
+    top: INNER + HEADER + 2,
+    width: width - 2 * (INNER + PADDING),
+    bottom: height - INNER - 2 * ROW - 2,
+  };
 }
 
-export function rule({ doc }: Pen, x1: number, y1: number, x2: number, y2: number, colour: SheetColour = 'ink', weight: keyof typeof LINE_WEIGHT = 'hairline'): void {
+export function rule(
+  { doc }: Pen,
+  x1: number,
+  y1: number,
+  x2: number,
+  y2: number,
+  colour: SheetColour = 'ink',
+  weight: keyof typeof LINE_WEIGHT = 'hairline',
+): void {
   doc.undash().lineWidth(LINE_WEIGHT[weight]).moveTo(x1, y1).lineTo(x2, y2).stroke(SHEET_COLOURS[colour]);
 }
 
 /** Double border, heading in the page's colour, and the one sentence under it. */
-export function drawPageHead(pen: Pen, paper: Paper, head: { readonly title: string; readonly lead: string; readonly colour: SheetColour }): void {
+export function drawPageHead(
+  pen: Pen,
+  paper: Paper,
+  head: { readonly title: string; readonly lead: string; readonly colour: SheetColour },
+): void {
   const { width, height } = PAPER_SIZE[paper];
   const { doc } = pen;
-  doc.undash().lineWidth(LINE_WEIGHT.hairline).rect(OUTER, OUTER, width - 2 * OUTER, height - 2 * OUTER).stroke(SHEET_COLOURS.ink);
-  doc.lineWidth(LINE_WEIGHT.thick).rect(INNER, INNER, width - 2 * INNER, height - 2 * INNER).stroke(SHEET_COLOURS.ink);
+  doc
+    .undash()
+    .lineWidth(LINE_WEIGHT.hairline)
+    .rect(OUTER, OUTER, width - 2 * OUTER, height - 2 * OUTER)
+    .stroke(SHEET_COLOURS.ink);
+  doc
+    .lineWidth(LINE_WEIGHT.thick)
+    .rect(INNER, INNER, width - 2 * INNER, height - 2 * INNER)
+    .stroke(SHEET_COLOURS.ink);
   const left = INNER + PADDING;
   const title = fitText(head.title, width - 2 * left, 6, [5.6, 4.6, 3.8, 3.1, 2.5]);
   drawText(pen, title.lines[0]!, left, INNER + 7.2, { size: title.size, bold: true, colour: head.colour });
   const lead = fitText(head.lead, width - 2 * left, 6, [2.8, 2.5, 2.2, 1.8]);
-  lead.lines.forEach((line, i) => drawText(pen, line, left, INNER + 11.8 + i * lead.size * LINE_HEIGHT, { size: lead.size, colour: 'ink' }));
+  lead.lines.forEach((line, i) =>
+    drawText(pen, line, left, INNER + 11.8 + i * lead.size * LINE_HEIGHT, { size: lead.size, colour: 'ink' }),
+  );
   rule(pen, INNER, INNER + HEADER, width - INNER, INNER + HEADER, head.colour, 'thick');
 }
 
@@ -54,7 +80,13 @@ interface Cell {
 const SIZES = [2.9, 2.6, 2.3, 2, 1.75];
 
 /** Two rows of fields along the bottom border, after ISO 7200. */
-export function drawTitleBlock(pen: Pen, paper: Paper, block: SheetTitleBlock, sheet: string, colour: SheetColour): void {
+export function drawTitleBlock(
+  pen: Pen,
+  paper: Paper,
+  block: SheetTitleBlock,
+  sheet: string,
+  colour: SheetColour,
+): void {
   const { width, height } = PAPER_SIZE[paper];
   const rows: Cell[][] = [
     [
@@ -89,7 +121,13 @@ function drawCell(pen: Pen, cell: Cell, x: number, top: number, width: number): 
   drawText(pen, cell.label, x + 1.5, top + 2.6, { size: 1.9, colour: 'pencil' });
   if (cell.value === '') return;
   const { lines, size } = fitText(cell.value, width - 3, ROW - 4, cell.sizes ?? SIZES);
-  lines.forEach((line, i) => drawText(pen, line, x + 1.5, top + 3.4 + size * (0.95 + i * LINE_HEIGHT), { size, bold: cell.bold, colour: cell.colour ?? 'ink' }));
+  lines.forEach((line, i) =>
+    drawText(pen, line, x + 1.5, top + 3.4 + size * (0.95 + i * LINE_HEIGHT), {
+      size,
+      bold: cell.bold,
+      colour: cell.colour ?? 'ink',
+    }),
+  );
 }
 
 /** Across the whole page, over everything, light enough to read through. */
@@ -97,7 +135,15 @@ export function drawDraftMark(pen: Pen, paper: Paper): void {
   const { width, height } = PAPER_SIZE[paper];
   const { doc } = pen;
   const angle = (-Math.atan2(height, width) * 180) / Math.PI;
-  doc.save().fillOpacity(0.16).rotate(angle, { origin: [width / 2, height / 2] });
-  drawText(pen, 'draft, not for cutting', width / 2, height / 2 + 8, { size: 22, bold: true, anchor: 'middle', colour: 'stop' });
+  doc
+    .save()
+    .fillOpacity(0.16)
+    .rotate(angle, { origin: [width / 2, height / 2] });
+  drawText(pen, 'draft, not for cutting', width / 2, height / 2 + 8, {
+    size: 22,
+    bold: true,
+    anchor: 'middle',
+    colour: 'stop',
+  });
   doc.restore();
 }

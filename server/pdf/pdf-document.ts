@@ -33,7 +33,14 @@ export async function openDocument({ title, subject, author, date, paper }: Docu
     bufferPages: true,
     lang: 'en',
     displayTitle: true,
-    info: { Title: title, Subject: subject, Author: author, Creator: 'Stilepost', Producer: 'Stilepost', CreationDate: date },
+    info: {
+      Title: title,
+      Subject: subject,
+      Author: author,
+      Creator: 'Stilepost',
+      Producer: 'Stilepost',
+      CreationDate: date,
+    },
   });
   for (const font of [...fonts.regular, ...fonts.bold]) doc.registerFont(font.name, Buffer.from(font.bytes));
   return { doc, fonts };

@@ -39,7 +39,11 @@ export function drawText({ doc, fonts }: Pen, text: string, x: number, y: number
 }
 
 // Ligatures and contextual forms would change the width of what is meant as figures.
-const PLAIN = { lineBreak: false, baseline: 'alphabetic', features: { calt: false, liga: false } as unknown as PDFKit.Mixins.OpenTypeFeatures[] } as const;
+const PLAIN = {
+  lineBreak: false,
+  baseline: 'alphabetic',
+  features: { calt: false, liga: false } as unknown as PDFKit.Mixins.OpenTypeFeatures[],
+} as const;
 
 const drawRun = (doc: PDFKit.PDFDocument, text: string, x: number, y: number): void => {
   doc.text(text, x, y, { ...PLAIN, features: PLAIN.features });

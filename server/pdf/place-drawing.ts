@@ -44,7 +44,10 @@ export function placeDrawing(
   const alone = layOutDrawing(drawing, { width: free.width, height: heightOf(free.height) });
   let best: { laid: LaidOutDrawing; list?: Piece } = { laid: alone };
   for (const column of below && free.height + below.height >= LEAST ? COLUMNS : []) {
-    const laid = layOutDrawing(drawing, { width: free.width - column - BETWEEN, height: heightOf(free.height + below!.height) });
+    const laid = layOutDrawing(drawing, {
+      width: free.width - column - BETWEEN,
+      height: heightOf(free.height + below!.height),
+    });
     const list = listPiece(below!.list, column, look);
     if (laid.denominator < best.laid.denominator && list.height <= laid.picture.height) best = { laid, list };
   }
@@ -62,7 +65,9 @@ function listPiece({ title, items, ordered }: ListBlock, width: number, { colour
   const pitch = TITLE_SIZE * 1.2;
   const head = TITLE + (titleLines.length - 1) * pitch;
   const draw: Piece['draw'] = (pen, x, y) => {
-    titleLines.forEach((words, i) => drawText(pen, words, x, y + 4 + i * pitch, { size: TITLE_SIZE, bold: true, colour }));
+    titleLines.forEach((words, i) =>
+      drawText(pen, words, x, y + 4 + i * pitch, { size: TITLE_SIZE, bold: true, colour }),
+    );
     let at = y + head;
     for (const piece of pieces) {
       piece.draw(pen, x, at);

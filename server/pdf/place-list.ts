@@ -11,7 +11,10 @@ export function placeList(items: readonly SheetLine[], ordered: boolean, width: 
   const indent = ordered ? textWidth(`${items.length} `, LIST_SIZE) : 0;
   return items.flatMap((item, i) => {
     const word = item.word ?? '';
-    const lines = wrapText(word === '' ? item.text : `${word} ${item.text}`, (width - indent) / (CHARACTER_WIDTH * LIST_SIZE));
+    const lines = wrapText(
+      word === '' ? item.text : `${word} ${item.text}`,
+      (width - indent) / (CHARACTER_WIDTH * LIST_SIZE),
+    );
     // A lead word that the line break cuts through is set plain: the break has moved it.
     const leads = word !== '' && lines[0]!.startsWith(word);
     return lines.map((line, n): Piece => {
@@ -21,7 +24,8 @@ export function placeList(items: readonly SheetLine[], ordered: boolean, width: 
         const base = y + LIST_SIZE;
         if (ordered && first) drawText(pen, String(i + 1), x, base, { size: LIST_SIZE, bold: true, colour: 'ink' });
         const bold = first && leads ? word : '';
-        if (bold !== '') drawText(pen, bold, x + indent, base, { size: LIST_SIZE, bold: true, colour: item.colour ?? 'ink' });
+        if (bold !== '')
+          drawText(pen, bold, x + indent, base, { size: LIST_SIZE, bold: true, colour: item.colour ?? 'ink' });
         const rest = Array.from(line).slice(countCharacters(bold)).join('');
         drawText(pen, rest, x + indent + textWidth(bold, LIST_SIZE), base, { size: LIST_SIZE, colour: 'ink' });
       };

@@ -13,12 +13,21 @@ import { placeTable } from './place-table.ts';
 /** Between a table and what is said under it. */
 const SPACE: Piece = { height: 0.9, draw: () => undefined };
 
-function placeBlock(block: Exclude<SheetBlock, { kind: 'drawing' }>, width: number, { row, line }: Spacing): PlacedBlock {
+function placeBlock(
+  block: Exclude<SheetBlock, { kind: 'drawing' }>,
+  width: number,
+  { row, line }: Spacing,
+): PlacedBlock {
   const { title } = block;
   switch (block.kind) {
     case 'table': {
       const { head, pieces } = placeTable(block.table, width, row);
-      const after = placeList(block.after.map((text) => ({ text })), false, width, line);
+      const after = placeList(
+        block.after.map((text) => ({ text })),
+        false,
+        width,
+        line,
+      );
       return { title, head, pieces: after.length === 0 ? pieces : [...pieces, SPACE, ...after] };
     }
     case 'list':
@@ -40,14 +49,24 @@ export interface PlacedPage {
 
 /** A page's blocks as pieces of known height, closer together where that saves a second sheet. Empty ones are left out. */
 export function placePage(blocks: readonly SheetBlock[], room: PageRoom, colour: SheetColour): PlacedPage {
-  const [easy, tight] = [EASY, TIGHT].map((spacing) => ({ gap: spacing.gap, blocks: placeBlocks(blocks, room, colour, spacing) }));
+  const [easy, tight] = [EASY, TIGHT].map((spacing) => ({
+    gap: spacing.gap,
+    blocks: placeBlocks(blocks, room, colour, spacing),
+  }));
   const fits = (page: PlacedPage) => blocksHeight(page.blocks, page.gap) <= room.bottom - room.top;
   return !fits(easy!) && fits(tight!) ? tight! : easy!;
 }
 
 /** The drawing is made as large as the others allow, with a list beside it where that lets it be larger. */
-function placeBlocks(blocks: readonly SheetBlock[], room: PageRoom, colour: SheetColour, spacing: Spacing): PlacedBlock[] {
-  const placed = new Map(blocks.flatMap((b) => (b.kind === 'drawing' ? [] : [[b, placeBlock(b, room.width, spacing)] as const])));
+function placeBlocks(
+  blocks: readonly SheetBlock[],
+  room: PageRoom,
+  colour: SheetColour,
+  spacing: Spacing,
+): PlacedBlock[] {
+  const placed = new Map(
+    blocks.flatMap((b) => (b.kind === 'drawing' ? [] : [[b, placeBlock(b, room.width, spacing)] as const])),
+  );
   const drawing = blocks.find((b) => b.kind === 'drawing');
   if (!drawing) return [...placed.values()].filter((b) => b.pieces.length > 0);
   const list = blocks.find((b): b is ListBlock => b.kind === 'list' && b.beside === true);

@@ -30,7 +30,10 @@ export function placePictures(pictures: readonly Captioned[], width: number): Pi
 function placeRow(row: readonly Captioned[], width: number): Piece {
   const scaled = row.map((one) => {
     const scale = Math.min(1, width / one.picture.width);
-    const caption = one.caption === '' ? [] : wrapText(one.caption, (row.length === 1 ? width : one.picture.width) / (CHARACTER_WIDTH * CAPTION));
+    const caption =
+      one.caption === ''
+        ? []
+        : wrapText(one.caption, (row.length === 1 ? width : one.picture.width) / (CHARACTER_WIDTH * CAPTION));
     return { ...one, scale, caption, height: one.picture.height * scale };
   });
   const pictureHeight = Math.max(...scaled.map((s) => s.height));
@@ -39,7 +42,12 @@ function placeRow(row: readonly Captioned[], width: number): Piece {
     let left = row.length === 1 ? x + (width - row[0]!.picture.width * scaled[0]!.scale) / 2 : x;
     for (const { picture, scale, caption, height } of scaled) {
       drawPicture(pen, picture, left, y + (pictureHeight - height) / 2, scale);
-      caption.forEach((line, i) => drawText(pen, line, row.length === 1 ? x : left, y + pictureHeight + CAPTION + i * LINE, { size: CAPTION, colour: 'pencil' }));
+      caption.forEach((line, i) =>
+        drawText(pen, line, row.length === 1 ? x : left, y + pictureHeight + CAPTION + i * LINE, {
+          size: CAPTION,
+          colour: 'pencil',
+        }),
+      );
       left += picture.width * scale;
     }
   };

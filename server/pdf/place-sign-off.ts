@@ -11,7 +11,10 @@ const HEIGHT = 16;
 /** Boxes to sign in, side by side: what was done, name, date. */
 export function placeSignOff(boxes: readonly SignOffBox[], width: number): Piece {
   const each = width / boxes.length;
-  return { height: HEIGHT + 1, draw: (pen, x, y) => boxes.forEach((box, i) => drawBox(pen, box, x + i * each, y, each)) };
+  return {
+    height: HEIGHT + 1,
+    draw: (pen, x, y) => boxes.forEach((box, i) => drawBox(pen, box, x + i * each, y, each)),
+  };
 }
 
 function drawBox(pen: Pen, { what, name, date }: SignOffBox, x: number, y: number, width: number): void {

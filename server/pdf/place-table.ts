@@ -1,28 +1,36 @@
+import { SAME } from '#shared/kernel/tolerances.ts';
 import { CHARACTER_WIDTH } from '#shared/kernel/sheet/paper-picture.ts';
 import { SHEET_COLOURS } from '#shared/kernel/sheet/sheet-colours.ts';
 import type { SheetCell, SheetSwatch, SheetTable } from '#shared/kernel/sheet/sheet-model.ts';
 import { wrapText } from '#shared/kernel/sheet/wrap-text.ts';
 import { columnWidths } from './column-widths.ts';
 import { rule } from './page-frame.ts';
-import { drawText, textWidth, type Pen } from './pen.ts';
+import { drawText, type Pen } from './pen.ts';
 import type { Piece } from './piece.ts';
+import { SWATCH, TABLE_SIZE } from './table-measures.ts';
 
-export const TABLE_SIZE = 2.45;
 const LINE = TABLE_SIZE * 1.25;
 const GUTTER = 2.4;
-/** A swatch and the space after it. */
-export const SWATCH = 5;
 
-const columnsIn = (width: number) => (width + 1e-6) / (CHARACTER_WIDTH * TABLE_SIZE);
+const columnsIn = (width: number) => (width + SAME) / (CHARACTER_WIDTH * TABLE_SIZE);
 
 /** A table's head and rows as pieces, columns as wide as their words need, wrapped where the page is too narrow. */
 export function placeTable(table: SheetTable, width: number, padding: number): { head?: Piece; pieces: Piece[] } {
-  if (table.rows.length === 0) return { pieces: table.whenEmpty === '' ? [] : [row([{ text: table.whenEmpty }], { widths: [width], aligns: ['left'], padding, heavy: false })] };
+  if (table.rows.length === 0)
+    return {
+      pieces:
+        table.whenEmpty === ''
+          ? []
+          : [row([{ text: table.whenEmpty }], { widths: [width], aligns: ['left'], padding, heavy: false })],
+    };
   const widths = columnWidths(table, width, GUTTER);
   const aligns = table.columns.map((c) => c.align);
   const heading = table.columns.map((c): SheetCell => ({ text: c.heading, colour: 'pencil' }));
   const look = { widths, aligns, padding };
-  return { head: row(heading, { ...look, heavy: true }), pieces: table.rows.map((cells) => row(cells, { ...look, heavy: false })) };
+  return {
+    head: row(heading, { ...look, heavy: true }),
+    pieces: table.rows.map((cells) => row(cells, { ...look, heavy: false })),
+  };
 }
 
 interface RowLook {
@@ -59,13 +67,19 @@ function row(cells: readonly SheetCell[], { widths, aligns, padding, heavy }: Ro
 
 function drawSwatch({ doc }: Pen, swatch: SheetSwatch, x: number, y: number): void {
   if (swatch.kind === 'layer') {
-    doc.undash().lineWidth(0.13).rect(x, y, SWATCH - 1.4, TABLE_SIZE).fillAndStroke(swatch.hex, SHEET_COLOURS.ink);
+    doc
+      .undash()
+      .lineWidth(0.13)
+      .rect(x, y, SWATCH - 1.4, TABLE_SIZE)
+      .fillAndStroke(swatch.hex, SHEET_COLOURS.ink);
     return;
   }
   if (swatch.dashed) doc.dash(1, { space: 0.6 });
   else doc.undash();
-  doc.lineWidth(0.7).moveTo(x, y + TABLE_SIZE / 2).lineTo(x + SWATCH - 1.4, y + TABLE_SIZE / 2).stroke(SHEET_COLOURS[swatch.colour]);
+  doc
+    .lineWidth(0.7)
+    .moveTo(x, y + TABLE_SIZE / 2)
+    .lineTo(x + SWATCH - 1.4, y + TABLE_SIZE / 2)
+    .stroke(SHEET_COLOURS[swatch.colour]);
   doc.undash();
 }
-
-export const cellWidth = (cell: { readonly text: string; readonly swatch?: SheetSwatch }): number => textWidth(cell.text, TABLE_SIZE) + (cell.swatch ? SWATCH : 0);

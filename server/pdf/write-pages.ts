@@ -23,15 +23,19 @@ export interface PrintedSheet {
   readonly pages: readonly PrintedPage[];
 }
 
+const revisionWords = ({ draft, titleBlock: { revision } }: PrintedSheet): string[] =>
+  draft ? ['draft'] : revision === '' ? [] : [`revision ${revision}`];
+
 /** Pages with border, heading and title block as a PDF; each goes on to as many sheets as it needs. Throws RangeError when the date is none. */
 export async function writePages(given: PrintedSheet, paper: Paper): Promise<Uint8Array> {
   const { regular } = await loadFonts();
   const sheet = printableDeep(given, (code) => regular.some((f) => f.has.has(code)));
   const date = new Date(sheet.releasedAt);
-  if (Number.isNaN(date.getTime())) throw new RangeError(`date of the sheet: got "${sheet.releasedAt}", takes an ISO date-time`);
+  if (Number.isNaN(date.getTime()))
+    throw new RangeError(`date of the sheet: got "${sheet.releasedAt}", takes an ISO date-time`);
   const { titleBlock } = sheet;
   const pen = await openDocument({
-    title: `${titleBlock.identification}, ${sheet.draft ? 'draft' : `revision ${titleBlock.revision}`}`,
+    title: [titleBlock.identification, ...revisionWords(sheet)].join(', '),
     subject: titleBlock.documentType,
     author: titleBlock.legalOwner,
     date,

@@ -10,50 +10,87 @@ const LONGEST = 10_000;
 const takes = (text: string) => ({ error: `takes ${text}` });
 
 /** A length above 0. */
-const length = z.number(takes('a length above 0')).gt(0, takes('a length above 0')).max(LONGEST, takes(`a length up to ${LONGEST}`));
+const length = z
+  .number(takes('a length above 0'))
+  .gt(0, takes('a length above 0'))
+  .max(LONGEST, takes(`a length up to ${LONGEST}`));
 /** A length that may be 0. */
-const lengthOrNone = z.number(takes('a length, 0 or more')).min(0, takes('a length, 0 or more')).max(LONGEST, takes(`a length up to ${LONGEST}`));
+const lengthOrNone = z
+  .number(takes('a length, 0 or more'))
+  .min(0, takes('a length, 0 or more'))
+  .max(LONGEST, takes(`a length up to ${LONGEST}`));
 /** A place in frame view; may lie outside the frame. */
-const place = z.number(takes('a place in frame view')).min(-LONGEST, takes(`a place from -${LONGEST}`)).max(LONGEST, takes(`a place up to ${LONGEST}`));
+const place = z
+  .number(takes('a place in frame view'))
+  .min(-LONGEST, takes(`a place from -${LONGEST}`))
+  .max(LONGEST, takes(`a place up to ${LONGEST}`));
 
 const cutterCommon = {
   fluteLength: length,
   maxPass: length.optional(),
   name: words(LIMITS.nameLength).optional(),
-  number: z.number(takes('a whole number from 0 to 9999')).int(takes('a whole number from 0 to 9999')).min(0, takes('a whole number from 0 to 9999')).max(9999, takes('a whole number from 0 to 9999')).optional(),
+  number: z
+    .number(takes('a whole number from 0 to 9999'))
+    .int(takes('a whole number from 0 to 9999'))
+    .min(0, takes('a whole number from 0 to 9999'))
+    .max(9999, takes('a whole number from 0 to 9999'))
+    .optional(),
 };
 
 export const cutter = z.discriminatedUnion('kind', [
   z.strictObject({ kind: z.literal('straight'), diameter: length, ...cutterCommon }),
   z.strictObject({
     kind: z.literal('vee'),
-    includedAngle: z.number(takes('an included angle in degrees, 5 to 170')).min(5, takes('an included angle in degrees, 5 to 170')).max(170, takes('an included angle in degrees, 5 to 170')),
+    includedAngle: z
+      .number(takes('an included angle in degrees, 5 to 170'))
+      .min(5, takes('an included angle in degrees, 5 to 170'))
+      .max(170, takes('an included angle in degrees, 5 to 170')),
     ...cutterCommon,
   }),
   z.strictObject({
     kind: z.literal('tapered'),
     tipRadius: length,
-    sideAngle: z.number(takes('the angle of one side in degrees, above 0, up to 45')).gt(0, takes('the angle of one side in degrees, above 0, up to 45')).max(45, takes('the angle of one side in degrees, above 0, up to 45')),
+    sideAngle: z
+      .number(takes('the angle of one side in degrees, above 0, up to 45'))
+      .gt(0, takes('the angle of one side in degrees, above 0, up to 45'))
+      .max(45, takes('the angle of one side in degrees, above 0, up to 45')),
     ...cutterCommon,
   }),
   z.strictObject({ kind: z.literal('beading'), profileRadius: length, tipFlat: lengthOrNone, ...cutterCommon }),
 ]) satisfies z.ZodType<Cutter>;
 
 const openingPart = z.strictObject({
-  opening: z.strictObject({ label: words(LIMITS.labelLength).optional(), arch: lengthOrNone.optional() }),
+  opening: z.strictObject({
+    label: words(LIMITS.labelLength).optional(),
+    arch: lengthOrNone.optional(),
+    edge: z.literal('square', takes('"square", or nothing')).optional(),
+  }),
   size: length.optional(),
 });
-const columnsPart = z.strictObject({ columns: z.array(z.unknown()).min(1, takes('at least one part')), between: length, size: length.optional() });
-const rowsPart = z.strictObject({ rows: z.array(z.unknown()).min(1, takes('at least one part')), between: length, size: length.optional() });
+const columnsPart = z.strictObject({
+  columns: z.array(z.unknown()).min(1, takes('at least one part')),
+  between: length,
+  size: length.optional(),
+});
+const rowsPart = z.strictObject({
+  rows: z.array(z.unknown()).min(1, takes('at least one part')),
+  between: length,
+  size: length.optional(),
+});
 
 const DEEPEST_TREE = 12;
 
 /** Reads one part of the layout tree by the key that it has, so that a mistake is named where it stands. */
-function readPart(value: unknown, path: PropertyKey[], depth: number, problem: (path: PropertyKey[], issue: z.core.$ZodIssue | string) => void): LayoutPart | null {
-  if (depth > DEEPEST_TREE) return problem(path, `takes a tree at most ${DEEPEST_TREE} parts deep`), null;
+function readPart(
+  value: unknown,
+  path: PropertyKey[],
+  depth: number,
+  problem: (path: PropertyKey[], issue: z.core.$ZodIssue | string) => void,
+): LayoutPart | null {
+  if (depth > DEEPEST_TREE) return (problem(path, `takes a tree at most ${DEEPEST_TREE} parts deep`), null);
   const has = (key: string) => value !== null && typeof value === 'object' && key in value;
   const kinds = ['opening', 'columns', 'rows'].filter(has);
-  if (kinds.length !== 1) return problem(path, 'takes one of "opening", "columns" or "rows"'), null;
+  if (kinds.length !== 1) return (problem(path, 'takes one of "opening", "columns" or "rows"'), null);
   const schema = kinds[0] === 'opening' ? openingPart : kinds[0] === 'columns' ? columnsPart : rowsPart;
   const read = schema.safeParse(value);
   if (!read.success) {
@@ -73,7 +110,11 @@ const countOpenings = (part: LayoutPart): number =>
 
 const layout = z.unknown().transform((value, ctx): LayoutPart => {
   const part = readPart(value, [], 0, (path, issue) =>
-    ctx.addIssue(typeof issue === 'string' ? { code: 'custom', path, message: issue } : ({ ...issue, path } as z.core.$ZodRawIssue)),
+    ctx.addIssue(
+      typeof issue === 'string'
+        ? { code: 'custom', path, message: issue }
+        : ({ ...issue, path } as z.core.$ZodRawIssue),
+    ),
   );
   if (part === null) return z.NEVER;
   if (part.size !== undefined) {
@@ -88,7 +129,10 @@ const layout = z.unknown().transform((value, ctx): LayoutPart => {
 });
 
 const bulge = z.number(takes('a bulge')).min(-1e6, takes('a bulge')).max(1e6, takes('a bulge'));
-const tracedVertex = z.union([z.tuple([place, place]), z.tuple([place, place, bulge])], takes('[x, y] or [x, y, bulge]'));
+const tracedVertex = z.union(
+  [z.tuple([place, place]), z.tuple([place, place, bulge])],
+  takes('[x, y] or [x, y, bulge]'),
+);
 const tracedContour = z
   .array(tracedVertex, takes('a list of [x, y] or [x, y, bulge]'))
   .min(2, takes('at least two vertices'))
@@ -107,14 +151,37 @@ const outline = z.discriminatedUnion('kind', [
   z.strictObject({
     kind: z.literal('traced'),
     perimeter: tracedContour,
-    openings: z.array(tracedContour, takes('a list of contours')).max(LIMITS.openings, takes(`at most ${LIMITS.openings} openings`)),
+    openings: z
+      .array(tracedContour, takes('a list of contours'))
+      .max(LIMITS.openings, takes(`at most ${LIMITS.openings} openings`)),
+    squareOpenings: z
+      .array(
+        z
+          .number(takes('a place in the list of openings, from 0'))
+          .int(takes('a place in the list of openings, from 0'))
+          .min(0, takes('a place in the list of openings, from 0')),
+        takes('a list of places in the list of openings'),
+      )
+      .max(LIMITS.openings, takes(`at most ${LIMITS.openings} openings`))
+      .optional(),
   }),
 ]);
 
-const edge = z.strictObject({
-  style: z.literal('square', takes('"square"')),
-  sizeHeldAt: z.enum(['face', 'back'], takes('"face" or "back"')),
-});
+const corners = z.enum(['lift', 'vee', 'round'], takes('"lift", "vee" or "round"')).optional();
+
+const edge = z.discriminatedUnion('style', [
+  z.strictObject({
+    style: z.literal('square'),
+    sizeHeldAt: z.enum(['face', 'back'], takes('"face" or "back"')),
+    corners,
+  }),
+  z.strictObject({
+    style: z.literal('beaded'),
+    sizeHeldAt: z.enum(['face', 'back', 'bead base'], takes('"face", "back" or "bead base"')).optional(),
+    bead: z.strictObject({ radius: length, drop: lengthOrNone, quirk: length }),
+    corners,
+  }),
+]);
 
 const dadoEnd = z.enum(['open', 'stopped', 'meets'], takes('"open", "stopped" or "meets"'));
 
@@ -148,7 +215,15 @@ export const particulars = z.strictObject({
     squaring: z.enum(['two-edges', 'all-edges'], takes('"two-edges" or "all-edges"')),
     spoilboard: lengthOrNone,
   }),
-  cutters: z.strictObject({ dado: cutter, squaring: cutter, opening: cutter, perimeter: cutter }),
+  cutters: z.strictObject({
+    dado: cutter,
+    squaring: cutter,
+    opening: cutter,
+    perimeter: cutter,
+    bead: cutter.optional(),
+    quirk: cutter.optional(),
+    corner: cutter.optional(),
+  }),
   blank: z.strictObject({ width: length, height: length }).optional(),
 });
 

@@ -21,7 +21,7 @@ export function Fetched<T>({ query, what, children }: FetchedProps<T>) {
   if (query.isPending) return <ProgressText>{`Fetching ${what}.`}</ProgressText>;
   if (isCode(query.error, 'not-found')) {
     return (
-      <Empty title={`No such page: ${what} is not here`} actions={<ButtonLink to="/jobs">To the jobs</ButtonLink>}>
+      <Empty title="Nothing here" actions={<ButtonLink to="/jobs">To the jobs</ButtonLink>}>
         {sayError(query.error)}
       </Empty>
     );

@@ -91,7 +91,8 @@ export function downloadsService(store: DownloadsStore, makers: Makers) {
       }
       const how = await wanted(shopId, profileId);
       const sets = rows.map((row) => setInput(row, how));
-      return makers.make('job-set', { jobName: job.name, shopName: how.shopName, paper: how.paper, sets }, signal);
+      const leftOut = await store.unreleased(shopId, jobId);
+      return makers.make('job-set', { jobName: job.name, shopName: how.shopName, paper: how.paper, sets, leftOut }, signal);
     },
   };
 }

@@ -61,4 +61,14 @@ export const downloadsStore = (database: Database) => ({
       .orderBy(frames.ordinal);
     return rows.map((row) => row.revision);
   },
+
+  /** Names of the frames that are not put away and have no revision. */
+  async unreleased(shopId: string, jobId: string): Promise<string[]> {
+    const rows = await database.queries
+      .select({ particulars: frames.particulars })
+      .from(frames)
+      .where(and(eq(frames.shopId, shopId), eq(frames.jobId, jobId), eq(frames.removed, false), eq(frames.letter, '')))
+      .orderBy(frames.ordinal);
+    return rows.map((row) => row.particulars.name);
+  },
 });

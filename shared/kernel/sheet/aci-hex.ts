@@ -11,7 +11,8 @@ const hex = (value: number) => Math.round(value).toString(16).toUpperCase().padS
  * darken, odd numbers are a third as strong. Throws for anything but a whole number from 1 to 255.
  */
 export function aciHex(index: number): string {
-  if (!Number.isInteger(index) || index < 1 || index > 255) throw new RangeError(`colour index: got ${index}, takes 1 to 255`);
+  if (!Number.isInteger(index) || index < 1 || index > 255)
+    throw new RangeError(`colour index: got ${index}, takes 1 to 255`);
   if (index < 10) return PLAIN[index - 1]!;
   if (index >= 250) return GREYS[index - 250]!;
   const hue = (Math.floor(index / 10) - 1) * 15;

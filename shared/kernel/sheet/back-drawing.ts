@@ -17,7 +17,13 @@ export interface PlacedDado {
 }
 
 export const placedDados = (worked: WorkedFrame): PlacedDado[] =>
-  worked.dados.map(({ id, part, depth, extents }, i) => ({ tag: `D${i + 1}`, id, part, depth, extents: placeExtents(worked.back.placement, extents) }));
+  worked.dados.map(({ id, part, depth, extents }, i) => ({
+    tag: `D${i + 1}`,
+    id,
+    part,
+    depth,
+    extents: placeExtents(worked.back.placement, extents),
+  }));
 
 const upright = (e: Extents) => e.maxY - e.minY > e.maxX - e.minX;
 
@@ -27,12 +33,42 @@ function dadoSpots({ extents: e }: PlacedDado, all: readonly PlacedDado[], board
   const others = all.map((d) => d.extents).filter((o) => upright(o) === turned);
   const beside: LabelSpot[] = turned
     ? [
-        { turned, close: 'right', area: { ...e, minX: Math.max(board.minX, ...others.map((o) => o.maxX).filter((x) => x <= e.minX)), maxX: e.minX } },
-        { turned, close: 'left', area: { ...e, minX: e.maxX, maxX: Math.min(board.maxX, ...others.map((o) => o.minX).filter((x) => x >= e.maxX)) } },
+        {
+          turned,
+          close: 'right',
+          area: {
+            ...e,
+            minX: Math.max(board.minX, ...others.map((o) => o.maxX).filter((x) => x <= e.minX)),
+            maxX: e.minX,
+          },
+        },
+        {
+          turned,
+          close: 'left',
+          area: {
+            ...e,
+            minX: e.maxX,
+            maxX: Math.min(board.maxX, ...others.map((o) => o.minX).filter((x) => x >= e.maxX)),
+          },
+        },
       ]
     : [
-        { close: 'bottom', area: { ...e, minY: e.maxY, maxY: Math.min(board.maxY, ...others.map((o) => o.minY).filter((y) => y >= e.maxY)) } },
-        { close: 'top', area: { ...e, minY: Math.max(board.minY, ...others.map((o) => o.maxY).filter((y) => y <= e.minY)), maxY: e.minY } },
+        {
+          close: 'bottom',
+          area: {
+            ...e,
+            minY: e.maxY,
+            maxY: Math.min(board.maxY, ...others.map((o) => o.minY).filter((y) => y >= e.maxY)),
+          },
+        },
+        {
+          close: 'top',
+          area: {
+            ...e,
+            minY: Math.max(board.minY, ...others.map((o) => o.maxY).filter((y) => y <= e.minY)),
+            maxY: e.minY,
+          },
+        },
       ];
   const room = ({ area }: LabelSpot) => (turned ? area.maxX - area.minX : area.maxY - area.minY);
   beside.sort((a, b) => room(b) - room(a));
@@ -51,7 +87,10 @@ function along(spot: LabelSpot, turned: boolean): LabelSpot[] {
 }
 
 /** Squared edges and dado sides measured from the pins; a dado across the board is measured across, its ends only where they lie on the board. */
-function dadoDimensions(dados: readonly PlacedDado[], worked: WorkedFrame): { across: PinDimension[]; up: PinDimension[] } {
+function dadoDimensions(
+  dados: readonly PlacedDado[],
+  worked: WorkedFrame,
+): { across: PinDimension[]; up: PinDimension[] } {
   const { unit } = worked.particulars;
   const { board } = worked.back;
   const look = (id: string) => ({ colour: 'back', of: [id] }) as const;
@@ -59,7 +98,9 @@ function dadoDimensions(dados: readonly PlacedDado[], worked: WorkedFrame): { ac
   const up: PinDimension[] = [];
   for (const { id, extents: e } of dados) {
     const ends = upright(e) ? [e.minY, e.maxY] : [e.minX, e.maxX];
-    const onBoard = ends.filter((v) => (upright(e) ? v > board.minY && v < board.maxY : v > board.minX && v < board.maxX));
+    const onBoard = ends.filter((v) =>
+      upright(e) ? v > board.minY && v < board.maxY : v > board.minX && v < board.maxX,
+    );
     const xs = upright(e) ? [e.minX, e.maxX] : onBoard;
     const ys = upright(e) ? onBoard : [e.minY, e.maxY];
     across.push(...xs.map((x) => dimensionAt(x, e.minY, unit, look(id))));
@@ -88,16 +129,38 @@ export function backDrawing(worked: WorkedFrame, layers: ReadonlyMap<string, Dra
   const dados = placedDados(worked);
   const hidden = { colour: 'pencil', weight: 'thin', dash: 'dashed' } as const;
   const frame: DrawingItem[] = [
-    { kind: 'contour', contour: placeContour(placement, worked.contours.perimeter), line: hidden, fill: 'board light', of: ['perimeter'], set: '' },
-    ...worked.contours.openings.map(
-      (o): DrawingItem => ({ kind: 'contour', contour: placeContour(placement, o.contour), line: hidden, of: [o.id], set: '' }),
-    ),
+    {
+      kind: 'contour',
+      contour: placeContour(placement, worked.contours.perimeter),
+      line: hidden,
+      fill: 'board light',
+      of: ['perimeter'],
+      set: '',
+    },
+    ...worked.contours.openings.map((o): DrawingItem => ({
+      kind: 'contour',
+      contour: placeContour(placement, o.contour),
+      line: hidden,
+      of: [o.id],
+      set: '',
+    })),
   ];
   // Filled one by one: merged outlines may hold islands, which are board.
-  const filled = dados.map((d): DrawingItem => ({ kind: 'contour', contour: rectangle(d.extents), fill: 'back light', of: [d.id], set: '' }));
-  const labels = dados.map(
-    (d): DrawingItem => ({ kind: 'label', texts: [`${d.tag} ${d.part}`, d.tag], spots: dadoSpots(d, dados, board), ground: 'board light', colour: 'back', of: [d.id] }),
-  );
+  const filled = dados.map((d): DrawingItem => ({
+    kind: 'contour',
+    contour: rectangle(d.extents),
+    fill: 'back light',
+    of: [d.id],
+    set: '',
+  }));
+  const labels = dados.map((d): DrawingItem => ({
+    kind: 'label',
+    texts: [`${d.tag} ${d.part}`, d.tag],
+    spots: dadoSpots(d, dados, board),
+    ground: 'board light',
+    colour: 'back',
+    of: [d.id],
+  }));
   const size = boardDimensions(board, unit);
   const squared = squaredDimensions(worked);
   const measured = dadoDimensions(dados, worked);

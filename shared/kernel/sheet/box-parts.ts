@@ -32,7 +32,9 @@ function countNames(names: readonly string[]): string[] {
 }
 
 const inRows = (names: readonly string[]): string[][] =>
-  Array.from({ length: Math.ceil(names.length / NAMES_IN_ROW) }, (_, i) => names.slice(i * NAMES_IN_ROW, (i + 1) * NAMES_IN_ROW));
+  Array.from({ length: Math.ceil(names.length / NAMES_IN_ROW) }, (_, i) =>
+    names.slice(i * NAMES_IN_ROW, (i + 1) * NAMES_IN_ROW),
+  );
 
 /** Box parts that plug into the frame: each grows by its dado's depth on the front edge. Parts that grow alike are told together. */
 export function boxPartTable(worked: WorkedFrame): SheetTable {

@@ -53,7 +53,10 @@ export function cutterGroups(worked: WorkedFrame): CutterGroup[] {
   return groups.map((g, i) => ({
     ...g,
     tag: `C${i + 1}`,
-    neededFlute: Math.max(0, ...sets.filter((s) => s.cutter !== null && g.roles.includes(s.cutter)).map((s) => s.depth)),
+    neededFlute: Math.max(
+      0,
+      ...sets.filter((s) => s.cutter !== null && g.roles.includes(s.cutter)).map((s) => s.depth),
+    ),
     short: shortName(g.cutter, unit),
   }));
 }

@@ -18,7 +18,10 @@ const heights = (flute: number): number[] => Array.from({ length: STEPS + 1 }, (
 
 function profile(cutter: Cutter, axis: number, tip: number, scale: number): string {
   const side = heights(cutter.fluteLength).map((h) => ({ x: radiusAtHeight(cutter, h) * scale, y: tip - h * scale }));
-  const points = [...side.map((p) => ({ x: axis - p.x, y: p.y })).reverse(), ...side.map((p) => ({ x: axis + p.x, y: p.y }))];
+  const points = [
+    ...side.map((p) => ({ x: axis - p.x, y: p.y })).reverse(),
+    ...side.map((p) => ({ x: axis + p.x, y: p.y })),
+  ];
   return linePath(points, true);
 }
 
@@ -37,19 +40,54 @@ export function cutterPicture({ cutter, tag, neededFlute }: CutterGroup, unit: U
     neededFlute === 0
       ? []
       : [
-          stroke([{ x: axis - half - 2, y: deep }, { x: axis + half + 6, y: deep }], { ...hair, colour: neededFlute > cutter.fluteLength ? 'stop' : 'front' }),
-          stroke([{ x: axis + half + 1, y: tip }, { x: axis + half + 6, y: tip }], hair),
-          { kind: 'text', text: formatLength(neededFlute, unit), x: axis + half + 4.4, y: (deep + tip) / 2 + 0.9, size: 2.4, anchor: 'start', colour: 'ink' },
+          stroke(
+            [
+              { x: axis - half - 2, y: deep },
+              { x: axis + half + 6, y: deep },
+            ],
+            { ...hair, colour: neededFlute > cutter.fluteLength ? 'stop' : 'front' },
+          ),
+          stroke(
+            [
+              { x: axis + half + 1, y: tip },
+              { x: axis + half + 6, y: tip },
+            ],
+            hair,
+          ),
+          {
+            kind: 'text',
+            text: formatLength(neededFlute, unit),
+            x: axis + half + 4.4,
+            y: (deep + tip) / 2 + 0.9,
+            size: 2.4,
+            anchor: 'start',
+            colour: 'ink',
+          },
         ];
   return {
     width: WIDTH,
     height: tip + 6,
     description: `Profile of cutter ${tag}, scale ${scaleText(denominator)}`,
     shapes: [
-      stroke([{ x: axis, y: Math.min(top, deep) - 3 }, { x: axis, y: tip + 2 }], { ...hair, dash: 'chain' }),
+      stroke(
+        [
+          { x: axis, y: Math.min(top, deep) - 3 },
+          { x: axis, y: tip + 2 },
+        ],
+        { ...hair, dash: 'chain' },
+      ),
       { kind: 'path', d: profile(cutter, axis, tip, scale), fill: 'white', line: { colour: 'ink', weight: 'thin' } },
       ...needed,
-      { kind: 'text', text: `${tag}  ${scaleText(denominator)}`, x: 0, y: tip + 5.4, size: 2.6, anchor: 'start', bold: true, colour: 'ink' },
+      {
+        kind: 'text',
+        text: `${tag}  ${scaleText(denominator)}`,
+        x: 0,
+        y: tip + 5.4,
+        size: 2.6,
+        anchor: 'start',
+        bold: true,
+        colour: 'ink',
+      },
     ],
   };
 }

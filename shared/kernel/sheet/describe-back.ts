@@ -11,7 +11,12 @@ import type { SheetContext, SheetPage } from './sheet-model.ts';
 import { stepsBeforeTurning } from './steps-back.ts';
 
 /** Page 1: the back, cut first. */
-export function describeBack(worked: WorkedFrame, context: SheetContext, layers: ReadonlyMap<string, DrawingLayer>, groups: readonly CutterGroup[]): SheetPage {
+export function describeBack(
+  worked: WorkedFrame,
+  context: SheetContext,
+  layers: ReadonlyMap<string, DrawingLayer>,
+  groups: readonly CutterGroup[],
+): SheetPage {
   const { unit, thickness } = worked.particulars;
   const { rough } = worked.blank;
   const size = [rough.maxX, rough.maxY, thickness].map((v) => formatLength(v, unit)).join(' × ');
@@ -30,10 +35,25 @@ export function describeBack(worked: WorkedFrame, context: SheetContext, layers:
         after: [fileLine(worked, 'back', context.profile)],
       },
       { kind: 'table', id: 'dados', title: 'Dados, measured from the pins', table: dadoTable(worked), after: [] },
-      { kind: 'list', id: 'before-turning', title: 'Before the board is turned over', ordered: true, beside: true, items: stepsBeforeTurning(worked) },
+      {
+        kind: 'list',
+        id: 'before-turning',
+        title: 'Before the board is turned over',
+        ordered: true,
+        beside: true,
+        items: stepsBeforeTurning(worked),
+      },
       ...(context.note === ''
         ? []
-        : [{ kind: 'list', id: 'note', title: 'Note with this revision', ordered: false, items: [{ text: context.note }] } as const]),
+        : [
+            {
+              kind: 'list',
+              id: 'note',
+              title: 'Note with this revision',
+              ordered: false,
+              items: [{ text: context.note }],
+            } as const,
+          ]),
     ],
   };
 }

@@ -10,8 +10,12 @@ const right = (key: string, heading: string) => ({ key, heading, align: 'right' 
 
 function countFindings(findings: readonly Finding[]): string {
   const levels: FindingLevel[] = ['stop', 'caution', 'note'];
-  const counts = levels.map((level) => ({ level, count: findings.filter((f) => f.level === level).length })).filter((c) => c.count > 0);
-  return counts.length === 0 ? 'none' : counts.map(({ level, count }) => `${count} ${level}${count === 1 ? '' : 's'}`).join(', ');
+  const counts = levels
+    .map((level) => ({ level, count: findings.filter((f) => f.level === level).length }))
+    .filter((c) => c.count > 0);
+  return counts.length === 0
+    ? 'none'
+    : counts.map(({ level, count }) => `${count} ${level}${count === 1 ? '' : 's'}`).join(', ');
 }
 
 function frameTable(frames: readonly CoverFrame[]): SheetTable {
@@ -54,7 +58,9 @@ function boardLines(frames: readonly CoverFrame[]): SheetLine[] {
     const words = `${formatLength(maxX, unit)} × ${formatLength(maxY, unit)}, ${formatWithUnit(thickness, unit)} thick`;
     boards.set(words, { count: (boards.get(words)?.count ?? 0) + 1, area: maxX * maxY });
   }
-  return [...boards].sort(([, a], [, b]) => b.area - a.area).map(([words, { count }]) => ({ word: String(count), text: `of ${words}` }));
+  return [...boards]
+    .sort(([, a], [, b]) => b.area - a.area)
+    .map(([words, { count }]) => ({ word: String(count), text: `of ${words}` }));
 }
 
 /** The cover of a job's zip: what is in it, which boards it takes, and the cautions. Throws RangeError when `releasedAt` is not a date. */
@@ -70,7 +76,7 @@ export function describeCover(frames: readonly CoverFrame[], context: CoverConte
       identification: jobName,
       title: jobName,
       documentType: 'Cover sheet',
-      revision: '–',
+      revision: '',
       dateOfIssue: dayOf(releasedAt),
       createdBy: author,
       approvedBy: '',
@@ -79,9 +85,23 @@ export function describeCover(frames: readonly CoverFrame[], context: CoverConte
       { kind: 'table', id: 'frames', title: 'Frames', table: frameTable(frames), after: [] },
       ...(leftOut.length === 0
         ? []
-        : [{ kind: 'list', id: 'left-out', title: 'Not in this set', ordered: false, items: leftOut.map((name) => ({ word: name, text: 'has no released revision.' })) } as const]),
+        : [
+            {
+              kind: 'list',
+              id: 'left-out',
+              title: 'Not in this set',
+              ordered: false,
+              items: leftOut.map((name) => ({ word: name, text: 'has no released revision.' })),
+            } as const,
+          ]),
       { kind: 'list', id: 'boards', title: 'Boards', ordered: false, items: boardLines(frames) },
-      { kind: 'list', id: 'files', title: 'Files', ordered: false, items: frames.map(({ folder, files }) => ({ word: `${folder}/`, text: files.join(', ') })) },
+      {
+        kind: 'list',
+        id: 'files',
+        title: 'Files',
+        ordered: false,
+        items: frames.map(({ folder, files }) => ({ word: `${folder}/`, text: files.join(', ') })),
+      },
       { kind: 'list', id: 'cautions', title: 'Cautions', ordered: false, items: [{ text: CAUTIONS.join(' ') }] },
     ],
   };

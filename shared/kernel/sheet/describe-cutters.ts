@@ -16,12 +16,20 @@ function cutterTable(groups: readonly CutterGroup[], unit: Unit): SheetTable {
   const rows = groups.map(({ tag, cutter, roles, neededFlute }): SheetCell[] => [
     { text: tag, bold: true },
     { text: cutter.number === undefined ? '–' : String(cutter.number), value: cutter.number },
-    { text: cutter.name === undefined ? describeCutter(cutter, unit) : `${cutter.name}: ${describeCutter(cutter, unit)}` },
+    {
+      text:
+        cutter.name === undefined ? describeCutter(cutter, unit) : `${cutter.name}: ${describeCutter(cutter, unit)}`,
+    },
     { text: roles.join(', ') },
     { text: formatLength(cutter.fluteLength, unit), value: cutter.fluteLength },
     neededFlute === 0
       ? { text: 'not used' }
-      : { text: `at least ${formatLength(neededFlute, unit)}`, value: neededFlute, bold: true, colour: neededFlute > cutter.fluteLength ? 'stop' : 'ink' },
+      : {
+          text: `at least ${formatLength(neededFlute, unit)}`,
+          value: neededFlute,
+          bold: true,
+          colour: neededFlute > cutter.fluteLength ? 'stop' : 'ink',
+        },
     { text: cutter.maxPass === undefined ? 'whole depth' : formatLength(cutter.maxPass, unit), value: cutter.maxPass },
   ]);
   const columns = [
@@ -47,20 +55,51 @@ export function describeCutters(worked: WorkedFrame, context: SheetContext, grou
     title: 'Cutters, parts and sign-off',
     lead: `Board ${formatWithUnit(thickness, unit)} thick. Check every cutter in your hand against these numbers.`,
     blocks: [
-      { kind: 'pictures', id: 'cutter-pictures', title: '', pictures: groups.map((g) => ({ caption: '', picture: cutterPicture(g, unit) })) },
+      {
+        kind: 'pictures',
+        id: 'cutter-pictures',
+        title: '',
+        pictures: groups.map((g) => ({ caption: '', picture: cutterPicture(g, unit) })),
+      },
       { kind: 'table', id: 'cutters', title: '', table: cutterTable(groups, unit), after: [] },
       { kind: 'table', id: 'box-parts', title: 'Box parts that plug in', table: boxPartTable(worked), after: [] },
-      { kind: 'table', id: 'residue', title: 'What is left in the corners of the openings', table: residueTable(worked), after: [] },
-      { kind: 'list', id: 'offcuts', title: 'Offcuts that come free', ordered: false, items: offcuts.length > 0 ? offcuts : [{ text: 'None but the rim.' }] },
-      { kind: 'list', id: 'findings', title: 'Findings', ordered: false, items: findings.length > 0 ? findings : [{ text: 'None.' }] },
-      { kind: 'list', id: 'proof', title: 'Proof: the files read back and held against the intended lines', ordered: false, items: proofLines(context.proof) },
+      {
+        kind: 'table',
+        id: 'residue',
+        title: 'What is left in the corners of the openings',
+        table: residueTable(worked),
+        after: [],
+      },
+      {
+        kind: 'list',
+        id: 'offcuts',
+        title: 'Offcuts that come free',
+        ordered: false,
+        items: offcuts.length > 0 ? offcuts : [{ text: 'None but the rim.' }],
+      },
+      {
+        kind: 'list',
+        id: 'findings',
+        title: 'Findings',
+        ordered: false,
+        items: findings.length > 0 ? findings : [{ text: 'None.' }],
+      },
+      {
+        kind: 'list',
+        id: 'proof',
+        title: 'Proof: the files read back and held against the intended lines',
+        ordered: false,
+        items: proofLines(context.proof),
+      },
       { kind: 'list', id: 'cautions', title: 'Cautions', ordered: false, items: [{ text: CAUTIONS.join(' ') }] },
       {
         kind: 'sign-off',
         id: 'sign-off',
         title: 'Sign-off',
         boxes: [
-          context.revision === '' ? { what: 'Drawn', name: '', date: '' } : { what: 'Drawn', name: context.author, date: dayOf(context.releasedAt) },
+          context.revision === ''
+            ? { what: 'Drawn', name: '', date: '' }
+            : { what: 'Drawn', name: context.author, date: dayOf(context.releasedAt) },
           { what: 'Checked', name: '', date: '' },
           { what: 'Cut', name: '', date: '' },
         ],

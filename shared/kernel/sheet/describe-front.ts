@@ -11,7 +11,12 @@ import type { SheetContext, SheetPage } from './sheet-model.ts';
 import { sizeLines, stepsOnFront } from './steps-front.ts';
 
 /** Page 3: the front, cut second. */
-export function describeFront(worked: WorkedFrame, context: SheetContext, layers: ReadonlyMap<string, DrawingLayer>, groups: readonly CutterGroup[]): SheetPage {
+export function describeFront(
+  worked: WorkedFrame,
+  context: SheetContext,
+  layers: ReadonlyMap<string, DrawingLayer>,
+  groups: readonly CutterGroup[],
+): SheetPage {
   const { unit } = worked.particulars;
   const { width, height } = worked.contours;
   return {
@@ -28,9 +33,28 @@ export function describeFront(worked: WorkedFrame, context: SheetContext, layers
         table: lineSetTable(worked, 'front', layers, groups),
         after: [fileLine(worked, 'front', context.profile)],
       },
-      { kind: 'list', id: 'sizes', title: 'Which line, which size', ordered: false, items: sizeLines(worked, context.profile.openingLines) },
-      { kind: 'table', id: 'openings', title: 'Openings, measured from the pins', table: openingTable(worked), after: [] },
-      { kind: 'list', id: 'front-steps', title: 'On the front', ordered: true, beside: true, items: stepsOnFront(worked) },
+      {
+        kind: 'list',
+        id: 'sizes',
+        title: 'Which line, which size',
+        ordered: false,
+        items: sizeLines(worked, context.profile.openingLines),
+      },
+      {
+        kind: 'table',
+        id: 'openings',
+        title: 'Openings, measured from the pins',
+        table: openingTable(worked),
+        after: [],
+      },
+      {
+        kind: 'list',
+        id: 'front-steps',
+        title: 'On the front',
+        ordered: true,
+        beside: true,
+        items: stepsOnFront(worked),
+      },
     ],
   };
 }

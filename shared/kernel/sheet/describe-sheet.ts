@@ -21,6 +21,11 @@ export function describeSheet(worked: WorkedFrame, context: SheetContext): Sheet
     draft: context.revision === '',
     titleBlock: describeTitleBlock(worked.particulars, context),
     releasedAt: context.releasedAt,
-    pages: [describeBack(worked, context, layers, groups), describeTurn(worked), describeFront(worked, context, layers, groups), describeCutters(worked, context, groups)],
+    pages: [
+      describeBack(worked, context, layers, groups),
+      describeTurn(worked),
+      describeFront(worked, context, layers, groups),
+      describeCutters(worked, context, groups),
+    ],
   };
 }

@@ -12,7 +12,9 @@ function edgeTable(edges: readonly TurnedEdge[], allSquared: boolean): SheetTabl
     { text: e.squared || allSquared ? 'squared' : 'rough' },
     { text: e.squared ? 'against the pins' : 'free', bold: e.squared },
   ]);
-  const columns = ['Edge', 'Lies, back up', 'Lies, front up', 'Is', 'Then'].map((heading) => ({ key: heading, heading, align: 'left' }) as const);
+  const columns = ['Edge', 'Lies, back up', 'Lies, front up', 'Is', 'Then'].map(
+    (heading) => ({ key: heading, heading, align: 'left' }) as const,
+  );
   return { columns, rows, whenEmpty: '' };
 }
 
@@ -20,11 +22,25 @@ function edgeTable(edges: readonly TurnedEdge[], allSquared: boolean): SheetTabl
 function turnPictures(worked: WorkedFrame): SheetBlock[] {
   const { flip } = worked.blank;
   const sideToSide = flip === 'side-to-side';
-  const spread = { caption: 'Not to scale. Heavy lines: squared edges. Filled corner: where they meet. Black letters: edges that go to the pins.', picture: turnPicture(worked) };
+  const spread = {
+    caption:
+      'Not to scale. Heavy lines: squared edges. Filled corner: where they meet. Black letters: edges that go to the pins.',
+    picture: turnPicture(worked),
+  };
   const from = sideToSide ? 'bottom' : 'left';
-  const section = { caption: `The same turn seen along the fold, from the ${from} edge of the machine. Then slide the board back to the pins.`, picture: turnSection(flip, sideToSide ? 44 : 28) };
-  const block = (id: string, pictures: (typeof spread)[]): SheetBlock => ({ kind: 'pictures', id, title: '', pictures });
-  return sideToSide ? [block('turn-picture', [spread]), block('turn-section', [section])] : [block('turn-picture', [spread, section])];
+  const section = {
+    caption: `The same turn seen along the fold, from the ${from} edge of the machine. Then slide the board back to the pins.`,
+    picture: turnSection(flip, sideToSide ? 44 : 28),
+  };
+  const block = (id: string, pictures: (typeof spread)[]): SheetBlock => ({
+    kind: 'pictures',
+    id,
+    title: '',
+    pictures,
+  });
+  return sideToSide
+    ? [block('turn-picture', [spread]), block('turn-section', [section])]
+    : [block('turn-picture', [spread, section])];
 }
 
 /** Page 2: how the board is turned over, so that nobody can take it the other way. */
@@ -36,17 +52,30 @@ export function describeTurn(worked: WorkedFrame): SheetPage {
   const letter = (side: string) => edges.find((e) => e.before === side)!.letter;
   const { lifted, pivot } = movingEdge(flip);
   const corner = squaredCornerPlaces(flip);
-  const stays = sideToSide ? 'Top stays at the top, bottom at the bottom.' : 'Left stays at the left, right at the right.';
+  const stays = sideToSide
+    ? 'Top stays at the top, bottom at the bottom.'
+    : 'Left stays at the left, right at the right.';
   const onPins = edges.filter((e) => e.squared);
   const steps: SheetLine[] = [
-    { word: 'Loosen', text: 'the board only when dados and squaring edge are both cut. Take away what came free; brush pins and bed clean.' },
-    { word: 'Lift', text: `edge ${letter(lifted)} (${lifted}) and carry it over edge ${letter(pivot)} (${pivot}) until the front face lies up. ${stays}` },
-    { word: 'Push', text: `${onPins.map((e) => `edge ${e.letter} to the pins at the ${e.after}`).join(' and ')}. Both are freshly cut.` },
+    {
+      word: 'Loosen',
+      text: 'the board only when dados and squaring edge are both cut. Take away what came free; brush pins and bed clean.',
+    },
+    {
+      word: 'Lift',
+      text: `edge ${letter(lifted)} (${lifted}) and carry it over edge ${letter(pivot)} (${pivot}) until the front face lies up. ${stays}`,
+    },
+    {
+      word: 'Push',
+      text: `${onPins.map((e) => `edge ${e.letter} to the pins at the ${e.after}`).join(' and ')}. Both are freshly cut.`,
+    },
     {
       word: 'Check',
       text:
         `the marked corner: it was ${corner.before} with the back up and is now ${corner.after}, at the pins, its mark underneath. ` +
-        (allSquared ? 'With all edges squared the corner alone tells: look for the mark.' : 'A rough edge at a pin means that the board was turned the wrong way: turn it back and begin this sheet again.'),
+        (allSquared
+          ? 'With all edges squared the corner alone tells: look for the mark.'
+          : 'A rough edge at a pin means that the board was turned the wrong way: turn it back and begin this sheet again.'),
     },
   ];
   return {
@@ -59,7 +88,13 @@ export function describeTurn(worked: WorkedFrame): SheetPage {
     blocks: [
       ...turnPictures(worked),
       { kind: 'list', id: 'turn-steps', title: 'How', ordered: true, items: steps },
-      { kind: 'table', id: 'turn-edges', title: 'Where each edge goes', table: edgeTable(edges, allSquared), after: [] },
+      {
+        kind: 'table',
+        id: 'turn-edges',
+        title: 'Where each edge goes',
+        table: edgeTable(edges, allSquared),
+        after: [],
+      },
     ],
   };
 }

@@ -22,9 +22,16 @@ export const millimetresPerUnit = (unit: Unit): number => (unit === 'in' ? MM_PE
  * Largest standard scale, as a denominator, at which `width` × `height` (in `unit`) stays within `room` (millimetres of paper).
  * Throws when the room is nothing or a size is not finite.
  */
-export function chooseScale(width: number, height: number, unit: Unit, room: { readonly width: number; readonly height: number }): number {
-  if (!(room.width > 0 && room.height > 0)) throw new RangeError(`room for a drawing: got ${room.width} × ${room.height} mm, takes more than 0`);
-  if (!Number.isFinite(width) || !Number.isFinite(height)) throw new RangeError(`size of a drawing: got ${width} × ${height}, takes finite lengths`);
+export function chooseScale(
+  width: number,
+  height: number,
+  unit: Unit,
+  room: { readonly width: number; readonly height: number },
+): number {
+  if (!(room.width > 0 && room.height > 0))
+    throw new RangeError(`room for a drawing: got ${room.width} × ${room.height} mm, takes more than 0`);
+  if (!Number.isFinite(width) || !Number.isFinite(height))
+    throw new RangeError(`size of a drawing: got ${width} × ${height}, takes finite lengths`);
   const mm = millimetresPerUnit(unit);
   for (const n of denominators(unit)) if ((width * mm) / n <= room.width && (height * mm) / n <= room.height) return n;
   throw new RangeError('no scale');

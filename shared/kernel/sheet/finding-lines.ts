@@ -12,7 +12,9 @@ const toLine = ({ level, text, remedy }: Finding): SheetLine => ({
 const isOffcut = (f: Finding) => f.code === 'offcut-free';
 
 /** What the checks say, but for offcuts, which have a place of their own. */
-export const findingLines = (findings: readonly Finding[]): SheetLine[] => findings.filter((f) => !isOffcut(f)).map(toLine);
+export const findingLines = (findings: readonly Finding[]): SheetLine[] =>
+  findings.filter((f) => !isOffcut(f)).map(toLine);
 
 /** What comes free when it is cut through, with its size. */
-export const offcutLines = (findings: readonly Finding[]): SheetLine[] => findings.filter(isOffcut).map(({ text }) => ({ text }));
+export const offcutLines = (findings: readonly Finding[]): SheetLine[] =>
+  findings.filter(isOffcut).map(({ text }) => ({ text }));

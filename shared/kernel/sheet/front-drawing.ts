@@ -37,7 +37,12 @@ export function frontDrawing(worked: WorkedFrame, layers: ReadonlyMap<string, Dr
   const { board, placement } = worked.front;
   const openings = placedOpenings(worked);
   const perimeter = placeContour(placement, worked.contours.perimeter);
-  const around = placeExtents(placement, { minX: 0, minY: 0, maxX: worked.contours.width, maxY: worked.contours.height });
+  const around = placeExtents(placement, {
+    minX: 0,
+    minY: 0,
+    maxX: worked.contours.width,
+    maxY: worked.contours.height,
+  });
   // A notch between feet is measured too; a traced perimeter may have any number of corners, so only its extents are.
   const edges = worked.particulars.outline.kind === 'members' ? perimeter.vertices : rectangle(around).vertices;
   const of = (id: string) => ({ colour: 'front', of: [id] }) as const;
@@ -46,22 +51,35 @@ export function frontDrawing(worked: WorkedFrame, layers: ReadonlyMap<string, Dr
 
   const labels = openings.map(({ id, label, tag, extents: e, width, height }): DrawingItem => {
     const words = `${formatLength(width, unit)} × ${formatLength(height, unit)}`;
-    const area = { minX: e.minX + 0.03 * width, maxX: e.maxX - 0.03 * width, minY: e.minY + 0.03 * height, maxY: e.maxY - 0.03 * height };
+    const area = {
+      minX: e.minX + 0.03 * width,
+      maxX: e.maxX - 0.03 * width,
+      minY: e.minY + 0.03 * height,
+      maxY: e.maxY - 0.03 * height,
+    };
     const texts = [`${label}\n${words}`, label, tag];
-    return { kind: 'label', texts, spots: [{ area, onFeature: true }, { area, onFeature: true, turned: true }], colour: 'front', bold: true, of: [id] };
+    return {
+      kind: 'label',
+      texts,
+      spots: [
+        { area, onFeature: true },
+        { area, onFeature: true, turned: true },
+      ],
+      colour: 'front',
+      bold: true,
+      of: [id],
+    };
   });
   const filled: DrawingItem[] = [
     { kind: 'contour', contour: perimeter, fill: 'board light', of: ['perimeter'], set: '' },
     ...openings.map((o): DrawingItem => ({ kind: 'contour', contour: o.contour, fill: 'white', of: [o.id], set: '' })),
-    ...worked.dados.map(
-      (d): DrawingItem => ({
-        kind: 'contour',
-        contour: rectangle(placeExtents(placement, d.extents)),
-        line: { colour: 'back', weight: 'hairline', dash: 'dotted' },
-        of: [d.id],
-        set: '',
-      }),
-    ),
+    ...worked.dados.map((d): DrawingItem => ({
+      kind: 'contour',
+      contour: rectangle(placeExtents(placement, d.extents)),
+      line: { colour: 'back', weight: 'hairline', dash: 'dotted' },
+      of: [d.id],
+      set: '',
+    })),
   ];
   return {
     description:
@@ -79,7 +97,9 @@ export function frontDrawing(worked: WorkedFrame, layers: ReadonlyMap<string, Dr
     up: [
       ...size.up,
       ...edges.map((v) => dimensionAt(v.y, v.x, unit, frameSize)),
-      ...openings.flatMap(({ id, extents: e, arch }) => [e.minY, ...(arch > 0 ? [e.maxY - arch] : []), e.maxY].map((y) => dimensionAt(y, e.minX, unit, of(id)))),
+      ...openings.flatMap(({ id, extents: e, arch }) =>
+        [e.minY, ...(arch > 0 ? [e.maxY - arch] : []), e.maxY].map((y) => dimensionAt(y, e.minX, unit, of(id))),
+      ),
     ],
   };
 }

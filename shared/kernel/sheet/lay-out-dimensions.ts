@@ -45,9 +45,17 @@ export interface DimensionAxis {
  * Dimension lines from a common origin with their figures (running dimensions, ISO 129-1), figures moved apart so that
  * none touches the next. When they cannot all stand, only those marked `always`; `leftOut` says how many are missing.
  */
-export function layOutDimensions(dimensions: readonly PinDimension[], on: DimensionAxis): { shapes: PaperShape[]; leftOut: number } {
+export function layOutDimensions(
+  dimensions: readonly PinDimension[],
+  on: DimensionAxis,
+): { shapes: PaperShape[]; leftOut: number } {
   const all = inOrder(dimensions);
-  const place = (chosen: readonly PinDimension[]) => spreadInRange(chosen.map((d) => on.along(d.at)), on.low, on.high);
+  const place = (chosen: readonly PinDimension[]) =>
+    spreadInRange(
+      chosen.map((d) => on.along(d.at)),
+      on.low,
+      on.high,
+    );
   const wide = place(all);
   const chosen = wide ? all : all.filter((d) => d.always);
   const places = wide ?? place(chosen) ?? [];
@@ -70,15 +78,28 @@ function drawDimension(d: PinDimension, figure: number, on: DimensionAxis): Pape
   const point = (along: number, outward: number) => (across ? { x: along, y: outward } : { x: outward, y: along });
   const bendStart = on.edge + out * PIN_CLEAR;
   const bendEnd = bendStart + out * BEND;
-  const line = stroke([point(at, on.outward(d.from)), point(at, bendStart), point(figure, bendEnd), point(figure, bendEnd + out * GAP)], {
-    colour: d.colour,
-    weight: 'hairline',
-  });
+  const line = stroke(
+    [point(at, on.outward(d.from)), point(at, bendStart), point(figure, bendEnd), point(figure, bendEnd + out * GAP)],
+    {
+      colour: d.colour,
+      weight: 'hairline',
+    },
+  );
   // Figures are centred on their line: capitals are 0.73 of the em high.
   const middle = figure + 0.365 * DIMENSION_SIZE;
   const end = point(middle, bendEnd + out * 1.6 * GAP);
   return [
     { ...line, of: d.of },
-    { kind: 'text', text: d.text, x: end.x, y: end.y, size: DIMENSION_SIZE, anchor: 'end', turned: across, colour: d.colour, of: d.of },
+    {
+      kind: 'text',
+      text: d.text,
+      x: end.x,
+      y: end.y,
+      size: DIMENSION_SIZE,
+      anchor: 'end',
+      turned: across,
+      colour: d.colour,
+      of: d.of,
+    },
   ];
 }

@@ -23,7 +23,10 @@ export interface LaidOutDrawing {
  * A drawing at the largest standard scale that fits `room` (millimetres of paper), with its figures, labels, pins and a
  * scale bar. The picture is as wide as the room and as high as it must be. Throws when the room holds no drawing at all.
  */
-export function layOutDrawing(drawing: SheetDrawing, room: { readonly width: number; readonly height: number }): LaidOutDrawing {
+export function layOutDrawing(
+  drawing: SheetDrawing,
+  room: { readonly width: number; readonly height: number },
+): LaidOutDrawing {
   const { extents, unit } = drawing;
   const leftBand = dimensionBand(drawing.up);
   const bottomBand = dimensionBand(drawing.across);
@@ -60,16 +63,35 @@ export function layOutDrawing(drawing: SheetDrawing, room: { readonly width: num
     ...across.shapes,
     ...up.shapes,
     ...drawMarks(drawing.items, to),
-    ...layOutLabels(drawing.items.filter((i) => i.kind === 'label'), drawing.keepClear, to),
+    ...layOutLabels(
+      drawing.items.filter((i) => i.kind === 'label'),
+      drawing.keepClear,
+      to,
+    ),
     ...scaleBar(denominator, unit, 0, footer),
     ...(leftOut > 0 ? [sayLeftOut(leftOut, room.width, footer + 3)] : []),
   ];
-  return { picture: { width: room.width, height: footer + FOOTER, shapes, description: drawing.description }, denominator, leftOut };
+  return {
+    picture: { width: room.width, height: footer + FOOTER, shapes, description: drawing.description },
+    denominator,
+    leftOut,
+  };
 }
 
 const drawContours = (items: readonly DrawingItem[], to: OnPaper): PaperShape[] =>
   items.flatMap((item) =>
-    item.kind === 'contour' ? [{ kind: 'path' as const, d: contourOnPaper(to, item.contour), line: item.line, fill: item.fill, of: item.of, set: item.set }] : [],
+    item.kind === 'contour'
+      ? [
+          {
+            kind: 'path' as const,
+            d: contourOnPaper(to, item.contour),
+            line: item.line,
+            fill: item.fill,
+            of: item.of,
+            set: item.set,
+          },
+        ]
+      : [],
   );
 
 const drawMarks = (items: readonly DrawingItem[], to: OnPaper): PaperShape[] =>

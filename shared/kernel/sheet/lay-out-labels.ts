@@ -21,7 +21,8 @@ const overlaps = (a: Extents, b: Extents) => a.minX < b.maxX && b.minX < a.maxX 
 export function layOutLabels(labels: readonly Label[], keepClear: readonly Extents[], to: OnPaper): PaperShape[] {
   const taken: Extents[] = [];
   const clear = keepClear.map((e) => areaOnPaper(to, e));
-  const isFree = (place: Extents, onFeature: boolean) => !taken.some((t) => overlaps(t, place)) && (onFeature || !clear.some((c) => overlaps(c, place)));
+  const isFree = (place: Extents, onFeature: boolean) =>
+    !taken.some((t) => overlaps(t, place)) && (onFeature || !clear.some((c) => overlaps(c, place)));
   return labels.flatMap((label) => {
     for (const [lines, size, spot] of choices(label)) {
       const place = boxIn(areaOnPaper(to, spot.area), lines, size, spot);
@@ -36,7 +37,8 @@ export function layOutLabels(labels: readonly Label[], keepClear: readonly Exten
 /** Wordings, each at every size and spot, best first. */
 function* choices(label: Label): Generator<[readonly string[], number, LabelSpot]> {
   for (const [i, text] of label.texts.entries())
-    for (const size of i === label.texts.length - 1 ? [...SIZES, LEAST_SIZE] : SIZES) for (const spot of label.spots) yield [text.split('\n'), size, spot];
+    for (const size of i === label.texts.length - 1 ? [...SIZES, LEAST_SIZE] : SIZES)
+      for (const spot of label.spots) yield [text.split('\n'), size, spot];
 }
 
 function areaOnPaper(to: OnPaper, e: Extents): Extents {
@@ -46,20 +48,31 @@ function areaOnPaper(to: OnPaper, e: Extents): Extents {
 }
 
 /** The words' box on paper within an area, or undefined when they do not fit. */
-function boxIn(area: Extents, lines: readonly string[], size: number, { turned, close }: LabelSpot): Extents | undefined {
+function boxIn(
+  area: Extents,
+  lines: readonly string[],
+  size: number,
+  { turned, close }: LabelSpot,
+): Extents | undefined {
   const long = Math.max(...lines.map(countCharacters)) * CHARACTER_WIDTH * size + 2 * MARGIN;
   const high = lines.length * size * LINE;
   const [width, height] = turned ? [high, long] : [long, high];
   if (width > area.maxX - area.minX || height > area.maxY - area.minY) return undefined;
-  const left = close === 'left' ? area.minX : close === 'right' ? area.maxX - width : (area.minX + area.maxX - width) / 2;
-  const top = close === 'top' ? area.minY : close === 'bottom' ? area.maxY - height : (area.minY + area.maxY - height) / 2;
+  const left =
+    close === 'left' ? area.minX : close === 'right' ? area.maxX - width : (area.minX + area.maxX - width) / 2;
+  const top =
+    close === 'top' ? area.minY : close === 'bottom' ? area.maxY - height : (area.minY + area.maxY - height) / 2;
   return { minX: left, maxX: left + width, minY: top, maxY: top + height };
 }
 
 function groundUnder(label: Label, spot: LabelSpot, area: Extents): PaperShape[] {
   if (!label.ground || spot.onFeature) return [];
   const inset = 0.2;
-  return [box(area.minX + inset, area.minY + inset, area.maxX - area.minX - 2 * inset, area.maxY - area.minY - 2 * inset, { fill: label.ground })];
+  return [
+    box(area.minX + inset, area.minY + inset, area.maxX - area.minX - 2 * inset, area.maxY - area.minY - 2 * inset, {
+      fill: label.ground,
+    }),
+  ];
 }
 
 function drawLabel(label: Label, lines: readonly string[], size: number, spot: LabelSpot, area: Extents): PaperShape[] {
@@ -67,6 +80,16 @@ function drawLabel(label: Label, lines: readonly string[], size: number, spot: L
   return lines.map((text, i) => {
     const off = (i - (lines.length - 1) / 2) * size * LINE + 0.365 * size;
     const base = spot.turned ? { x: middle.x + off, y: middle.y } : { x: middle.x, y: middle.y + off };
-    return { kind: 'text', text, ...base, size, anchor: 'middle', turned: spot.turned ?? false, bold: label.bold ?? false, colour: label.colour, of: label.of };
+    return {
+      kind: 'text',
+      text,
+      ...base,
+      size,
+      anchor: 'middle',
+      turned: spot.turned ?? false,
+      bold: label.bold ?? false,
+      colour: label.colour,
+      of: label.of,
+    };
   });
 }

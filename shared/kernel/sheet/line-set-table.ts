@@ -9,7 +9,13 @@ import { cutterTag, type CutterGroup } from './cutter-groups.ts';
 import { lineLook } from './line-look.ts';
 import type { SheetCell, SheetTable } from './sheet-model.ts';
 
-const SIDES: Record<CutterSide, string> = { inside: 'inside', outside: 'outside', on: 'on the line', waste: 'waste side', none: '–' };
+const SIDES: Record<CutterSide, string> = {
+  inside: 'inside',
+  outside: 'outside',
+  on: 'on the line',
+  waste: 'waste side',
+  none: '–',
+};
 const MOST_PASSES = 6;
 
 const COLUMNS: SheetTable['columns'] = [
@@ -29,7 +35,9 @@ const totalLength = (set: LineSet): number =>
 
 function passesText(passes: readonly number[], unit: Unit): string {
   const texts = passes.map((p) => formatLength(p, unit));
-  return texts.length <= MOST_PASSES ? texts.join(', ') : `${texts.length} passes: ${texts[0]}, ${texts[1]} … ${texts[texts.length - 1]}`;
+  return texts.length <= MOST_PASSES
+    ? texts.join(', ')
+    : `${texts.length} passes: ${texts[0]}, ${texts[1]} … ${texts[texts.length - 1]}`;
 }
 
 /** "1", "2", "or 2" (the second of two layers that say one cut), "–" for what is not cut. */
@@ -44,7 +52,12 @@ function orders(sets: readonly LineSet[]): string[] {
 }
 
 /** The line sets that the files of `layers` hold for one face, in cutting order, as rows: what runs where, how deep, how often. */
-export function lineSetTable(worked: WorkedFrame, face: Face, layers: ReadonlyMap<string, DrawingLayer>, groups: readonly CutterGroup[]): SheetTable {
+export function lineSetTable(
+  worked: WorkedFrame,
+  face: Face,
+  layers: ReadonlyMap<string, DrawingLayer>,
+  groups: readonly CutterGroup[],
+): SheetTable {
   const { unit } = worked.particulars;
   const sets = worked[face].lineSets.filter((s) => layers.has(lineSetKey(s)));
   const order = orders(sets);
@@ -60,7 +73,10 @@ export function lineSetTable(worked: WorkedFrame, face: Face, layers: ReadonlyMa
       { text: String(layer.colour), value: layer.colour, swatch: { kind: 'layer', hex: aciHex(layer.colour) } },
       { text: set.cutter === null ? '–' : cutterTag(groups, set.cutter) },
       { text: side },
-      { text: set.cutter === null ? '–' : `${formatLength(set.depth, unit)}${climbs ? ', climbs' : ''}`, value: set.depth },
+      {
+        text: set.cutter === null ? '–' : `${formatLength(set.depth, unit)}${climbs ? ', climbs' : ''}`,
+        value: set.depth,
+      },
       { text: set.passes.length === 0 ? '–' : passesText(set.passes, unit) },
       { text: String(set.shapes.length), value: set.shapes.length },
       { text: formatLength(length, unit), value: length },

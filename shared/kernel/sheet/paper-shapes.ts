@@ -10,7 +10,8 @@ const rounded = (value: number): number => Number(value.toFixed(6));
 const at = (p: Point): string => `${rounded(p.x)} ${rounded(p.y)}`;
 
 /** Path data of straight lines through points. */
-export const linePath = (points: readonly Point[], closed = false): string => `${points.map((p, i) => `${i === 0 ? 'M' : 'L'}${at(p)}`).join('')}${closed ? 'Z' : ''}`;
+export const linePath = (points: readonly Point[], closed = false): string =>
+  `${points.map((p, i) => `${i === 0 ? 'M' : 'L'}${at(p)}`).join('')}${closed ? 'Z' : ''}`;
 
 /** Takes a place on the board to a place on paper: x = left + x·scale, y = bottom − y·scale (paper's Y runs down). */
 export interface OnPaper {
@@ -37,9 +38,23 @@ export const stroke = (points: readonly Point[], line: LineLook): PaperShape => 
   line,
 });
 
-export const box = (x: number, y: number, width: number, height: number, look: { line?: LineLook; fill?: SheetColour }): PaperShape => ({
+export const box = (
+  x: number,
+  y: number,
+  width: number,
+  height: number,
+  look: { line?: LineLook; fill?: SheetColour },
+): PaperShape => ({
   kind: 'path',
-  d: linePath([{ x, y }, { x: x + width, y }, { x: x + width, y: y + height }, { x, y: y + height }], true),
+  d: linePath(
+    [
+      { x, y },
+      { x: x + width, y },
+      { x: x + width, y: y + height },
+      { x, y: y + height },
+    ],
+    true,
+  ),
   ...look,
 });
 
@@ -48,12 +63,22 @@ export const arcPath = (from: Point, to: Point, radius: number, sweep: 0 | 1): s
   `M${at(from)}A${rounded(radius)} ${rounded(radius)} 0 0 ${sweep} ${at(to)}`;
 
 export function disc(centre: Point, radius: number, look: { line?: LineLook; fill?: SheetColour }): PaperShape {
-  const [left, right] = [{ x: centre.x - radius, y: centre.y }, { x: centre.x + radius, y: centre.y }];
-  return { kind: 'path', d: `${arcPath(left, right, radius, 1)}${arcPath(right, left, radius, 1).replace(/^M[^A]*/, '')}Z`, ...look };
+  const [left, right] = [
+    { x: centre.x - radius, y: centre.y },
+    { x: centre.x + radius, y: centre.y },
+  ];
+  return {
+    kind: 'path',
+    d: `${arcPath(left, right, radius, 1)}${arcPath(right, left, radius, 1).replace(/^M[^A]*/, '')}Z`,
+    ...look,
+  };
 }
 
 /** A filled arrow head whose tip is at `tip`, pointing along `angle` (radians on paper, Y down). */
 export function arrowHead(tip: Point, angle: number, length: number, fill: SheetColour): PaperShape {
-  const back = (turn: number) => ({ x: tip.x - length * Math.cos(angle + turn), y: tip.y - length * Math.sin(angle + turn) });
+  const back = (turn: number) => ({
+    x: tip.x - length * Math.cos(angle + turn),
+    y: tip.y - length * Math.sin(angle + turn),
+  });
   return { kind: 'path', d: linePath([tip, back(0.38), back(-0.38)], true), fill };
 }

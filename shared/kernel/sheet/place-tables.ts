@@ -20,7 +20,15 @@ export function dadoTable(worked: WorkedFrame): SheetTable {
     length(e.maxY),
     length(depth),
   ]);
-  const columns = [left('tag', 'Dado'), left('part', 'Box part'), right('x1', 'Left side'), right('x2', 'Right side'), right('y1', 'Lower side'), right('y2', 'Upper side'), right('depth', 'Depth')];
+  const columns = [
+    left('tag', 'Dado'),
+    left('part', 'Box part'),
+    right('x1', 'Left side'),
+    right('x2', 'Right side'),
+    right('y1', 'Lower side'),
+    right('y2', 'Upper side'),
+    right('depth', 'Depth'),
+  ];
   return { columns, rows, whenEmpty: 'No dados: the back is only squared.' };
 }
 

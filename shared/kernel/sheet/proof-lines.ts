@@ -14,14 +14,22 @@ function gatherNames(names: readonly string[]): string {
     const key = where.join(' and ');
     whatsByWhere.set(key, [...(whatsByWhere.get(key) ?? []), what]);
   }
-  return [...whatsByWhere].map(([where, whats]) => (where === '' ? whats.join(', ') : `${where}: ${whats.join(', ')}`)).join('; ');
+  return [...whatsByWhere]
+    .map(([where, whats]) => (where === '' ? whats.join(', ') : `${where}: ${whats.join(', ')}`))
+    .join('; ');
 }
 
 /** What reading the files back found: passed with what was looked at, or each check that does not hold. */
 export function proofLines(proof: Proof | null): SheetLine[] {
   if (proof === null) return [{ word: 'Not proved.', text: 'No files have been written for this sheet.' }];
   const { checks } = proof;
-  if (proof.ok) return [{ word: 'Passed.', text: `${checks.length} of ${checks.length} checks hold. ${gatherNames(checks.map((c) => c.name))}.` }];
+  if (proof.ok)
+    return [
+      {
+        word: 'Passed.',
+        text: `${checks.length} of ${checks.length} checks hold. ${gatherNames(checks.map((c) => c.name))}.`,
+      },
+    ];
   const failed = checks.filter((c) => !c.ok);
   return [
     { word: 'Failed.', colour: 'stop', text: `${failed.length} of ${checks.length} checks do not hold. Do not cut.` },

@@ -1,4 +1,5 @@
 import type { CornerResidue } from '../line-sets/corner-residue.ts';
+import { SAME } from '../tolerances.ts';
 import { formatLength } from '../units/format-length.ts';
 import type { WorkedFrame } from '../worked-frame.ts';
 import type { SheetCell, SheetTable } from './sheet-model.ts';
@@ -10,7 +11,9 @@ interface Alike {
 }
 
 const signature = (r: CornerResidue) =>
-  [r.angle, ...r.levels.flatMap((l) => [l.depth, l.lifted.radius, l.unlifted.radius])].map((n) => n.toFixed(6)).join(' ');
+  [r.angle, ...r.levels.flatMap((l) => [l.depth, l.lifted.radius, l.unlifted.radius])]
+    .map((n) => n.toFixed(6))
+    .join(' ');
 
 function alikeCorners(residues: readonly CornerResidue[]): Alike[] {
   const groups = new Map<string, Alike>();
@@ -52,5 +55,5 @@ export function residueTable(worked: WorkedFrame): SheetTable {
 function formatDegrees(radians: number): string {
   const degrees = (radians * 180) / Math.PI;
   const shown = Number(degrees.toFixed(2));
-  return `${Math.abs(shown - degrees) < 1e-6 ? '' : '≈'}${shown}°`;
+  return `${Math.abs(shown - degrees) < SAME ? '' : '≈'}${shown}°`;
 }

@@ -21,10 +21,27 @@ export function scaleBar(denominator: number, unit: Unit, left: number, top: num
   const start = left + words.length * 0.6 * 2.6 + 4;
   const end = start + length * scale;
   const base = top + 3;
-  const text = (x: number, content: string, bold: boolean): PaperShape => ({ kind: 'text', text: content, x, y: base, size: 2.6, anchor: 'start', bold, colour: 'ink' });
+  const text = (x: number, content: string, bold: boolean): PaperShape => ({
+    kind: 'text',
+    text: content,
+    x,
+    y: base,
+    size: 2.6,
+    anchor: 'start',
+    bold,
+    colour: 'ink',
+  });
   return [
     text(left, words, true),
-    stroke([{ x: start, y: base - 2 }, { x: start, y: base }, { x: end, y: base }, { x: end, y: base - 2 }], line),
+    stroke(
+      [
+        { x: start, y: base - 2 },
+        { x: start, y: base },
+        { x: end, y: base },
+        { x: end, y: base - 2 },
+      ],
+      line,
+    ),
     text(end + 2, formatWithUnit(length, unit), false),
   ];
 }

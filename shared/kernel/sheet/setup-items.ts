@@ -12,9 +12,19 @@ import type { DrawingItem, PinDimension } from './sheet-drawing.ts';
 
 /** The board as it lies on the pins: two below it, one at its left (3-2-1 locating; where they stand is the machine's). */
 export function boardItems(board: Extents): DrawingItem[] {
-  const at = (x: number, y: number) => ({ x: board.minX + x * (board.maxX - board.minX), y: board.minY + y * (board.maxY - board.minY) });
+  const at = (x: number, y: number) => ({
+    x: board.minX + x * (board.maxX - board.minX),
+    y: board.minY + y * (board.maxY - board.minY),
+  });
   return [
-    { kind: 'contour', contour: rectangle(board), line: { colour: 'pencil', weight: 'thin' }, fill: 'board', of: ['blank'], set: '' },
+    {
+      kind: 'contour',
+      contour: rectangle(board),
+      line: { colour: 'pencil', weight: 'thin' },
+      fill: 'board',
+      of: ['blank'],
+      set: '',
+    },
     { kind: 'pin', at: at(0.12, 0), side: 'below' },
     { kind: 'pin', at: at(0.7, 0), side: 'below' },
     { kind: 'pin', at: at(0, 0.3), side: 'left' },
@@ -30,14 +40,19 @@ export function lineSetItems(work: FaceWork, layers: ReadonlyMap<string, Drawing
 }
 
 function shapeItem(set: LineSet, shape: LineSet['shapes'][number]): DrawingItem {
-  const contour = shape.kind === 'contour' ? shape.contour : { closed: false, vertices: shape.points.map(({ x, y }) => ({ x, y, bulge: 0 })) };
+  const contour =
+    shape.kind === 'contour'
+      ? shape.contour
+      : { closed: false, vertices: shape.points.map(({ x, y }) => ({ x, y, bulge: 0 })) };
   return { kind: 'contour', contour, line: lineLook(set.set), of: shape.of, set: lineSetKey(set) };
 }
 
 /** Around the board and every line on it. */
 export const workExtents = (work: FaceWork): Extents =>
   work.lineSets
-    .flatMap((s) => s.shapes.map((shape) => (shape.kind === 'contour' ? contourExtents(shape.contour) : pointExtents(shape.points))))
+    .flatMap((s) =>
+      s.shapes.map((shape) => (shape.kind === 'contour' ? contourExtents(shape.contour) : pointExtents(shape.points))),
+    )
     .reduce((a, b) => joinExtents(a, b), work.board);
 
 /** Where the squaring lines run in the back setup; edges that are not squared are the board's own. */
@@ -48,7 +63,12 @@ export function squaredOnBack({ flip, squaredCorner: { x, y }, squared }: BlankP
 }
 
 /** A place's dimension from the pins, with the length as people read it. */
-export const dimensionAt = (at: number, from: number, unit: Unit, rest: Pick<PinDimension, 'colour' | 'of' | 'always'>): PinDimension => ({
+export const dimensionAt = (
+  at: number,
+  from: number,
+  unit: Unit,
+  rest: Pick<PinDimension, 'colour' | 'of' | 'always'>,
+): PinDimension => ({
   at,
   from,
   text: formatLength(at, unit),

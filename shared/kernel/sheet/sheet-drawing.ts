@@ -66,7 +66,12 @@ export type DrawingItem =
   /** Where both setups measure from. */
   | { readonly kind: 'origin'; readonly at: Point }
   /** A corner marked with a filled quarter disc; `inward` points into the board. */
-  | { readonly kind: 'corner mark'; readonly at: Point; readonly inward: { readonly x: 1 | -1; readonly y: 1 | -1 }; readonly colour: SheetColour };
+  | {
+      readonly kind: 'corner mark';
+      readonly at: Point;
+      readonly inward: { readonly x: 1 | -1; readonly y: 1 | -1 };
+      readonly colour: SheetColour;
+    };
 
 /** A drawing to scale with dimensions from the pins. */
 export interface SheetDrawing {

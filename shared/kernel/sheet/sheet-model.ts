@@ -26,7 +26,7 @@ export interface SheetTitleBlock {
   readonly identification: string;
   readonly title: string;
   readonly documentType: string;
-  /** The letter, or 'draft'. */
+  /** The letter, or 'draft'; '' for what has none of its own, as a cover. */
   readonly revision: string;
   /** Day, as 2026-03-31. */
   readonly dateOfIssue: string;
@@ -65,8 +65,19 @@ export interface SheetTable {
 /** Parts of a page, in reading order. */
 export type SheetBlock =
   | { readonly kind: 'drawing'; readonly id: string; readonly title: string; readonly drawing: SheetDrawing }
-  | { readonly kind: 'pictures'; readonly id: string; readonly title: string; readonly pictures: readonly { readonly caption: string; readonly picture: PaperPicture }[] }
-  | { readonly kind: 'table'; readonly id: string; readonly title: string; readonly table: SheetTable; readonly after: readonly string[] }
+  | {
+      readonly kind: 'pictures';
+      readonly id: string;
+      readonly title: string;
+      readonly pictures: readonly { readonly caption: string; readonly picture: PaperPicture }[];
+    }
+  | {
+      readonly kind: 'table';
+      readonly id: string;
+      readonly title: string;
+      readonly table: SheetTable;
+      readonly after: readonly string[];
+    }
   | {
       readonly kind: 'list';
       readonly id: string;

@@ -3,7 +3,12 @@
  * (least squares, by pooling neighbours that push each other), order kept, all within `low` … `high`.
  * `wanted` must rise. Returns undefined when the line is too short for them; [] for none.
  */
-export function spreadPlaces(wanted: readonly number[], pitch: number, low: number, high: number): number[] | undefined {
+export function spreadPlaces(
+  wanted: readonly number[],
+  pitch: number,
+  low: number,
+  high: number,
+): number[] | undefined {
   if (wanted.length === 0) return [];
   if ((wanted.length - 1) * pitch > high - low) return undefined;
   // Taking i·pitch off each place turns "apart by pitch" into "not falling": a pooled running mean solves it.
@@ -19,6 +24,8 @@ export function spreadPlaces(wanted: readonly number[], pitch: number, low: numb
   });
   const highest = high - (wanted.length - 1) * pitch;
   return pools
-    .flatMap((pool) => Array.from({ length: pool.count }, () => Math.min(highest, Math.max(low, pool.sum / pool.count))))
+    .flatMap((pool) =>
+      Array.from({ length: pool.count }, () => Math.min(highest, Math.max(low, pool.sum / pool.count))),
+    )
     .map((place, i) => place + i * pitch);
 }

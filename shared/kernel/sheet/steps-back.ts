@@ -13,9 +13,13 @@ function wasteWords(worked: WorkedFrame): string {
   const lines = squaredOnBack(worked.blank);
   const rims = [lines.minX - rough.minX, rough.maxX - lines.maxX, lines.minY - rough.minY, rough.maxY - lines.maxY];
   if (setup.squaring === 'all-edges')
-    return Math.max(...rims) - kerf > SAME ? 'A rim comes free all round, so hold down the board itself, not its rim.' : 'Nothing comes free: the cutter takes the whole rim.';
+    return Math.max(...rims) - kerf > SAME
+      ? 'A rim comes free all round, so hold down the board itself, not its rim.'
+      : 'Nothing comes free: the cutter takes the whole rim.';
   const strip = setup.trim - kerf;
-  return strip > SAME ? `Strips ${formatWithUnit(strip, unit)} wide come free there: hold them down.` : 'Nothing comes free: the cutter takes the whole strip.';
+  return strip > SAME
+    ? `Strips ${formatWithUnit(strip, unit)} wide come free there: hold them down.`
+    : 'Nothing comes free: the cutter takes the whole strip.';
 }
 
 /** What must be done on the back before the board is turned, in order. */
@@ -41,9 +45,20 @@ export function stepsBeforeTurning(worked: WorkedFrame): SheetLine[] {
       text: 'back face up, its lower left corner in the pins. Rough edges will do here.',
     },
     ...(dados.length > 0
-      ? [{ word: 'Cut the dados', text: 'first. Try an offcut of the box panel in one before going on; measure the depth.' }]
+      ? [
+          {
+            word: 'Cut the dados',
+            text: 'first. Try an offcut of the box panel in one before going on; measure the depth.',
+          },
+        ]
       : []),
-    { word: 'Square', text: `${edges} in the same clamping: do not loosen the board between dados and squaring.${depth} ${free}` },
-    { word: 'Mark', text: 'the squared corner with a pencil on this face, then loosen the board and go to the next sheet.' },
+    {
+      word: 'Square',
+      text: `${edges} in the same clamping: do not loosen the board between dados and squaring.${depth} ${free}`,
+    },
+    {
+      word: 'Mark',
+      text: 'the squared corner with a pencil on this face, then loosen the board and go to the next sheet.',
+    },
   ];
 }

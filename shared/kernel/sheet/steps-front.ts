@@ -8,16 +8,27 @@ import type { WorkedFrame } from '../worked-frame.ts';
 
 import type { SheetLine } from './sheet-model.ts';
 
-const cutsOpenings = (worked: WorkedFrame) => worked.front.lineSets.some((s) => s.set === 'OPENING' && s.shapes.length > 0);
+const cutsOpenings = (worked: WorkedFrame) =>
+  worked.front.lineSets.some((s) => s.set === 'OPENING' && s.shapes.length > 0);
 
 /** Where an edge's entered size is true, and how far the cutter's axis runs inside it. `which` says which openings when there are several kinds. */
-function sizeOf(worked: WorkedFrame, cut: OpeningCut, which: string, openingLines: FileProfile['openingLines']): SheetLine[] {
+function sizeOf(
+  worked: WorkedFrame,
+  cut: OpeningCut,
+  which: string,
+  openingLines: FileProfile['openingLines'],
+): SheetLine[] {
   const { unit, thickness } = worked.particulars;
   const length = (value: number) => formatWithUnit(value, unit);
   const at =
-    cut.heldDepth === 0 ? 'at the face' : cut.heldDepth === thickness ? `at the back, ${length(thickness)} below the face` : `${length(cut.heldDepth)} below the face`;
+    cut.heldDepth === 0
+      ? 'at the face'
+      : cut.heldDepth === thickness
+        ? `at the back, ${length(thickness)} below the face`
+        : `${length(cut.heldDepth)} below the face`;
   const narrowing = cut.atFace - cut.atBack;
-  const taper = narrowing < SAME ? '' : ` At the back each opening is ${length(narrowing)} smaller a side than at the face.`;
+  const taper =
+    narrowing < SAME ? '' : ` At the back each opening is ${length(narrowing)} smaller a side than at the face.`;
   const offset = length(cut.axisOffset);
   const lines = {
     both:
@@ -28,7 +39,10 @@ function sizeOf(worked: WorkedFrame, cut: OpeningCut, which: string, openingLine
   };
   return [
     { word: `Entered size${which}`, text: `is true ${at} (z0 = ${formatLength(cut.heldDepth, unit)}).${taper}` },
-    { word: openingLines === 'both' ? `Cut one, not both${which}.` : `Opening line${which}.`, text: lines[openingLines] },
+    {
+      word: openingLines === 'both' ? `Cut one, not both${which}.` : `Opening line${which}.`,
+      text: lines[openingLines],
+    },
   ];
 }
 
@@ -40,7 +54,12 @@ export function sizeLines(worked: WorkedFrame, openingLines: FileProfile['openin
     const { particulars } = worked;
     const square = isSquare(set);
     const cut = openingCut(particulars, edgeOfOpening(particulars.edge, { square }));
-    return sizeOf(worked, cut, sets.length === 1 ? '' : square ? ' of square openings' : ' of beaded openings', openingLines);
+    return sizeOf(
+      worked,
+      cut,
+      sets.length === 1 ? '' : square ? ' of square openings' : ' of beaded openings',
+      openingLines,
+    );
   });
 }
 
@@ -48,8 +67,13 @@ export function sizeLines(worked: WorkedFrame, openingLines: FileProfile['openin
 export function stepsOnFront(worked: WorkedFrame): SheetLine[] {
   const lifts = worked.front.lineSets.some((s) => s.set === 'CORNER_LIFT' && s.shapes.length > 0);
   return [
-    { word: 'Check', text: 'that both edges against the pins are the squared ones and that no chips lie under the board.' },
-    ...(cutsOpenings(worked) ? [{ word: 'Cut the openings', text: 'in passes, the last one through. Each offcut comes free: hold it down.' }] : []),
+    {
+      word: 'Check',
+      text: 'that both edges against the pins are the squared ones and that no chips lie under the board.',
+    },
+    ...(cutsOpenings(worked)
+      ? [{ word: 'Cut the openings', text: 'in passes, the last one through. Each offcut comes free: hold it down.' }]
+      : []),
     ...(lifts
       ? [
           {
@@ -60,6 +84,9 @@ export function stepsOnFront(worked: WorkedFrame): SheetLine[] {
           },
         ]
       : []),
-    { word: 'Perimeter last,', text: 'outside, through. The frame is free from its rim then: hold it down before the last pass.' },
+    {
+      word: 'Perimeter last,',
+      text: 'outside, through. The frame is free from its rim then: hold it down before the last pass.',
+    },
   ];
 }

@@ -20,7 +20,12 @@ const SWAPPED: Record<Flip, Record<EdgeSide, EdgeSide>> = {
 /** The four edges, lettered clockwise from the left with the back face up; those in `squared` will meet the pins. */
 export function turnedEdges(flip: Flip, squared: readonly EdgeSide[]): TurnedEdge[] {
   const sides = ['left', 'top', 'right', 'bottom'] as const;
-  return sides.map((before, i) => ({ letter: (['A', 'B', 'C', 'D'] as const)[i]!, before, after: SWAPPED[flip][before], squared: squared.includes(before) }));
+  return sides.map((before, i) => ({
+    letter: (['A', 'B', 'C', 'D'] as const)[i]!,
+    before,
+    after: SWAPPED[flip][before],
+    squared: squared.includes(before),
+  }));
 }
 
 /** The edge that is carried over, and the one that it turns about. */

@@ -3,7 +3,7 @@ import type { Flip } from '../particulars/particulars.ts';
 import type { PaperPicture, PaperShape } from './paper-picture.ts';
 import { arcPath, arrowHead, linePath, stroke } from './paper-shapes.ts';
 import { movingEdge, turnedEdges } from './turn-edges.ts';
-import { letterMark } from './turn-picture.ts';
+import { letterMark } from './turn-board.ts';
 
 const THICK = 3;
 /** Room beside and below for letters and the machine's bed. */
@@ -20,7 +20,10 @@ interface Stand {
 function boardOnTheWay({ pivot, reach }: Stand, angle: number): PaperShape {
   const along = { x: -Math.cos(angle), y: -Math.sin(angle) };
   const across = { x: -along.y * (THICK / 2), y: along.x * (THICK / 2) };
-  const corner = (a: number, b: number) => ({ x: pivot.x + along.x * a + across.x * b, y: pivot.y + along.y * a + across.y * b });
+  const corner = (a: number, b: number) => ({
+    x: pivot.x + along.x * a + across.x * b,
+    y: pivot.y + along.y * a + across.y * b,
+  });
   const d = linePath([corner(4, 1), corner(reach - 4, 1), corner(reach - 4, -1), corner(4, -1)], true);
   return { kind: 'path', d, line: { colour: 'pencil', weight: 'hairline', dash: 'dashed' } };
 }
@@ -29,7 +32,15 @@ function boardOnTheWay({ pivot, reach }: Stand, angle: number): PaperShape {
 function boardLying({ pivot, reach }: Stand, side: 1 | -1): PaperShape {
   const [near, far] = [pivot.x + side, pivot.x + side * reach];
   const [bed, top] = [pivot.y, pivot.y - THICK];
-  const d = linePath([{ x: near, y: bed }, { x: far, y: bed }, { x: far, y: top }, { x: near, y: top }], true);
+  const d = linePath(
+    [
+      { x: near, y: bed },
+      { x: far, y: bed },
+      { x: far, y: top },
+      { x: near, y: top },
+    ],
+    true,
+  );
   return { kind: 'path', d, fill: 'board', line: { colour: 'ink', weight: 'thin' } };
 }
 
@@ -37,14 +48,32 @@ function arrowOver({ pivot, reach }: Stand): PaperShape[] {
   const arc = reach * 0.78;
   const start = { x: pivot.x - arc * Math.cos(0.35), y: pivot.y - arc * Math.sin(0.35) };
   const end = { x: pivot.x + arc * Math.cos(0.35), y: start.y };
-  return [{ kind: 'path', d: arcPath(start, end, arc, 1), line: { colour: 'ink', weight: 'thick' } }, arrowHead(end, Math.PI / 2 + 0.2, 4.5, 'ink')];
+  return [
+    { kind: 'path', d: arcPath(start, end, arc, 1), line: { colour: 'ink', weight: 'thick' } },
+    arrowHead(end, Math.PI / 2 + 0.2, 4.5, 'ink'),
+  ];
 }
 
 function sectionShapes(stand: Stand, width: number, lifted: string, pivotLetter: string): PaperShape[] {
   const { pivot, reach } = stand;
-  const text = (content: string, x: number, colour: 'back' | 'front'): PaperShape => ({ kind: 'text', text: content, x, y: pivot.y - THICK - 1.6, size: 2.6, anchor: 'middle', bold: true, colour });
+  const text = (content: string, x: number, colour: 'back' | 'front'): PaperShape => ({
+    kind: 'text',
+    text: content,
+    x,
+    y: pivot.y - THICK - 1.6,
+    size: 2.6,
+    anchor: 'middle',
+    bold: true,
+    colour,
+  });
   return [
-    stroke([{ x: 2, y: pivot.y }, { x: width - 2, y: pivot.y }], { colour: 'ink', weight: 'thick' }),
+    stroke(
+      [
+        { x: 2, y: pivot.y },
+        { x: width - 2, y: pivot.y },
+      ],
+      { colour: 'ink', weight: 'thick' },
+    ),
     ...[Math.PI / 4, Math.PI / 2, (3 * Math.PI) / 4].map((angle) => boardOnTheWay(stand, angle)),
     boardLying(stand, -1),
     boardLying(stand, 1),

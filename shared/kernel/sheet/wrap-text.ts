@@ -26,7 +26,8 @@ function breakBefore(characters: readonly string[], width: number): number {
     if (!isWithinLength(characters, i)) return i;
     withinLength ||= i;
   }
-  for (let i = width; i > width / 3; i--) if ('-/_'.includes(characters[i - 1]!) && !/\d/.test(characters[i]!)) return i;
+  for (let i = width; i > width / 3; i--)
+    if ('-/_'.includes(characters[i - 1]!) && !/\d/.test(characters[i]!)) return i;
   return withinLength || width;
 }
 

@@ -33,7 +33,14 @@ function findingsText(frames: readonly FrameRow[]): string {
   )}`;
 }
 
-function JobTitleBlock({ page, jobId }: { readonly page: JobPage | undefined; readonly jobId: string }) {
+interface JobTitleBlockProps {
+  readonly page: JobPage | undefined;
+  readonly jobId: string;
+  /** In place of what the page would say. */
+  readonly unknown: string;
+}
+
+function JobTitleBlock({ page, jobId, unknown }: JobTitleBlockProps) {
   const { shop, mayDo } = useSignedIn();
   const mayEdit = mayDo('edit-frames') && page !== undefined;
   const released = page?.frames.filter((row) => row.revision !== '').length ?? 0;
@@ -44,11 +51,11 @@ function JobTitleBlock({ page, jobId }: { readonly page: JobPage | undefined; re
     >
       <TitleCell label="Shop">{shop.name}</TitleCell>
       <TitleCell label="Job" main>
-        {page?.job.name ?? 'fetching'}
+        {page?.job.name ?? unknown}
       </TitleCell>
-      <TitleCell label="Findings">{page ? findingsText(page.frames) : 'fetching'}</TitleCell>
+      <TitleCell label="Findings">{page ? findingsText(page.frames) : unknown}</TitleCell>
       <TitleCell label="Revision" detail={page && plural(page.frames.length, 'frame')}>
-        {page ? `${released} released` : 'fetching'}
+        {page ? `${released} released` : unknown}
       </TitleCell>
     </TitleBlock>
   );
@@ -66,7 +73,9 @@ export function JobRoute() {
       title={name}
       crumbs={[{ label: 'Jobs', to: '/jobs' }, { label: name }]}
       aside={mayEdit && query.data ? <RenameJob job={query.data.job} /> : undefined}
-      titleBlock={<JobTitleBlock page={query.data} jobId={jobId} />}
+      titleBlock={
+        <JobTitleBlock page={query.data} jobId={jobId} unknown={query.isError ? 'not fetched' : 'fetching'} />
+      }
     >
       <Fetched query={query} what="the job">
         {({ frames }) => (

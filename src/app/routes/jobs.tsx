@@ -14,6 +14,7 @@ export function JobsRoute() {
   const query = useJobs();
   const jobs = query.data?.jobs.filter((job) => !job.removed);
   const mayEdit = mayDo('edit-frames');
+  const unknown = query.isError ? 'not fetched' : 'fetching';
   return (
     <Sheet
       title="Jobs"
@@ -27,10 +28,10 @@ export function JobsRoute() {
             Jobs
           </TitleCell>
           <TitleCell label="Frames" detail={jobs && `${plural(sum(jobs.map((job) => job.frames)), 'frame')}`}>
-            {jobs ? plural(jobs.length, 'job') : 'fetching'}
+            {jobs ? plural(jobs.length, 'job') : unknown}
           </TitleCell>
           <TitleCell label="Findings">
-            {jobs ? `${plural(sum(jobs.map((job) => job.withStops)), 'frame')} with stops` : 'fetching'}
+            {jobs ? `${plural(sum(jobs.map((job) => job.withStops)), 'frame')} with stops` : unknown}
           </TitleCell>
         </TitleBlock>
       }

@@ -1,4 +1,5 @@
 import type { Extents } from '#shared/kernel/contour/contour.ts';
+import type { Measured } from '#shared/kernel/height-field/measure-frame.ts';
 import type { Face } from '#shared/kernel/line-sets/line-set.ts';
 import type { FaceMesh } from '../mesh/face-mesh.ts';
 import type { Slice } from '../mesh/slice.ts';
@@ -70,5 +71,5 @@ export interface Answers {
   readonly look: Picture;
   readonly slice: Slice;
   readonly relief: Relief;
-  readonly measure: import('#shared/kernel/height-field/measure-frame.ts').Measured;
+  readonly measure: Measured;
 }

@@ -1,0 +1,45 @@
+import { formatWithUnit } from '#shared/kernel/units/format-length.ts';
+import type { Unit } from '#shared/kernel/units/unit.ts';
+import type { PictureFacts, Plane } from '../work/picture.ts';
+import type { Place } from './places.ts';
+import type { Step } from './steps.ts';
+
+interface Looked {
+  readonly steps: readonly Step[];
+  readonly done: number;
+  readonly place: Place;
+  readonly shown: 'front' | 'back' | 'both';
+  readonly plane: Plane | null;
+  readonly facts: PictureFacts | null;
+  readonly unit: Unit;
+}
+
+const SQUARE_MM_TO_CM = 100;
+
+const areaWords = (area: number, unit: Unit): string =>
+  unit === 'in' ? `≈${area.toFixed(2)} square inches` : `≈${(area / SQUARE_MM_TO_CM).toFixed(1)} square centimetres`;
+
+const piecesWords = (count: number) => (count === 0 ? 'Nothing has come free.' : count === 1 ? 'One piece has come free.' : `${count} pieces have come free.`);
+
+const FACE_WORDS = { front: 'Seen from the front', back: 'Seen from the back', both: 'Both faces about the fold' } as const;
+
+/** The step that was taken last, in a sentence. */
+export function stepSentence({ steps, done, facts, unit }: Pick<Looked, 'steps' | 'done' | 'facts' | 'unit'>): string {
+  const step = steps[done - 1];
+  if (!step) return 'The board as loaded, before any cut.';
+  const area = facts?.marked[step.face][step.order];
+  const marked = area === undefined ? '' : area === 0 ? ' It leaves no surface of its own here.' : ` Its surfaces here: ${areaWords(area, unit)}.`;
+  return `After step ${done} of ${steps.length}, ${step.face}, ${step.words.toLowerCase()}: ${step.detail}.${marked}`;
+}
+
+function planeWords({ runs, at }: Plane, unit: Unit): string {
+  return runs === 'upright' ? `Cut open at an upright plane ${formatWithUnit(at, unit)} from the left edge.` : `Cut open at a level plane ${formatWithUnit(at, unit)} from the lower edge.`;
+}
+
+/** What the picture shows, for people who do not see it. */
+export function describePart({ steps, done, place, shown, plane, facts, unit }: Looked): string {
+  const sentences = [`${place.words}.`, `${FACE_WORDS[shown]}.`, stepSentence({ steps, done, facts, unit })];
+  if (plane) sentences.push(planeWords(plane, unit));
+  if (facts) sentences.push(piecesWords(facts.loosePieces));
+  return sentences.join(' ');
+}

@@ -1,0 +1,225 @@
+import {
+  AmbientLight,
+  BufferAttribute,
+  BufferGeometry,
+  Color,
+  DirectionalLight,
+  DoubleSide,
+  Group,
+  LineBasicMaterial,
+  LineSegments,
+  Mesh,
+  MeshLambertMaterial,
+  OrthographicCamera,
+  Plane as ClippingPlane,
+  Quaternion,
+  Scene,
+  SRGBColorSpace,
+  Vector3,
+  WebGLRenderer,
+} from 'three';
+import type { Extents, Point } from '#shared/kernel/contour/contour.ts';
+import type { Face } from '#shared/kernel/line-sets/line-set.ts';
+import type { Flip } from '#shared/kernel/particulars/particulars.ts';
+import type { FaceMesh } from '../mesh/face-mesh.ts';
+import type { Slice } from '../mesh/slice.ts';
+import type { Hold } from '../model/turning.ts';
+import type { Picture, Plane, Rgb } from '../work/picture.ts';
+import { spreadOut, visibleHeight } from './lay-out.ts';
+
+/** Light that falls everywhere, and from the upper left of the screen. */
+const AMBIENT = 1.35;
+const LAMP = 2.1;
+
+/** What is shown of a picture. */
+export interface Showing {
+  /** Two copies: the part turned over beside the part, as in the spread. */
+  readonly both: boolean;
+  readonly loose: boolean;
+  readonly flip: Flip;
+}
+
+export interface SceneColours {
+  /** Of each face: untouched first, then each layer. */
+  readonly palettes: Readonly<Record<Face, readonly Rgb[]>>;
+  readonly inside: Rgb;
+  readonly ink: Rgb;
+}
+
+const colourOf = ([r, g, b]: Rgb): Color => new Color().setRGB(r / 255, g / 255, b / 255, SRGBColorSpace);
+
+function colourCorners(out: Float32Array, by: Uint8Array, palette: readonly Rgb[]): void {
+  const colours = palette.map(colourOf);
+  for (let i = 0; i < by.length; i++) (colours[by[i]!] ?? colours[0]!).toArray(out, 3 * i);
+}
+
+/** One copy of the part: its own materials, since each copy is cut by a plane of its own. */
+class Copy {
+  readonly group = new Group();
+  private readonly skin = new MeshLambertMaterial({ vertexColors: true, flatShading: true });
+  private readonly meshes: readonly [Mesh, Mesh, Mesh, LineSegments];
+
+  constructor(front: BufferGeometry, back: BufferGeometry, cap: BufferGeometry, outline: BufferGeometry, inside: MeshLambertMaterial, ink: LineBasicMaterial) {
+    this.meshes = [new Mesh(front, this.skin), new Mesh(back, this.skin), new Mesh(cap, inside), new LineSegments(outline, ink)];
+    for (const mesh of this.meshes) mesh.frustumCulled = false;
+    this.group.add(...this.meshes);
+  }
+
+  /** Keeps what lies left of an upright plane, or above a level one; frame view. */
+  cutAt(plane: Plane | null): void {
+    this.group.updateMatrixWorld(true);
+    const kept = plane && (plane.runs === 'upright' ? new ClippingPlane(new Vector3(-1, 0, 0), plane.at) : new ClippingPlane(new Vector3(0, 1, 0), -plane.at));
+    this.skin.clippingPlanes = kept ? [kept.applyMatrix4(this.group.matrixWorld)] : null;
+    this.meshes[2].visible = plane !== null;
+    this.meshes[3].visible = plane !== null;
+  }
+
+  dispose(): void {
+    this.skin.dispose();
+  }
+}
+
+/** The cut part in three dimensions on a canvas. It draws when it is told to, never by itself. */
+export class PartScene {
+  private readonly renderer: WebGLRenderer;
+  private readonly scene = new Scene();
+  private readonly camera = new OrthographicCamera();
+  private readonly geometries = { front: new BufferGeometry(), back: new BufferGeometry(), cap: new BufferGeometry(), outline: new BufferGeometry() };
+  private readonly inside = new MeshLambertMaterial({ side: DoubleSide });
+  private readonly ink = new LineBasicMaterial();
+  private readonly copies: readonly [Copy, Copy];
+  private region: Extents = { minX: 0, minY: 0, maxX: 1, maxY: 1 };
+  private thickness = 1;
+  private meshes: { front: FaceMesh; back: FaceMesh } | null = null;
+  private slice: Slice | null = null;
+  private size = { width: 1, height: 1 };
+  private showing: Showing = { both: false, loose: false, flip: 'side-to-side' };
+
+  /** Throws when the browser has no WebGL. */
+  constructor(canvas: HTMLCanvasElement) {
+    this.renderer = new WebGLRenderer({ canvas, antialias: true, alpha: true });
+    this.renderer.localClippingEnabled = true;
+    this.renderer.setClearAlpha(0);
+    const { front, back, cap, outline } = this.geometries;
+    this.copies = [new Copy(front, back, cap, outline, this.inside, this.ink), new Copy(front, back, cap, outline, this.inside, this.ink)];
+    const lamp = new DirectionalLight(undefined, LAMP);
+    lamp.position.set(-0.45, 0.6, 1);
+    this.camera.add(lamp, lamp.target);
+    this.scene.add(this.camera, new AmbientLight(undefined, AMBIENT), ...this.copies.map((copy) => copy.group));
+  }
+
+  /** A picture in colours. The place it is seen from stays. */
+  setPicture(picture: Picture, { palettes, inside, ink }: SceneColours): void {
+    for (const face of ['front', 'back'] as const) {
+      const geometry = this.geometries[face];
+      const { positions, index, by } = picture[face];
+      if (this.meshes?.[face] !== picture[face]) {
+        geometry.dispose();
+        geometry.setAttribute('position', new BufferAttribute(positions, 3));
+        geometry.setAttribute('color', new BufferAttribute(new Float32Array(positions.length), 3));
+        geometry.setIndex(new BufferAttribute(index, 1));
+      }
+      const colours = geometry.getAttribute('color');
+      colourCorners(colours.array as Float32Array, by, palettes[face]);
+      colours.needsUpdate = true;
+    }
+    this.meshes = picture;
+    this.region = picture.region;
+    this.thickness = picture.thickness;
+    this.inside.color = colourOf(inside);
+    this.ink.color = colourOf(ink);
+    this.setShowing(this.showing);
+  }
+
+  setShowing(showing: Showing): void {
+    this.showing = showing;
+    const places = spreadOut(this.region, this.thickness, showing);
+    this.copies.forEach(({ group }, i) => {
+      const place = places[i];
+      group.visible = place !== undefined;
+      if (!place) return;
+      group.quaternion.set(...place.turn);
+      group.position.set(-place.from.x, -place.from.y, -place.from.z).applyQuaternion(group.quaternion);
+      group.position.x += place.to.x;
+      group.position.y += place.to.y;
+    });
+    for (const face of ['front', 'back'] as const) {
+      const mesh = this.meshes?.[face];
+      if (mesh) this.geometries[face].setDrawRange(0, showing.loose ? Infinity : mesh.looseFrom);
+    }
+    this.geometries.cap.setDrawRange(0, showing.loose || !this.slice ? Infinity : this.slice.looseFrom);
+    this.geometries.outline.setDrawRange(0, showing.loose || !this.slice ? Infinity : this.slice.outlineLooseFrom / 3);
+  }
+
+  /** The plane takes effect at once, its slice once that is worked out. */
+  setSlice(plane: Plane | null, slice: Slice | null): void {
+    for (const copy of this.copies) copy.cutAt(plane);
+    if (slice === this.slice) return;
+    this.slice = slice;
+    const { cap, outline } = this.geometries;
+    cap.dispose();
+    outline.dispose();
+    cap.setAttribute('position', new BufferAttribute(slice?.positions ?? new Float32Array(), 3));
+    cap.setIndex(new BufferAttribute(slice?.index ?? new Uint32Array(), 1));
+    cap.deleteAttribute('normal');
+    cap.computeVertexNormals();
+    outline.setAttribute('position', new BufferAttribute(slice?.outline ?? new Float32Array(), 3));
+    this.setShowing(this.showing);
+  }
+
+  /** CSS pixels; the canvas' own size follows, its style never does. */
+  resize(width: number, height: number, pixelRatio: number): void {
+    this.size = { width, height };
+    this.renderer.setPixelRatio(Math.min(pixelRatio, 2));
+    this.renderer.setSize(width, height, false);
+  }
+
+  /** Length of the part to one CSS pixel, as it is held. */
+  lengthOfPixel(hold: Hold): number {
+    return visibleHeight(this.region, this.thickness, this.showing, this.size.width / this.size.height) / hold.zoom / this.size.height;
+  }
+
+  draw(hold: Hold): void {
+    const { width, height } = this.size;
+    const half = (this.lengthOfPixel(hold) * height) / 2;
+    const { camera } = this;
+    const reach = 8 * (this.region.maxX - this.region.minX + this.region.maxY - this.region.minY + this.thickness);
+    camera.left = (-half * width) / height;
+    camera.right = (half * width) / height;
+    camera.top = half;
+    camera.bottom = -half;
+    camera.near = 0;
+    camera.far = 2 * reach;
+    camera.quaternion.set(...hold.turn).invert();
+    camera.position.set(-hold.pan.x, -hold.pan.y, reach).applyQuaternion(camera.quaternion);
+    camera.updateProjectionMatrix();
+    this.renderer.render(this.scene, this.camera);
+  }
+
+  /** The place of the frame under a place of the screen (pixels from its middle, right and up), on the face that looks this way; null beside the board. */
+  placeUnder(hold: Hold, at: Point): Point | null {
+    const pixel = this.lengthOfPixel(hold);
+    const back = new Quaternion(...hold.turn).invert();
+    const eye = new Vector3(at.x * pixel - hold.pan.x, at.y * pixel - hold.pan.y, 0).applyQuaternion(back);
+    const ahead = new Vector3(0, 0, -1).applyQuaternion(back);
+    for (const { group } of this.copies) {
+      if (!group.visible) continue;
+      const home = group.quaternion.clone().invert();
+      const from = eye.clone().sub(group.position).applyQuaternion(home);
+      const way = ahead.clone().applyQuaternion(home);
+      const z = way.z < 0 ? 0 : -this.thickness;
+      const place = from.addScaledVector(way, (z - from.z) / way.z);
+      const { minX, minY, maxX, maxY } = this.region;
+      if (place.x >= minX && place.x <= maxX && place.y >= minY && place.y <= maxY) return { x: place.x, y: place.y };
+    }
+    return null;
+  }
+
+  dispose(): void {
+    for (const geometry of Object.values(this.geometries)) geometry.dispose();
+    for (const copy of this.copies) copy.dispose();
+    this.inside.dispose();
+    this.ink.dispose();
+    this.renderer.dispose();
+  }
+}
