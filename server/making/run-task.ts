@@ -4,6 +4,7 @@ import { buildJobSet } from '../layer-set/build-job-set.ts';
 import { buildLayerSet } from '../layer-set/build-layer-set.ts';
 import { safeName } from '../layer-set/safe-name.ts';
 import { writeSetupSheet } from '../pdf/write-setup-sheet.ts';
+import { proveFrame } from './prove-frame.ts';
 import { summarizeFrame } from './summarize-frame.ts';
 import type { TaskKind, Tasks } from './tasks.ts';
 
@@ -30,14 +31,7 @@ const RUN: { [K in TaskKind]: (input: Tasks[K]['input']) => Promise<Tasks[K]['re
     return { name: `${safeName(particulars.name, 'frame')}_draft_setup-sheet.pdf`, bytes: await writeSetupSheet(model, paper) };
   },
 
-  proof: async ({ set, profiles }) => {
-    const checks = [];
-    for (const profile of profiles) {
-      const { proof } = await buildLayerSet({ ...set, profile });
-      checks.push(...proof.checks.map((check) => ({ ...check, name: `${profile.flavour}: ${check.name}` })));
-    }
-    return { ok: checks.every((c) => c.ok), checks };
-  },
+  proof: async ({ particulars, profiles }) => proveFrame(particulars, profiles),
 
   summary: async (particulars) => summarizeFrame(particulars),
 };

@@ -1,5 +1,3 @@
-import { createRequire } from 'node:module';
-import { pathToFileURL } from 'node:url';
 import { Worker } from 'node:worker_threads';
 import { AppError } from '../errors.ts';
 import { toMakingError } from './making-error.ts';
@@ -19,16 +17,14 @@ interface Waiting {
   reject(error: unknown): void;
 }
 
-/**
- * Starts a worker thread on built files as they are, and on sources through tsx, which each thread must load for itself:
- * the thread that starts it may have been set up by something else.
- */
+// Not written in place, where the builder would take it for something to bundle.
+const SOURCES = './load-sources.mjs';
+
+/** Starts a worker thread on built files as they are, and on sources through tsx. */
 function startWorker(entry: URL): Worker {
-  const resourceLimits = { maxOldGenerationSizeMb: MEMORY_CAP_MB };
-  if (!entry.pathname.endsWith('.ts')) return new Worker(entry, { execArgv: [], resourceLimits });
-  const tsx = pathToFileURL(createRequire(import.meta.url).resolve('tsx/esm/api')).href;
-  const bootstrap = `const { register } = await import(${JSON.stringify(tsx)}); register(); await import(${JSON.stringify(entry.href)});`;
-  return new Worker(new URL(`data:text/javascript,${encodeURIComponent(bootstrap)}`), { execArgv: [], resourceLimits });
+  const fromSources = entry.pathname.endsWith('.ts');
+  const first = fromSources ? new URL(SOURCES, import.meta.url) : entry;
+  return new Worker(first, { workerData: entry.href, execArgv: [], resourceLimits: { maxOldGenerationSizeMb: MEMORY_CAP_MB } });
 }
 
 /**
@@ -47,6 +43,8 @@ export function startMakers(entry: URL, size: number): Makers {
       all.delete(worker);
       const at = idle.indexOf(worker);
       if (at >= 0) idle.splice(at, 1);
+      // Its place is free: somebody may be waiting for it.
+      next();
     });
     return worker;
   };

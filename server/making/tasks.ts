@@ -40,8 +40,8 @@ export interface Tasks {
   /** The setup sheet as it lies in the layer set. */
   'setup-sheet': { input: LayerSetInput; result: MadeFile };
   'draft-sheet': { input: DraftSheetInput; result: MadeFile };
-  /** Builds the set in each of the profiles; fails like one set, answers the checks of all. */
-  proof: { input: { set: Omit<LayerSetInput, 'profile'>; profiles: readonly FileProfile[] }; result: Proof };
+  /** Writes and reads back both DXF files in each of the profiles. */
+  proof: { input: { particulars: Particulars; profiles: readonly FileProfile[] }; result: Proof };
   summary: { input: Particulars; result: WorkedSummary };
 }
 

@@ -30,17 +30,18 @@ export const releaseService = ({ store, makers, now }: FramesGiven, frames: Fram
     const letter = nextLetter(frame.letter);
     const releasedAt = now();
     const file = new TextEncoder().encode(writeFrameFile(particulars));
-    const named = { shopName: frame.shopName, jobName: frame.jobName, author: who.name, note: request.note };
-    const set = { particulars, ...named, revision: letter, releasedAt: releasedAt.toISOString(), paper: 'A4' as const };
-    const proof = await makers.make('proof', { set, profiles: PROVED });
+    const proof = await makers.make('proof', { particulars, profiles: PROVED });
     if (!proof.ok) throw new AppError('proof-failed', `release of ${frameId}`, { details: { proof } });
 
     const revision = {
-      ...named,
       id: randomUUID(),
       shopId: who.shopId,
       frameId,
       letter,
+      note: request.note,
+      author: who.name,
+      jobName: frame.jobName,
+      shopName: frame.shopName,
       releasedAt,
       authorId: who.id,
       acknowledged: request.acknowledged,

@@ -13,7 +13,7 @@ import type { FrontLineSets } from '../line-sets/front-line-sets.ts';
 import { beadBase } from '../line-sets/held-depth.ts';
 import type { BeadedEdge, Particulars } from '../particulars/particulars.ts';
 import { sectionDifference } from '../section/section-difference.ts';
-import { beadShave, leastUnderBead, SAME } from '../tolerances.ts';
+import { beadShave, DEEPEST_DADO, leastUnderBead, SAME } from '../tolerances.ts';
 import { formatWithUnit } from '../units/format-length.ts';
 import type { Unit } from '../units/unit.ts';
 import type { Finding } from './finding.ts';
@@ -26,11 +26,29 @@ export function checkBeads(p: Particulars, contours: FrameContours, front: Front
   const cutters = beadCutters(p.cutters);
   if (edge.style !== 'beaded' || beaded.length === 0 || !cutters) return [];
   return [
+    ...checkBeadDepth(p, edge, contours),
     ...checkBeadCutters(p, edge, cutters, contours),
     ...front.beadProblems.map((problem) => collapseFinding(problem, p.unit)),
     ...checkFaceBetween(p, edge, beaded, contours, front.cut.atPlane),
     ...checkUnderBead(p, edge, beaded, dados),
     ...checkShave(p, edge, beaded),
+  ];
+}
+
+/** A quirk is a groove in the face: it may take as much of the board as a dado. */
+function checkBeadDepth(p: Particulars, edge: BeadedEdge, contours: FrameContours): Finding[] {
+  const [depth, most] = [beadBase(edge), p.thickness * DEEPEST_DADO];
+  if (depth <= most + SAME) return [];
+  return [
+    {
+      code: 'bead-too-deep',
+      level: 'stop',
+      text: `Bead and quirk go ${formatWithUnit(depth, p.unit)} deep into a board of ${formatWithUnit(p.thickness, p.unit)}.`,
+      remedy: `Take a smaller bead, or set it less far below the face: ${formatWithUnit(most, p.unit)} together at most.`,
+      numbers: { depth, most },
+      places: [wholeFrame(contours, 'front')],
+      field: 'edge.bead.radius',
+    },
   ];
 }
 

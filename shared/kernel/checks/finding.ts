@@ -16,6 +16,7 @@ export type FindingCode =
   | 'dado-outside-frame'
   | 'offset-collapses'
   | 'bead-collapses'
+  | 'bead-too-deep'
   | 'bead-cutter-differs'
   | 'quirk-narrower-than-cutter'
   | 'vee-over-bead'

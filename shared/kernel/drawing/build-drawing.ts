@@ -44,15 +44,17 @@ export function buildDrawing(worked: WorkedFrame, face: Face, profile: FileProfi
   const named = nameLayers(worked, profile);
   const origin = originOf(worked, face, profile.origin);
   const length = (value: number) => convertLength(value, drawn, unit);
-  const move = <P extends Point>(p: P): P => ({ ...p, x: length(p.x - origin.x), y: length(p.y - origin.y) });
+  const moveX = (x: number) => length(x - origin.x);
+  const moveY = (y: number) => length(y - origin.y);
 
   const draw = (shape: Shape, layer: string): DrawingEntity => {
     if (shape.kind === 'climb') {
-      const points = shape.points.map((p) => ({ ...move(p), z: length(p.z) }));
+      const points = shape.points.map((p) => ({ x: moveX(p.x), y: moveY(p.y), z: length(p.z) }));
       return { kind: 'polyline3d', layer, points: tidyPath(points, decimals) };
     }
     const { closed, vertices } = shape.contour;
-    return { kind: 'polyline', layer, closed, vertices: tidyContour(vertices.map(move), closed, decimals) };
+    const moved = vertices.map((v) => ({ x: moveX(v.x), y: moveY(v.y), bulge: v.bulge }));
+    return { kind: 'polyline', layer, closed, vertices: tidyContour(moved, closed, decimals) };
   };
 
   const layers: DrawingLayer[] = [];
@@ -67,9 +69,12 @@ export function buildDrawing(worked: WorkedFrame, face: Face, profile: FileProfi
 
   const labels = named.get(labelsKey(face));
   if (labels !== undefined) {
-    const texts = placeLabels(worked, face).map((t) => ({ ...t, at: move(t.at), height: length(t.height) }));
+    const texts = placeLabels(worked, face);
     if (texts.length > 0) layers.push(labels);
-    for (const { at, height, text } of texts) entities.push({ kind: 'text', layer: labels.name, at, height, text });
+    for (const { at, height, text } of texts) {
+      const moved = { x: moveX(at.x), y: moveY(at.y) };
+      entities.push({ kind: 'text', layer: labels.name, at: moved, height: length(height), text });
+    }
   }
   return { unit, decimals, layers, entities, extents: joinExtents(first, ...rest) };
 }

@@ -8,6 +8,7 @@ export const depthDigits = (depth: number, unit: Unit): string =>
 
 /** What a layer template may hold in braces. */
 export const LAYER_TOKENS = ['face', 'set', 'cutter', 'depth'] as const;
+const KNOWN = new RegExp(`\\{(${LAYER_TOKENS.join('|')})\\}`, 'g');
 type LayerToken = (typeof LAYER_TOKENS)[number];
 
 /** Gives BACK_DADO, FRONT_OPENING_AXIS, BACK_DADO_D0250 … */
@@ -32,8 +33,10 @@ export interface LayerTokenValues {
 
 /** Letters with marks lose them, everything else outside `[A-Z0-9_-]` becomes "_"; at most 31 characters. */
 function cleanLayerName(text: string): string {
-  const plain = text.normalize('NFKD').replace(/\p{M}/gu, '').toUpperCase();
+  // Names are made while a person types, and nearly all are plain already.
+  const plain = /^[ -~]*$/.test(text) ? text : text.normalize('NFKD').replace(/\p{M}/gu, '');
   return plain
+    .toUpperCase()
     .replace(/[^A-Z0-9_-]+/g, '_')
     .replace(/^[_-]+/, '')
     .slice(0, LONGEST_LAYER_NAME)
@@ -42,8 +45,7 @@ function cleanLayerName(text: string): string {
 
 /** Tokens of a template that are not known, and braces without a partner. Empty when all is well. */
 export function strayTokens(template: string): string[] {
-  const known = new RegExp(`\\{(${LAYER_TOKENS.join('|')})\\}`, 'g');
-  return template.replace(known, '').match(/\{[^{}]*\}|[{}]/g) ?? [];
+  return template.replace(KNOWN, '').match(/\{[^{}]*\}|[{}]/g) ?? [];
 }
 
 /**

@@ -1,5 +1,5 @@
 import { edgeOfOpening } from '../line-sets/held-depth.ts';
-import type { LineSet } from '../line-sets/line-set.ts';
+import type { LineSet, SetName } from '../line-sets/line-set.ts';
 import { openingCut, type OpeningCut } from '../line-sets/opening-cut.ts';
 import type { FileProfile } from '../profiles/file-profile.ts';
 import { SAME } from '../tolerances.ts';
@@ -63,30 +63,36 @@ export function sizeLines(worked: WorkedFrame, openingLines: FileProfile['openin
   });
 }
 
-/** What is done on the front, in order; the perimeter last. */
+/** What is done on the front, in the order of the line sets; the perimeter last. */
 export function stepsOnFront(worked: WorkedFrame): SheetLine[] {
-  const lifts = worked.front.lineSets.some((s) => s.set === 'CORNER_LIFT' && s.shapes.length > 0);
-  return [
+  const has = (...names: SetName[]) => worked.front.lineSets.some((s) => names.includes(s.set) && s.shapes.length > 0);
+  const steps: (SheetLine | false)[] = [
     {
       word: 'Check',
       text: 'that both edges against the pins are the squared ones and that no chips lie under the board.',
     },
-    ...(cutsOpenings(worked)
-      ? [{ word: 'Cut the openings', text: 'in passes, the last one through. Each offcut comes free: hold it down.' }]
-      : []),
-    ...(lifts
-      ? [
-          {
-            word: 'Lift lines',
-            text:
-              'climb in space from full depth up into each corner of an opening; the tip follows the line, with no offset. ' +
-              'Run them after the opening. They carry their own depths: do not flatten them.',
-          },
-        ]
-      : []),
+    has('BEAD_INNER', 'BEAD_OUTER', 'QUIRK', 'QUIRK_CORNER') && {
+      word: 'Beads and quirks',
+      text: 'before the openings, while the board is whole: each cutter on its line, at the depth of its line set.',
+    },
+    has('OPENING') && {
+      word: 'Cut the openings',
+      text: 'in passes, the last one through. Each offcut comes free: hold it down.',
+    },
+    has('CORNER_LIFT') && {
+      word: 'Lift lines',
+      text:
+        'climb in space from full depth up into each corner of an opening; the tip follows the line, with no offset. ' +
+        'Run them after the opening. They carry their own depths: do not flatten them.',
+    },
+    has('CORNER_VEE') && {
+      word: 'V-cutter lines',
+      text: 'run in space into the corners after that; the tip follows the line, with no offset and at its own depths.',
+    },
     {
       word: 'Perimeter last,',
       text: 'outside, through. The frame is free from its rim then: hold it down before the last pass.',
     },
   ];
+  return steps.filter((step) => step !== false);
 }

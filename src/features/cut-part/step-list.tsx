@@ -14,14 +14,12 @@ interface StepListProps {
   /** How many are cut. */
   readonly done: number;
   readonly onDone: (done: number) => void;
-  /** False while the picture of the last one is still worked on: playing waits for it. */
-  readonly isShown: boolean;
 }
 
 const FACE_WORDS = { back: 'Back, cut first', front: 'Front, cut second' } as const;
 
 /** The line sets in cutting order, to be walked one by one. */
-export function StepList({ steps, colours, done, onDone, isShown }: StepListProps) {
+export function StepList({ steps, colours, done, onDone }: StepListProps) {
   const [isPlaying, setIsPlaying] = useState(false);
   const plays = isPlaying && done < steps.length;
   const next = useEffectEvent(() => {
@@ -29,10 +27,10 @@ export function StepList({ steps, colours, done, onDone, isShown }: StepListProp
     if (done + 1 >= steps.length) setIsPlaying(false);
   });
   useEffect(() => {
-    if (!plays || !isShown) return;
+    if (!plays) return;
     const timer = setTimeout(() => next(), PLAY_MS);
     return () => clearTimeout(timer);
-  }, [plays, isShown, done]);
+  }, [plays, done]);
 
   function play(): void {
     if (done >= steps.length) onDone(0);

@@ -34,7 +34,7 @@ export function ImportFrameFiles({ jobId }: { readonly jobId: string }) {
     send([...event.dataTransfer.files]);
   }
 
-  const cancelled = running.current?.signal.aborted === true;
+  const cancelled = take.variables?.signal.aborted === true;
   return (
     <div>
       <div

@@ -39,5 +39,3 @@ export function useProfileEditor(stored: StoredProfile) {
     },
   };
 }
-
-export type ProfileEditor = ReturnType<typeof useProfileEditor>;

@@ -65,7 +65,7 @@ describe('Downloading a layer set', () => {
     const path = `/api/frames/${frame.id}/revisions/A/layer-set.zip`;
     const first = await visitor.get(path);
     server.wait(3600);
-    expectStatus(await visitor.put(`/api/frames/${frame.id}/draft`, { version: 1, particulars: aFrame({ 'outline.width': 40 }) }), 200);
+    expectStatus(await visitor.put(`/api/frames/${frame.id}/draft`, { version: 1, particulars: aFrame({ 'setup.allowance': 1.5 }) }), 200);
     expect((await visitor.get(path)).bytes).toEqual(first.bytes);
   });
 
@@ -110,12 +110,12 @@ describe('Downloading a layer set', () => {
     const { visitor } = await openShop(server);
     const job = await addJob(visitor, 'Kitchen');
     const one = await addFrame(visitor, job.id, aFrame({ name: 'One' }));
-    const two = await addFrame(visitor, job.id, aFrame({ name: 'Two', 'outline.width': 36 }));
+    const two = await addFrame(visitor, job.id, aFrame({ name: 'Two', 'setup.allowance': 1.25 }));
     await addFrame(visitor, job.id, aFrame({ name: 'Draft only' }));
     const away = await addFrame(visitor, job.id, aFrame({ name: 'Put away' }));
     for (const frame of [one, two, away]) await releaseFrame(visitor, frame);
     expectStatus(await visitor.patch(`/api/frames/${away.id}`, { removed: true }), 200);
-    expectStatus(await visitor.put(`/api/frames/${two.id}/draft`, { version: 1, particulars: aFrame({ name: 'Two', 'outline.width': 40 }) }), 200);
+    expectStatus(await visitor.put(`/api/frames/${two.id}/draft`, { version: 1, particulars: aFrame({ name: 'Two', 'setup.allowance': 1.5 }) }), 200);
     await releaseFrame(visitor, { id: two.id, version: 2 });
 
     const files = await filesIn(expectStatus(await visitor.get(`/api/jobs/${job.id}/layer-sets.zip`), 200));

@@ -16,8 +16,9 @@ const release = (visitor: HttpClient, frame: Pick<Frame, 'id' | 'version'>, more
   visitor.post(`/api/frames/${frame.id}/revisions`, { version: frame.version, note: '', ...more });
 const codeOf = (answer: { json<T>(): T }) => answer.json<{ code: string }>().code;
 
-async function change(visitor: HttpClient, frame: Frame, width: number): Promise<Frame> {
-  expectStatus(await visitor.put(`/api/frames/${frame.id}/draft`, { version: frame.version, particulars: aFrame({ 'outline.width': width }) }), 200);
+/** A change that makes no finding: 1 in is what the frame has. */
+async function change(visitor: HttpClient, frame: Frame, allowance: number): Promise<Frame> {
+  expectStatus(await visitor.put(`/api/frames/${frame.id}/draft`, { version: frame.version, particulars: aFrame({ 'setup.allowance': allowance }) }), 200);
   return frameContract.parse((await visitor.get(`/api/frames/${frame.id}`)).json());
 }
 
@@ -37,7 +38,7 @@ describe('Releasing a revision', () => {
   it('When the draft goes on, then the revision stays, and the next is B', async () => {
     const { visitor, frame } = await openShopWithFrame(server);
     await releaseFrame(visitor, frame);
-    const changed = await change(visitor, frame, 40);
+    const changed = await change(visitor, frame, 1.5);
     expect(changed.draftChanged).toBe(true);
     const second = await releaseFrame(visitor, changed);
     expect(second.revisions.map((r) => r.letter)).toEqual(['B', 'A']);
@@ -48,8 +49,8 @@ describe('Releasing a revision', () => {
   it('When the draft is changed back to what was released, then it says so, and cannot be released again', async () => {
     const { visitor, frame } = await openShopWithFrame(server);
     await releaseFrame(visitor, frame);
-    const there = await change(visitor, frame, 40);
-    const back = await change(visitor, there, 33);
+    const there = await change(visitor, frame, 1.5);
+    const back = await change(visitor, there, 1);
     expect(back.draftChanged).toBe(false);
     expect(codeOf(expectStatus(await release(visitor, back), 422))).toBe('nothing-changed');
   });
@@ -57,7 +58,7 @@ describe('Releasing a revision', () => {
   it('When nine revisions are released, then the letters skip I (ASME Y14.35, from memory)', async () => {
     const { visitor, frame } = await openShopWithFrame(server);
     let now = await releaseFrame(visitor, frame);
-    for (let i = 1; i < 9; i++) now = await releaseFrame(visitor, await change(visitor, now, 33 + i));
+    for (let i = 1; i < 9; i++) now = await releaseFrame(visitor, await change(visitor, now, 1 + i / 8));
     expect(now.revisions.map((r) => r.letter)).toEqual(['J', 'H', 'G', 'F', 'E', 'D', 'C', 'B', 'A']);
   }, 60_000);
 
@@ -81,9 +82,9 @@ describe('Releasing a revision', () => {
   it('When the draft was changed meanwhile, then the release is refused and tells what was changed', async () => {
     const { visitor, frame, session } = await openShopWithFrame(server);
     const { visitor: other } = await addPerson(server, session.shop.id, 'designer');
-    await change(other, frame, 36);
+    await change(other, frame, 1.25);
     const answer = expectStatus(await release(visitor, frame), 409);
-    expect(answer.json<{ details: { changes: unknown[] } }>().details.changes).toEqual([{ path: 'outline.width', was: '33', theirs: '36', yours: '33' }]);
+    expect(answer.json<{ details: { changes: unknown[] } }>().details.changes).toEqual([{ path: 'setup.allowance', was: '1', theirs: '1.25', yours: '1' }]);
   });
 
   it('When two release at the same moment, then there is one revision', async () => {
@@ -96,7 +97,7 @@ describe('Releasing a revision', () => {
 
   it('When the draft is saved while it is being proved, then what was proved is not released under it', async () => {
     const { visitor, frame } = await openShopWithFrame(server);
-    const [released] = await Promise.all([release(visitor, frame), change(visitor, frame, 36)]);
+    const [released] = await Promise.all([release(visitor, frame), change(visitor, frame, 1.25)]);
     const after = frameContract.parse((await visitor.get(`/api/frames/${frame.id}`)).json());
     // Either order is right; a revision that holds what was not proved is not.
     if (released.status === 409) expect(after.revisions).toEqual([]);

@@ -8,7 +8,7 @@ import type { HttpClient } from '../../setup/http-client.ts';
 import { listRoutes } from '../../setup/list-routes.ts';
 import { startTestServer, type TestServer } from '../../setup/test-server.ts';
 
-/** Things of a shop that paths and bodies may name. A fresh set for each request, so that one request cannot spoil the next. */
+/** Things of a shop that paths and bodies may name. Requests that change something get a fresh set, so that none spoils the next. */
 interface Things {
   readonly jobId: string;
   readonly frameId: string;
@@ -65,7 +65,7 @@ const TABLE: Record<string, Row> = {
   'PUT /api/frames/:frameId/draft': { who: EDITORS, answers: 200, body: () => ({ version: 1, particulars: aFrame({ 'outline.width': 34 }) }) },
   'GET /api/frames/:frameId/draft/frame-file': { who: 'signed in', answers: 200 },
   'GET /api/frames/:frameId/draft/setup-sheet.pdf': { who: 'signed in', answers: 200, query: ofProfile },
-  'POST /api/frames/:frameId/revisions': { who: EDITORS, answers: 422, body: () => ({ version: 1 }) },
+  'POST /api/frames/:frameId/revisions': { who: EDITORS, answers: 201, body: () => ({ version: 1 }) },
   'GET /api/frames/:frameId/revisions/:letter': { who: 'signed in', answers: 200 },
   'GET /api/frames/:frameId/revisions/:letter/frame-file': { who: 'signed in', answers: 200 },
   'GET /api/frames/:frameId/revisions/:letter/layer-set.zip': { who: 'signed in', answers: 200, query: ofProfile },
@@ -78,15 +78,18 @@ let server: TestServer;
 let mine: SignedInVisitor;
 let theirs: SignedInVisitor;
 let theirThings: Things;
+let myThings: Things;
 const people = new Map<Role, HttpClient>();
 
-async function things(visitor: HttpClient): Promise<Things> {
+async function things(visitor: HttpClient, released: boolean): Promise<Things> {
   const job = await addJob(visitor);
   const frame = await addFrame(visitor, job.id);
-  await releaseFrame(visitor, frame);
+  if (released) await releaseFrame(visitor, frame);
   const profile = expectStatus(await visitor.post('/api/profiles', aProfile()), 201).json<{ id: string }>();
   return { jobId: job.id, frameId: frame.id, profileId: profile.id };
 }
+
+const thingsFor = async (route: string): Promise<Things> => (route.startsWith('GET') ? myThings : things(mine.visitor, false));
 
 const ask = (visitor: HttpClient, route: string, row: Row, named: Things, queried = named) => {
   const [method = '', pattern = ''] = route.split(' ');
@@ -98,7 +101,8 @@ beforeAll(async () => {
   server = await startTestServer();
   mine = await openShop(server, { shopName: 'Mine' });
   theirs = await openShop(server, { shopName: 'Theirs' });
-  theirThings = await things(theirs.visitor);
+  theirThings = await things(theirs.visitor, true);
+  myThings = await things(mine.visitor, true);
   people.set('owner', mine.visitor);
   for (const role of roles.options) if (role !== 'owner') people.set(role, (await addPerson(server, mine.session.shop.id, role)).visitor);
 });
@@ -124,14 +128,14 @@ describe('Every route', () => {
   });
 
   it.each(ROWS.filter(([, row]) => row.query))("When only the profile is another shop's, then %s answers 404", async (route, row) => {
-    const answer = await ask(mine.visitor, route, row, await things(mine.visitor), theirThings);
+    const answer = await ask(mine.visitor, route, row, myThings, theirThings);
     expect(answer.status).toBe(404);
   });
 
   describe.each(roles.options)('When a person is %s', (role) => {
     it.each(ROWS.filter((r) => !isOpen(r) && r[0] !== 'POST /api/sign-out-everywhere'))('then %s lets in or answers 403, as the table says', async (route, row) => {
       const allowed = row.who === 'signed in' || row.who.includes(role);
-      const answer = await ask(people.get(role)!, route, row, await things(mine.visitor));
+      const answer = await ask(people.get(role)!, route, row, await thingsFor(route));
       expect(answer.status).toBe(allowed ? row.answers : 403);
       if (!allowed) expect(answer.json().code).toBe('not-allowed');
     });

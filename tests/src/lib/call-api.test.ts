@@ -1,3 +1,4 @@
+// @vitest-environment node
 import { describe, expect, it, vi } from 'vitest';
 import { z } from 'zod';
 import { ApiError } from '../../../src/lib/api-error.ts';

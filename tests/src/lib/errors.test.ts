@@ -1,3 +1,4 @@
+// @vitest-environment node
 import { describe, expect, it } from 'vitest';
 import { ERROR_CODES } from '#shared/contracts/error-codes.ts';
 import { signUpRequest } from '#shared/contracts/session.ts';

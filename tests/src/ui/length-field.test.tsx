@@ -20,7 +20,7 @@ function Desk({ unit = 'in', start = 30.5, onValue }: DeskProps) {
   };
   return (
     <form>
-      <LengthField label="Width" unit={unit} value={width} onValue={take} least={0} above />
+      <LengthField label="Width" unit={unit} value={width} onValue={take} above={0} />
       <LengthField label="Height" unit={unit} value={height} onValue={setHeight} />
       <button type="button" onClick={() => setWidth(12)}>
         Undo
@@ -39,6 +39,11 @@ describe('LengthField', () => {
     expect(width().value).toBe('30 1/2');
     // 30.5 × 25.4, the inch being 25.4 mm by definition.
     expect(width().title).toBe('774.7 mm');
+  });
+
+  it('When a value has more digits than are shown to read, then all of them stand in the field', () => {
+    show(<Desk start={0.08216083} />);
+    expect(width().value).toBe('0.08216083');
   });
 
   it('When a length is typed, then each keystroke that can be read is taken and the text stays as typed', async () => {

@@ -23,7 +23,7 @@ import type { Face } from '#shared/kernel/line-sets/line-set.ts';
 import type { Flip } from '#shared/kernel/particulars/particulars.ts';
 import type { FaceMesh } from '../mesh/face-mesh.ts';
 import type { Slice } from '../mesh/slice.ts';
-import type { Hold } from '../model/turning.ts';
+import { NO_TURN, type Hold } from '../model/turning.ts';
 import type { Picture, Plane, Rgb } from '../work/picture.ts';
 import { spreadOut, visibleHeight } from './lay-out.ts';
 
@@ -33,8 +33,8 @@ const LAMP = 2.1;
 
 /** What is shown of a picture. */
 export interface Showing {
-  /** Two copies: the part turned over beside the part, as in the spread. */
-  readonly both: boolean;
+  /** 'both': two copies, the part turned over beside the part, as in the spread. */
+  readonly shown: 'front' | 'back' | 'both';
   readonly loose: boolean;
   readonly flip: Flip;
 }
@@ -65,10 +65,11 @@ class Copy {
     this.group.add(...this.meshes);
   }
 
-  /** Keeps what lies left of an upright plane, or above a level one; frame view. */
-  cutAt(plane: Plane | null): void {
+  /** Keeps what lies left of an upright plane or below a level one, or the other side; frame view. */
+  cutAt(plane: Plane | null, keepsLow: boolean): void {
     this.group.updateMatrixWorld(true);
-    const kept = plane && (plane.runs === 'upright' ? new ClippingPlane(new Vector3(-1, 0, 0), plane.at) : new ClippingPlane(new Vector3(0, 1, 0), -plane.at));
+    const side = keepsLow ? -1 : 1;
+    const kept = plane && new ClippingPlane(plane.runs === 'upright' ? new Vector3(side, 0, 0) : new Vector3(0, side, 0), -side * plane.at);
     this.skin.clippingPlanes = kept ? [kept.applyMatrix4(this.group.matrixWorld)] : null;
     this.meshes[2].visible = plane !== null;
     this.meshes[3].visible = plane !== null;
@@ -79,7 +80,7 @@ class Copy {
   }
 }
 
-/** The cut part in three dimensions on a canvas. It draws when it is told to, never by itself. */
+/** The cut part in three dimensions on a canvas. It draws after each change, at most once a frame of the screen, and never otherwise. */
 export class PartScene {
   private readonly renderer: WebGLRenderer;
   private readonly scene = new Scene();
@@ -93,7 +94,9 @@ export class PartScene {
   private meshes: { front: FaceMesh; back: FaceMesh } | null = null;
   private slice: Slice | null = null;
   private size = { width: 1, height: 1 };
-  private showing: Showing = { both: false, loose: false, flip: 'side-to-side' };
+  private hold: Hold = { turn: NO_TURN, zoom: 1, pan: { x: 0, y: 0 } };
+  private frame = 0;
+  private showing: Showing = { shown: 'front', loose: false, flip: 'side-to-side' };
 
   /** Throws when the browser has no WebGL. */
   constructor(canvas: HTMLCanvasElement) {
@@ -149,11 +152,16 @@ export class PartScene {
     }
     this.geometries.cap.setDrawRange(0, showing.loose || !this.slice ? Infinity : this.slice.looseFrom);
     this.geometries.outline.setDrawRange(0, showing.loose || !this.slice ? Infinity : this.slice.outlineLooseFrom / 3);
+    this.drawSoon();
   }
 
   /** The plane takes effect at once, its slice once that is worked out. */
   setSlice(plane: Plane | null, slice: Slice | null): void {
-    for (const copy of this.copies) copy.cutAt(plane);
+    const { shown, flip } = this.showing;
+    // The cut side is to look to the right and up, where the part is first held to be seen from.
+    const turns = shown === 'back' && plane?.runs === (flip === 'side-to-side' ? 'upright' : 'level');
+    for (const copy of this.copies) copy.cutAt(plane, !turns);
+    this.drawSoon();
     if (slice === this.slice) return;
     this.slice = slice;
     const { cap, outline } = this.geometries;
@@ -172,16 +180,28 @@ export class PartScene {
     this.size = { width, height };
     this.renderer.setPixelRatio(Math.min(pixelRatio, 2));
     this.renderer.setSize(width, height, false);
+    this.drawSoon();
+  }
+
+  setHold(hold: Hold): void {
+    this.hold = hold;
+    this.drawSoon();
   }
 
   /** Length of the part to one CSS pixel, as it is held. */
-  lengthOfPixel(hold: Hold): number {
-    return visibleHeight(this.region, this.thickness, this.showing, this.size.width / this.size.height) / hold.zoom / this.size.height;
+  lengthOfPixel(): number {
+    return visibleHeight(this.region, this.thickness, this.showing, this.size.width / this.size.height) / this.hold.zoom / this.size.height;
   }
 
-  draw(hold: Hold): void {
+  private drawSoon(): void {
+    cancelAnimationFrame(this.frame);
+    this.frame = requestAnimationFrame(() => this.draw());
+  }
+
+  private draw(): void {
+    const { hold } = this;
     const { width, height } = this.size;
-    const half = (this.lengthOfPixel(hold) * height) / 2;
+    const half = (this.lengthOfPixel() * height) / 2;
     const { camera } = this;
     const reach = 8 * (this.region.maxX - this.region.minX + this.region.maxY - this.region.minY + this.thickness);
     camera.left = (-half * width) / height;
@@ -197,8 +217,9 @@ export class PartScene {
   }
 
   /** The place of the frame under a place of the screen (pixels from its middle, right and up), on the face that looks this way; null beside the board. */
-  placeUnder(hold: Hold, at: Point): Point | null {
-    const pixel = this.lengthOfPixel(hold);
+  placeUnder(at: Point): Point | null {
+    const { hold } = this;
+    const pixel = this.lengthOfPixel();
     const back = new Quaternion(...hold.turn).invert();
     const eye = new Vector3(at.x * pixel - hold.pan.x, at.y * pixel - hold.pan.y, 0).applyQuaternion(back);
     const ahead = new Vector3(0, 0, -1).applyQuaternion(back);
@@ -216,6 +237,7 @@ export class PartScene {
   }
 
   dispose(): void {
+    cancelAnimationFrame(this.frame);
     for (const geometry of Object.values(this.geometries)) geometry.dispose();
     for (const copy of this.copies) copy.dispose();
     this.inside.dispose();

@@ -22,70 +22,54 @@ interface PartStageProps {
   readonly describedBy: string;
 }
 
-/** A scene on the canvas for as long as the canvas is there, as large as its area, drawn at most once a frame of the screen. */
-function useScene(canvas: RefObject<HTMLCanvasElement | null>, hold: Hold, onLost: () => void) {
+/** A scene on the canvas for as long as the canvas is there, as large as the canvas is laid out. */
+function useScene(canvas: RefObject<HTMLCanvasElement | null>, onLost: () => void): PartScene | null {
   const [scene, setScene] = useState<PartScene | null>(null);
-  const frame = useRef(0);
-  const draw = useEffectEvent((of: PartScene) => of.draw(hold));
   const lost = useEffectEvent(onLost);
-  const drawSoon = useRef((of: PartScene) => {
-    cancelAnimationFrame(frame.current);
-    frame.current = requestAnimationFrame(() => draw(of));
-  });
-
   useEffect(() => {
     const element = canvas.current!;
     const made = new PartScene(element);
-    const onContextLost = (event: Event) => {
-      event.preventDefault();
-      lost();
-    };
+    const onContextLost = () => lost();
     element.addEventListener('webglcontextlost', onContextLost);
     const fit = () => {
-      const { clientWidth, clientHeight } = element;
-      if (clientWidth === 0 || clientHeight === 0) return;
-      made.resize(clientWidth, clientHeight, window.devicePixelRatio);
-      drawSoon.current(made);
+      if (element.clientWidth === 0 || element.clientHeight === 0) return;
+      made.resize(element.clientWidth, element.clientHeight, window.devicePixelRatio);
+      setScene(made);
     };
-    fit();
     const watch = new ResizeObserver(fit);
     watch.observe(element);
-    setScene(made);
     return () => {
       watch.disconnect();
       element.removeEventListener('webglcontextlost', onContextLost);
-      cancelAnimationFrame(frame.current);
       made.dispose();
     };
   }, [canvas]);
-  return { scene, drawSoon: drawSoon.current };
+  return scene;
 }
 
 /** The part in three dimensions: it can be turned, moved and zoomed by mouse, touch and keyboard. */
 export function PartStage({ picture, colours, showing, plane, slice, hold, onHold, onReset, onPick, onLost, label, describedBy }: PartStageProps) {
   const area = useRef<HTMLDivElement>(null);
   const canvas = useRef<HTMLCanvasElement>(null);
-  const { scene, drawSoon } = useScene(canvas, hold, onLost);
-  const { both, loose, flip } = showing;
+  const scene = useScene(canvas, onLost);
+  const { shown, loose, flip } = showing;
 
   useEffect(() => {
     if (scene && picture) scene.setPicture(picture, colours);
   }, [scene, picture, colours]);
-  useEffect(() => scene?.setShowing({ both, loose, flip }), [scene, both, loose, flip]);
-  useEffect(() => scene?.setSlice(plane, plane && slice), [scene, plane, slice, picture, both, flip]);
-  useEffect(() => {
-    if (scene && picture) drawSoon(scene);
-  }, [scene, drawSoon, picture, colours, both, loose, flip, plane, slice, hold]);
+  useEffect(() => scene?.setShowing({ shown, loose, flip }), [scene, shown, loose, flip]);
+  useEffect(() => scene?.setSlice(plane, plane && slice), [scene, plane, slice, picture, shown, flip]);
+  useEffect(() => scene?.setHold(hold), [scene, hold]);
 
   const turning = useTurning({
     hold,
     onHold,
     onReset,
     onPick: (at) => {
-      const place = scene?.placeUnder(hold, at);
+      const place = scene?.placeUnder(at);
       if (place) onPick(place);
     },
-    pixel: () => scene?.lengthOfPixel(hold) ?? 0,
+    pixel: () => scene?.lengthOfPixel() ?? 0,
     area,
   });
   return (

@@ -1,4 +1,5 @@
 import { memo } from 'react';
+import { FIT } from '#shared/kernel/checks/check-cutters.ts';
 import type { Cutter, CutterKind, CutterRole } from '#shared/kernel/cutters/cutter.ts';
 import { changeCutterKind } from '#shared/kernel/particulars/change-cutter-kind.ts';
 import { setField } from '#shared/kernel/particulars/set-field.ts';
@@ -12,13 +13,12 @@ const ROLES: readonly { readonly role: CutterRole; readonly heading: string }[] 
   { role: 'squaring', heading: 'Squaring edge' },
   { role: 'opening', heading: 'Openings' },
   { role: 'perimeter', heading: 'Perimeter' },
+  { role: 'bead', heading: 'Bead' },
+  { role: 'quirk', heading: 'Quirk' },
+  { role: 'corner', heading: 'Corners' },
 ];
 
-const KINDS: readonly { readonly value: CutterKind; readonly label: string }[] = [
-  { value: 'straight', label: 'Straight' },
-  { value: 'tapered', label: 'Tapered' },
-  { value: 'vee', label: 'V' },
-];
+const KIND_WORDS: Record<CutterKind, string> = { straight: 'Straight', tapered: 'Tapered', vee: 'V', beading: 'Beading' };
 
 /** The numbers that give a kind of cutter its shape. */
 const SHAPES: Record<CutterKind, readonly { readonly key: string; readonly label: string; readonly kind: 'length' | 'number'; readonly suffix?: string }[]> = {
@@ -39,16 +39,20 @@ const CutterEntries = memo(function CutterEntries({ role, heading }: { readonly 
   const kind = useEditor((s) => s.history.present.cutters[role]?.kind);
   const path = `cutters.${role}`;
   if (kind === undefined) return null;
+  const kinds = [...new Set([...FIT[role], kind])];
   function changeKind(wanted: CutterKind) {
     const { present } = editor.store.get().history;
     const cutter = present.cutters[role] as Cutter;
     editor.apply(setField(present, path, changeCutterKind(cutter, wanted, present.unit)), `${heading}, kind of cutter`);
   }
   return (
-    <Section heading={heading} level={3}>
-      <div data-entry={`${path}.kind`}>
-        <Select label="Kind" layout="row" options={KINDS} value={kind} onValue={changeKind} disabled={readOnly} />
-      </div>
+    <Section heading={heading} aside={kinds.length > 1 ? undefined : KIND_WORDS[kind].toLowerCase()} level={3}>
+      {/* Where one kind alone can do the work there is nothing to choose. */}
+      {kinds.length > 1 && (
+        <div data-entry={`${path}.kind`}>
+          <Select label="Kind" layout="row" options={kinds.map((value) => ({ value, label: KIND_WORDS[value] }))} value={kind} onValue={changeKind} disabled={readOnly} />
+        </div>
+      )}
       {SHAPES[kind].map(({ key, ...entry }) => (
         <Entry key={key} path={`${path}.${key}`} {...entry} />
       ))}
@@ -60,7 +64,7 @@ const CutterEntries = memo(function CutterEntries({ role, heading }: { readonly 
   );
 });
 
-/** The cutter of each role. */
+/** The cutter of each role that the frame has one for. */
 export function CuttersSection() {
   return (
     <Section heading="Cutters">

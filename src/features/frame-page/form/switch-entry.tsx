@@ -11,12 +11,14 @@ interface SwitchEntryProps {
   /** A list that opens, where there is no room to show all options. */
   readonly asList?: boolean;
   readonly hideLabel?: boolean;
+  /** What holds while an optional entry is absent. */
+  readonly whenAbsent?: string;
 }
 
 /** One of a few words in the particulars. Give it the same `options` object each time. */
-export const SwitchEntry = memo(function SwitchEntry({ path, label, options, asList = false, hideLabel = false }: SwitchEntryProps) {
+export const SwitchEntry = memo(function SwitchEntry({ path, label, options, asList = false, hideLabel = false, whenAbsent = '' }: SwitchEntryProps) {
   const { editor, readOnly } = useDesk();
-  const value = useEditor((s) => readField(s.history.present, path)) as string;
+  const value = useEditor((s) => (readField(s.history.present, path) as string | undefined) ?? whenAbsent);
   const wrong = useEditor((s) => s.wrong.get(path) ?? '');
   const pick = (picked: string) => {
     editor.setWrong(path, editor.edit(path, picked));

@@ -119,8 +119,10 @@ export function createAutosave({ save, judge, ...start }: AutosaveOptions): Auto
       if (running === null) sendAfter(PAUSE_MS);
     },
     async flush() {
-      // What is under way may be older than what is wanted, so that a second one follows it.
-      for (let i = 0; i < 2 && wanted !== saved && store.get().kind !== 'stale'; i += 1) await send();
+      if (store.get().kind === 'stale') return false;
+      await send();
+      // What was under way may have been older than what is wanted.
+      if (store.get().kind === 'saving') await send();
       return wanted === saved;
     },
     goOnFrom(newVersion, newSaved) {

@@ -1,3 +1,4 @@
+// @vitest-environment node
 import { describe, expect, it } from 'vitest';
 import { LIMITS } from '#shared/contracts/limits.ts';
 import { copyName } from '../../../../src/features/jobs/copy-name.ts';
