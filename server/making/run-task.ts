@@ -1,37 +1,40 @@
-import { describeSheet } from '#shared/kernel/sheet/describe-sheet.ts';
-import { workFrame } from '#shared/kernel/work-frame.ts';
-import { buildJobSet } from '../layer-set/build-job-set.ts';
-import { buildLayerSet } from '../layer-set/build-layer-set.ts';
 import { safeName } from '../layer-set/safe-name.ts';
-import { writeSetupSheet } from '../pdf/write-setup-sheet.ts';
-import { proveFrame } from './prove-frame.ts';
 import { summarizeFrame } from './summarize-frame.ts';
 import type { TaskKind, Tasks } from './tasks.ts';
 
+// What writes PDF is loaded by the first task that needs it: a release, which proves DXF files, must not wait for it.
+const layerSets = () => import('../layer-set/build-layer-set.ts');
+
 const RUN: { [K in TaskKind]: (input: Tasks[K]['input']) => Promise<Tasks[K]['result']> } = {
   'layer-set': async (input) => {
+    const { buildLayerSet } = await layerSets();
     const set = await buildLayerSet(input);
     return { name: set.zipName, bytes: set.zip };
   },
 
   'job-set': async (input) => {
+    const { buildJobSet } = await import('../layer-set/build-job-set.ts');
     const set = await buildJobSet(input);
     return { name: set.zipName, bytes: set.zip };
   },
 
   'setup-sheet': async (input) => {
+    const { buildLayerSet } = await layerSets();
     const set = await buildLayerSet(input);
     const sheet = set.files.find((file) => file.name === 'setup-sheet.pdf');
     if (!sheet) throw new Error('the layer set has no setup-sheet.pdf');
     return { name: set.zipName.replace(/\.zip$/, '_setup-sheet.pdf'), bytes: sheet.bytes };
   },
 
-  'draft-sheet': async ({ particulars, paper, changedAt, ...context }) => {
-    const model = describeSheet(workFrame(particulars), { ...context, revision: '', releasedAt: changedAt, note: '', proof: null });
-    return { name: `${safeName(particulars.name, 'frame')}_draft_setup-sheet.pdf`, bytes: await writeSetupSheet(model, paper) };
+  'draft-sheet': async (input) => {
+    const { writeDraftSheet } = await import('./write-draft-sheet.ts');
+    return { name: `${safeName(input.particulars.name, 'frame')}_draft_setup-sheet.pdf`, bytes: await writeDraftSheet(input) };
   },
 
-  proof: async ({ particulars, profiles }) => proveFrame(particulars, profiles),
+  proof: async ({ particulars, profiles }) => {
+    const { proveFrame } = await import('./prove-frame.ts');
+    return proveFrame(particulars, profiles);
+  },
 
   summary: async (particulars) => summarizeFrame(particulars),
 };

@@ -30,7 +30,7 @@ function startWorker(entry: URL): Worker {
 /**
  * A pool of at most `size` worker threads running `entry`; each is started when it is first needed and does one task at a time.
  */
-export function startMakers(entry: URL, size: number): Makers {
+export function startMakers(entry: URL, size: number, timeCapMs = TIME_CAP_MS): Makers {
   const queue: Waiting[] = [];
   const idle: Worker[] = [];
   const all = new Set<Worker>();
@@ -64,9 +64,9 @@ export function startMakers(entry: URL, size: number): Makers {
     const broke = (error: Error): void => settle(() => task.reject(new Error(`a worker broke down making ${task.kind}`, { cause: error })), false);
     const left = (code: number): void => settle(() => task.reject(new Error(`a worker ended with ${code} making ${task.kind}`)), false);
     const cap = setTimeout(() => {
-      const message = `This takes longer than ${TIME_CAP_MS / 1000} seconds to work out and was given up. A tracing with fewer vertices will do.`;
+      const message = `This takes longer than ${timeCapMs / 1000} seconds to work out and was given up. A tracing with fewer vertices will do.`;
       settle(() => task.reject(new AppError('too-large', `${task.kind} hit the time cap`, { message })), false);
-    }, TIME_CAP_MS);
+    }, timeCapMs);
     worker.on('message', answered).on('error', broke).on('exit', left);
     worker.postMessage({ kind: task.kind, input: task.input });
   };

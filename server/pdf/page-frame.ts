@@ -59,7 +59,8 @@ export function drawPageHead(
     .rect(INNER, INNER, width - 2 * INNER, height - 2 * INNER)
     .stroke(SHEET_COLOURS.ink);
   const left = INNER + PADDING;
-  const title = fitText(head.title, width - 2 * left, 6, [5.6, 4.6, 3.8, 3.1, 2.5]);
+  // The right end is kept for the mark of a draft.
+  const title = fitText(head.title, width - 2 * left - 48, 6, [5.6, 4.6, 3.8, 3.1, 2.5]);
   drawText(pen, title.lines[0]!, left, INNER + 7.2, { size: title.size, bold: true, colour: head.colour });
   const lead = fitText(head.lead, width - 2 * left, 6, [2.8, 2.5, 2.2, 1.8]);
   lead.lines.forEach((line, i) =>
@@ -77,7 +78,8 @@ interface Cell {
   readonly sizes?: readonly number[];
 }
 
-const SIZES = [2.9, 2.6, 2.3, 2, 1.75];
+/** The least ones are for names as long as a form takes. */
+const SIZES = [2.9, 2.6, 2.3, 2, 1.75, 1.5, 1.35];
 
 /** Two rows of fields along the bottom border, after ISO 7200. */
 export function drawTitleBlock(
@@ -130,7 +132,9 @@ function drawCell(pen: Pen, cell: Cell, x: number, top: number, width: number): 
   );
 }
 
-/** Across the whole page, over everything, light enough to read through. */
+const DRAFT_WORDS = 'draft, not for cutting';
+
+/** Across the whole page, over everything, light enough to read through; and in full strength in the heading. */
 export function drawDraftMark(pen: Pen, paper: Paper): void {
   const { width, height } = PAPER_SIZE[paper];
   const { doc } = pen;
@@ -139,11 +143,8 @@ export function drawDraftMark(pen: Pen, paper: Paper): void {
     .save()
     .fillOpacity(0.16)
     .rotate(angle, { origin: [width / 2, height / 2] });
-  drawText(pen, 'draft, not for cutting', width / 2, height / 2 + 8, {
-    size: 22,
-    bold: true,
-    anchor: 'middle',
-    colour: 'stop',
-  });
+  drawText(pen, DRAFT_WORDS, width / 2, height / 2 + 8, { size: 22, bold: true, anchor: 'middle', colour: 'stop' });
   doc.restore();
+  const look = { size: 3.2, bold: true, anchor: 'end', colour: 'stop' } as const;
+  drawText(pen, DRAFT_WORDS, width - INNER - PADDING, INNER + 6, look);
 }

@@ -3,12 +3,14 @@ import type { SheetBlock } from '#shared/kernel/sheet/sheet-model.ts';
 import { blockHeight } from './flow-blocks.ts';
 import type { PageRoom } from './page-frame.ts';
 import type { Piece, PlacedBlock } from './piece.ts';
-import { placeDrawing, type ListBlock } from './place-drawing.ts';
+import { placeDrawing } from './place-drawing.ts';
 import { placeList } from './place-list.ts';
+import { placePicturesBeside } from './place-pictures-beside.ts';
 import { placePictures } from './place-pictures.ts';
 import { placeSignOff } from './place-sign-off.ts';
 import { EASY, TIGHT, type Spacing } from './spacing.ts';
 import { placeTable } from './place-table.ts';
+import type { ListBlock } from './place-titled-list.ts';
 
 /** Between a table and what is said under it. */
 const SPACE: Piece = { height: 0.9, draw: () => undefined };
@@ -57,24 +59,34 @@ export function placePage(blocks: readonly SheetBlock[], room: PageRoom, colour:
   return !fits(easy!) && fits(tight!) ? tight! : easy!;
 }
 
-/** The drawing is made as large as the others allow, with a list beside it where that lets it be larger. */
+/**
+ * The drawing is made as large as the others allow, with a list beside it where that lets it be larger. On a page without
+ * one, the list stands beside the first pictures where there is room.
+ */
 function placeBlocks(
   blocks: readonly SheetBlock[],
   room: PageRoom,
   colour: SheetColour,
   spacing: Spacing,
 ): PlacedBlock[] {
-  const placed = new Map(
-    blocks.flatMap((b) => (b.kind === 'drawing' ? [] : [[b, placeBlock(b, room.width, spacing)] as const])),
-  );
-  const drawing = blocks.find((b) => b.kind === 'drawing');
-  if (!drawing) return [...placed.values()].filter((b) => b.pieces.length > 0);
+  const look = { colour, line: spacing.line };
+  const placed = new Map<SheetBlock, PlacedBlock>();
+  for (const b of blocks) if (b.kind !== 'drawing') placed.set(b, placeBlock(b, room.width, spacing));
   const list = blocks.find((b): b is ListBlock => b.kind === 'list' && b.beside === true);
-  const below = list && { list, height: blockHeight(placed.get(list)!, spacing.gap) };
-  const free = room.bottom - room.top - spacing.gap - blocksHeight(placed.values(), spacing.gap);
-  const drawn = placeDrawing(drawing, below, { width: room.width, height: free }, { colour, line: spacing.line });
-  return blocks
-    .filter((b) => !(drawn.holdsList && b === list))
-    .map((b) => (b.kind === 'drawing' ? drawn.block : placed.get(b)!))
-    .filter((b) => b.pieces.length > 0);
+  const drawing = blocks.find((b) => b.kind === 'drawing');
+  const pictures = blocks.find((b) => b.kind === 'pictures');
+  if (drawing) {
+    const below = list && { list, height: blockHeight(placed.get(list)!, spacing.gap) };
+    const free = room.bottom - room.top - spacing.gap - blocksHeight(placed.values(), spacing.gap);
+    const { block, holdsList } = placeDrawing(drawing, below, { width: room.width, height: free }, look);
+    placed.set(drawing, block);
+    if (holdsList) placed.delete(list!);
+  } else if (pictures && list) {
+    const both = placePicturesBeside(pictures, list, room.width, look);
+    if (both) {
+      placed.set(pictures, both);
+      placed.delete(list);
+    }
+  }
+  return blocks.flatMap((b) => placed.get(b) ?? []).filter((b) => b.pieces.length > 0);
 }

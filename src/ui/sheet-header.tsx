@@ -30,20 +30,22 @@ export function SheetHeader({ crumbs }: { readonly crumbs: readonly Crumb[] }) {
       )}
       <div className="flex min-h-11 min-w-0 flex-1 basis-96 items-center justify-end gap-x-6 py-1">
         {crumbs.length > 0 && (
-          <nav
-            aria-label="Where you are"
-            title={crumbs.map((crumb) => crumb.label).join(' / ')}
-            className="min-w-0 truncate"
-          >
+          <nav aria-label="Where you are" className="flex min-w-0 gap-x-[1ch]">
             {crumbs.map((crumb, i) => (
               <Fragment key={i}>
-                {i > 0 && <span aria-hidden="true"> / </span>}
+                {i > 0 && <span aria-hidden="true">/</span>}
                 {crumb.to ? (
-                  <Link to={crumb.to} className="underline decoration-rule underline-offset-4 hover:decoration-ink">
+                  <Link
+                    to={crumb.to}
+                    title={crumb.label}
+                    className="min-w-0 truncate underline decoration-rule underline-offset-4 hover:decoration-ink"
+                  >
                     {crumb.label}
                   </Link>
                 ) : (
-                  <span aria-current="page">{crumb.label}</span>
+                  <span aria-current="page" title={crumb.label} className="min-w-0 truncate">
+                    {crumb.label}
+                  </span>
                 )}
               </Fragment>
             ))}

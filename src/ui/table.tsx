@@ -11,6 +11,8 @@ export interface Column<Row> {
   readonly sortBy?: (row: Row) => string | number;
   /** The cell that names the row; one column of a table has it. */
   readonly names?: boolean;
+  /** Left out where the window is narrow: what another column shows too. */
+  readonly spare?: boolean;
   /** Head for screen readers only: columns of drawings or actions. */
   readonly hideHead?: boolean;
 }
@@ -60,8 +62,9 @@ export function Table<Row>({ caption, columns, rows, rowKey }: TableProps<Row>) 
                   scope="col"
                   aria-sort={direction}
                   className={classNames(
-                    'px-2 py-1 align-bottom text-11 font-normal text-pencil first:pl-0 last:pr-0',
+                    'px-2 py-1 align-bottom text-11 font-normal text-pencil',
                     column.align === 'right' && 'text-right',
+                    column.spare && 'max-lg:hidden',
                   )}
                 >
                   {column.sortBy === undefined ? (
@@ -88,8 +91,9 @@ export function Table<Row>({ caption, columns, rows, rowKey }: TableProps<Row>) 
             <tr key={rowKey(row)} className="break-inside-avoid border-b border-rule hover:bg-board-light">
               {columns.map((column) => {
                 const look = classNames(
-                  'px-2 py-1.5 font-normal first:pl-0 last:pr-0',
+                  'px-2 py-1.5 font-normal',
                   column.align === 'right' && 'text-right',
+                  column.spare && 'max-lg:hidden',
                 );
                 return column.names ? (
                   <th key={column.key} scope="row" className={look}>

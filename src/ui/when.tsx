@@ -7,7 +7,7 @@ export function When({ iso, now = new Date() }: { readonly iso: string; readonly
   const time = new Date(iso);
   const today = DAY.format(time) === DAY.format(now);
   return (
-    <time dateTime={iso} title={FULL.format(time)} className="whitespace-nowrap">
+    <time dateTime={iso} title={FULL.format(time)}>
       {today ? `today ${TIME.format(time)}` : DAY.format(time)}
     </time>
   );

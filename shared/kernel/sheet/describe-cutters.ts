@@ -91,7 +91,14 @@ export function describeCutters(worked: WorkedFrame, context: SheetContext, grou
         ordered: false,
         items: proofLines(context.proof),
       },
-      { kind: 'list', id: 'cautions', title: 'Cautions', ordered: false, items: [{ text: CAUTIONS.join(' ') }] },
+      {
+        kind: 'list',
+        id: 'cautions',
+        title: 'Cautions',
+        ordered: false,
+        beside: true,
+        items: [{ text: CAUTIONS.join(' ') }],
+      },
       {
         kind: 'sign-off',
         id: 'sign-off',

@@ -84,7 +84,7 @@ export type SheetBlock =
       readonly title: string;
       readonly ordered: boolean;
       readonly items: readonly SheetLine[];
-      /** May stand beside the page's drawing, where that leaves room for a larger one. */
+      /** May stand beside the page's drawing or first pictures, where that saves room. */
       readonly beside?: boolean;
     }
   | { readonly kind: 'sign-off'; readonly id: string; readonly title: string; readonly boxes: readonly SignOffBox[] };

@@ -8,9 +8,6 @@ import type { WorkedFrame } from '../worked-frame.ts';
 
 import type { SheetLine } from './sheet-model.ts';
 
-const cutsOpenings = (worked: WorkedFrame) =>
-  worked.front.lineSets.some((s) => s.set === 'OPENING' && s.shapes.length > 0);
-
 /** Where an edge's entered size is true, and how far the cutter's axis runs inside it. `which` says which openings when there are several kinds. */
 function sizeOf(
   worked: WorkedFrame,

@@ -3,7 +3,7 @@ import type { Starter } from './starter.ts';
 
 const SIZES = {
   in: { width: 17.5, reveal: { left: 0.75, right: 0.75, top: 1.5, bottom: 0.25, partition: 0 }, rail: 1.5, drawer: 5 },
-  mm: { width: 438, reveal: { left: 21, right: 21, top: 40, bottom: 8, partition: 0 }, rail: 40, drawer: 130 },
+  mm: { width: 438, reveal: { left: 21, right: 21, top: 40, bottom: 8, partition: 0 }, rail: 40, drawer: 125 },
 } as const;
 
 export const drawerStackStarter: Starter = {

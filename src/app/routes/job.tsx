@@ -79,7 +79,7 @@ export function JobRoute() {
     >
       <Fetched query={query} what="the job">
         {({ frames }) => (
-          <div className="grid gap-x-8 gap-y-6 xl:grid-cols-[minmax(0,1fr)_20rem] print:block">
+          <div className="grid gap-x-6 gap-y-6 xl:grid-cols-[minmax(0,1fr)_18rem] print:block">
             <div className="min-w-0">
               <JobFrames
                 frames={frames}

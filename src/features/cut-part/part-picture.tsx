@@ -20,43 +20,38 @@ interface PartPictureProps {
   readonly tokens: Tokens;
 }
 
-/** What goes on while a picture is made, and why there is none. */
+/** Over the picture: what goes on while one is made, and why there is none. */
 function PictureNews({ asked, stop, again }: { readonly asked: Asked<unknown>; readonly stop: () => void; readonly again: () => void }) {
-  if (asked.at === 'working')
-    return (
-      <ProgressText
-        done={asked.done}
-        cancel={
-          <Button kind="quiet" onClick={stop}>
-            Cancel
+  if (asked.at === 'ready') return null;
+  return (
+    <div className="absolute bottom-0 left-0 bg-paper px-3 py-1.5">
+      {asked.at === 'working' && (
+        <ProgressText
+          done={asked.done}
+          cancel={
+            <Button kind="quiet" onClick={stop}>
+              Cancel
+            </Button>
+          }
+        >
+          Cutting
+        </ProgressText>
+      )}
+      {asked.at === 'stopped' && (
+        <p role="status">
+          Stopped.{' '}
+          <Button kind="quiet" onClick={again}>
+            Cut again
           </Button>
-        }
-      >
-        Cutting
-      </ProgressText>
-    );
-  if (asked.at === 'stopped')
-    return (
-      <p role="status">
-        Stopped.{' '}
-        <Button kind="quiet" onClick={again}>
-          Cut again
-        </Button>
-      </p>
-    );
-  if (asked.at === 'refused')
-    return (
-      <Notice level="stop" word="Cannot be cut" live>
-        {asked.reason}
-      </Notice>
-    );
-  if (asked.at === 'failed')
-    return (
-      <Notice level="stop" word="Not shown" live action={<Button onClick={again}>Try again</Button>}>
-        {asked.reason}
-      </Notice>
-    );
-  return null;
+        </p>
+      )}
+      {(asked.at === 'refused' || asked.at === 'failed') && (
+        <Notice level="stop" word={asked.at === 'refused' ? 'Cannot be cut' : 'Not shown'} live action={asked.at === 'failed' && <Button onClick={again}>Try again</Button>}>
+          {asked.reason}
+        </Notice>
+      )}
+    </div>
+  );
 }
 
 const KEYS = 'Arrows turn, with Shift they move; + and − zoom, 0 holds as at first, Enter looks closer at the middle.';
@@ -94,6 +89,7 @@ export function SolidPicture({ client, files, view, colours, tokens, onLost }: P
           label="Cut part"
           describedBy={`${id}-says ${id}-keys`}
         />
+        <PictureNews asked={picture} stop={picture.stop} again={picture.again} />
       </div>
       <p id={`${id}-says`} className="sr-only">
         {describePart({ steps, done, place, shown, plane, facts, unit })}
@@ -105,7 +101,6 @@ export function SolidPicture({ client, files, view, colours, tokens, onLost }: P
         {stepSentence({ steps, done, facts, unit })}
         {picture.answer && ` Worked out every ${formatWithUnit(picture.answer.cell, unit)}.`}
       </p>
-      <PictureNews asked={picture} stop={picture.stop} again={picture.again} />
     </>
   );
 }
@@ -126,6 +121,7 @@ export function FlatPicture({ client, files, view, colours, tokens }: PartPictur
       </Notice>
       <div className="relative min-h-72 flex-1 border border-rule">
         <ReliefStage relief={relief.answer} label={`Cut part, ${face}`} describedBy={`${id}-says`} />
+        <PictureNews asked={relief} stop={relief.stop} again={relief.again} />
       </div>
       <p id={`${id}-says`} className="sr-only">
         {describePart({ steps, done, place, shown: face, plane: null, facts, unit })}
@@ -133,7 +129,6 @@ export function FlatPicture({ client, files, view, colours, tokens }: PartPictur
       <p role="status" className="text-12">
         {stepSentence({ steps, done, facts, unit })}
       </p>
-      <PictureNews asked={relief} stop={relief.stop} again={relief.again} />
     </>
   );
 }

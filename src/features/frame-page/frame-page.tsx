@@ -120,7 +120,7 @@ export function FramePage({ frame, profiles, defaultProfileId, shopName, mayEdit
         }
       >
         <div className="flex min-h-0 flex-1 flex-col-reverse md:flex-row">
-          <div className="flex min-h-0 shrink-0 flex-col border-t border-ink md:w-80 md:border-t-0 md:border-r max-md:h-2/5 2xl:w-96">
+          <div className="flex min-h-0 shrink-0 flex-col border-t border-ink md:w-84 md:border-t-0 md:border-r max-md:h-2/5 2xl:w-96">
             <FormBar>
               <FrameFileButtons />
             </FormBar>

@@ -26,7 +26,16 @@ const Revision = ({ row }: { readonly row: FrameRow }) =>
   ) : (
     <>
       <span className="font-bold">{row.revision}</span>
-      {row.draftChanged && <span className="block text-pencil">draft after it</span>}
+      {row.draftChanged && <span className="text-pencil"> + draft</span>}
+      <div>
+        <ButtonLink
+          kind="quiet"
+          to={`/frames/${row.id}/sheet?revision=${encodeURIComponent(row.revision)}`}
+          label={`Setup sheet of ${row.name}, revision ${row.revision}`}
+        >
+          Setup sheet
+        </ButtonLink>
+      </div>
     </>
   );
 
@@ -59,7 +68,7 @@ const COLUMNS: readonly Column<FrameRow>[] = [
       </>
     ),
   },
-  { key: 'openings', head: 'Openings', align: 'right', sortBy: (row) => row.openings, cell: (row) => row.openings },
+  { key: 'openings', head: 'Openings', align: 'right', spare: true, sortBy: (row) => row.openings, cell: (row) => row.openings },
   { key: 'findings', head: 'Findings', sortBy: weight, cell: (row) => <FindingCounts counts={row.findings} /> },
   { key: 'revision', head: 'Revision', sortBy: (row) => row.revision, cell: (row) => <Revision row={row} /> },
   { key: 'changed', head: 'Changed', sortBy: (row) => row.changedAt, cell: (row) => <When iso={row.changedAt} /> },
@@ -80,15 +89,6 @@ export function FramesTable({ frames, drawing, onCopy, onPutAway }: FramesTableP
       hideHead: true,
       cell: (row) => (
         <div className="flex flex-col items-end gap-x-4 2xl:flex-row 2xl:justify-end">
-          {row.revision !== '' && (
-            <ButtonLink
-              kind="quiet"
-              to={`/frames/${row.id}/sheet?revision=${row.revision}`}
-              label={`Setup sheet of ${row.name}`}
-            >
-              Setup sheet
-            </ButtonLink>
-          )}
           {onCopy && (
             <Button kind="quiet" aria-label={`Copy ${row.name}`} onClick={() => onCopy(row)}>
               Copy

@@ -48,7 +48,6 @@ export function SetupSheetPage({ model, frame, job, newerRevision, pdf, shown, a
           }
           actionNote="opens beside this page"
         >
-          <TitleCell label="Shop">{titleBlock.legalOwner}</TitleCell>
           <TitleCell label="Frame" main detail={job.name}>
             {frame.name}
           </TitleCell>

@@ -178,7 +178,8 @@ test('When help is asked for, then it names every option and the exit codes', as
     expect(out).toContain(word);
 });
 
-describe('When it is run as a command', () => {
+// A process of its own for each, which compiles all it needs: slow on a busy machine.
+describe('When it is run as a command', { timeout: 120_000 }, () => {
   const command = (args: string[], input?: string) =>
     spawnSync(
       process.execPath,

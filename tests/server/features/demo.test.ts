@@ -11,7 +11,10 @@ import { DEMO_FRAMES, DEMO_PEOPLE } from '../../../server/features/demo/demo-sce
 import { readConfig } from '../../../server/config.ts';
 import { expectStatus, openShop } from '../../builders/shops.ts';
 import type { HttpClient } from '../../setup/http-client.ts';
+import { allowSlowMachine } from '../../setup/slow-machine.ts';
 import { startTestServer, type TestServer } from '../../setup/test-server.ts';
+
+allowSlowMachine();
 
 const samples = join(import.meta.dirname, '../../../samples');
 const said: string[] = [];
@@ -28,7 +31,7 @@ beforeAll(async () => {
   const { jobs } = jobList.parse((await visitor.get('/api/jobs')).json());
   const page = jobPage.parse((await visitor.get(`/api/jobs/${jobs[0]!.id}`)).json());
   frames = await Promise.all(page.frames.map(async (f) => frameContract.parse((await visitor.get(`/api/frames/${f.id}`)).json())));
-}, 120_000);
+});
 afterAll(() => server.close());
 
 const findingsOf = (frame: Frame) => workFrame(frame.particulars).findings;

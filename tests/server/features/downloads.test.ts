@@ -8,7 +8,10 @@ import { parseFrameFile } from '../../../shared/contracts/parse-frame-file.ts';
 import { aFrame, aFrameWithStop } from '../../builders/particulars.ts';
 import { addFrame, addJob, expectStatus, openShop, openShopWithFrame, releaseFrame } from '../../builders/shops.ts';
 import type { Answer } from '../../setup/http-client.ts';
+import { allowSlowMachine } from '../../setup/slow-machine.ts';
 import { startTestServer, type TestServer } from '../../setup/test-server.ts';
+
+allowSlowMachine();
 
 let server: TestServer;
 beforeAll(async () => void (server = await startTestServer()));
@@ -122,7 +125,7 @@ describe('Downloading a layer set', () => {
     const names = [...files.keys()];
     expect(names.filter((n) => n.endsWith('_back.dxf')).map((n) => n.split('/').pop()).sort()).toEqual(['One_rev-A_back.dxf', 'Two_rev-B_back.dxf']);
     expect(names.some((n) => !n.includes('/') && n.endsWith('.pdf'))).toBe(true);
-  }, 60_000);
+  });
 });
 
 describe('While files are made', () => {
@@ -143,7 +146,7 @@ describe('While files are made', () => {
     // If the files were made on the thread that answers, the first of these would have waited for all of them.
     expect(waits.length).toBeGreaterThan(5);
     expect(Math.max(...waits)).toBeLessThan(whole / 2);
-  }, 120_000);
+  });
 
   it('When more is asked for than can wait, then the rest is told to come back', async () => {
     const { visitor, frame } = await openShopWithFrame(server);
@@ -153,5 +156,5 @@ describe('While files are made', () => {
     expect(counts.made + counts.later).toBe(80);
     expect(counts.later).toBeGreaterThan(0);
     expect(counts.made).toBeGreaterThanOrEqual(64);
-  }, 120_000);
+  });
 });

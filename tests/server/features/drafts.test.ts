@@ -5,7 +5,10 @@ import type { Particulars } from '../../../shared/kernel/particulars/particulars
 import { aFrame, aFrameWithCaution, aFrameWithStop } from '../../builders/particulars.ts';
 import { addFrame, addJob, addPerson, expectStatus, openShop, openShopWithFrame } from '../../builders/shops.ts';
 import type { HttpClient } from '../../setup/http-client.ts';
+import { allowSlowMachine } from '../../setup/slow-machine.ts';
 import { startTestServer, type TestServer } from '../../setup/test-server.ts';
+
+allowSlowMachine();
 
 let server: TestServer;
 beforeAll(async () => void (server = await startTestServer()));
@@ -92,7 +95,7 @@ describe('Two people on one draft', () => {
     for (let version = 1; version <= 201; version++) await saved(first, frame.id, version, aFrame({ 'outline.width': 33 + version / 64 }));
     const { changes } = await refused(first, frame.id, 1, aFrame());
     expect(changes).toEqual([{ path: 'outline.width', yours: '33', theirs: String(33 + 201 / 64) }]);
-  }, 60_000);
+  });
 
   it('When both save at the same moment, then one is saved and the other told', async () => {
     const { first, second, frame } = await meet();

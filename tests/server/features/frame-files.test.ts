@@ -6,7 +6,10 @@ import { writeFrameFile } from '../../../shared/contracts/write-frame-file.ts';
 import { aFrame } from '../../builders/particulars.ts';
 import { addJob, expectStatus, openShop } from '../../builders/shops.ts';
 import type { Answer, HttpClient } from '../../setup/http-client.ts';
+import { allowSlowMachine } from '../../setup/slow-machine.ts';
 import { startTestServer, type TestServer } from '../../setup/test-server.ts';
+
+allowSlowMachine();
 
 let server: TestServer;
 let visitor: HttpClient;

@@ -3,7 +3,10 @@ import { profileList, storedProfile, type StoredProfile } from '../../../shared/
 import { BUILTIN_PROFILES } from '../../../shared/kernel/profiles/builtin-profiles.ts';
 import { expectStatus, openShop } from '../../builders/shops.ts';
 import type { HttpClient } from '../../setup/http-client.ts';
+import { allowSlowMachine } from '../../setup/slow-machine.ts';
 import { startTestServer, type TestServer } from '../../setup/test-server.ts';
+
+allowSlowMachine();
 
 let server: TestServer;
 let visitor: HttpClient;

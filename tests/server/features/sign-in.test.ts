@@ -3,7 +3,10 @@ import { session as sessionContract } from '../../../shared/contracts/session.ts
 import { sessions, users } from '../../../server/db/schema.ts';
 import { addPerson, anAddress, expectStatus, openShop, PASSWORD } from '../../builders/shops.ts';
 import type { HttpClient } from '../../setup/http-client.ts';
+import { allowSlowMachine } from '../../setup/slow-machine.ts';
 import { startTestServer, type TestServer } from '../../setup/test-server.ts';
+
+allowSlowMachine();
 
 let server: TestServer;
 beforeAll(async () => void (server = await startTestServer()));

@@ -5,7 +5,10 @@ import { AppError, statusOf } from '../../../server/errors.ts';
 import { aFrame } from '../../builders/particulars.ts';
 import { openShopWithFrame } from '../../builders/shops.ts';
 import type { Answer, HttpClient } from '../../setup/http-client.ts';
+import { allowSlowMachine } from '../../setup/slow-machine.ts';
 import { startTestServer, type TestServer } from '../../setup/test-server.ts';
+
+allowSlowMachine();
 
 let server: TestServer;
 let visitor: HttpClient;

@@ -6,7 +6,10 @@ import { aFrame } from '../../builders/particulars.ts';
 import { addFrame, addJob, addPerson, expectStatus, openShop, releaseFrame, type SignedInVisitor } from '../../builders/shops.ts';
 import type { HttpClient } from '../../setup/http-client.ts';
 import { listRoutes } from '../../setup/list-routes.ts';
+import { allowSlowMachine } from '../../setup/slow-machine.ts';
 import { startTestServer, type TestServer } from '../../setup/test-server.ts';
+
+allowSlowMachine();
 
 /** Things of a shop that paths and bodies may name. Requests that change something get a fresh set, so that none spoils the next. */
 interface Things {

@@ -15,8 +15,14 @@ export interface FaceMesh {
   readonly looseFrom: number;
 }
 
-/** Room about the samples for the board's own edges. */
+/** Room about the samples for the board's own edges, and the mark of it: there is no layer of this number. */
 const RING = 1;
+const OUTSIDE = 255;
+
+/** A raster that also knows which layer cut where. */
+interface OwnedRaster extends Raster {
+  readonly by: Uint8Array;
+}
 
 /** The raster's side for a grid: a power of two and one more, with a ring of nothing about the samples. */
 export function rasterSide(columns: number, rows: number): number {
@@ -29,60 +35,85 @@ export function rasterSide(columns: number, rows: number): number {
  * Heights of one surface. Where nothing is left the walls run down to the other surface, so that both close the board
  * between them; beside the board they meet at the back.
  */
-function makeRaster({ grid, thickness, front, back, standing }: CutPart, face: Face): Raster {
+function makeRaster({ grid, thickness, front, back, standing }: CutPart, face: Face): OwnedRaster {
   const side = rasterSide(grid.columns, grid.rows);
   const height = new Float32Array(side * side).fill(-thickness);
   const kind = new Uint16Array(side * side);
-  const by = face === 'front' ? front.by : back.by;
+  const owners = face === 'front' ? front.by : back.by;
+  const by = new Uint8Array(side * side).fill(OUTSIDE);
   for (let j = 0; j < grid.rows; j++) {
     for (let i = 0; i < grid.columns; i++) {
       const at = j * grid.columns + i;
       const to = (j + RING) * side + i + RING;
       const under = thickness - back.depth[at]!;
       height[to] = face === 'back' ? -under : -Math.min(front.depth[at]!, under);
-      if (standing[at] !== GONE) kind[to] = standing[at]! * 256 + by[at]!;
+      by[to] = owners[at]!;
+      if (standing[at] !== GONE) kind[to] = standing[at]! * 256 + owners[at]!;
     }
   }
-  return { side, height, kind };
+  return { side, height, kind, by };
 }
 
-/** The surface of a cut board seen from `face`, flat stretches merged as far as `tolerance` allows; see right-triangles.ts. */
+/** Corners and triangles as they are found, in arrays of the right size. */
+class MeshBuilder {
+  readonly positions: Float32Array;
+  readonly by: Uint8Array;
+  readonly index: Uint32Array;
+  private corners = 0;
+
+  constructor(corners: number, triangles: number) {
+    this.positions = new Float32Array(3 * corners);
+    this.by = new Uint8Array(corners);
+    this.index = new Uint32Array(3 * triangles);
+  }
+
+  corner(x: number, y: number, z: number, by: number): number {
+    const at = this.corners++;
+    this.positions[3 * at] = x;
+    this.positions[3 * at + 1] = y;
+    this.positions[3 * at + 2] = z;
+    this.by[at] = by;
+    return at;
+  }
+}
+
+/**
+ * The surface of a cut board seen from `face`, flat stretches merged as far as `tolerance` allows; see right-triangles.ts.
+ * A triangle is of one colour: one between surfaces of several layers has corners of its own, which belong to the layer
+ * that cut its deepest corner, or to none at the edge of the board or region.
+ */
 export function faceMesh(part: CutPart, face: Face, tolerance: number): FaceMesh {
   const { grid } = part;
-  const raster = makeRaster(part, face);
-  const { side, kind, height } = raster;
-  const walk = rightTriangles(raster, tolerance);
+  const { side, height, kind, by } = makeRaster(part, face);
+  const walk = rightTriangles({ side, height, kind }, tolerance);
   const isLoose = (a: number, b: number, c: number) => kind[a]! >> 8 === LOOSE || kind[b]! >> 8 === LOOSE || kind[c]! >> 8 === LOOSE;
+  const isEven = (a: number, b: number, c: number) => by[a] === by[b] && by[a] === by[c];
+  const isOutside = (at: number) => by[at] === OUTSIDE;
+  const deepest = (a: number, b: number): number => ((height[a]! < height[b]!) === (face === 'front') ? a : b);
+  const layerOf = (a: number, b: number, c: number): number => (isOutside(a) || isOutside(b) || isOutside(c) ? 0 : by[deepest(deepest(a, b), c)]!);
 
-  const numbers = new Uint32Array(side * side);
+  const numbers = new Int32Array(side * side);
   let corners = 0;
   let [partCount, looseCount] = [0, 0];
   walk((a, b, c) => {
     if (isLoose(a, b, c)) looseCount++;
     else partCount++;
-    for (const at of [a, b, c]) if (numbers[at] === 0) numbers[at] = ++corners;
+    if (!isEven(a, b, c)) corners += 3;
+    else for (const at of [a, b, c]) if (numbers[at] === 0) numbers[at] = ++corners;
   });
 
-  const index = new Uint32Array(3 * (partCount + looseCount));
+  const mesh = new MeshBuilder(corners, partCount + looseCount);
+  const place = (at: number, layer: number) => mesh.corner(sampleX(grid, (at % side) - RING), sampleY(grid, Math.floor(at / side) - RING), height[at]!, layer);
+  const shared = numbers.fill(-1);
+  const share = (at: number): number => (shared[at] === -1 ? (shared[at] = place(at, by[at]!)) : shared[at]!);
   let [partAt, looseAt] = [0, 3 * partCount];
   walk((a, b, c) => {
     const at = isLoose(a, b, c) ? (looseAt += 3) - 3 : (partAt += 3) - 3;
-    index[at] = numbers[a]! - 1;
-    index[at + 1] = numbers[face === 'front' ? b : c]! - 1;
-    index[at + 2] = numbers[face === 'front' ? c : b]! - 1;
+    const layer = isEven(a, b, c) ? -1 : layerOf(a, b, c);
+    const [p, q, r] = layer < 0 ? [share(a), share(b), share(c)] : [place(a, layer), place(b, layer), place(c, layer)];
+    mesh.index[at] = p;
+    mesh.index[at + 1] = face === 'front' ? q : r;
+    mesh.index[at + 2] = face === 'front' ? r : q;
   });
-
-  const positions = new Float32Array(3 * corners);
-  const by = new Uint8Array(corners);
-  const owners = face === 'front' ? part.front.by : part.back.by;
-  for (let at = 0; at < numbers.length; at++) {
-    if (numbers[at] === 0) continue;
-    const k = numbers[at]! - 1;
-    const [i, j] = [(at % side) - RING, Math.floor(at / side) - RING];
-    positions[3 * k] = sampleX(grid, i);
-    positions[3 * k + 1] = sampleY(grid, j);
-    positions[3 * k + 2] = height[at]!;
-    if (i >= 0 && j >= 0 && i < grid.columns && j < grid.rows) by[k] = owners[j * grid.columns + i]!;
-  }
-  return { positions, by, index, looseFrom: 3 * partCount };
+  return { positions: mesh.positions, by: mesh.by, index: mesh.index, looseFrom: 3 * partCount };
 }

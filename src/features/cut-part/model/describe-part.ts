@@ -28,7 +28,7 @@ export function stepSentence({ steps, done, facts, unit }: Pick<Looked, 'steps' 
   const step = steps[done - 1];
   if (!step) return 'The board as loaded, before any cut.';
   const area = facts?.marked[step.face][step.order];
-  const marked = area === undefined ? '' : area === 0 ? ' It leaves no surface of its own here.' : ` Its surfaces here: ${areaWords(area, unit)}.`;
+  const marked = area === undefined ? '' : area === 0 ? ' It leaves upright walls only here, or nothing.' : ` Its surfaces here: ${areaWords(area, unit)}.`;
   return `After step ${done} of ${steps.length}, ${step.face}, ${step.words.toLowerCase()}: ${step.detail}.${marked}`;
 }
 

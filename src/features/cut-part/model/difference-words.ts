@@ -1,5 +1,5 @@
 import type { Difference, LargestDifference } from '#shared/kernel/height-field/find-difference.ts';
-import { formatLength, formatWithUnit } from '#shared/kernel/units/format-length.ts';
+import type { Unit } from '#shared/kernel/units/unit.ts';
 import type { WorkedFrame } from '#shared/kernel/worked-frame.ts';
 
 function featureWords({ contours, dados }: WorkedFrame, { of }: Difference): string {
@@ -10,13 +10,19 @@ function featureWords({ contours, dados }: WorkedFrame, { of }: Difference): str
   return dado ? ` at the dado of ${dado.part}` : '';
 }
 
+/** Digits of what was measured at samples: it is never exact, and is marked so. */
+const DIGITS: Record<Unit, { readonly size: number; readonly place: number }> = { in: { size: 4, place: 2 }, mm: { size: 2, place: 0 } };
+
 /** One difference in words: how much, what, where. */
 export function differenceWords(worked: WorkedFrame, difference: Difference): string {
   const { unit, thickness } = worked.particulars;
   const { kind, off, x, y, depth, intended } = difference;
-  const deep = (z: number) => (z >= thickness ? 'through' : formatLength(z, unit));
+  const digits = DIGITS[unit];
+  const size = (value: number) => `≈${value.toFixed(digits.size)}`;
+  const place = (value: number) => `≈${value.toFixed(digits.place)}`;
+  const deep = (z: number) => (z >= thickness ? 'through' : z === 0 ? 'not at all' : `${size(z)} deep`);
   const what = kind === 'left' ? 'of board left standing' : 'cut away too much';
-  return `${formatWithUnit(off, unit)} ${what}${featureWords(worked, difference)}, at ${formatLength(x, unit)}, ${formatLength(y, unit)}: cut ${deep(depth)}, meant ${deep(intended)}`;
+  return `${size(off)} ${unit} ${what}${featureWords(worked, difference)}, at ${place(x)}, ${place(y)}: cut ${deep(depth)}, meant to be ${deep(intended)}`;
 }
 
 /** The largest differences of a face, the greater first; empty when there are none above rounding. */

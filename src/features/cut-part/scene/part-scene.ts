@@ -9,6 +9,7 @@ import {
   LineBasicMaterial,
   LineSegments,
   Mesh,
+  MeshBasicMaterial,
   MeshLambertMaterial,
   OrthographicCamera,
   Plane as ClippingPlane,
@@ -28,8 +29,11 @@ import type { Picture, Plane, Rgb } from '../work/picture.ts';
 import { spreadOut, visibleHeight } from './lay-out.ts';
 
 /** Light that falls everywhere, and from the upper left of the screen. */
-const AMBIENT = 1.35;
-const LAMP = 2.1;
+const AMBIENT = 1.6;
+const LAMP = 2;
+
+/** Surfaces give way to lines drawn along them. */
+const BEHIND_LINES = { polygonOffset: true, polygonOffsetFactor: 1, polygonOffsetUnits: 1 };
 
 /** What is shown of a picture. */
 export interface Showing {
@@ -56,10 +60,10 @@ function colourCorners(out: Float32Array, by: Uint8Array, palette: readonly Rgb[
 /** One copy of the part: its own materials, since each copy is cut by a plane of its own. */
 class Copy {
   readonly group = new Group();
-  private readonly skin = new MeshLambertMaterial({ vertexColors: true, flatShading: true });
+  private readonly skin = new MeshLambertMaterial({ vertexColors: true, flatShading: true, ...BEHIND_LINES });
   private readonly meshes: readonly [Mesh, Mesh, Mesh, LineSegments];
 
-  constructor(front: BufferGeometry, back: BufferGeometry, cap: BufferGeometry, outline: BufferGeometry, inside: MeshLambertMaterial, ink: LineBasicMaterial) {
+  constructor(front: BufferGeometry, back: BufferGeometry, cap: BufferGeometry, outline: BufferGeometry, inside: MeshBasicMaterial, ink: LineBasicMaterial) {
     this.meshes = [new Mesh(front, this.skin), new Mesh(back, this.skin), new Mesh(cap, inside), new LineSegments(outline, ink)];
     for (const mesh of this.meshes) mesh.frustumCulled = false;
     this.group.add(...this.meshes);
@@ -86,7 +90,7 @@ export class PartScene {
   private readonly scene = new Scene();
   private readonly camera = new OrthographicCamera();
   private readonly geometries = { front: new BufferGeometry(), back: new BufferGeometry(), cap: new BufferGeometry(), outline: new BufferGeometry() };
-  private readonly inside = new MeshLambertMaterial({ side: DoubleSide });
+  private readonly inside = new MeshBasicMaterial({ side: DoubleSide, ...BEHIND_LINES });
   private readonly ink = new LineBasicMaterial();
   private readonly copies: readonly [Copy, Copy];
   private region: Extents = { minX: 0, minY: 0, maxX: 1, maxY: 1 };
@@ -169,8 +173,6 @@ export class PartScene {
     outline.dispose();
     cap.setAttribute('position', new BufferAttribute(slice?.positions ?? new Float32Array(), 3));
     cap.setIndex(new BufferAttribute(slice?.index ?? new Uint32Array(), 1));
-    cap.deleteAttribute('normal');
-    cap.computeVertexNormals();
     outline.setAttribute('position', new BufferAttribute(slice?.outline ?? new Float32Array(), 3));
     this.setShowing(this.showing);
   }

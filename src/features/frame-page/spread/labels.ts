@@ -16,13 +16,15 @@ export interface Label {
   readonly colour: 'back' | 'front' | 'ink' | 'pencil';
   /** Length in frame's unit that the words must fit into; Infinity when they stand free. */
   readonly room: number;
+  /** Where the words do not fit that way they are turned, if they fit into this. 0: they are not. */
+  readonly turnedRoom: number;
   /** Name of the line set that it belongs to, with which it is switched off; '' for none. */
   readonly hiddenWith: string;
   /** Lies across lines on the board. */
   readonly onBoard: boolean;
 }
 
-const free = { dx: 0, dy: 0, turned: false, room: Infinity, hiddenWith: '', onBoard: false } as const;
+const free = { dx: 0, dy: 0, turned: false, room: Infinity, turnedRoom: 0, hiddenWith: '', onBoard: false } as const;
 
 function backLabels(worked: WorkedFrame): Label[] {
   const { particulars, back, contours } = worked;
@@ -62,7 +64,7 @@ function frontLabels({ contours, particulars, front }: WorkedFrame): Label[] {
     const arch = o.arch > 0 ? `, arch ${formatLength(o.arch, unit)}` : '';
     return [
       { ...common, key: `${o.id}-label`, text: o.label, dy: -9 },
-      { ...common, key: `${o.id}-size`, text: `${formatLength(o.width, unit)} × ${formatLength(o.height, unit)}${arch}`, dy: 9 },
+      { ...common, key: `${o.id}-size`, text: `${formatLength(o.width, unit)} × ${formatLength(o.height, unit)}${arch}`, dy: 9, turnedRoom: o.height / 2 },
     ];
   });
   return [

@@ -6,6 +6,7 @@ import type { Label } from './labels.ts';
 /** Width of a character of the 11 px type, and a little on either side of the words. */
 const CHARACTER_PX = 6.6;
 const SPARE_PX = 6;
+const LINE_PX = 16;
 
 /** A halo of the board's colour keeps words readable across lines. */
 const HALO = 'stroke-board [paint-order:stroke] [stroke-width:4]';
@@ -34,11 +35,14 @@ export function PageLabels({ labels, view, placement, page, hiddenSets }: PageLa
   return (
     <g aria-hidden="true" className="text-11 pointer-events-none">
       {labels.map((label) => {
-        const fits = label.text.length * CHARACTER_PX + SPARE_PX <= label.room * view.scale;
-        if (!fits || hiddenSets.has(label.hiddenWith)) return null;
+        const length = label.text.length * CHARACTER_PX + SPARE_PX;
+        const fits = length <= label.room * view.scale;
+        const fitsTurned = !fits && length + LINE_PX <= label.turnedRoom * view.scale;
+        if ((!fits && !fitsTurned) || hiddenSets.has(label.hiddenWith)) return null;
         const { x, y } = toPage(view, placement, page, label.at);
-        // Whole pixels keep the type sharp, and unchanged words unchanged.
-        return <Words key={label.key} x={Math.round(x + label.dx)} y={Math.round(y + label.dy)} turned={label.turned} text={label.text} look={label.onBoard ? `${COLOURS[label.colour]} ${HALO}` : COLOURS[label.colour]} />;
+        // Turned words stand below what is written above them. Whole pixels keep the type sharp, and unchanged words unchanged.
+        const down = fitsTurned ? length / 2 : label.dy;
+        return <Words key={label.key} x={Math.round(x + label.dx)} y={Math.round(y + down)} turned={label.turned || fitsTurned} text={label.text} look={label.onBoard ? `${COLOURS[label.colour]} ${HALO}` : COLOURS[label.colour]} />;
       })}
     </g>
   );
