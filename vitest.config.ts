@@ -25,7 +25,14 @@ export default defineConfig({
         plugins: [react()],
         test: { name: 'src', environment: 'jsdom', include: ['tests/src/**/*.test.{ts,tsx}'], testTimeout: 15_000 },
       },
-      { test: { name: 'architecture', environment: 'node', include: ['tests/architecture/**/*.test.ts'], testTimeout: 60_000 } },
+      {
+        test: {
+          name: 'architecture',
+          environment: 'node',
+          include: ['tests/architecture/**/*.test.ts'],
+          testTimeout: 60_000,
+        },
+      },
     ],
   },
 });

@@ -1,13 +1,7 @@
-import { StrictMode } from 'react';
-import { createRoot } from 'react-dom/client';
-import { App } from './app/app.tsx';
+import { config } from 'zod';
 import './styles.css';
 
-const root = document.getElementById('root');
-if (root === null) throw new Error('index.html has no element with the id "root"');
-
-createRoot(root).render(
-  <StrictMode>
-    <App />
-  </StrictMode>,
-);
+// zod looks whether it may compile its schemas, which the content security policy forbids and the browser then reports.
+// It looks when the first schema is made: so everything with schemas comes after this.
+config({ jitless: true });
+void import('./start.tsx');

@@ -20,7 +20,9 @@ function runVite(root: string, args: string[]): Promise<void> {
     child.stdout.on('data', (chunk: Buffer) => (said += chunk.toString()));
     child.stderr.on('data', (chunk: Buffer) => (said += chunk.toString()));
     child.once('error', failed);
-    child.once('close', (code) => (code === 0 ? done() : failed(new Error(`vite build ${args.join(' ')} failed\n${said}`))));
+    child.once('close', (code) =>
+      code === 0 ? done() : failed(new Error(`vite build ${args.join(' ')} failed\n${said}`)),
+    );
   });
 }
 

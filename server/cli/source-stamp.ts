@@ -3,7 +3,17 @@ import { existsSync, readdirSync, readFileSync, statSync } from 'node:fs';
 import { join } from 'node:path';
 
 /** What the build is made from, relative to the product's folder. */
-const SOURCES = ['src', 'server', 'shared', 'public', 'index.html', 'vite.config.ts', 'package.json', 'package-lock.json', 'tsconfig.json'];
+const SOURCES = [
+  'src',
+  'server',
+  'shared',
+  'public',
+  'index.html',
+  'vite.config.ts',
+  'package.json',
+  'package-lock.json',
+  'tsconfig.json',
+];
 
 function filesUnder(path: string): string[] {
   if (!statSync(path).isDirectory()) return [path];

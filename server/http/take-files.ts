@@ -1,6 +1,7 @@
 import type { Request, RequestHandler } from 'express';
 import multer from 'multer';
 import { LIMITS } from '#shared/contracts/limits.ts';
+import { wrongField } from '../errors.ts';
 
 /** A file of an upload, held in memory. */
 export interface UploadedFile {
@@ -40,8 +41,17 @@ const upload = multer({
   limits: { files: LIMITS.frameFilesAtOnce, fields: 0, parts: LIMITS.frameFilesAtOnce, fileSize: 32 * LIMITS.frameFileBytes, headerPairs: 20 },
 });
 
-/** Takes several files from the form field `field`. */
-export const takeFiles = (field: string): RequestHandler => upload.array(field, LIMITS.frameFilesAtOnce);
+/** Takes several files from the form field `field`. A form that cannot be read is 'invalid-input'. */
+export function takeFiles(field: string): RequestHandler {
+  const take = upload.array(field, LIMITS.frameFilesAtOnce);
+  return (req, res, next) => {
+    take(req, res, (error: unknown) => {
+      // The reader of forms throws plain errors; whatever they say, the form is at fault.
+      const unreadable = error instanceof Error && !(error instanceof multer.MulterError);
+      next(unreadable ? wrongField(field, error.message, 'files, as whole multipart form data') : error);
+    });
+  };
+}
 
 /** What takeFiles took, in the order sent. */
 export const takenFiles = (req: Request): UploadedFile[] =>

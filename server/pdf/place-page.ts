@@ -41,22 +41,25 @@ function placeBlock(
   }
 }
 
-export const blocksHeight = (blocks: Iterable<PlacedBlock>, gap: number): number =>
+const blocksHeight = (blocks: Iterable<PlacedBlock>, gap: number): number =>
   [...blocks].reduce((sum, b) => sum + (b.pieces.length > 0 ? blockHeight(b, gap) : 0), 0);
 
-export interface PlacedPage {
+interface PlacedPage {
   readonly blocks: readonly PlacedBlock[];
   readonly gap: number;
 }
 
 /** A page's blocks as pieces of known height, closer together where that saves a second sheet. Empty ones are left out. */
 export function placePage(blocks: readonly SheetBlock[], room: PageRoom, colour: SheetColour): PlacedPage {
-  const [easy, tight] = [EASY, TIGHT].map((spacing) => ({
+  const place = (spacing: Spacing): PlacedPage => ({
     gap: spacing.gap,
     blocks: placeBlocks(blocks, room, colour, spacing),
-  }));
+  });
   const fits = (page: PlacedPage) => blocksHeight(page.blocks, page.gap) <= room.bottom - room.top;
-  return !fits(easy!) && fits(tight!) ? tight! : easy!;
+  const easy = place(EASY);
+  if (fits(easy)) return easy;
+  const tight = place(TIGHT);
+  return fits(tight) ? tight : easy;
 }
 
 /**

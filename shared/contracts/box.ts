@@ -29,7 +29,11 @@ const places = z.discriminatedUnion('kind', [
   }),
   z.strictObject({
     kind: z.enum(['equal openings', 'equal spaces']),
-    count: z.number(takes(partitionCount)).int(takes(partitionCount)).min(1, takes(partitionCount)).max(MOST_PARTITIONS, takes(partitionCount)),
+    count: z
+      .number(takes(partitionCount))
+      .int(takes(partitionCount))
+      .min(1, takes(partitionCount))
+      .max(MOST_PARTITIONS, takes(partitionCount)),
   }),
 ]);
 
@@ -51,15 +55,29 @@ export const box = z
     top: top.optional(),
     partitions: z.strictObject({ thickness: length, places }).optional(),
     overhang: z.strictObject({ left: overhang, right: overhang, top: overhang, bottom: overhang }),
-    reveal: z.strictObject({ left: lengthOrNone, right: lengthOrNone, top: lengthOrNone, bottom: lengthOrNone, partition: lengthOrNone }),
+    reveal: z.strictObject({
+      left: lengthOrNone,
+      right: lengthOrNone,
+      top: lengthOrNone,
+      bottom: lengthOrNone,
+      partition: lengthOrNone,
+    }),
     feet: lengthOrNone,
-    dado: z.strictObject({ depth: length, clearance: lengthOrNone, run: z.enum(['open', 'stopped'], takes('"open" or "stopped"')) }),
+    dado: z.strictObject({
+      depth: length,
+      clearance: lengthOrNone,
+      run: z.enum(['open', 'stopped'], takes('"open" or "stopped"')),
+    }),
     letIn: lengthOrNone,
   })
   .superRefine((value, ctx) => {
     // Entries are held against one another only when each is right by itself.
     if (ctx.issues.length > 0) return;
     for (const { field, takes: wanted } of checkBox(value, newFrame(value.unit, value.name)))
-      ctx.addIssue({ code: 'custom', path: field.split('.').map((key) => (/^\d+$/.test(key) ? Number(key) : key)), message: `takes ${wanted}` });
+      ctx.addIssue({
+        code: 'custom',
+        path: field.split('.').map((key) => (/^\d+$/.test(key) ? Number(key) : key)),
+        message: `takes ${wanted}`,
+      });
   }) satisfies z.ZodType<Box>;
 export type BoxInput = z.input<typeof box>;

@@ -62,7 +62,7 @@ export function Table<Row>({ caption, columns, rows, rowKey }: TableProps<Row>) 
                   scope="col"
                   aria-sort={direction}
                   className={classNames(
-                    'px-2 py-1 align-bottom text-11 font-normal text-pencil',
+                    'px-1.5 py-1 align-bottom lg:px-2 text-11 font-normal text-pencil',
                     column.align === 'right' && 'text-right',
                     column.spare && 'max-lg:hidden',
                   )}
@@ -91,7 +91,7 @@ export function Table<Row>({ caption, columns, rows, rowKey }: TableProps<Row>) 
             <tr key={rowKey(row)} className="break-inside-avoid border-b border-rule hover:bg-board-light">
               {columns.map((column) => {
                 const look = classNames(
-                  'px-2 py-1.5 font-normal',
+                  'px-1.5 py-1.5 font-normal lg:px-2',
                   column.align === 'right' && 'text-right',
                   column.spare && 'max-lg:hidden',
                 );

@@ -1,7 +1,10 @@
 import { describe, expect, test } from 'vitest';
 import { countPlaywright, countVitest, heedExitCode } from '../setup/count-results.ts';
 
-const file = (status: string, ...results: string[]) => ({ status, assertionResults: results.map((r) => ({ status: r })) });
+const file = (status: string, ...results: string[]) => ({
+  status,
+  assertionResults: results.map((r) => ({ status: r })),
+});
 
 describe('When vitest’s report is counted', () => {
   test('then passes and failures of all files are added up', () => {
@@ -14,7 +17,10 @@ describe('When vitest’s report is counted', () => {
   });
 
   test('then a test that did not run is a failure', () => {
-    expect(countVitest({ testResults: [file('passed', 'passed', 'pending', 'todo')] })).toEqual({ passed: 1, failed: 2 });
+    expect(countVitest({ testResults: [file('passed', 'passed', 'pending', 'todo')] })).toEqual({
+      passed: 1,
+      failed: 2,
+    });
   });
 });
 

@@ -7,7 +7,9 @@ import { ROOT } from './source-files.ts';
 const read = (name: string) => readFileSync(join(ROOT, name), 'utf8');
 const flat = (text: string) => text.replace(/\s+/g, ' ');
 const foldersIn = (path: string) =>
-  readdirSync(join(ROOT, path), { withFileTypes: true }).flatMap((entry) => (entry.isDirectory() ? [`${path}/${entry.name}/`] : []));
+  readdirSync(join(ROOT, path), { withFileTypes: true }).flatMap((entry) =>
+    entry.isDirectory() ? [`${path}/${entry.name}/`] : [],
+  );
 
 describe('When README is read', () => {
   const readme = read('README.md');
@@ -42,11 +44,14 @@ describe('When README is read', () => {
 describe('When DEVELOPERS is read', () => {
   const developers = read('DEVELOPERS.md');
 
-  test.each(['src', 'server', 'shared', 'shared/kernel', 'tests'])('then it tells what is in each folder of %s', (path) => {
-    const folders = foldersIn(path).filter((folder) => readdirSync(join(ROOT, folder)).length > 0);
-    expect(folders.length).toBeGreaterThan(1);
-    expect(folders.filter((folder) => !developers.includes(`\`${folder}\``))).toEqual([]);
-  });
+  test.each(['src', 'server', 'shared', 'shared/kernel', 'tests'])(
+    'then it tells what is in each folder of %s',
+    (path) => {
+      const folders = foldersIn(path).filter((folder) => readdirSync(join(ROOT, folder)).length > 0);
+      expect(folders.length).toBeGreaterThan(1);
+      expect(folders.filter((folder) => !developers.includes(`\`${folder}\``))).toEqual([]);
+    },
+  );
 
   test('then every folder that it names is there', () => {
     const named = [...developers.matchAll(/^\| `([\w/-]+\/)`/gm)].map((match) => match[1]!);

@@ -3,7 +3,8 @@ import { join } from 'node:path';
 import { describe, expect, test } from 'vitest';
 import { ROOT } from './source-files.ts';
 
-const read = (name: string) => JSON.parse(readFileSync(join(ROOT, name), 'utf8')) as Record<string, Record<string, unknown>>;
+const read = (name: string) =>
+  JSON.parse(readFileSync(join(ROOT, name), 'utf8')) as Record<string, Record<string, unknown>>;
 
 const isExact = (version: unknown) => typeof version === 'string' && /^\d+\.\d+\.\d+(-[\w.]+)?$/.test(version);
 
@@ -18,9 +19,13 @@ describe('When the packages are listed', () => {
   });
 
   test('then the lockfile holds those very versions, each with its checksum', () => {
-    const other = Object.entries(wanted).filter(([name, version]) => lock[`node_modules/${name}`]?.['version'] !== version);
+    const other = Object.entries(wanted).filter(
+      ([name, version]) => lock[`node_modules/${name}`]?.['version'] !== version,
+    );
     expect(other).toEqual([]);
-    const unchecked = Object.entries(lock).filter(([path, entry]) => path !== '' && !entry['link'] && !entry['integrity'] && !entry['inBundle']);
+    const unchecked = Object.entries(lock).filter(
+      ([path, entry]) => path !== '' && !entry['link'] && !entry['integrity'] && !entry['inBundle'],
+    );
     expect(unchecked.map(([path]) => path)).toEqual([]);
   });
 

@@ -10,7 +10,16 @@ export interface SourceFile {
 }
 
 /** Not ours, or made anew by a command. */
-const PASSED_OVER = new Set(['node_modules', 'dist', 'data', '.git', '.cache', 'coverage', 'test-results', 'playwright-report']);
+const PASSED_OVER = new Set([
+  'node_modules',
+  'dist',
+  'data',
+  '.git',
+  '.cache',
+  'coverage',
+  'test-results',
+  'playwright-report',
+]);
 const TEXT = /(\.(ts|tsx|js|cjs|mjs|css|html|json|md|sql|svg|yml|yaml)|\.npmrc|\.prettierrc|\.ci\/run)$/;
 
 function pathsUnder(folder: string): string[] {

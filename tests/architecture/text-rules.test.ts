@@ -18,7 +18,9 @@ describe.each(TEXT_RULES)('$name', ({ applies, find, breaker }) => {
 });
 
 describe('When the lengths of all files of the product are counted', () => {
-  const lengths = files.filter((file) => isProductCode(file.path)).map((file) => file.text.trimEnd().split('\n').length);
+  const lengths = files
+    .filter((file) => isProductCode(file.path))
+    .map((file) => file.text.trimEnd().split('\n').length);
   lengths.sort((a, b) => a - b);
 
   test('then the median is about 70 lines', () => {

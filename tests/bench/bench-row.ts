@@ -13,16 +13,27 @@ export interface Bench {
   readonly run: () => Promise<BenchRow[]>;
 }
 
-const median = (numbers: number[]): number => numbers.sort((a, b) => a - b)[Math.floor(numbers.length / 2)]!;
+export const median = (numbers: readonly number[]): number =>
+  numbers.toSorted((a, b) => a - b)[Math.floor(numbers.length / 2)]!;
 
-/** Median time of one call in milliseconds, after `warmUps` calls that are not counted. The collector may work between calls. */
-export async function medianTime(work: () => unknown, { warmUps, runs }: { warmUps: number; runs: number }): Promise<number> {
-  const times: number[] = [];
-  for (let i = 0; i < warmUps + runs; i++) {
-    const from = performance.now();
-    work();
-    if (i >= warmUps) times.push(performance.now() - from);
-    await new Promise((done) => setImmediate(done));
+/**
+ * Time of one call in milliseconds: the smallest of the medians of `batches` batches of `calls` calls, after one batch that is
+ * not counted. Other programs on the machine only ever make a batch slower. The collector may work between calls.
+ */
+export async function quietTime(
+  work: () => unknown,
+  { batches, calls }: { batches: number; calls: number },
+): Promise<number> {
+  const medians: number[] = [];
+  for (let batch = 0; batch <= batches; batch++) {
+    const times: number[] = [];
+    for (let call = 0; call < calls; call++) {
+      const from = performance.now();
+      work();
+      times.push(performance.now() - from);
+      await new Promise((done) => setImmediate(done));
+    }
+    if (batch > 0) medians.push(median(times));
   }
-  return median(times);
+  return Math.min(...medians);
 }

@@ -18,20 +18,24 @@ const opening: fc.Arbitrary<LayoutPart> = fc.oneof(
 /** Layout trees two levels deep: columns of rows, rows of columns, or less. Parts share what is left equally. */
 const layout: fc.Arbitrary<LayoutPart> = fc.oneof(
   opening,
-  fc.tuple(fc.array(fc.oneof(opening, rowsOf(opening)), { minLength: 1, maxLength: 3 }), lengthFrom(1, 2)).map(
-    ([columns, between]): LayoutPart => ({ columns, between }),
-  ),
-  fc.tuple(fc.array(fc.oneof(opening, columnsOf(opening)), { minLength: 1, maxLength: 3 }), lengthFrom(1, 2)).map(
-    ([rows, between]): LayoutPart => ({ rows, between }),
-  ),
+  fc
+    .tuple(fc.array(fc.oneof(opening, rowsOf(opening)), { minLength: 1, maxLength: 3 }), lengthFrom(1, 2))
+    .map(([columns, between]): LayoutPart => ({ columns, between })),
+  fc
+    .tuple(fc.array(fc.oneof(opening, columnsOf(opening)), { minLength: 1, maxLength: 3 }), lengthFrom(1, 2))
+    .map(([rows, between]): LayoutPart => ({ rows, between })),
 );
 
 function rowsOf(part: fc.Arbitrary<LayoutPart>): fc.Arbitrary<LayoutPart> {
-  return fc.tuple(fc.array(part, { minLength: 2, maxLength: 3 }), lengthFrom(1, 2)).map(([rows, between]) => ({ rows, between }));
+  return fc
+    .tuple(fc.array(part, { minLength: 2, maxLength: 3 }), lengthFrom(1, 2))
+    .map(([rows, between]) => ({ rows, between }));
 }
 
 function columnsOf(part: fc.Arbitrary<LayoutPart>): fc.Arbitrary<LayoutPart> {
-  return fc.tuple(fc.array(part, { minLength: 2, maxLength: 3 }), lengthFrom(1, 2)).map(([columns, between]) => ({ columns, between }));
+  return fc
+    .tuple(fc.array(part, { minLength: 2, maxLength: 3 }), lengthFrom(1, 2))
+    .map(([columns, between]) => ({ columns, between }));
 }
 
 const end = fc.constantFrom<DadoEnd>('open', 'stopped', 'meets');

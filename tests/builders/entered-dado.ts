@@ -12,7 +12,9 @@ export function enteredDado(dado: Dado, radius: number): Extents {
   const beyond = { open: radius, stopped: relief, meets: 0 };
   const [low, high] = [dado.at - half, dado.at + dado.panel + half];
   const [from, to] = [dado.from - beyond[dado.ends[0]], dado.to + beyond[dado.ends[1]]];
-  return dado.runs === 'vertical' ? { minX: low, maxX: high, minY: from, maxY: to } : { minX: from, maxX: to, minY: low, maxY: high };
+  return dado.runs === 'vertical'
+    ? { minX: low, maxX: high, minY: from, maxY: to }
+    : { minX: from, maxX: to, minY: low, maxY: high };
 }
 
 export const cornersOf = ({ minX, minY, maxX, maxY }: Extents): Point[] => [

@@ -5,7 +5,8 @@ import type { FaceWork } from '#shared/kernel/worked-frame.ts';
 /** The line sets of one name on a face; throws when there is none, so that a check cannot pass on nothing. */
 export function lineSets(work: FaceWork, set: SetName): LineSet[] {
   const found = work.lineSets.filter((lineSet) => lineSet.set === set);
-  if (found.length === 0) throw new Error(`no ${set} on the ${work.face}; there are ${work.lineSets.map((s) => s.set).join(', ')}`);
+  if (found.length === 0)
+    throw new Error(`no ${set} on the ${work.face}; there are ${work.lineSets.map((s) => s.set).join(', ')}`);
   return found;
 }
 

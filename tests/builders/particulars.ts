@@ -5,7 +5,8 @@ import type { Particulars } from '../../shared/kernel/particulars/particulars.ts
 /** A valid frame in inches with neither stop nor caution; `changes` are entries by path, such as { 'outline.width': 30 }. */
 export function aFrame(changes: Record<string, unknown> = {}): Particulars {
   let particulars = newFrame('in', 'Two-door base');
-  for (const [path, value] of Object.entries({ 'outline.rails.bottom': 1.5, ...changes })) particulars = setField(particulars, path, value);
+  for (const [path, value] of Object.entries({ 'outline.rails.bottom': 1.5, ...changes }))
+    particulars = setField(particulars, path, value);
   return particulars;
 }
 

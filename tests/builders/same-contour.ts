@@ -8,10 +8,12 @@ const reversed = (vertices: readonly Vertex[]): Vertex[] =>
   });
 
 const farthest = (a: readonly Vertex[], b: readonly Vertex[], shift: number): number =>
-  Math.max(...a.map((v, i) => {
-    const w = b[(i + shift) % b.length]!;
-    return Math.max(Math.abs(v.x - w.x), Math.abs(v.y - w.y), Math.abs(v.bulge - w.bulge));
-  }));
+  Math.max(
+    ...a.map((v, i) => {
+      const w = b[(i + shift) % b.length]!;
+      return Math.max(Math.abs(v.x - w.x), Math.abs(v.y - w.y), Math.abs(v.bulge - w.bulge));
+    }),
+  );
 
 /** How far two closed contours differ at most in a coordinate or bulge, wherever each starts and whichever way it runs. */
 export function contourDifference(a: Contour, b: Contour): number {

@@ -18,7 +18,8 @@ export const anAddress = (): string => `person-${++count}@shop.example`;
 
 /** The answer, once its status is the expected one; the body is in the message otherwise. */
 export function expectStatus(answer: Answer, status: number): Answer {
-  if (answer.status !== status) throw new Error(`status ${answer.status}, expected ${status}: ${new TextDecoder().decode(answer.bytes)}`);
+  if (answer.status !== status)
+    throw new Error(`status ${answer.status}, expected ${status}: ${new TextDecoder().decode(answer.bytes)}`);
   return answer;
 }
 
@@ -28,30 +29,58 @@ export interface SignedInVisitor {
 }
 
 /** A new shop; the visitor is signed in as its owner. */
-export async function openShop(server: TestServer, given: { shopName?: string; name?: string; email?: string; unit?: 'in' | 'mm' } = {}): Promise<SignedInVisitor> {
+export async function openShop(
+  server: TestServer,
+  given: { shopName?: string; name?: string; email?: string; unit?: 'in' | 'mm' } = {},
+): Promise<SignedInVisitor> {
   const visitor = server.visitor();
-  const answer = await visitor.post('/api/sign-up', { shopName: 'Shop', name: 'Owner', email: anAddress(), password: PASSWORD, ...given });
+  const answer = await visitor.post('/api/sign-up', {
+    shopName: 'Shop',
+    name: 'Owner',
+    email: anAddress(),
+    password: PASSWORD,
+    ...given,
+  });
   return { visitor, session: expectStatus(answer, 201).json<SignedInVisitor['session']>() };
 }
 
 /** One more person of a shop, signed in. There is no route for invitations yet, so the row is written directly. */
-export async function addPerson(server: TestServer, shopId: string, role: Role, name = `The ${role}`): Promise<SignedInVisitor> {
+export async function addPerson(
+  server: TestServer,
+  shopId: string,
+  role: Role,
+  name = `The ${role}`,
+): Promise<SignedInVisitor> {
   const email = anAddress();
   const passwordHash = await hashPassword(PASSWORD);
-  await server.database.queries.insert(users).values({ id: randomUUID(), shopId, role, name, email, passwordHash, createdAt: new Date(0) });
+  await server.database.queries
+    .insert(users)
+    .values({ id: randomUUID(), shopId, role, name, email, passwordHash, createdAt: new Date(0) });
   const visitor = server.visitor();
   const answer = await visitor.post('/api/sign-in', { email, password: PASSWORD });
   return { visitor, session: expectStatus(answer, 200).json<SignedInVisitor['session']>() };
 }
 
-export const addJob = async (visitor: HttpClient, name = 'Job'): Promise<Job> => expectStatus(await visitor.post('/api/jobs', { name }), 201).json<Job>();
+export const addJob = async (visitor: HttpClient, name = 'Job'): Promise<Job> =>
+  expectStatus(await visitor.post('/api/jobs', { name }), 201).json<Job>();
 
-export const addFrame = async (visitor: HttpClient, jobId: string, particulars: Particulars = aFrame()): Promise<Frame> =>
-  expectStatus(await visitor.post(`/api/jobs/${jobId}/frames`, { particulars }), 201).json<Frame>();
+export const addFrame = async (
+  visitor: HttpClient,
+  jobId: string,
+  particulars: Particulars = aFrame(),
+): Promise<Frame> => expectStatus(await visitor.post(`/api/jobs/${jobId}/frames`, { particulars }), 201).json<Frame>();
 
 /** Releases a frame's draft, whatever cautions it has. */
-export async function releaseFrame(visitor: HttpClient, frame: Pick<Frame, 'id' | 'version'>, acknowledged: string[] = []): Promise<Frame> {
-  const answer = await visitor.post(`/api/frames/${frame.id}/revisions`, { version: frame.version, note: 'First issue', acknowledged });
+export async function releaseFrame(
+  visitor: HttpClient,
+  frame: Pick<Frame, 'id' | 'version'>,
+  acknowledged: string[] = [],
+): Promise<Frame> {
+  const answer = await visitor.post(`/api/frames/${frame.id}/revisions`, {
+    version: frame.version,
+    note: 'First issue',
+    acknowledged,
+  });
   return expectStatus(answer, 201).json<Frame>();
 }
 

@@ -5,10 +5,20 @@ import { expect, test } from './watched-test.ts';
 
 /** WCAG 2.2 AA and axe's own good practice; findings that are serious or worse fail. */
 async function expectAccessible(page: Page): Promise<void> {
-  const { violations, passes } = await new AxeBuilder({ page }).withTags(['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa', 'best-practice']).analyze();
+  const { violations, passes } = await new AxeBuilder({ page })
+    .withTags(['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa', 'best-practice'])
+    .analyze();
   expect(passes.length).toBeGreaterThan(5);
   const bad = violations.filter(({ impact }) => impact === 'serious' || impact === 'critical');
-  expect(bad.map(({ id, nodes }) => `${id}: ${nodes.map((node) => node.html).join(' | ').slice(0, 400)}`)).toEqual([]);
+  expect(
+    bad.map(
+      ({ id, nodes }) =>
+        `${id}: ${nodes
+          .map((node) => node.html)
+          .join(' | ')
+          .slice(0, 400)}`,
+    ),
+  ).toEqual([]);
 }
 
 const OPEN_PAGES = ['/sign-in', '/sign-up', '/no-such-page'];

@@ -7,7 +7,9 @@ test.beforeEach(async ({ page }) => {
   await newFrame(page, 'Base');
 });
 
-test('When an entry cannot be read, then the text stays, it says what it takes, and the frame is not released', async ({ page }) => {
+test('When an entry cannot be read, then the text stays, it says what it takes, and the frame is not released', async ({
+  page,
+}) => {
   const before = await entry(page, 'outline.height').inputValue();
   await type(page, 'outline.width', '30,5');
   await entry(page, 'outline.height').focus();

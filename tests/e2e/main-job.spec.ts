@@ -7,7 +7,9 @@ import { expect, test } from './watched-test.ts';
 /** Vertices of the one closed contour of a layer that holds a place among its corners. */
 type Corner = { x: number; y: number };
 
-test('When a designer signs up, enters a frame and releases it, then the zip holds what was entered', async ({ page }) => {
+test('When a designer signs up, enters a frame and releases it, then the zip holds what was entered', async ({
+  page,
+}) => {
   await signUp(page);
   await newJob(page, 'Fenwick Lane kitchen');
   await newFrame(page, 'B33 two-door base');
@@ -30,13 +32,18 @@ test('When a designer signs up, enters a frame and releases it, then the zip hol
 
   const front = theOne(set.names, '_rev-A_front.dxf');
   const back = theOne(set.names, '_rev-A_back.dxf');
-  expect(set.names).toEqual([theOne(set.names, '_rev-A.frame.json'), back, front, 'SHA256SUMS', 'layers.csv', 'setup-sheet.pdf'].sort());
+  expect(set.names).toEqual(
+    [theOne(set.names, '_rev-A.frame.json'), back, front, 'SHA256SUMS', 'layers.csv', 'setup-sheet.pdf'].sort(),
+  );
   expect(checkSums(set, 'SHA256SUMS')).toHaveLength(set.names.length - 1);
   expect(checkSums(set, 'SHA256SUMS').every((line) => line.endsWith(': OK'))).toBe(true);
 
   // dxf-parser: the first opening is where the members leave it, moved by the allowance.
   const parsed = new DxfParser().parseSync(set.read(front));
-  const entered = parsed!.entities.filter((entity) => entity.layer === 'FRONT_OPENING') as unknown as { vertices: Corner[]; shape: boolean }[];
+  const entered = parsed!.entities.filter((entity) => entity.layer === 'FRONT_OPENING') as unknown as {
+    vertices: Corner[];
+    shape: boolean;
+  }[];
   expect(entered).toHaveLength(2);
   expect(entered.every((polyline) => polyline.shape)).toBe(true);
   const allowance = 1;

@@ -1,7 +1,12 @@
 import { entry, newFrame, newJob, saved, signIn, signUp, type } from './steps.ts';
 import { expect, test } from './watched-test.ts';
 
-test('When two people change one draft, then the second is told what changed and loses nothing', async ({ page, browser, baseURL, complaints }) => {
+test('When two people change one draft, then the second is told what changed and loses nothing', async ({
+  page,
+  browser,
+  baseURL,
+  complaints,
+}) => {
   // The refused save is what this is about; browsers report each answer of 409 on the console.
   complaints.allow(/status of 409/);
   const person = await signUp(page);

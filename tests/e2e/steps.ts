@@ -63,7 +63,8 @@ export async function type(page: Page, path: string, text: string): Promise<void
 }
 
 /** Waits until the draft is saved; it says so in the title block. */
-export const saved = (page: Page): Promise<void> => expect(page.locator('[data-saving]')).toHaveAttribute('data-saving', 'saved');
+export const saved = (page: Page): Promise<void> =>
+  expect(page.locator('[data-saving]')).toHaveAttribute('data-saving', 'saved');
 
 /** Looks at each caution, releases, and ends on the dialog with the files. */
 export async function release(page: Page, letter: string): Promise<void> {

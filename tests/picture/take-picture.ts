@@ -19,7 +19,10 @@ try {
   await page.goto(`${server.url}/sign-in`);
   await page.getByRole('button', { name: 'Open the demo shop' }).click();
   await page.getByRole('link', { name: 'Fenwick Lane kitchen' }).first().click();
-  await page.getByRole('link', { name: /two-door base/i }).first().click();
+  await page
+    .getByRole('link', { name: /two-door base/i })
+    .first()
+    .click();
   await page.getByRole('img', { name: 'Front face' }).waitFor();
   await page.evaluate(() => document.fonts.ready);
   await page.screenshot({ path: picture });

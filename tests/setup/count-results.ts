@@ -30,7 +30,9 @@ export function countVitest(report: VitestReport): Counts {
   const files = report.testResults;
   const passedIn = (file: VitestReport['testResults'][number]) =>
     file.assertionResults.filter((result) => result.status === 'passed').length;
-  const notLoaded = files.filter((file) => file.status === 'failed' && file.assertionResults.every((r) => r.status === 'passed'));
+  const notLoaded = files.filter(
+    (file) => file.status === 'failed' && file.assertionResults.every((r) => r.status === 'passed'),
+  );
   return {
     passed: sum(files.map(passedIn)),
     failed: sum(files.map((file) => file.assertionResults.length - passedIn(file))) + notLoaded.length,

@@ -4,9 +4,13 @@ import { isThere, READERS, type Reader } from './readers.ts';
 /** Before the tests: finds the programs that they hold our files against, and gets the missing ones where that is allowed. */
 
 const apt = (args: string[]) =>
-  spawnSync('apt-get', args, { stdio: ['ignore', 'ignore', 'inherit'], env: { ...process.env, DEBIAN_FRONTEND: 'noninteractive' } });
+  spawnSync('apt-get', args, {
+    stdio: ['ignore', 'ignore', 'inherit'],
+    env: { ...process.env, DEBIAN_FRONTEND: 'noninteractive' },
+  });
 
-const mayInstall = () => process.getuid?.() === 0 && spawnSync('apt-get', ['--version'], { stdio: 'ignore' }).status === 0;
+const mayInstall = () =>
+  process.getuid?.() === 0 && spawnSync('apt-get', ['--version'], { stdio: 'ignore' }).status === 0;
 
 function install(missing: readonly Reader[]): void {
   const packages = [...new Set(missing.map((reader) => reader.packageName))];

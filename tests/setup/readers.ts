@@ -17,11 +17,35 @@ export const CHROMIUM = process.env['CHROMIUM'] ?? '/usr/bin/chromium';
 
 export const READERS: readonly Reader[] = [
   { name: 'Chromium', command: CHROMIUM, probe: ['--version'], packageName: 'chromium', usedFor: 'driving the pages' },
-  { name: 'ezdxf', command: PYTHON, probe: ['-c', 'import ezdxf'], packageName: 'python3-ezdxf', usedFor: 'auditing DXFs' },
+  {
+    name: 'ezdxf',
+    command: PYTHON,
+    probe: ['-c', 'import ezdxf'],
+    packageName: 'python3-ezdxf',
+    usedFor: 'auditing DXFs',
+  },
   { name: 'ogrinfo', command: 'ogrinfo', probe: ['--version'], packageName: 'gdal-bin', usedFor: 'reading DXFs' },
-  { name: 'LibreCAD', command: 'librecad', probe: ['dxf2pdf', '-v'], packageName: 'librecad', usedFor: 'plotting DXFs' },
-  { name: 'pdftotext', command: 'pdftotext', probe: ['-v'], packageName: 'poppler-utils', usedFor: 'reading setup sheets' },
-  { name: 'pdftoppm', command: 'pdftoppm', probe: ['-v'], packageName: 'poppler-utils', usedFor: 'looking at setup sheets' },
+  {
+    name: 'LibreCAD',
+    command: 'librecad',
+    probe: ['dxf2pdf', '-v'],
+    packageName: 'librecad',
+    usedFor: 'plotting DXFs',
+  },
+  {
+    name: 'pdftotext',
+    command: 'pdftotext',
+    probe: ['-v'],
+    packageName: 'poppler-utils',
+    usedFor: 'reading setup sheets',
+  },
+  {
+    name: 'pdftoppm',
+    command: 'pdftoppm',
+    probe: ['-v'],
+    packageName: 'poppler-utils',
+    usedFor: 'looking at setup sheets',
+  },
   { name: 'sha256sum', command: 'sha256sum', probe: ['--version'], packageName: 'coreutils', usedFor: 'checking zips' },
 ];
 

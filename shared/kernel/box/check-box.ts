@@ -20,7 +20,12 @@ function checkDados(box: Box, base: Particulars, bounds: BoxBounds): void {
 
   const cutter = 2 * radiusAtHeight(base.cutters.dado, base.thickness);
   const thick = (field: string, thickness: number): void =>
-    bounds.least(field, thickness, tidyLength(cutter - dado.clearance), `its dado is cut with a cutter of ${say(cutter)}`);
+    bounds.least(
+      field,
+      thickness,
+      tidyLength(cutter - dado.clearance),
+      `its dado is cut with a cutter of ${say(cutter)}`,
+    );
   thick('ends.thickness', ends.thickness);
   thick('bottom.thickness', bottom.thickness);
   if (top) thick('top.thickness', top.thickness);
@@ -35,7 +40,13 @@ function checkOverhang({ unit, overhang, ends, bottom, top, feet, reveal }: Box,
   const behind = feet > 0 ? 'the bottom must lie above the feet' : 'the bottom must lie behind the frame';
   bounds.least('bottom.up', bottom.up, tidyLength(feet - overhang.bottom), behind);
   if (top) bounds.least('top.down', top.down, tidyLength(-overhang.top), 'the top must lie behind the frame');
-  else bounds.least('reveal.top', reveal.top, tidyLength(leastRail(unit) - overhang.top), 'the top rail would be too narrow');
+  else
+    bounds.least(
+      'reveal.top',
+      reveal.top,
+      tidyLength(leastRail(unit) - overhang.top),
+      'the top rail would be too narrow',
+    );
 }
 
 /**

@@ -8,7 +8,11 @@ import { checkBox } from './check-box.ts';
 import { layOutBox } from './lay-out-box.ts';
 
 export type FrameFromBox =
-  | { readonly ok: true; readonly particulars: Particulars; /** Cautions and notes of the frame; no stop. */ readonly findings: readonly Finding[] }
+  | {
+      readonly ok: true;
+      readonly particulars: Particulars;
+      /** Cautions and notes of the frame; no stop. */ readonly findings: readonly Finding[];
+    }
   | { readonly ok: false; readonly problems: readonly BoxProblem[] };
 
 /**
@@ -29,6 +33,7 @@ export function frameFromBox(box: Box, base: Particulars = newFrame(box.unit, bo
   };
   const { findings } = workFrame(particulars);
   const stops = findings.filter((finding) => finding.level === 'stop');
-  if (stops.length > 0) return { ok: false, problems: stops.map(({ text, remedy }) => ({ field: '', got: text, takes: remedy })) };
+  if (stops.length > 0)
+    return { ok: false, problems: stops.map(({ text, remedy }) => ({ field: '', got: text, takes: remedy })) };
   return { ok: true, particulars, findings };
 }

@@ -44,7 +44,12 @@ function layoutOf(openings: readonly number[], between: number): LayoutPart {
 }
 
 /** Width of each opening: from the members' edges, which lie past the parts by the reveal. */
-function openingWidths(width: number, stiles: Pick<Sides, 'left' | 'right'>, centres: readonly number[], between: number): number[] {
+function openingWidths(
+  width: number,
+  stiles: Pick<Sides, 'left' | 'right'>,
+  centres: readonly number[],
+  between: number,
+): number[] {
   const starts = [stiles.left, ...centres.map((c) => c + between / 2)];
   const ends = [...centres.map((c) => c - between / 2), width - stiles.right];
   return starts.map((from, i) => tidyLength(ends[i]! - from));
@@ -61,25 +66,56 @@ export function layOutBox(box: Box): BoxLayout {
   const width = tidyLength(box.width + overhang.left + overhang.right);
   const height = tidyLength(box.height + overhang.top + overhang.bottom);
 
-  const stiles = { left: tidyLength(overhang.left + end + reveal.left), right: tidyLength(overhang.right + end + reveal.right) };
+  const stiles = {
+    left: tidyLength(overhang.left + end + reveal.left),
+    right: tidyLength(overhang.right + end + reveal.right),
+  };
   const bottomAt = tidyLength(overhang.bottom + bottom.up);
   const bottomTop = tidyLength(bottomAt + bottom.thickness);
   const covered = top ? top.down + top.thickness : 0;
-  const rails = { top: tidyLength(overhang.top + covered + reveal.top), bottom: tidyLength(bottomTop + reveal.bottom - feet) };
+  const rails = {
+    top: tidyLength(overhang.top + covered + reveal.top),
+    bottom: tidyLength(bottomTop + reveal.bottom - feet),
+  };
 
   const partition = box.partitions?.thickness ?? 0;
   const places = placePartitions(box).map((at) => tidyLength(overhang.left + at));
   const between = places.length > 0 ? tidyLength(partition + 2 * reveal.partition) : 0;
-  const openings = openingWidths(width, stiles, places.map((at) => at + partition / 2), between);
+  const openings = openingWidths(
+    width,
+    stiles,
+    places.map((at) => at + partition / 2),
+    between,
+  );
 
   const common = { clearance: box.dado.clearance, depth: box.dado.depth };
   const past = runOut(box, height);
   const leftFace = tidyLength(overhang.left + end);
   const rightEnd = tidyLength(width - overhang.right - end);
-  const upright = (part: string, at: number, panel: number, run: Upright): Dado => ({ part, runs: 'vertical', at, panel, ...common, ...run });
-  const level = (part: string, at: number, panel: number): Dado => ({ part, runs: 'horizontal', at, panel, ...common, from: leftFace, to: rightEnd, ends: ['meets', 'meets'] });
+  const upright = (part: string, at: number, panel: number, run: Upright): Dado => ({
+    part,
+    runs: 'vertical',
+    at,
+    panel,
+    ...common,
+    ...run,
+  });
+  const level = (part: string, at: number, panel: number): Dado => ({
+    part,
+    runs: 'horizontal',
+    at,
+    panel,
+    ...common,
+    from: leftFace,
+    to: rightEnd,
+    ends: ['meets', 'meets'],
+  });
   const topAt = top ? tidyLength(height - overhang.top - covered) : undefined;
-  const standing: Upright = { from: bottomTop, to: topAt ?? past.to, ends: ['meets', topAt === undefined ? past.ends[1] : 'meets'] };
+  const standing: Upright = {
+    from: bottomTop,
+    to: topAt ?? past.to,
+    ends: ['meets', topAt === undefined ? past.ends[1] : 'meets'],
+  };
   const partitionName = (i: number): string => (places.length === 1 ? 'Partition' : `Partition ${i + 1}`);
 
   return {

@@ -3,8 +3,32 @@ import type { Box } from './box.ts';
 
 /** Numbers of a box to begin from, in each unit: round numbers of the trade, common practice, no source. */
 const USUAL = {
-  in: { width: 32.5, height: 30, depth: 23.25, panel: 0.75, overhang: 0.25, low: 0.5, reveal: 0.75, top: 1.75, partition: 0.375, dado: 0.25, clearance: 0.01 },
-  mm: { width: 828, height: 761, depth: 580, panel: 18, overhang: 6, low: 14, reveal: 21, top: 45, partition: 11, dado: 6, clearance: 0.3 },
+  in: {
+    width: 32.5,
+    height: 30,
+    depth: 23.25,
+    panel: 0.75,
+    overhang: 0.25,
+    low: 0.5,
+    reveal: 0.75,
+    top: 1.75,
+    partition: 0.375,
+    dado: 0.25,
+    clearance: 0.01,
+  },
+  mm: {
+    width: 828,
+    height: 761,
+    depth: 580,
+    panel: 18,
+    overhang: 6,
+    low: 14,
+    reveal: 21,
+    top: 45,
+    partition: 11,
+    dado: 6,
+    clearance: 0.3,
+  },
 } as const;
 
 /** The box behind the two-door base frame of new-frame.ts, to begin from: a partition in the middle, no top. */

@@ -20,7 +20,5 @@ export function placePartitions(box: Box): number[] {
   const from = ends.thickness + past.left;
   const to = box.width - ends.thickness - past.right;
   const clear = (to - from - count * member) / (count + 1);
-  return Array.from({ length: count }, (_, i) =>
-    tidyLength(from + (i + 1) * clear + i * member + past.partition),
-  );
+  return Array.from({ length: count }, (_, i) => tidyLength(from + (i + 1) * clear + i * member + past.partition));
 }

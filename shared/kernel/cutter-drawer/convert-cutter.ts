@@ -24,6 +24,11 @@ export function convertCutter(cutter: Cutter, from: Unit, to: Unit): Cutter {
     case 'tapered':
       return { kind: cutter.kind, tipRadius: length(cutter.tipRadius), sideAngle: cutter.sideAngle, ...common };
     case 'beading':
-      return { kind: cutter.kind, profileRadius: length(cutter.profileRadius), tipFlat: length(cutter.tipFlat), ...common };
+      return {
+        kind: cutter.kind,
+        profileRadius: length(cutter.profileRadius),
+        tipFlat: length(cutter.tipFlat),
+        ...common,
+      };
   }
 }

@@ -46,7 +46,13 @@ function heightsOf(cutter: Cutter, chord: number): number[] {
 export function cutterProfile(cutter: Cutter, chord: number): Point[] {
   if (!(chord > 0)) throw new RangeError(`chord tolerance: got ${chord}, takes a length above 0`);
   const flat = radiusAtHeight(cutter, 0);
-  const tip = flat > 0 ? [{ x: 0, y: 0 }, { x: flat, y: 0 }] : [{ x: 0, y: 0 }];
+  const tip =
+    flat > 0
+      ? [
+          { x: 0, y: 0 },
+          { x: flat, y: 0 },
+        ]
+      : [{ x: 0, y: 0 }];
   return [...tip, ...heightsOf(cutter, chord).map((y) => ({ x: radiusAtHeight(cutter, y), y }))];
 }
 

@@ -30,7 +30,8 @@ export function draftsTouched(
   after: DrawerCutter | null,
   drafts: readonly { readonly frameId: string; readonly cutterRefs: CutterRefs }[],
 ): DraftsTouched {
-  if (after && after.id !== before.id) throw new RangeError(`cutter: got ${after.id} after ${before.id}, takes the same one`);
+  if (after && after.id !== before.id)
+    throw new RangeError(`cutter: got ${after.id} after ${before.id}, takes the same one`);
   const changes = after ? changedEntries(before, after) : ['removed'];
   if (changes.length === 0) return { changes, drafts: [] };
   const touched = drafts.flatMap(({ frameId, cutterRefs }): TouchedDraft[] => {

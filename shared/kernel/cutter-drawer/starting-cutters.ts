@@ -4,10 +4,34 @@ import type { DrawerEntry } from './drawer-cutter.ts';
 
 type Named = Cutter & { readonly name: string };
 
-const straight = (name: string, diameter: number, fluteLength: number, maxPass: number): Named => ({ kind: 'straight', name, diameter, fluteLength, maxPass });
-const tapered = (name: string, tipRadius: number, sideAngle: number, fluteLength: number, maxPass: number): Named => ({ kind: 'tapered', name, tipRadius, sideAngle, fluteLength, maxPass });
-const vee = (name: string, includedAngle: number, fluteLength: number): Named => ({ kind: 'vee', name, includedAngle, fluteLength });
-const beading = (name: string, profileRadius: number, tipFlat: number, fluteLength: number): Named => ({ kind: 'beading', name, profileRadius, tipFlat, fluteLength });
+const straight = (name: string, diameter: number, fluteLength: number, maxPass: number): Named => ({
+  kind: 'straight',
+  name,
+  diameter,
+  fluteLength,
+  maxPass,
+});
+const tapered = (name: string, tipRadius: number, sideAngle: number, fluteLength: number, maxPass: number): Named => ({
+  kind: 'tapered',
+  name,
+  tipRadius,
+  sideAngle,
+  fluteLength,
+  maxPass,
+});
+const vee = (name: string, includedAngle: number, fluteLength: number): Named => ({
+  kind: 'vee',
+  name,
+  includedAngle,
+  fluteLength,
+});
+const beading = (name: string, profileRadius: number, tipFlat: number, fluteLength: number): Named => ({
+  kind: 'beading',
+  name,
+  profileRadius,
+  tipFlat,
+  fluteLength,
+});
 
 /** Common sizes of each unit, not converted from the other. Common practice, no source. */
 const CUTTERS: Record<Unit, readonly Named[]> = {
@@ -41,4 +65,8 @@ const CUTTERS: Record<Unit, readonly Named[]> = {
 
 /** What a new shop's drawer begins with. The numbers are to be held against the cutters in hand, so each says so in its remarks. */
 export const startingCutters = (unit: Unit): DrawerEntry[] =>
-  CUTTERS[unit].map((cutter) => ({ unit, cutter, remarks: 'A common size. Check it against the cutter in your hand.' }));
+  CUTTERS[unit].map((cutter) => ({
+    unit,
+    cutter,
+    remarks: 'A common size. Check it against the cutter in your hand.',
+  }));

@@ -6,6 +6,7 @@ import type { EdgePreset } from './edge-preset.ts';
  * keep it. Throws when the preset is in another unit than the frame: lengths are never converted on the quiet.
  */
 export function applyEdgePreset(particulars: Particulars, { unit, edge, cutters }: EdgePreset): Particulars {
-  if (unit !== particulars.unit) throw new RangeError(`edge preset: got one in ${unit}, takes one in ${particulars.unit}`);
+  if (unit !== particulars.unit)
+    throw new RangeError(`edge preset: got one in ${unit}, takes one in ${particulars.unit}`);
   return { ...particulars, edge, cutters: { ...particulars.cutters, ...cutters } };
 }

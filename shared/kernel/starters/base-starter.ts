@@ -2,7 +2,12 @@ import { frameOf, stack } from './frame-of.ts';
 import type { Starter } from './starter.ts';
 
 const SIZES = {
-  in: { width: 35.5, reveal: { left: 0.75, right: 0.75, top: 1.5, bottom: 0.25, partition: 0.375 }, rail: 1.5, drawer: 5 },
+  in: {
+    width: 35.5,
+    reveal: { left: 0.75, right: 0.75, top: 1.5, bottom: 0.25, partition: 0.375 },
+    rail: 1.5,
+    drawer: 5,
+  },
   mm: { width: 888, reveal: { left: 21, right: 21, top: 40, bottom: 8, partition: 11 }, rail: 40, drawer: 130 },
 } as const;
 

@@ -22,13 +22,15 @@ function whyNot({ unit, outline }: Particulars, change: MemberChange): string | 
 
 function checkNumber({ what, to }: MemberChange): void {
   const none = MAY_BE_NONE.includes(what);
-  if (!Number.isFinite(to) || to < 0 || (to === 0 && !none)) throw new RangeError(`${what}: got ${to}, takes a length${none ? ', 0 or more' : ' above 0'}`);
+  if (!Number.isFinite(to) || to < 0 || (to === 0 && !none))
+    throw new RangeError(`${what}: got ${to}, takes a length${none ? ', 0 or more' : ' above 0'}`);
 }
 
 const contoursOf = ({ outline, unit }: Particulars): FrameContours =>
   (outline.kind === 'members' ? membersContours(outline, unit) : tracedContours(outline)).contours;
 
-const stopKey = ({ code, field, places }: Finding): string => `${code} ${field ?? ''} ${places.flatMap((p) => p.features).join(' ')}`;
+const stopKey = ({ code, field, places }: Finding): string =>
+  `${code} ${field ?? ''} ${places.flatMap((p) => p.features).join(' ')}`;
 
 /**
  * A frame with some of its members changed. The frame keeps its size: openings without a size of their own give or take
@@ -65,10 +67,12 @@ export function changeMembers(particulars: Particulars, changes: readonly Member
 }
 
 /** The same for one change. */
-export const changeMember = (particulars: Particulars, change: MemberChange): ChangedFrame => changeMembers(particulars, [change]);
+export const changeMember = (particulars: Particulars, change: MemberChange): ChangedFrame =>
+  changeMembers(particulars, [change]);
 
 /** The same for many frames: what becomes of each, in the order given; no frame stands in another's way. */
 export const changeManyFrames = <Frame extends { readonly id: string; readonly particulars: Particulars }>(
   frames: readonly Frame[],
   changes: readonly MemberChange[],
-): { readonly id: string; readonly result: ChangedFrame }[] => frames.map(({ id, particulars }) => ({ id, result: changeMembers(particulars, changes) }));
+): { readonly id: string; readonly result: ChangedFrame }[] =>
+  frames.map(({ id, particulars }) => ({ id, result: changeMembers(particulars, changes) }));

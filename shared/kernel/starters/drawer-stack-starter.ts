@@ -13,6 +13,8 @@ export const drawerStackStarter: Starter = {
   frames(unit, edge) {
     const s = SIZES[unit];
     const box = { width: s.width, partitions: undefined, reveal: s.reveal };
-    return [frameOf(unit, { name: 'Drawer stack', box, fill: [stack(s.rail, [['A', s.drawer], ['B'], ['C'], ['D']])] }, edge)];
+    return [
+      frameOf(unit, { name: 'Drawer stack', box, fill: [stack(s.rail, [['A', s.drawer], ['B'], ['C'], ['D']])] }, edge),
+    ];
   },
 };

@@ -79,8 +79,15 @@ export function setMember(particulars: Particulars, change: MemberChange): SetMe
       case 'dado depth':
         return { ...particulars, dados: dados.map((dado) => ({ ...dado, depth: sift(dado.depth) })) };
       default:
-        return outline.kind === 'members' ? { ...particulars, outline: setInOutline(outline, change.what, sift) } : particulars;
+        return outline.kind === 'members'
+          ? { ...particulars, outline: setInOutline(outline, change.what, sift) }
+          : particulars;
     }
   })();
-  return { particulars: sift.was.size > 0 ? changed : particulars, was: [...sift.was], others: [...sift.others], found: sift.all.size > 0 };
+  return {
+    particulars: sift.was.size > 0 ? changed : particulars,
+    was: [...sift.was],
+    others: [...sift.others],
+    found: sift.all.size > 0,
+  };
 }

@@ -1,3 +1,4 @@
+import { lazy, Suspense } from 'react';
 import { useQuery } from '@tanstack/react-query';
 import { useParams } from 'react-router';
 import { frameQuery } from '../../features/frame-page/api/get-frame.ts';
@@ -5,7 +6,11 @@ import { FramePage } from '../../features/frame-page/frame-page.tsx';
 import { useProfiles } from '../../features/profiles/api/list-profiles.ts';
 import { useSignedIn } from '../../features/session/signed-in.tsx';
 import { Fetched } from '../../ui/fetched.tsx';
+import { ProgressText } from '../../ui/progress-text.tsx';
 import { Sheet } from '../../ui/sheet.tsx';
+
+// Three dimensions are large: fetched when somebody looks.
+const CutPart = lazy(async () => ({ default: (await import('../../features/cut-part/cut-part.tsx')).CutPart }));
 
 /** /frames/:frameId */
 export function FramePageRoute() {
@@ -24,6 +29,11 @@ export function FramePageRoute() {
         shopName={shop.name}
         mayEdit={mayDo('edit-frames') && !frame.data.removed}
         mayRelease={mayDo('release') && !frame.data.removed}
+        renderCutPart={(worked) => (
+          <Suspense fallback={<ProgressText>The view is fetched.</ProgressText>}>
+            <CutPart worked={worked} />
+          </Suspense>
+        )}
       />
     );
   }

@@ -52,7 +52,7 @@ function ShownSheet({ frame, revision, stored }: ShownSheetProps) {
     <SetupSheetPage
       model={model}
       frame={{ id: frame.id, name: particulars.name }}
-      job={{ id: frame.jobId, name: frame.jobName }}
+      jobName={frame.jobName}
       newerRevision={revision !== null && newest !== revision.letter ? newest : ''}
       pdf={`${at}/${of}/setup-sheet.pdf${revision === null ? '' : `?profile=${encodeURIComponent(stored.id)}`}`}
       shown={PAGES.find((id) => id === search.get('page')) ?? 'back'}

@@ -1,8 +1,9 @@
 import { useQueryClient } from '@tanstack/react-query';
-import { useMemo, useState, useSyncExternalStore } from 'react';
+import { useMemo, useState, useSyncExternalStore, type ReactNode } from 'react';
 import type { Frame } from '#shared/contracts/frames.ts';
 import type { StoredProfile } from '#shared/contracts/profiles.ts';
 import type { Particulars } from '#shared/kernel/particulars/particulars.ts';
+import type { WorkedFrame } from '#shared/kernel/worked-frame.ts';
 import { nextLetter } from '#shared/kernel/revisions/next-letter.ts';
 import { Button } from '../../ui/button.tsx';
 import { Sheet } from '../../ui/sheet.tsx';
@@ -22,6 +23,9 @@ import { SavingCell } from './saving/saving-cell.tsx';
 import { StaleDialog, type TwoDrafts } from './saving/stale-dialog.tsx';
 import { useDraft } from './saving/use-draft.ts';
 import { Spread } from './spread/spread.tsx';
+import { CornerView } from './views/corner-view.tsx';
+import { SectionView } from './views/section-view.tsx';
+import { ViewBar, type FrameView } from './views/view-bar.tsx';
 
 interface FramePageProps {
   /** As the server has it now; the work starts from its draft. */
@@ -31,21 +35,40 @@ interface FramePageProps {
   readonly shopName: string;
   readonly mayEdit: boolean;
   readonly mayRelease: boolean;
+  /** The look at the cut part, which is a feature of its own. */
+  readonly renderCutPart: (worked: WorkedFrame) => ReactNode;
 }
 
-/** Form, spread and findings: beside or below each other as the board is turned. Follows nothing but the flip. */
-function FrameWork() {
-  const isUpright = useEditor((s) => s.drawn.blank.flip === 'side-to-side');
+/** What the middle shows beside the findings. */
+function Shown({ view, renderCutPart }: { readonly view: FrameView; readonly renderCutPart: (worked: WorkedFrame) => ReactNode }) {
+  const worked = useEditor((s) => s.drawn);
+  if (view === 'faces') return <Spread />;
   return (
-    <div className={`flex min-h-0 min-w-0 flex-1 flex-col ${isUpright ? '' : 'xl:flex-row'}`}>
-      <Spread />
-      <FindingsList className={isUpright ? 'max-h-24 shrink-0 border-t border-ink [@media(min-height:60rem)]:max-h-44' : 'max-h-24 shrink-0 border-t border-ink xl:max-h-none xl:w-80 xl:border-t-0 xl:border-l'} />
+    <div className="flex min-h-0 min-w-0 flex-1 flex-col overflow-y-auto p-4">
+      {view === 'section' && <SectionView />}
+      {view === 'corners' && <CornerView />}
+      {view === 'part' && renderCutPart(worked)}
+    </div>
+  );
+}
+
+/** Form, drawings and findings: beside or below each other as the board is turned. Follows nothing but the flip. */
+function FrameWork({ renderCutPart }: Pick<FramePageProps, 'renderCutPart'>) {
+  const isUpright = useEditor((s) => s.drawn.blank.flip === 'side-to-side');
+  const [view, setView] = useState<FrameView>('faces');
+  return (
+    <div className="flex min-h-0 min-w-0 flex-1 flex-col">
+      <ViewBar view={view} onView={setView} />
+      <div className={`flex min-h-0 min-w-0 flex-1 flex-col ${isUpright ? '' : 'xl:flex-row'}`}>
+        <Shown view={view} renderCutPart={renderCutPart} />
+        <FindingsList className={isUpright ? 'max-h-24 shrink-0 border-t border-ink [@media(min-height:60rem)]:max-h-44' : 'max-h-24 shrink-0 border-t border-ink xl:max-h-none xl:w-80 xl:border-t-0 xl:border-l'} />
+      </div>
     </div>
   );
 }
 
 /** The frame page: particulars at the left, both faces, findings, and the title block with the release. */
-export function FramePage({ frame, profiles, defaultProfileId, shopName, mayEdit, mayRelease }: FramePageProps) {
+export function FramePage({ frame, profiles, defaultProfileId, shopName, mayEdit, mayRelease, renderCutPart }: FramePageProps) {
   const client = useQueryClient();
   const { editor, autosave, copyKept } = useDraft(frame);
   const desk = useMemo(() => createDesk(editor, !mayEdit), [editor, mayEdit]);
@@ -129,7 +152,7 @@ export function FramePage({ frame, profiles, defaultProfileId, shopName, mayEdit
               <ParticularsForm />
             </div>
           </div>
-          <FrameWork />
+          <FrameWork renderCutPart={renderCutPart} />
         </div>
         <LeaveDialog autosave={autosave} copyKept={copyKept} />
         {stale !== null && !later && (

@@ -68,7 +68,14 @@ const COLUMNS: readonly Column<FrameRow>[] = [
       </>
     ),
   },
-  { key: 'openings', head: 'Openings', align: 'right', spare: true, sortBy: (row) => row.openings, cell: (row) => row.openings },
+  {
+    key: 'openings',
+    head: 'Openings',
+    align: 'right',
+    spare: true,
+    sortBy: (row) => row.openings,
+    cell: (row) => row.openings,
+  },
   { key: 'findings', head: 'Findings', sortBy: weight, cell: (row) => <FindingCounts counts={row.findings} /> },
   { key: 'revision', head: 'Revision', sortBy: (row) => row.revision, cell: (row) => <Revision row={row} /> },
   { key: 'changed', head: 'Changed', sortBy: (row) => row.changedAt, cell: (row) => <When iso={row.changedAt} /> },

@@ -10,7 +10,7 @@ import { SheetPages } from './sheet-pages.tsx';
 interface SetupSheetPageProps {
   readonly model: SheetModel;
   readonly frame: { readonly id: string; readonly name: string };
-  readonly job: { readonly id: string; readonly name: string };
+  readonly jobName: string;
   /** Letter of the newest revision, when the one shown is older; '' otherwise. */
   readonly newerRevision: string;
   readonly pdf: string;
@@ -27,18 +27,14 @@ function useLargeType(): void {
 }
 
 /** The setup sheet on a tablet at the machine. */
-export function SetupSheetPage({ model, frame, job, newerRevision, pdf, shown, addressOf }: SetupSheetPageProps) {
+export function SetupSheetPage({ model, frame, jobName, newerRevision, pdf, shown, addressOf }: SetupSheetPageProps) {
   useLargeType();
   const { titleBlock } = model;
   return (
     <Sheet
       title={`Setup sheet of ${frame.name}`}
       showTitle={false}
-      crumbs={[
-        { label: job.name, to: `/jobs/${job.id}` },
-        { label: frame.name, to: `/frames/${frame.id}` },
-        { label: 'Setup sheet' },
-      ]}
+      crumbs={[{ label: frame.name, to: `/frames/${frame.id}` }, { label: 'Setup sheet' }]}
       titleBlock={
         <TitleBlock
           action={
@@ -48,7 +44,7 @@ export function SetupSheetPage({ model, frame, job, newerRevision, pdf, shown, a
           }
           actionNote="opens beside this page"
         >
-          <TitleCell label="Frame" main detail={job.name}>
+          <TitleCell label="Frame" main detail={jobName}>
             {frame.name}
           </TitleCell>
           <TitleCell label="Revision" detail={titleBlock.dateOfIssue}>

@@ -4,7 +4,7 @@ import { pictureSvg } from '#shared/kernel/sheet/picture-svg.ts';
 import { SHEET_COLOURS } from '#shared/kernel/sheet/sheet-colours.ts';
 import type { SheetDrawing } from '#shared/kernel/sheet/sheet-drawing.ts';
 import type { SheetBlock as Block, SheetLine, SignOffBox } from '#shared/kernel/sheet/sheet-model.ts';
-import { SheetSvg } from './sheet-svg.tsx';
+import { SvgPicture } from '../../ui/svg-picture.tsx';
 import { SheetTable } from './sheet-table.tsx';
 
 /** CSS pixels for a millimetre of the sheet's paper: its smallest figures then stand 15 px high, to be read at arm's length. */
@@ -18,7 +18,7 @@ function Drawing({ drawing, width }: { readonly drawing: SheetDrawing; readonly 
   const across = Math.max(LEAST_ROOM.width, Math.round(width / PIXELS_PER_MM));
   const up = Math.max(LEAST_ROOM.height, Math.round((window.innerHeight * SHARE_OF_HEIGHT) / PIXELS_PER_MM));
   const svg = useMemo(() => sheetDrawingSvg(drawing, { width: across, height: up }), [drawing, across, up]);
-  return <SheetSvg svg={svg} />;
+  return <SvgPicture svg={svg} />;
 }
 
 function Pictures({ pictures }: Pick<Extract<Block, { kind: 'pictures' }>, 'pictures'>) {
@@ -26,7 +26,7 @@ function Pictures({ pictures }: Pick<Extract<Block, { kind: 'pictures' }>, 'pict
     <div className="flex flex-wrap gap-x-8 gap-y-6">
       {pictures.map(({ caption, picture }, i) => (
         <figure key={i} className="max-w-full" style={{ width: picture.width * PIXELS_PER_MM }}>
-          <SheetSvg svg={pictureSvg(picture)} />
+          <SvgPicture svg={pictureSvg(picture)} />
           {caption !== '' && <figcaption className="mt-1">{caption}</figcaption>}
         </figure>
       ))}

@@ -31,7 +31,7 @@ describe('The pool of workers', () => {
   });
 
   it('When a task never ends, then it is given up after its time, and the next is done', async () => {
-    start(1, 300);
+    start(1, 5000);
     const hanging = act('hang');
     const next = act('answer');
     await expect(hanging).rejects.toMatchObject({ code: 'too-large' });

@@ -116,8 +116,10 @@ describe('a frame with a hundred openings and a hundred dados, and long names', 
   test('Long names stand whole in the title block', () => {
     const words = pdfWords(pdf)[1]!.filter((w) => w.top > SIZE.Letter.height - BORDER - 23);
     const joined = words.map((w) => w.text).join('');
+    // Once as the title and once in the identification, after the job; and the one of the job's own words.
     expect(joined.match(/N/g)!.length).toBeGreaterThanOrEqual(240);
-    expect(joined).toContain('Fenwick');
-    expect(joined).toContain('leftHandside'.slice(0, 4));
+    expect(joined).toContain('without_a_single_space_here');
+    expect(joined).toContain('left');
+    expect(joined).not.toContain('…');
   });
 });

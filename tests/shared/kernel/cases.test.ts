@@ -38,10 +38,13 @@ const box = (e: Extents): Box => [e.minX, e.minY, e.maxX, e.maxY];
 const near = (numbers: readonly number[]) => numbers.map((n) => expect.closeTo(n, 9));
 const allSets = (worked: WorkedFrame): LineSet[] => [...worked.back.lineSets, ...worked.front.lineSets];
 const setOf = (worked: WorkedFrame, key: string) => allSets(worked).find((set) => lineSetKey(set) === key);
-const boxesIn = (worked: WorkedFrame, key: string) => contoursIn(setOf(worked, key) ? [setOf(worked, key)!] : []).map((c) => box(contourExtents(c)));
+const boxesIn = (worked: WorkedFrame, key: string) =>
+  contoursIn(setOf(worked, key) ? [setOf(worked, key)!] : []).map((c) => box(contourExtents(c)));
 
 /** How each key of an expected.json is looked up in a worked frame. */
-const lookUps: { [K in Exclude<keyof Expected, 'about'>]-?: (worked: WorkedFrame, wanted: NonNullable<Expected[K]>) => void } = {
+const lookUps: {
+  [K in Exclude<keyof Expected, 'about'>]-?: (worked: WorkedFrame, wanted: NonNullable<Expected[K]>) => void;
+} = {
   size: ({ contours }, wanted) => expect([contours.width, contours.height]).toEqual(near(wanted)),
   blank: ({ blank }, wanted) => expect(box(blank.rough)).toEqual(near([0, 0, ...wanted])),
   squaredBlank: ({ front, blank }, wanted) => {
@@ -68,14 +71,16 @@ const lookUps: { [K in Exclude<keyof Expected, 'about'>]-?: (worked: WorkedFrame
     const [entered, axis] = [boxesIn(worked, 'front/OPENING'), boxesIn(worked, 'front/OPENING_AXIS')];
     expect(axis).toEqual(entered.map(([a, b, c, d]) => near([a + wanted, b + wanted, c - wanted, d - wanted])));
   },
-  layers: (worked, wanted) => expect(Object.fromEntries(allSets(worked).map((s) => [lineSetKey(s), s.shapes.length]))).toEqual(wanted),
+  layers: (worked, wanted) =>
+    expect(Object.fromEntries(allSets(worked).map((s) => [lineSetKey(s), s.shapes.length]))).toEqual(wanted),
   depths: (worked, wanted) => {
     for (const [key, depth] of Object.entries(wanted)) expect(setOf(worked, key)?.depth, key).toBeCloseTo(depth, 9);
   },
   passes: (worked, wanted) => {
     for (const [key, passes] of Object.entries(wanted)) expect(setOf(worked, key)?.passes).toEqual(near(passes));
   },
-  notes: ({ findings }, wanted) => expect(findings.filter((f) => f.level === 'note').map((f) => f.code)).toEqual(expect.arrayContaining(wanted)),
+  notes: ({ findings }, wanted) =>
+    expect(findings.filter((f) => f.level === 'note').map((f) => f.code)).toEqual(expect.arrayContaining(wanted)),
   stops: ({ findings }, wanted) => {
     const stops = findings.filter((f) => f.level === 'stop').map((f) => f.code);
     expect([...new Set(stops)].sort()).toEqual([...wanted].sort());

@@ -39,7 +39,11 @@ describe('When the worked example is worked', () => {
   });
 
   test('then Left end is at x 33.245…34.005, y 1.0625…31.9375 in the back setup', () => {
-    expectNear(placeExtents(frame.back.placement, frame.dados[0]!.extents), box(33.245, 1.0625, 34.005, 31.9375), EXACT);
+    expectNear(
+      placeExtents(frame.back.placement, frame.dados[0]!.extents),
+      box(33.245, 1.0625, 34.005, 31.9375),
+      EXACT,
+    );
   });
 
   test('then Right end is at x 1.495…2.255 in the back setup', () => {
@@ -82,7 +86,9 @@ describe('When the worked example is worked', () => {
 
   test('then the flank leaves the nose with radius 0.062479 at height 0.060864', () => {
     expect(Math.abs(radiusAtHeight(cutters.opening, 0.060864) - 0.062479)).toBeLessThanOrEqual(SIX);
-    expect(Math.abs(heightAtRadius(cutters.opening, 0.0625 * Math.cos((1.5 * Math.PI) / 180)) - 0.060864)).toBeLessThanOrEqual(SIX);
+    expect(
+      Math.abs(heightAtRadius(cutters.opening, 0.0625 * Math.cos((1.5 * Math.PI) / 180)) - 0.060864),
+    ).toBeLessThanOrEqual(SIX);
   });
 
   test('then a stopped end is 0.144488 longer', () => {
@@ -94,7 +100,9 @@ describe('When the worked example is worked', () => {
   test('then an arch of rise 1.5 over 14 has radius 17.083333 and bulge 0.214286', () => {
     const outline = workedExample().outline as MembersOutline;
     const arched = workFrame(
-      workedExample({ outline: { ...outline, layout: { columns: [{ opening: { arch: 1.5 } }, { opening: {} }], between: 1.5 } } }),
+      workedExample({
+        outline: { ...outline, layout: { columns: [{ opening: { arch: 1.5 } }, { opening: {} }], between: 1.5 } },
+      }),
     );
     const opening = arched.contours.openings[0]!;
     const heads = opening.contour.vertices.filter((vertex) => vertex.bulge !== 0);

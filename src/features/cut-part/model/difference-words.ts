@@ -22,7 +22,7 @@ export function differenceWords(worked: WorkedFrame, difference: Difference): st
   const place = (value: number) => `≈${value.toFixed(digits.place)}`;
   const deep = (z: number) => (z >= thickness ? 'through' : z === 0 ? 'not at all' : `${size(z)} deep`);
   const what = kind === 'left' ? 'of board left standing' : 'cut away too much';
-  return `${size(off)} ${unit} ${what}${featureWords(worked, difference)}, at ${place(x)}, ${place(y)}: cut ${deep(depth)}, meant to be ${deep(intended)}`;
+  return `${size(off)} ${unit} ${what}${featureWords(worked, difference)}, at ${place(x)}, ${place(y)}: cut ${deep(depth)}, ${intended === 0 ? 'not meant to be' : `meant to be ${deep(intended)}`}`;
 }
 
 /** The largest differences of a face, the greater first; empty when there are none above rounding. */

@@ -9,13 +9,13 @@ import { useDesk, useEditor } from '../model/desk.ts';
 import { Entry } from './entry.tsx';
 
 const ROLES: readonly { readonly role: CutterRole; readonly heading: string }[] = [
-  { role: 'dado', heading: 'Dados' },
-  { role: 'squaring', heading: 'Squaring edge' },
-  { role: 'opening', heading: 'Openings' },
-  { role: 'perimeter', heading: 'Perimeter' },
-  { role: 'bead', heading: 'Bead' },
-  { role: 'quirk', heading: 'Quirk' },
-  { role: 'corner', heading: 'Corners' },
+  { role: 'dado', heading: 'Dado cutter' },
+  { role: 'squaring', heading: 'Squaring cutter' },
+  { role: 'opening', heading: 'Opening cutter' },
+  { role: 'perimeter', heading: 'Perimeter cutter' },
+  { role: 'bead', heading: 'Bead cutter' },
+  { role: 'quirk', heading: 'Quirk cutter' },
+  { role: 'corner', heading: 'Corner cutter' },
 ];
 
 const KIND_WORDS: Record<CutterKind, string> = { straight: 'Straight', tapered: 'Tapered', vee: 'V', beading: 'Beading' };
@@ -43,7 +43,7 @@ const CutterEntries = memo(function CutterEntries({ role, heading }: { readonly 
   function changeKind(wanted: CutterKind) {
     const { present } = editor.store.get().history;
     const cutter = present.cutters[role] as Cutter;
-    editor.apply(setField(present, path, changeCutterKind(cutter, wanted, present.unit)), `${heading}, kind of cutter`);
+    editor.apply(setField(present, path, changeCutterKind(cutter, wanted, present.unit)), `${heading}, kind`);
   }
   return (
     <Section heading={heading} aside={kinds.length > 1 ? undefined : KIND_WORDS[kind].toLowerCase()} level={3}>

@@ -2,6 +2,7 @@ import { useRef, useState } from 'react';
 import type { FieldError } from '#shared/contracts/error-codes.ts';
 import { LIMITS } from '#shared/contracts/limits.ts';
 import { parseFrameFile } from '#shared/contracts/parse-frame-file.ts';
+import { safeFileName, saveFile } from '../../../lib/save-file.ts';
 import { Button } from '../../../ui/button.tsx';
 import { Dialog } from '../../../ui/dialog.tsx';
 import { useDesk } from '../model/desk.ts';
@@ -11,9 +12,6 @@ interface Refused {
   readonly message: string;
   readonly fields: readonly FieldError[];
 }
-
-/** Safe in any file system: the name's letters, digits and dashes. */
-const fileNameOf = (name: string): string => `${name.replace(/[^A-Za-z0-9-]+/g, '-').replace(/^-+|-+$/g, '') || 'frame'}.frame.json`;
 
 function RefusedDialog({ refused, onClose }: { readonly refused: Refused; readonly onClose: () => void }) {
   return (
@@ -46,12 +44,7 @@ export function FrameFileButtons() {
 
   function save() {
     const { present } = editor.store.get().history;
-    const address = URL.createObjectURL(new Blob([`${JSON.stringify(present, null, 2)}\n`], { type: 'application/json' }));
-    const link = document.createElement('a');
-    link.href = address;
-    link.download = fileNameOf(present.name);
-    link.click();
-    setTimeout(() => URL.revokeObjectURL(address), 60_000);
+    saveFile(safeFileName(present.name, '.frame.json'), `${JSON.stringify(present, null, 2)}\n`, 'application/json');
   }
 
   return (

@@ -2,10 +2,12 @@ import fc from 'fast-check';
 import type { Box, PartitionPlaces } from '#shared/kernel/box/box.ts';
 
 /** A length as a shop enters it: sixteenths and thousandths of an inch; tenths and whole millimetres. */
-const lengths = (unit: 'in' | 'mm') => (min: number, max: number): fc.Arbitrary<number> => {
-  const per = (n: number) => fc.integer({ min: Math.ceil(min * n), max: Math.floor(max * n) }).map((i) => i / n);
-  return unit === 'in' ? fc.oneof(per(16), per(1000)) : fc.oneof(per(1), per(10));
-};
+const lengths =
+  (unit: 'in' | 'mm') =>
+  (min: number, max: number): fc.Arbitrary<number> => {
+    const per = (n: number) => fc.integer({ min: Math.ceil(min * n), max: Math.floor(max * n) }).map((i) => i / n);
+    return unit === 'in' ? fc.oneof(per(16), per(1000)) : fc.oneof(per(1), per(10));
+  };
 
 /** Boxes of all kinds, most of which can be: kitchens, walls, tall ones; with toe kicks, feet, tops, stretchers, partitions. */
 const boxIn = (unit: 'in' | 'mm'): fc.Arbitrary<Box> => {
@@ -53,7 +55,11 @@ const boxIn = (unit: 'in' | 'mm'): fc.Arbitrary<Box> => {
       partition: length(0, 0.5),
     }),
     feet: fc.oneof({ weight: 3, arbitrary: none }, { weight: 1, arbitrary: length(1, 4) }),
-    dado: fc.record({ depth: length(0.125, 0.5), clearance: length(0, 0.05), run: fc.constantFrom('open' as const, 'stopped' as const) }),
+    dado: fc.record({
+      depth: length(0.125, 0.5),
+      clearance: length(0, 0.05),
+      run: fc.constantFrom('open' as const, 'stopped' as const),
+    }),
     letIn: fc.oneof(none, length(0, 0.25)),
   });
 };

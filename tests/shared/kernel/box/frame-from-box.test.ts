@@ -44,9 +44,12 @@ describe('When the frame of a box is made', () => {
     ]);
   });
 
-  test.each(['in', 'mm'] as const)('then the box to begin from, in %s, is the one behind the frame to begin from', (unit) => {
-    expect(frameOf(newBox(unit, 'A'))).toEqual(newFrame(unit, 'A'));
-  });
+  test.each(['in', 'mm'] as const)(
+    'then the box to begin from, in %s, is the one behind the frame to begin from',
+    (unit) => {
+      expect(frameOf(newBox(unit, 'A'))).toEqual(newFrame(unit, 'A'));
+    },
+  );
 
   test('then with a top, the partition ends under it and the rail covers it', () => {
     // A wall box of 30 × 36: frame flush above and below, 1/4 past each side; top rail over a 3/4 top and 3/4 past it.
@@ -60,7 +63,13 @@ describe('When the frame of a box is made', () => {
       }),
     );
     expect(p.outline).toMatchObject({ width: 30.5, height: 36, rails: { top: 1.5, bottom: 1.5 } });
-    expect(partOf(p, 'Top')).toMatchObject({ runs: 'horizontal', at: 35.25, from: 1, to: 29.5, ends: ['meets', 'meets'] });
+    expect(partOf(p, 'Top')).toMatchObject({
+      runs: 'horizontal',
+      at: 35.25,
+      from: 1,
+      to: 29.5,
+      ends: ['meets', 'meets'],
+    });
     expect(partOf(p, 'Partition')).toMatchObject({ from: 0.75, to: 35.25, ends: ['meets', 'meets'] });
   });
 
@@ -71,14 +80,18 @@ describe('When the frame of a box is made', () => {
   });
 
   test('then stopped dados end where the box does, and run out only where the frame does not stand past it', () => {
-    const p = frameOf(boxWith({ overhang: { left: 0.25, right: 0.25, top: 0, bottom: 0.5 }, dado: { ...base.dado, run: 'stopped' } }));
+    const p = frameOf(
+      boxWith({ overhang: { left: 0.25, right: 0.25, top: 0, bottom: 0.5 }, dado: { ...base.dado, run: 'stopped' } }),
+    );
     expect(partOf(p, 'Left end')).toMatchObject({ from: 0.5, to: 30.5, ends: ['stopped', 'open'] });
     expect(partOf(p, 'Partition')).toMatchObject({ ends: ['meets', 'open'] });
   });
 
   test('then a toe kick is a negative overhang below: the ends run down past the frame to the floor', () => {
     // 34 1/2 high to the floor, the frame 30 1/2 high above a 4 in kick; bottom 4 1/2 above the floor.
-    const p = frameOf(boxWith({ height: 34.5, overhang: { ...base.overhang, bottom: -4 }, bottom: { thickness: 0.75, up: 4.5 } }));
+    const p = frameOf(
+      boxWith({ height: 34.5, overhang: { ...base.overhang, bottom: -4 }, bottom: { thickness: 0.75, up: 4.5 } }),
+    );
     expect(p.outline).toMatchObject({ height: 30.5, rails: { bottom: 1.25 } });
     expect(partOf(p, 'Left end')).toMatchObject({ from: 0, ends: ['open', 'open'] });
     expect(partOf(p, 'Bottom')).toMatchObject({ at: 0.5 });
@@ -88,7 +101,9 @@ describe('When the frame of a box is made', () => {
     // Ends 3/4, partition’s left face at 12 from the box’s left outside: its mid-stile (1 1/2) from 11.875 to 13.375 in frame view.
     const p = frameOf(boxWith({ partitions: { thickness: 0.75, places: { kind: 'given', at: [12] } } }));
     expect(partOf(p, 'Partition')).toMatchObject({ at: 12.25 });
-    expect(p.outline).toMatchObject({ layout: { columns: [{ opening: { label: 'A' }, size: 10.125 }, { opening: { label: 'B' } }] } });
+    expect(p.outline).toMatchObject({
+      layout: { columns: [{ opening: { label: 'A' }, size: 10.125 }, { opening: { label: 'B' } }] },
+    });
     expect(workFrame(p).contours.openings.map((o) => o.width)).toEqual([10.125, 17.875]);
   });
 
@@ -96,17 +111,28 @@ describe('When the frame of a box is made', () => {
     const wide = { ...base.reveal, left: 1.5 };
     const places = (kind: 'equal spaces' | 'equal openings') => ({ thickness: 0.75, places: { kind, count: 2 } });
     const spaces = frameOf(boxWith({ reveal: wide, partitions: places('equal spaces') }));
-    const faces = spaces.dados.filter((d) => d.runs === 'vertical').map((d) => d.at).sort((a, b) => a - b);
+    const faces = spaces.dados
+      .filter((d) => d.runs === 'vertical')
+      .map((d) => d.at)
+      .sort((a, b) => a - b);
     const gaps = faces.slice(1).map((at, i) => at - faces[i]! - 0.75);
     for (const gap of gaps) expect(gap).toBeCloseTo((32.5 - 4 * 0.75) / 3, 9);
-    const openings = workFrame(frameOf(boxWith({ reveal: wide, partitions: places('equal openings') }))).contours.openings;
+    const openings = workFrame(frameOf(boxWith({ reveal: wide, partitions: places('equal openings') }))).contours
+      .openings;
     for (const { width } of openings) expect(width).toBeCloseTo((33 - 2.5 - 1.75 - 2 * 1.5) / 3, 9);
   });
 
   test('then the board, edge, setup and cutters are those of the frame it is based on', () => {
-    const shop = { ...newFrame('in', 'B'), thickness: 1, setup: { ...newFrame('in', 'B').setup, flip: 'end-over-end' as const } };
+    const shop = {
+      ...newFrame('in', 'B'),
+      thickness: 1,
+      setup: { ...newFrame('in', 'B').setup, flip: 'end-over-end' as const },
+    };
     const made = frameFromBox(base, shop);
-    expect(made).toMatchObject({ ok: true, particulars: { thickness: 1, setup: shop.setup, cutters: shop.cutters, name: 'Two-door base' } });
+    expect(made).toMatchObject({
+      ok: true,
+      particulars: { thickness: 1, setup: shop.setup, cutters: shop.cutters, name: 'Two-door base' },
+    });
   });
 
   test('then a base in the other unit is refused', () => {
@@ -128,10 +154,16 @@ describe('When any box passes its checks', () => {
     fc.assert(
       fc.property(acceptable, (box) => {
         const { width, height, stiles, rails, layout, dados } = layOutBox(box);
-        const p: Particulars = { ...newFrame(box.unit, box.name), outline: { kind: 'members', width, height, stiles, rails, feet: box.feet, layout }, dados };
+        const p: Particulars = {
+          ...newFrame(box.unit, box.name),
+          outline: { kind: 'members', width, height, stiles, rails, feet: box.feet, layout },
+          dados,
+        };
         expect(contract.safeParse(p).error).toBeUndefined();
         const codes = workFrame(p).findings.map((f) => `${f.level} ${f.code}`);
-        expect(codes.filter((c) => c.startsWith('stop') || c.includes('end-meets-nothing') || c.includes('open-end-inside'))).toEqual([]);
+        expect(
+          codes.filter((c) => c.startsWith('stop') || c.includes('end-meets-nothing') || c.includes('open-end-inside')),
+        ).toEqual([]);
       }),
       asserted,
     );

@@ -24,7 +24,11 @@ function sawn(box: Box): { part: string; thickness: number; length: number; widt
   const between = width - 2 * ends.thickness + 2 * letIn;
   const inside = height - (bottom.up + bottom.thickness) - (top ? top.down + top.thickness : 0);
   const deep = depth === undefined ? undefined : depth + dado.depth;
-  const count = !partitions ? 0 : partitions.places.kind === 'given' ? partitions.places.at.length : partitions.places.count;
+  const count = !partitions
+    ? 0
+    : partitions.places.kind === 'given'
+      ? partitions.places.at.length
+      : partitions.places.count;
   return [
     { part: 'Left end', thickness: ends.thickness, length: height, width: deep },
     { part: 'Right end', thickness: ends.thickness, length: height, width: deep },
@@ -52,7 +56,14 @@ describe('When the box parts of a frame are listed', () => {
   test('then each grows by its dado’s depth on its front edge', () => {
     const box = newBox('in', 'Two-door base');
     const rows = partsOf(box);
-    const row = { count: 1, thickness: 0.75, width: 23.5, growth: 0.25, grows: 'front edge', remark: 'add 1/4 in to the front-to-back size' };
+    const row = {
+      count: 1,
+      thickness: 0.75,
+      width: 23.5,
+      growth: 0.25,
+      grows: 'front edge',
+      remark: 'add 1/4 in to the front-to-back size',
+    };
     // Ends 30 long though their dados run out at 0 below; bottom between the ends; partition from the bottom up.
     expect(rows).toEqual([
       { ...row, part: 'Left end', length: 30, runsOut: ['bottom', 'top'] },
@@ -64,7 +75,12 @@ describe('When the box parts of a frame are listed', () => {
 
   test('then without the box’s depth only the growth is told', () => {
     const [end] = listBoxParts(newFrame('mm', 'A'));
-    expect(end).toMatchObject({ part: 'Left end', width: undefined, growth: 6, remark: 'add 6 mm to the front-to-back size' });
+    expect(end).toMatchObject({
+      part: 'Left end',
+      width: undefined,
+      growth: 6,
+      remark: 'add 6 mm to the front-to-back size',
+    });
   });
 
   test('then parts of one name and size are told together', () => {
@@ -79,13 +95,23 @@ describe('When the box parts of a frame are listed', () => {
 
   test('then a traced outline serves as well', () => {
     const frame = newFrame('in', 'A');
-    const perimeter = [[5, 5], [38, 5], [38, 35.5], [5, 35.5]] as const;
-    expect(listBoxParts({ ...frame, outline: { kind: 'traced', perimeter, openings: [] } })).toEqual(listBoxParts(frame));
+    const perimeter = [
+      [5, 5],
+      [38, 5],
+      [38, 35.5],
+      [5, 35.5],
+    ] as const;
+    expect(listBoxParts({ ...frame, outline: { kind: 'traced', perimeter, openings: [] } })).toEqual(
+      listBoxParts(frame),
+    );
   });
 
   test('then a part named like a property of objects has no width of its own', () => {
     const frame = newFrame('in', 'A');
-    const [part] = listBoxParts({ ...frame, dados: [{ ...frame.dados[0]!, part: 'constructor' }] }, { widths: { Stretcher: 4 } });
+    const [part] = listBoxParts(
+      { ...frame, dados: [{ ...frame.dados[0]!, part: 'constructor' }] },
+      { widths: { Stretcher: 4 } },
+    );
     expect(part).toMatchObject({ part: 'constructor', width: undefined });
   });
 

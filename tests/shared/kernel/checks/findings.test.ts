@@ -1,6 +1,12 @@
 import { describe, expect, test } from 'vitest';
 import type { Finding, FindingCode, FindingLevel } from '#shared/kernel/checks/finding.ts';
-import type { Cutters, MembersOutline, Particulars, Setup, TracedVertex } from '#shared/kernel/particulars/particulars.ts';
+import type {
+  Cutters,
+  MembersOutline,
+  Particulars,
+  Setup,
+  TracedVertex,
+} from '#shared/kernel/particulars/particulars.ts';
 import { workFrame } from '#shared/kernel/work-frame.ts';
 import { dado, workedExample } from '../../../builders/worked-example.ts';
 
@@ -15,11 +21,19 @@ interface Case {
 
 const base = workedExample();
 const members = base.outline as MembersOutline;
-const outline = (changes: Partial<MembersOutline>): Particulars => workedExample({ outline: { ...members, ...changes }, dados: [] });
-const setup = (changes: Partial<Setup>, more: Partial<Particulars> = {}): Particulars => workedExample({ ...more, setup: { ...base.setup, ...changes } });
+const outline = (changes: Partial<MembersOutline>): Particulars =>
+  workedExample({ outline: { ...members, ...changes }, dados: [] });
+const setup = (changes: Partial<Setup>, more: Partial<Particulars> = {}): Particulars =>
+  workedExample({ ...more, setup: { ...base.setup, ...changes } });
 const cutters = (changes: Partial<Cutters>): Particulars => workedExample({ cutters: { ...base.cutters, ...changes } });
-const dados = (...list: Parameters<typeof dado>[0][]): Particulars => workedExample({ dados: list.map((changes) => dado(changes)) });
-const box = (x: number, y: number, width: number, height: number): TracedVertex[] => [[x, y], [x + width, y], [x + width, y + height], [x, y + height]];
+const dados = (...list: Parameters<typeof dado>[0][]): Particulars =>
+  workedExample({ dados: list.map((changes) => dado(changes)) });
+const box = (x: number, y: number, width: number, height: number): TracedVertex[] => [
+  [x, y],
+  [x + width, y],
+  [x + width, y + height],
+  [x, y + height],
+];
 const traced = (perimeter: TracedVertex[], ...openings: TracedVertex[][]): Particulars =>
   workedExample({ outline: { kind: 'traced', perimeter, openings }, dados: [] });
 
@@ -32,8 +46,25 @@ const CASES: Case[] = [
     code: 'members-do-not-add-up',
     level: 'stop',
     when: 'columns of 10 and 18 stand with 1.5 between in 29.5, or in a hundredth less',
-    speaks: outline({ width: 32.99, layout: { columns: [{ opening: {}, size: 10 }, { opening: {}, size: 18 }], between: 1.5 } }),
-    silent: outline({ layout: { columns: [{ opening: {}, size: 10 }, { opening: {}, size: 18 }], between: 1.5 } }),
+    speaks: outline({
+      width: 32.99,
+      layout: {
+        columns: [
+          { opening: {}, size: 10 },
+          { opening: {}, size: 18 },
+        ],
+        between: 1.5,
+      },
+    }),
+    silent: outline({
+      layout: {
+        columns: [
+          { opening: {}, size: 10 },
+          { opening: {}, size: 18 },
+        ],
+        between: 1.5,
+      },
+    }),
   },
   {
     code: 'opening-smaller-than-cutter',
@@ -123,7 +154,12 @@ const CASES: Case[] = [
     code: 'outline-crosses-itself',
     level: 'stop',
     when: 'a traced opening is a bow, or the same four corners in order',
-    speaks: traced(box(0, 0, 20, 20), [[5, 5], [10, 10], [10, 5], [5, 10]]),
+    speaks: traced(box(0, 0, 20, 20), [
+      [5, 5],
+      [10, 10],
+      [10, 5],
+      [5, 10],
+    ]),
     silent: traced(box(0, 0, 20, 20), box(5, 5, 5, 5)),
   },
   {
@@ -202,23 +238,46 @@ const CASES: Case[] = [
 function rounded(radius: number): TracedVertex[] {
   const q = Math.tan(Math.PI / 8);
   return [
-    [5 + radius, 5], [13 - radius, 5, q], [13, 5 + radius], [13, 13 - radius, q],
-    [13 - radius, 13], [5 + radius, 13, q], [5, 13 - radius], [5, 5 + radius, q],
+    [5 + radius, 5],
+    [13 - radius, 5, q],
+    [13, 5 + radius],
+    [13, 13 - radius, q],
+    [13 - radius, 13],
+    [5 + radius, 13, q],
+    [5, 13 - radius],
+    [5, 5 + radius, q],
   ];
 }
 
 /** Two rooms of 4 × 6 joined by a neck of the given width. */
 function necked(width: number): TracedVertex[] {
   const [low, high] = [8 - width / 2, 8 + width / 2];
-  return [[3, 5], [7, 5], [7, low], [11, low], [11, 5], [15, 5], [15, 11], [11, 11], [11, high], [7, high], [7, 11], [3, 11]];
+  return [
+    [3, 5],
+    [7, 5],
+    [7, low],
+    [11, low],
+    [11, 5],
+    [15, 5],
+    [15, 11],
+    [11, 11],
+    [11, high],
+    [7, high],
+    [7, 11],
+    [3, 11],
+  ];
 }
 
 /** Dados in a frame with stiles wide enough for several. */
 function wide(...list: Parameters<typeof dado>[0][]): Particulars {
-  return workedExample({ outline: { ...members, stiles: { left: 8, right: 1.75 } }, dados: list.map((changes) => dado(changes)) });
+  return workedExample({
+    outline: { ...members, stiles: { left: 8, right: 1.75 } },
+    dados: list.map((changes) => dado(changes)),
+  });
 }
 
-const found = (p: Particulars, code: FindingCode): Finding[] => workFrame(p).findings.filter((finding) => finding.code === code);
+const found = (p: Particulars, code: FindingCode): Finding[] =>
+  workFrame(p).findings.filter((finding) => finding.code === code);
 
 describe.each(CASES)('When $when: $code', ({ code, level, speaks, silent }) => {
   test(`then the one is a ${level} with its place, its numbers and what to change`, () => {
@@ -270,7 +329,11 @@ describe('When every check is listed', () => {
   test('then each of a square-edged frame is held against a frame that sets it off', () => {
     const tried = new Set(CASES.map((c) => c.code));
     const named: FindingCode[] = ['dado-outside-frame', 'open-end-inside', 'end-meets-nothing'];
-    const [outside, inside, nothing] = [dados({ at: 40 }), dados({ from: 5, to: 20 }), dados({ from: 5, to: 20, ends: ['meets', 'meets'] })];
+    const [outside, inside, nothing] = [
+      dados({ at: 40 }),
+      dados({ from: 5, to: 20 }),
+      dados({ from: 5, to: 20, ends: ['meets', 'meets'] }),
+    ];
     expect([outside, inside, nothing].map((p, i) => found(p, named[i]!).length)).toEqual([1, 2, 2]);
     expect(named.map((code) => found(workedExample(), code).length)).toEqual([0, 0, 0]);
     expect(tried.size).toBeGreaterThanOrEqual(18);

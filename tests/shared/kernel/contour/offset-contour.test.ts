@@ -98,7 +98,9 @@ describe('When an outline of lines and arcs is offset', () => {
         const out = offsetContour(outline, distance);
         const back = out.ok && offsetContour(out.contour, -distance);
         if (!back || !back.ok) return;
-        expect(differenceArea([flattenContour(back.contour, CHORD)], [flattenContour(outline, CHORD)])).toBeLessThan(slack(outline) * 2);
+        expect(differenceArea([flattenContour(back.contour, CHORD)], [flattenContour(outline, CHORD)])).toBeLessThan(
+          slack(outline) * 2,
+        );
       }),
       { numRuns: 100 },
     );
@@ -177,7 +179,20 @@ describe('When an arc cannot shrink any more', () => {
 
 describe('When an offset runs over itself, then it is refused with the place', () => {
   // A slot 1 wide that opens to a room: inwards by 0.6 its walls pass each other, though no side is used up.
-  const slot: [number, number][] = [[0, 0], [4, 0], [4, 4], [8, 4], [8, 0], [12, 0], [12, 9], [8, 9], [8, 5], [4, 5], [4, 9], [0, 9]];
+  const slot: [number, number][] = [
+    [0, 0],
+    [4, 0],
+    [4, 4],
+    [8, 4],
+    [8, 0],
+    [12, 0],
+    [12, 9],
+    [8, 9],
+    [8, 5],
+    [4, 5],
+    [4, 9],
+    [0, 9],
+  ];
   const room: Contour = { closed: true, vertices: slot.map(([x, y]) => ({ x, y, bulge: 0 })) };
 
   test('inwards by 0.4 it holds', () => expect(offsetContour(room, -0.4)).toMatchObject({ ok: true }));
@@ -191,5 +206,7 @@ describe('When an offset runs over itself, then it is refused with the place', (
 
 describe('When the wrong thing is offset, then that throws with the value', () => {
   test('an open line', () => expect(() => offsetContour({ ...square(1), closed: false }, 0.1)).toThrow(/open/));
-  test.each([NaN, Infinity])('by %d', (distance) => expect(() => offsetContour(square(1), distance)).toThrow(String(distance)));
+  test.each([NaN, Infinity])('by %d', (distance) =>
+    expect(() => offsetContour(square(1), distance)).toThrow(String(distance)),
+  );
 });

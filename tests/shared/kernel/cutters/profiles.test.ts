@@ -112,14 +112,18 @@ describe('When a depth is cut in passes', () => {
 
   test('then they rise, none takes more than it may, and the last is the depth itself', () => {
     fc.assert(
-      fc.property(fc.double({ min: 0.01, max: 50, noNaN: true }), fc.double({ min: 0.05, max: 20, noNaN: true }), (depth, most) => {
-        const passes = passDepths(depth, most);
-        expect(passes.at(-1)).toBe(depth);
-        const steps = passes.map((pass, i) => pass - (passes[i - 1] ?? 0));
-        expect(Math.max(...steps)).toBeLessThanOrEqual(most + 1e-9);
-        expect(Math.min(...steps)).toBeGreaterThan(0);
-        expect(passes.length).toBe(Math.ceil(depth / most - 1e-9));
-      }),
+      fc.property(
+        fc.double({ min: 0.01, max: 50, noNaN: true }),
+        fc.double({ min: 0.05, max: 20, noNaN: true }),
+        (depth, most) => {
+          const passes = passDepths(depth, most);
+          expect(passes.at(-1)).toBe(depth);
+          const steps = passes.map((pass, i) => pass - (passes[i - 1] ?? 0));
+          expect(Math.max(...steps)).toBeLessThanOrEqual(most + 1e-9);
+          expect(Math.min(...steps)).toBeGreaterThan(0);
+          expect(passes.length).toBe(Math.ceil(depth / most - 1e-9));
+        },
+      ),
     );
   });
 });

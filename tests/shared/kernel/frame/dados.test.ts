@@ -23,7 +23,10 @@ describe('When a dado ends', () => {
   const extents = (changes: Partial<Dado>) => work(dado(changes)).dados[0]!.extents;
 
   test('open, then it runs out past its end by the cutter’s radius', () => {
-    expect(extents({ from: 0, to: 30.5, ends: ['open', 'open'] })).toMatchObject({ minY: -RADIUS, maxY: 30.5 + RADIUS });
+    expect(extents({ from: 0, to: 30.5, ends: ['open', 'open'] })).toMatchObject({
+      minY: -RADIUS,
+      maxY: 30.5 + RADIUS,
+    });
   });
 
   test('meets, then it ends exactly there', () => {
@@ -112,7 +115,9 @@ describe('When dados touch or cross', () => {
           const outlines = contoursIn([set]);
           const area = Math.abs(outlines.reduce((sum, outline) => sum + contourArea(outline), 0));
           expect(Math.abs(area - unionArea(entered))).toBeLessThan(1e-5);
-          const corners = outlines.flatMap(({ vertices }) => vertices.map((v, i) => corner(vertices.at(i - 1)!, v, vertices[(i + 1) % vertices.length]!)));
+          const corners = outlines.flatMap(({ vertices }) =>
+            vertices.map((v, i) => corner(vertices.at(i - 1)!, v, vertices[(i + 1) % vertices.length]!)),
+          );
           expect(Math.min(...corners.map((c) => c.side))).toBeGreaterThan(1e-9);
           expect(Math.max(...corners.map((c) => c.skew))).toBeLessThan(1e-6);
           compared++;
@@ -132,7 +137,11 @@ function corner(a: Point, b: Point, c: Point): { side: number; skew: number } {
 
 describe('When dados have several depths', () => {
   test('then each depth is a line set of its own, and only equal depths are merged', () => {
-    const { back } = work(dado({ at: 5, depth: 0.25 }), dado({ at: 10, depth: 0.375 }), dado({ runs: 'horizontal', at: 10, from: 4, to: 20, depth: 0.25 }));
+    const { back } = work(
+      dado({ at: 5, depth: 0.25 }),
+      dado({ at: 10, depth: 0.375 }),
+      dado({ runs: 'horizontal', at: 10, from: 4, to: 20, depth: 0.25 }),
+    );
     const sets = lineSets(back, 'DADO');
     expect(sets.map((set) => set.depth).sort()).toEqual([0.25, 0.375]);
     expect(sets.map((set) => set.shapes.length)).toEqual([1, 1]);
@@ -147,7 +156,9 @@ describe('When dados have several depths', () => {
 
   test('then passes follow the dado cutter’s deepest step', () => {
     const { cutters } = workedExample();
-    const { back } = workFrame(workedExample({ dados: [dado()], cutters: { ...cutters, dado: { ...cutters.dado, maxPass: 0.1 } } }));
+    const { back } = workFrame(
+      workedExample({ dados: [dado()], cutters: { ...cutters, dado: { ...cutters.dado, maxPass: 0.1 } } }),
+    );
     const [set] = lineSets(back, 'DADO');
     expect(set!.passes).toEqual([expect.closeTo(0.1), expect.closeTo(0.2), 0.25]);
   });

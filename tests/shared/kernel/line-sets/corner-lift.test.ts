@@ -9,7 +9,14 @@ import { unplace, placeContour, placeShape } from '#shared/kernel/placing/place.
 import { liftChord } from '#shared/kernel/tolerances.ts';
 import { workFrame } from '#shared/kernel/work-frame.ts';
 import { contoursIn, lineSet } from '../../../builders/line-sets.ts';
-import { placesAlong, reachInto, signedDistance, standsAlong, standsOf, type TipPath } from '../../../builders/sweep.ts';
+import {
+  placesAlong,
+  reachInto,
+  signedDistance,
+  standsAlong,
+  standsOf,
+  type TipPath,
+} from '../../../builders/sweep.ts';
 import { workedExample } from '../../../builders/worked-example.ts';
 
 /**
@@ -26,12 +33,24 @@ const vee: Cutter = { kind: 'vee', includedAngle: 30, fluteLength: 1.5 };
 
 const traced = (...opening: TracedVertex[]): Particulars =>
   workedExample({
-    outline: { kind: 'traced', perimeter: [[0, 0], [20, 0], [20, 20], [0, 20]], openings: [opening] },
+    outline: {
+      kind: 'traced',
+      perimeter: [
+        [0, 0],
+        [20, 0],
+        [20, 20],
+        [0, 20],
+      ],
+      openings: [opening],
+    },
     dados: [],
   });
 
 const members = (arch: number): Particulars =>
-  workedExample({ outline: { ...(workedExample().outline as MembersOutline), layout: { opening: { arch } } }, dados: [] });
+  workedExample({
+    outline: { ...(workedExample().outline as MembersOutline), layout: { opening: { arch } } },
+    dados: [],
+  });
 
 interface Situation {
   name: string;
@@ -43,7 +62,18 @@ interface Situation {
 const situations: Situation[] = [
   { name: 'square corners, line and line', frame: workedExample({ dados: [] }), corners: 8 },
   { name: 'corners of 60°, line and line', frame: traced([4, 4], [14, 4], [9, 4 + 5 * Math.sqrt(3)]), corners: 3 },
-  { name: 'corners of 120°, line and line', frame: traced([4, 10], [7, 4.803847577293368], [13, 4.803847577293368], [16, 10], [13, 15.196152422706632], [7, 15.196152422706632]), corners: 6 },
+  {
+    name: 'corners of 120°, line and line',
+    frame: traced(
+      [4, 10],
+      [7, 4.803847577293368],
+      [13, 4.803847577293368],
+      [16, 10],
+      [13, 15.196152422706632],
+      [7, 15.196152422706632],
+    ),
+    corners: 6,
+  },
   { name: 'an arch’s springing, line and arc', frame: members(2.5), corners: 4 },
   { name: 'a hollow side, line and arc', frame: traced([4, 4], [14, 4, -0.2], [14, 14], [4, 14]), corners: 4 },
   { name: 'a lens, arc and arc', frame: traced([4, 10, 0.5], [16, 10, 0.5]), corners: 2 },
@@ -76,19 +106,29 @@ function workCorners(p: Particulars): Worked[] {
     const face = offsetContour(contours.openings[index]!.contour, widening);
     if (!face.ok) throw new Error('the opening in the face collapses');
     const around = standsOf(axes[index]!, axis.depth, corner, 0.8, STEP);
-    return { corner, path: [...around, ...standsAlong(lift.points, STEP / 2)], face: face.contour, cutter, tipDepth: axis.depth };
+    return {
+      corner,
+      path: [...around, ...standsAlong(lift.points, STEP / 2)],
+      face: face.contour,
+      cutter,
+      tipDepth: axis.depth,
+    };
   });
 }
 
 /** The wall at a depth stands inside the face's by how much narrower the cutter is there. */
-const wallInset = ({ cutter, tipDepth }: Worked, depth: number) => radiusAtHeight(cutter, tipDepth) - radiusAtHeight(cutter, tipDepth - depth);
+const wallInset = ({ cutter, tipDepth }: Worked, depth: number) =>
+  radiusAtHeight(cutter, tipDepth) - radiusAtHeight(cutter, tipDepth - depth);
 
 /** Places that must stay at a depth: all along the wall, and those of a grid that lie behind it. */
 function placesThatStay(worked: Worked, depth: number): Point[] {
   const wall = offsetContour(worked.face, -wallInset(worked, depth));
   if (!wall.ok) throw new Error('the wall collapses');
   const polygon = flattenContour(wall.contour, 2e-6);
-  return [...placesAlong(wall.contour, worked.corner, NEAR, 0.005), ...grid(worked.corner).filter((p) => signedDistance(polygon, p) > 0)];
+  return [
+    ...placesAlong(wall.contour, worked.corner, NEAR, 0.005),
+    ...grid(worked.corner).filter((p) => signedDistance(polygon, p) > 0),
+  ];
 }
 
 /** Places that must be gone at the face: just inside the wall, and further in as far as the cutter's radius. */
@@ -120,7 +160,11 @@ const cutters: [string, Cutter, 'face' | 'back'][] = [
 
 describe.each(cutters)('When %s lifts into a corner', (_, cutter, sizeHeldAt) => {
   describe.each(situations)('of $name', ({ frame, corners }) => {
-    const p: Particulars = { ...frame, edge: { style: 'square', sizeHeldAt }, cutters: { ...frame.cutters, opening: cutter } };
+    const p: Particulars = {
+      ...frame,
+      edge: { style: 'square', sizeHeldAt },
+      cutters: { ...frame.cutters, opening: cutter },
+    };
     const all = workCorners(p);
     // Of square and equal corners two are enough; where line and arc meet, both kinds are among the first four.
     const swept = all.slice(0, corners > 4 ? 2 : 4);
@@ -137,7 +181,9 @@ describe.each(cutters)('When %s lifts into a corner', (_, cutter, sizeHeldAt) =>
       for (const worked of swept) {
         for (const depth of DEPTHS) {
           const cut = Math.max(...reachInto(worked.path, worked.cutter, placesThatStay(worked, depth), depth));
-          expect(cut, `at depth ${depth} in the corner at ${worked.corner.x}, ${worked.corner.y}`).toBeLessThan(TOLERANCE);
+          expect(cut, `at depth ${depth} in the corner at ${worked.corner.x}, ${worked.corner.y}`).toBeLessThan(
+            TOLERANCE,
+          );
         }
       }
     });

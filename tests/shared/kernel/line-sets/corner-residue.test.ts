@@ -16,7 +16,19 @@ const cos = (degrees: number) => Math.cos((degrees * Math.PI) / 180);
 const tapered: Cutter = { kind: 'tapered', tipRadius: 0.0625, sideAngle: 1.5, fluteLength: 1.25 };
 
 const traced = (...opening: TracedVertex[]): Particulars =>
-  workedExample({ outline: { kind: 'traced', perimeter: [[0, 0], [20, 0], [20, 20], [0, 20]], openings: [opening] }, dados: [] });
+  workedExample({
+    outline: {
+      kind: 'traced',
+      perimeter: [
+        [0, 0],
+        [20, 0],
+        [20, 20],
+        [0, 20],
+      ],
+      openings: [opening],
+    },
+    dados: [],
+  });
 
 /** Openings whose first corner is at (4, 4), with its bisector along +x +y turned by half its angle. */
 const corners: [string, number, Particulars][] = [
@@ -29,7 +41,10 @@ const corners: [string, number, Particulars][] = [
 function leftOver(path: TipPath, cutter: Cutter, tipDepth: number, degrees: number, depth: number): number {
   const half = ((degrees / 2) * Math.PI) / 180;
   const inset = (radiusAtHeight(cutter, tipDepth) - radiusAtHeight(cutter, tipDepth - depth)) / Math.sin(half);
-  const places = Array.from({ length: 1500 }, (_, i) => ({ x: 4 + (inset + i * SCAN) * Math.cos(half), y: 4 + (inset + i * SCAN) * Math.sin(half) }));
+  const places = Array.from({ length: 1500 }, (_, i) => ({
+    x: 4 + (inset + i * SCAN) * Math.cos(half),
+    y: 4 + (inset + i * SCAN) * Math.sin(half),
+  }));
   const first = reachInto(path, cutter, places, depth).findIndex((reach) => reach >= -1e-6);
   if (first < 0) throw new Error('the corner is never reached');
   return first * SCAN;
@@ -59,7 +74,9 @@ describe.each(corners)('When a corner of %s is cut with a tapered cutter', (_, d
       const radius = radiusAtHeight(tapered, axis.depth - depth);
       expect(unlifted.radius).toBeCloseTo(radius, 9);
       expect(unlifted.diagonal).toBeCloseTo(radius * (1 / Math.sin((degrees * Math.PI) / 360) - 1), 9);
-      expect(Math.abs(leftOver(around, tapered, axis.depth, degrees, depth) - unlifted.diagonal)).toBeLessThan(2 * SCAN);
+      expect(Math.abs(leftOver(around, tapered, axis.depth, degrees, depth) - unlifted.diagonal)).toBeLessThan(
+        2 * SCAN,
+      );
     }
   });
 

@@ -10,8 +10,20 @@ import { contourDifference } from '../../../builders/same-contour.ts';
 import { workedExample } from '../../../builders/worked-example.ts';
 
 /** A frame without any symmetry: a cut-off corner, an arched side, an opening with a full and a hollow arc and slanted sides. */
-const PERIMETER: TracedVertex[] = [[0, 0], [24, 0], [24, 14], [19, 18], [0, 18, 0.2]];
-const OPENING: TracedVertex[] = [[3, 3], [12, 2, 0.25], [15, 9], [11, 14, -0.2], [4, 12]];
+const PERIMETER: TracedVertex[] = [
+  [0, 0],
+  [24, 0],
+  [24, 14],
+  [19, 18],
+  [0, 18, 0.2],
+];
+const OPENING: TracedVertex[] = [
+  [3, 3],
+  [12, 2, 0.25],
+  [15, 9],
+  [11, 14, -0.2],
+  [4, 12],
+];
 
 /** The eight ways of laying a board down: four turns, and four turns over. Each is a matrix with its own inverse's transpose. */
 const WAYS = [
@@ -36,10 +48,20 @@ const turned = (m: Matrix, contour: TracedVertex[]): TracedVertex[] =>
   });
 
 const frame = (m: Matrix): Particulars =>
-  workedExample({ outline: { kind: 'traced', perimeter: turned(m, PERIMETER), openings: [turned(m, OPENING)] }, dados: [] });
+  workedExample({
+    outline: { kind: 'traced', perimeter: turned(m, PERIMETER), openings: [turned(m, OPENING)] },
+    dados: [],
+  });
 
 /** Lines of the front in frame view. */
-function work(m: Matrix): { axis: Contour; perimeter: Contour; opening: Contour; lifts: readonly (readonly Point3[])[]; codes: string[]; size: number[] } {
+function work(m: Matrix): {
+  axis: Contour;
+  perimeter: Contour;
+  opening: Contour;
+  lifts: readonly (readonly Point3[])[];
+  codes: string[];
+  size: number[];
+} {
   const { front, contours, findings } = workFrame(frame(m));
   const back = unplace(front.placement);
   const lifted = lineSet(front, 'CORNER_LIFT');
@@ -68,7 +90,10 @@ describe.each(WAYS)('When a traced frame is %s', (_, m) => {
   const other = work(m);
   const low = (points: readonly Point[], axis: 'x' | 'y') => Math.min(...points.map((p) => p[axis]));
   const moved = plain.opening.vertices.map((v) => apply(m, v));
-  const by = { x: low(other.opening.vertices, 'x') - low(moved, 'x'), y: low(other.opening.vertices, 'y') - low(moved, 'y') };
+  const by = {
+    x: low(other.opening.vertices, 'x') - low(moved, 'x'),
+    y: low(other.opening.vertices, 'y') - low(moved, 'y'),
+  };
 
   test('then opening, axis and perimeter are turned with it', () => {
     for (const name of ['opening', 'axis', 'perimeter'] as const) {
@@ -99,7 +124,8 @@ describe.each(WAYS)('When a traced frame is %s', (_, m) => {
   test('then the findings are the same', () => expect(other.codes).toEqual(plain.codes));
 });
 
-const distance = (p: Point3, q: Point3, by: Point) => Math.max(Math.abs(p.x - q.x - by.x), Math.abs(p.y - q.y - by.y), Math.abs(p.z - q.z));
+const distance = (p: Point3, q: Point3, by: Point) =>
+  Math.max(Math.abs(p.x - q.x - by.x), Math.abs(p.y - q.y - by.y), Math.abs(p.z - q.z));
 
 describe('When a traced contour starts at another vertex or runs the other way', () => {
   const shifted = (list: TracedVertex[]): TracedVertex[] => [...list.slice(2), ...list.slice(0, 2)];
@@ -114,7 +140,10 @@ describe('When a traced contour starts at another vertex or runs the other way',
     ['another vertex', shifted],
     ['the other way', backwards],
   ])('%s, then the lines are the same', (_, change) => {
-    const p = workedExample({ outline: { kind: 'traced', perimeter: change(PERIMETER), openings: [change(OPENING)] }, dados: [] });
+    const p = workedExample({
+      outline: { kind: 'traced', perimeter: change(PERIMETER), openings: [change(OPENING)] },
+      dados: [],
+    });
     const { front, contours } = workFrame(p);
     const axis = placeContour(unplace(front.placement), contoursIn([lineSet(front, 'OPENING_AXIS')])[0]!);
     expect(contourDifference(axis, plain.axis)).toBeLessThan(1e-9);

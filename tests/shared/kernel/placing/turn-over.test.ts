@@ -62,7 +62,9 @@ describe('When the back is turned over about the fold and laid on the pins', () 
         const all = p.setup.squaring === 'all-edges';
         const [right, top] = [width + 2 * p.setup.allowance, height + 2 * p.setup.allowance];
         expect(turned).toHaveLength(all ? 4 : 3);
-        const astray = turned.map(({ x, y }) => Math.min(nearest(x, all ? [0, right] : [0]), nearest(y, all ? [0, top] : [0])));
+        const astray = turned.map(({ x, y }) =>
+          Math.min(nearest(x, all ? [0, right] : [0]), nearest(y, all ? [0, top] : [0])),
+        );
         expect(Math.max(...astray)).toBeLessThan(EXACT);
         // It meets at the corner of the pins.
         expect(turned.some(({ x, y }) => Math.abs(x) < EXACT && Math.abs(y) < EXACT)).toBe(true);

@@ -1,10 +1,9 @@
-import colors from 'dxf/lib/util/colors.js';
+import * as dxf from 'dxf';
 import { describe, expect, test } from 'vitest';
 import { aciHex } from '#shared/kernel/sheet/aci-hex.ts';
 
 /** The table of npm dxf, an independent DXF reader. */
-const table = (colors as { default?: unknown }).default ?? colors;
-const known = table as readonly (readonly [number, number, number])[];
+const known = (dxf as unknown as { colors: readonly (readonly [number, number, number])[] }).colors;
 
 const channels = (hex: string) => [1, 3, 5].map((i) => parseInt(hex.slice(i, i + 2), 16));
 

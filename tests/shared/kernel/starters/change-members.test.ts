@@ -6,7 +6,12 @@ import { particulars as contract } from '#shared/contracts/particulars.ts';
 import { newFrame } from '#shared/kernel/particulars/new-frame.ts';
 import type { LayoutPart, MembersOutline, Particulars } from '#shared/kernel/particulars/particulars.ts';
 import { changeManyFrames, changeMember, changeMembers } from '#shared/kernel/starters/change-members.ts';
-import { CHANGEABLE, type Changeable, type ChangedFrame, type MemberChange } from '#shared/kernel/starters/member-change.ts';
+import {
+  CHANGEABLE,
+  type Changeable,
+  type ChangedFrame,
+  type MemberChange,
+} from '#shared/kernel/starters/member-change.ts';
 import { STARTERS } from '#shared/kernel/starters/starters.ts';
 import { workFrame } from '#shared/kernel/work-frame.ts';
 
@@ -14,7 +19,12 @@ import { workFrame } from '#shared/kernel/work-frame.ts';
 const frame = newFrame('in', 'Two-door base');
 const outline = frame.outline as MembersOutline;
 const withLayout = (layout: LayoutPart): Particulars => ({ ...frame, outline: { ...outline, layout } });
-const inch = (what: Changeable, to: number, from?: number): MemberChange => ({ what, unit: 'in', to, ...(from === undefined ? {} : { from }) });
+const inch = (what: Changeable, to: number, from?: number): MemberChange => ({
+  what,
+  unit: 'in',
+  to,
+  ...(from === undefined ? {} : { from }),
+});
 
 function taken(result: ChangedFrame): Extract<ChangedFrame, { ok: true }> {
   if (!result.ok) throw new Error(result.why);
@@ -47,7 +57,12 @@ describe('When a member is changed', () => {
   });
 
   test('then a bottom that is not flush keeps its place to the frame’s edge', () => {
-    const low: Particulars = { ...frame, dados: frame.dados.map((d) => (d.part === 'Bottom' ? { ...d, at: 0.25 } : d.part === 'Partition' ? { ...d, from: 1 } : d)) };
+    const low: Particulars = {
+      ...frame,
+      dados: frame.dados.map((d) =>
+        d.part === 'Bottom' ? { ...d, at: 0.25 } : d.part === 'Partition' ? { ...d, from: 1 } : d,
+      ),
+    };
     expect(taken(changeMember(low, inch('bottom rail', 1.5))).moved).toEqual([]);
   });
 
@@ -75,14 +90,25 @@ describe('When a member is changed', () => {
     expect(taken(changeMember(wide, inch('mid-stiles', 2.5))).moved).toEqual([]);
     // The mid-stile stands from 15 to 18; 2 1/2 wide it begins at 15.25.
     const flush = { ...wide, dados: wide.dados.with(2, { ...wide.dados[2]!, at: 15 }) };
-    expect(taken(changeMember(flush, inch('mid-stiles', 2.5))).moved).toMatchObject([{ part: 'Partition', entry: 'at', was: 15, is: 15.25 }]);
+    expect(taken(changeMember(flush, inch('mid-stiles', 2.5))).moved).toMatchObject([
+      { part: 'Partition', entry: 'at', was: 15, is: 15.25 },
+    ]);
     const neither = { ...wide, dados: wide.dados.with(2, { ...wide.dados[2]!, at: 15.5 }) };
-    expect(taken(changeMember(neither, inch('mid-stiles', 2.5)))).toMatchObject({ moved: [], stayed: [{ dado: 'dado-2', part: 'Partition' }] });
+    expect(taken(changeMember(neither, inch('mid-stiles', 2.5)))).toMatchObject({
+      moved: [],
+      stayed: [{ dado: 'dado-2', part: 'Partition' }],
+    });
   });
 
   test('then a partition behind two mid-stiles that part company stays and is told', () => {
     const column = (size?: number): LayoutPart => ({ opening: {}, ...(size === undefined ? {} : { size }) });
-    const split = withLayout({ rows: [{ columns: [column(), column()], between: 1.5 }, { columns: [column(14), column()], between: 1.5 }], between: 1.5 });
+    const split = withLayout({
+      rows: [
+        { columns: [column(), column()], between: 1.5 },
+        { columns: [column(14), column()], between: 1.5 },
+      ],
+      between: 1.5,
+    });
     const { moved, stayed } = taken(changeMember(split, inch('right stile', 2)));
     expect(moved).toEqual([]);
     expect(stayed).toEqual([{ dado: 'dado-2', part: 'Partition' }]);
@@ -95,7 +121,13 @@ describe('When a member is changed', () => {
   });
 
   test('then fixed sizes that no longer add up are a refusal that says by how much', () => {
-    const full = withLayout({ columns: [{ opening: {}, size: 14 }, { opening: {}, size: 14 }], between: 1.5 });
+    const full = withLayout({
+      columns: [
+        { opening: {}, size: 14 },
+        { opening: {}, size: 14 },
+      ],
+      between: 1.5,
+    });
     expect(changeMember(full, inch('left stile', 2))).toEqual({
       ok: false,
       why: 'Columns and mid-stiles are 1/4 in too long for the width they share. Take 1/4 in off one of them, or leave one part without a size: it takes what is left.',
@@ -105,32 +137,66 @@ describe('When a member is changed', () => {
   test('then a mid-rail in every stack is changed, however deep it lies', () => {
     const [base] = STARTERS.find((s) => s.id === 'base')!.frames('in');
     const { particulars, changed } = taken(changeMember(base!, inch('mid-rails', 2)));
-    expect(workFrame(particulars).contours.members.filter((m) => m.kind === 'mid-rail').map((m) => m.width)).toEqual([2, 2]);
+    expect(
+      workFrame(particulars)
+        .contours.members.filter((m) => m.kind === 'mid-rail')
+        .map((m) => m.width),
+    ).toEqual([2, 2]);
     expect(changed).toEqual(['mid-rails: 2 in, was 1 1/2 in']);
   });
 
   test('then clearance and depth of all dados change where they are', () => {
-    const { particulars, moved } = taken(changeMembers(frame, [inch('dado clearance', 0.02), inch('dado depth', 0.375)]));
+    const { particulars, moved } = taken(
+      changeMembers(frame, [inch('dado clearance', 0.02), inch('dado depth', 0.375)]),
+    );
     expect(particulars.dados).toEqual(frame.dados.map((d) => ({ ...d, clearance: 0.02, depth: 0.375 })));
     expect(moved).toEqual([]);
   });
 
   test('then a board too thin for its dados is a refusal', () => {
-    expect(changeMember(frame, inch('thickness', 0.3))).toMatchObject({ ok: false, why: expect.stringContaining('deep in a board of 0.3 in') });
+    expect(changeMember(frame, inch('thickness', 0.3))).toMatchObject({
+      ok: false,
+      why: expect.stringContaining('deep in a board of 0.3 in'),
+    });
   });
 
   test('then a traced outline has no members, but a board and dados', () => {
-    const traced: Particulars = { ...frame, outline: { kind: 'traced', perimeter: [[0, 0], [33, 0], [33, 30.5], [0, 30.5]], openings: [] } };
-    expect(changeMember(traced, inch('left stile', 2))).toEqual({ ok: false, why: 'Its outline is traced, so it has no left stile to change.' });
+    const traced: Particulars = {
+      ...frame,
+      outline: {
+        kind: 'traced',
+        perimeter: [
+          [0, 0],
+          [33, 0],
+          [33, 30.5],
+          [0, 30.5],
+        ],
+        openings: [],
+      },
+    };
+    expect(changeMember(traced, inch('left stile', 2))).toEqual({
+      ok: false,
+      why: 'Its outline is traced, so it has no left stile to change.',
+    });
     expect(taken(changeMember(traced, inch('thickness', 1))).particulars).toEqual({ ...traced, thickness: 1 });
   });
 
   test('then a change in the other unit is refused: nothing is converted on the quiet', () => {
-    expect(changeMember(frame, { what: 'left stile', unit: 'mm', to: 50 })).toEqual({ ok: false, why: 'The frame is in inches, the change in millimetres.' });
+    expect(changeMember(frame, { what: 'left stile', unit: 'mm', to: 50 })).toEqual({
+      ok: false,
+      why: 'The frame is in inches, the change in millimetres.',
+    });
   });
 
   test('then what has nothing to change is told, and the frame is the very same', () => {
-    expect(changeMember(frame, inch('left stile', 1.75))).toEqual({ ok: true, particulars: frame, changed: [], skipped: ['left stile: 1 3/4 in already'], moved: [], stayed: [] });
+    expect(changeMember(frame, inch('left stile', 1.75))).toEqual({
+      ok: true,
+      particulars: frame,
+      changed: [],
+      skipped: ['left stile: 1 3/4 in already'],
+      moved: [],
+      stayed: [],
+    });
     expect(taken(changeMember(frame, inch('mid-rails', 2))).skipped).toEqual(['mid-rails: there is none']);
     const kept = taken(changeMember(frame, inch('left stile', 2, 1.5)));
     expect(kept.skipped).toEqual(['left stile: 1 3/4 in, not 1 1/2 in']);
@@ -151,17 +217,49 @@ describe('When a member is changed', () => {
 
 describe('When many frames are changed at once', () => {
   test('then each is answered for itself, in order', () => {
-    const narrow = withLayout({ columns: [{ opening: {}, size: 14 }, { opening: {}, size: 14 }], between: 1.5 });
-    const results = changeManyFrames([{ id: 'a', particulars: frame }, { id: 'b', particulars: newFrame('mm', 'B') }, { id: 'c', particulars: narrow }], [inch('left stile', 2, 1.75)]);
-    expect(results.map(({ id, result }) => [id, result.ok])).toEqual([['a', true], ['b', false], ['c', false]]);
+    const narrow = withLayout({
+      columns: [
+        { opening: {}, size: 14 },
+        { opening: {}, size: 14 },
+      ],
+      between: 1.5,
+    });
+    const results = changeManyFrames(
+      [
+        { id: 'a', particulars: frame },
+        { id: 'b', particulars: newFrame('mm', 'B') },
+        { id: 'c', particulars: narrow },
+      ],
+      [inch('left stile', 2, 1.75)],
+    );
+    expect(results.map(({ id, result }) => [id, result.ok])).toEqual([
+      ['a', true],
+      ['b', false],
+      ['c', false],
+    ]);
   });
 });
 
 describe('When any starter is changed at will', () => {
   const frames = STARTERS.flatMap((s) => s.frames('in'));
-  const wanted = fc.constantFrom(...CHANGEABLE).chain((what) =>
-    fc.integer({ min: 8, max: 48 }).map((n) => inch(what, what === 'dado clearance' ? n / 1000 : what === 'dado depth' ? n / 100 : what === 'thickness' ? 0.5 + n / 64 : n / 16)),
-  );
+  const wanted = fc
+    .constantFrom(...CHANGEABLE)
+    .chain((what) =>
+      fc
+        .integer({ min: 8, max: 48 })
+        .map((n) =>
+          inch(
+            what,
+            what === 'dado clearance'
+              ? n / 1000
+              : what === 'dado depth'
+                ? n / 100
+                : what === 'thickness'
+                  ? 0.5 + n / 64
+                  : n / 16,
+          ),
+        ),
+    );
 
   test('then what is taken is valid, keeps its size, brings no new stop, and keeps every end of a dado where it met another', () => {
     let counted = 0;
@@ -195,17 +293,23 @@ describe('When any starter is changed at will', () => {
     };
     let counted = 0;
     fc.assert(
-      fc.property(fc.constantFrom(...frames), fc.constantFrom(...members), fc.integer({ min: 25, max: 40 }), (from, what, n) => {
-        const there = changeMember(from, inch(what, n / 16));
-        if (!there.ok || there.stayed.length > 0) return;
-        const back = taken(changeMember(there.particulars, inch(what, width[what]!(from.outline as MembersOutline))));
-        if (back.stayed.length > 0) return;
-        counted += 1;
-        expect(back.particulars.outline).toEqual(from.outline);
-        back.particulars.dados.forEach((dado, i) => {
-          for (const entry of ['at', 'from', 'to'] as const) expect(dado[entry]).toBeCloseTo(from.dados[i]![entry], 9);
-        });
-      }),
+      fc.property(
+        fc.constantFrom(...frames),
+        fc.constantFrom(...members),
+        fc.integer({ min: 25, max: 40 }),
+        (from, what, n) => {
+          const there = changeMember(from, inch(what, n / 16));
+          if (!there.ok || there.stayed.length > 0) return;
+          const back = taken(changeMember(there.particulars, inch(what, width[what]!(from.outline as MembersOutline))));
+          if (back.stayed.length > 0) return;
+          counted += 1;
+          expect(back.particulars.outline).toEqual(from.outline);
+          back.particulars.dados.forEach((dado, i) => {
+            for (const entry of ['at', 'from', 'to'] as const)
+              expect(dado[entry]).toBeCloseTo(from.dados[i]![entry], 9);
+          });
+        },
+      ),
       { numRuns: 60 },
     );
     expect(counted).toBeGreaterThan(20);

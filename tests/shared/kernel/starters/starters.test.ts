@@ -17,22 +17,37 @@ const openingsOf = (p: Particulars) => workFrame(p).contours.openings;
 
 describe('When frames are begun from a starter', () => {
   test('then all seven of the list are there, each told in a line', () => {
-    expect(STARTERS.map((s) => s.id)).toEqual(['base', 'drawer-stack', 'wall', 'tall', 'corner-pair', 'vanity', 'arched-bookcase']);
+    expect(STARTERS.map((s) => s.id)).toEqual([
+      'base',
+      'drawer-stack',
+      'wall',
+      'tall',
+      'corner-pair',
+      'vanity',
+      'arched-bookcase',
+    ]);
     for (const { name, line } of STARTERS) {
       expect(name).not.toBe('');
       expect(line).toMatch(/^[^\n]{20,160}\.$/);
     }
   });
 
-  test.each(cases)('then $id in $unit is valid, its edges square, and nothing is found but notes', ({ starter: s, unit }) => {
-    const frames = s.frames(unit);
-    expect(frames.length).toBeGreaterThan(0);
-    for (const frame of frames) {
-      expect(contract.parse(frame)).toEqual(frame);
-      expect(frame).toMatchObject({ unit, edge: { style: 'square' } });
-      expect(workFrame(frame).findings.filter((f) => f.level !== 'note').map((f) => f.text)).toEqual([]);
-    }
-  });
+  test.each(cases)(
+    'then $id in $unit is valid, its edges square, and nothing is found but notes',
+    ({ starter: s, unit }) => {
+      const frames = s.frames(unit);
+      expect(frames.length).toBeGreaterThan(0);
+      for (const frame of frames) {
+        expect(contract.parse(frame)).toEqual(frame);
+        expect(frame).toMatchObject({ unit, edge: { style: 'square' } });
+        expect(
+          workFrame(frame)
+            .findings.filter((f) => f.level !== 'note')
+            .map((f) => f.text),
+        ).toEqual([]);
+      }
+    },
+  );
 
   test.each(cases)('then $id in $unit takes a beaded edge without a stop', ({ starter: s, unit }) => {
     for (const frame of s.frames(unit, beaded(unit))) {
@@ -44,14 +59,18 @@ describe('When frames are begun from a starter', () => {
     }
   });
 
-  test.each(cases)('then $id in $unit has round sizes: sixteenths of an inch or whole millimetres', ({ starter: s, unit }) => {
-    const per = unit === 'in' ? 16 : 1;
-    for (const { outline } of s.frames(unit)) {
-      if (outline.kind !== 'members') throw new Error('a starter has members');
-      const { width, height, stiles, rails, feet } = outline;
-      for (const size of [width, height, stiles.left, stiles.right, rails.top, rails.bottom, feet]) expect(size * per).toBe(Math.round(size * per));
-    }
-  });
+  test.each(cases)(
+    'then $id in $unit has round sizes: sixteenths of an inch or whole millimetres',
+    ({ starter: s, unit }) => {
+      const per = unit === 'in' ? 16 : 1;
+      for (const { outline } of s.frames(unit)) {
+        if (outline.kind !== 'members') throw new Error('a starter has members');
+        const { width, height, stiles, rails, feet } = outline;
+        for (const size of [width, height, stiles.left, stiles.right, rails.top, rails.bottom, feet])
+          expect(size * per).toBe(Math.round(size * per));
+      }
+    },
+  );
 
   test.each(cases)('then every opening of $id in $unit has a label of its own', ({ starter: s, unit }) => {
     for (const frame of s.frames(unit)) {
@@ -69,7 +88,8 @@ describe('When frames are begun from a starter', () => {
   test.each(UNITS)('then the corner pair in %s shows the same width of stile on both sides of the corner', (unit) => {
     // The right-hand frame’s edge, as thick as its board, hides that much of the left-hand one’s filler stile.
     const [left, right] = starter('corner-pair').frames(unit);
-    if (left?.outline.kind !== 'members' || right?.outline.kind !== 'members') throw new Error('two frames with members');
+    if (left?.outline.kind !== 'members' || right?.outline.kind !== 'members')
+      throw new Error('two frames with members');
     expect(left.outline.stiles.right - right.thickness).toBe(right.outline.stiles.left);
     expect(left.outline.stiles.right).toBeGreaterThan(left.outline.stiles.left);
     expect(left.outline.height).toBe(right.outline.height);
@@ -103,7 +123,9 @@ describe('When an edge preset is applied', () => {
   });
 
   test('then one in the other unit is refused', () => {
-    expect(() => applyEdgePreset(starter('wall').frames('in')[0]!, beaded('mm'))).toThrow('edge preset: got one in mm, takes one in in');
+    expect(() => applyEdgePreset(starter('wall').frames('in')[0]!, beaded('mm'))).toThrow(
+      'edge preset: got one in mm, takes one in in',
+    );
   });
 
   test('then the usual beaded one in inches is the specification’s example', () => {

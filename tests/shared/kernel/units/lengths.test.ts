@@ -38,18 +38,33 @@ describe('When a length is typed as people write it', () => {
 
   test('as millimetres that are whole 64ths of an inch, then an inch frame has just that 64th', () => {
     // 64ths of an inch in millimetres: n · 25.4 / 64 = n · 0.396875, six decimals at most.
-    const strays = Array.from({ length: 97 * 64 }, (_, n) => n + 1).filter((n) => read(`${((n * 396875) / 1e6).toFixed(6)}mm`, 'in') !== n / 64);
+    const strays = Array.from({ length: 97 * 64 }, (_, n) => n + 1).filter(
+      (n) => read(`${((n * 396875) / 1e6).toFixed(6)}mm`, 'in') !== n / 64,
+    );
     expect(strays).toEqual([]);
   });
 
-  test.each(['', '   ', 'abc', '1,5', '30 1/0', '1/', '/2', '1 2 3/4', '30 1/2 ft', '1e3', '--3', 'NaN', 'Infinity', '3..5', '30 1/2" mm'])(
-    'but it is "%s", then it says what it takes',
-    (text) => {
-      const parsed = parseLength(text, 'in');
-      expect(parsed.ok).toBe(false);
-      expect(parsed.ok ? '' : parsed.takes.length).toBeGreaterThan(10);
-    },
-  );
+  test.each([
+    '',
+    '   ',
+    'abc',
+    '1,5',
+    '30 1/0',
+    '1/',
+    '/2',
+    '1 2 3/4',
+    '30 1/2 ft',
+    '1e3',
+    '--3',
+    'NaN',
+    'Infinity',
+    '3..5',
+    '30 1/2" mm',
+  ])('but it is "%s", then it says what it takes', (text) => {
+    const parsed = parseLength(text, 'in');
+    expect(parsed.ok).toBe(false);
+    expect(parsed.ok ? '' : parsed.takes.length).toBeGreaterThan(10);
+  });
 });
 
 describe('When a length is shown', () => {

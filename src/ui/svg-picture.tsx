@@ -1,5 +1,5 @@
 /** An SVG made by the kernel, which escapes every text in it; scales to the width it is given. */
-export function SheetSvg({ svg, className }: { readonly svg: string; readonly className?: string }) {
+export function SvgPicture({ svg, className }: { readonly svg: string; readonly className?: string }) {
   return (
     <div className={`[&>svg]:h-auto [&>svg]:w-full ${className ?? ''}`} dangerouslySetInnerHTML={{ __html: svg }} />
   );

@@ -1,0 +1,119 @@
+import { CUTTER_HEADINGS, NEEDED_HEADINGS, NUMBER_COLUMNS, type NumberColumn } from './cutter-columns.ts';
+import { readPlainNumber } from './plain-number.ts';
+import { readCsv, type CsvRow } from './read-csv.ts';
+import { unguardFormula } from './write-csv-line.ts';
+
+/** A cell that is wrong: its line in the file, from 1, and the heading of its column. */
+export interface CellProblem {
+  readonly line: number;
+  readonly column: string;
+  readonly got: string;
+  readonly takes: string;
+}
+
+/** A row as its cells say, not yet held against what a cutter takes. */
+export interface CutterRow {
+  readonly line: number;
+  readonly entry: {
+    readonly unit: string;
+    readonly cutter: Readonly<Record<string, unknown>>;
+    readonly remarks: string;
+  };
+  readonly problems: readonly CellProblem[];
+}
+
+export interface CutterRows {
+  readonly rows: readonly CutterRow[];
+  /** What is wrong beside the rows: faults of the CSV, or a header row that leaves nothing to read. */
+  readonly problems: readonly CellProblem[];
+}
+
+const said = (text: string): string =>
+  text === '' ? 'nothing' : JSON.stringify(text.length > 60 ? `${text.slice(0, 57)}…` : text);
+
+function checkHeader({ line, cells }: CsvRow, headings: readonly string[]): CellProblem[] {
+  if (headings.length === 1 && cells[0]!.includes(';'))
+    return [{ line, column: 'the header row', got: said(cells[0]!), takes: 'cells parted by commas' }];
+  const strange = headings.filter((heading) => !CUTTER_HEADINGS.includes(heading));
+  const twice = headings.filter((heading, i) => CUTTER_HEADINGS.includes(heading) && headings.indexOf(heading) < i);
+  const missing = NEEDED_HEADINGS.filter((heading) => !headings.includes(heading));
+  return [
+    ...strange.map((heading) => ({
+      line,
+      column: heading === '' ? 'without a heading' : heading,
+      got: 'a column that is not known',
+      takes: CUTTER_HEADINGS.join(', '),
+    })),
+    ...twice.map((heading) => ({ line, column: heading, got: 'this column twice', takes: 'each column once' })),
+    ...missing.map((heading) => ({ line, column: heading, got: 'no such column', takes: 'this column' })),
+  ];
+}
+
+function readNumber(
+  { heading, entry, kinds }: NumberColumn,
+  text: string,
+  kind: string,
+  line: number,
+  problems: CellProblem[],
+): Record<string, number> {
+  if (text === '') return {};
+  if (kinds && !(kinds as readonly string[]).includes(kind)) {
+    problems.push({
+      line,
+      column: heading,
+      got: said(text),
+      takes: `nothing: only a ${kinds.join(' or ')} cutter has it`,
+    });
+    return {};
+  }
+  const value = readPlainNumber(text);
+  if (value === undefined)
+    problems.push({ line, column: heading, got: said(text), takes: 'a number with a decimal point, such as 9.525' });
+  return value === undefined ? {} : { [entry]: value };
+}
+
+function readRow({ line, cells }: CsvRow, headings: readonly string[]): CutterRow {
+  const problems: CellProblem[] = [];
+  const text = (heading: string): string => {
+    const index = headings.indexOf(heading);
+    return unguardFormula((index < 0 ? undefined : cells[index]) ?? '').trim();
+  };
+  cells.slice(headings.length).forEach((cell, i) => {
+    if (cell.trim() !== '')
+      problems.push({
+        line,
+        column: `number ${headings.length + i + 1}`,
+        got: said(cell),
+        takes: 'no cell beyond the last column',
+      });
+  });
+  const kind = text('kind').toLowerCase();
+  const numbers = NUMBER_COLUMNS.map((column) => readNumber(column, text(column.heading), kind, line, problems));
+  const name = text('name');
+  const cutter = Object.assign({ kind, ...(name === '' ? {} : { name }) }, ...numbers) as Record<string, unknown>;
+  return { line, entry: { unit: text('unit').toLowerCase(), cutter, remarks: text('remarks') }, problems };
+}
+
+/** Reads the rows of a cutters' CSV as far as pure text goes. Columns in any order, headings in any case. Never throws. */
+export function readCutterRows(text: string): CutterRows {
+  const { rows, faults } = readCsv(text);
+  const [header, ...rest] = rows;
+  const headings = header?.cells.map((cell) => unguardFormula(cell).trim().toLowerCase()) ?? [];
+  const broken = faults.map(({ line, column, got, takes }) => ({
+    line,
+    column: headings[column - 1] ?? `number ${column}`,
+    got,
+    takes,
+  }));
+  if (!header)
+    return {
+      rows: [],
+      problems:
+        broken.length > 0
+          ? broken
+          : [{ line: 1, column: 'the header row', got: 'nothing', takes: CUTTER_HEADINGS.join(', ') }],
+    };
+  const wrong = checkHeader(header, headings);
+  if (wrong.length > 0) return { rows: [], problems: [...wrong, ...broken] };
+  return { rows: rest.map((row) => readRow(row, headings)), problems: broken };
+}
