@@ -4,6 +4,9 @@ import type { Logger } from 'pino';
 import { LIMITS } from '#shared/contracts/limits.ts';
 import type { Config } from './config.ts';
 import type { Database } from './db/database.ts';
+import { cuttersRoutes } from './features/cutters/cutters.routes.ts';
+import { cuttersService } from './features/cutters/cutters.service.ts';
+import { cuttersStore } from './features/cutters/cutters.store.ts';
 import { downloadsRoutes } from './features/downloads/downloads.routes.ts';
 import { downloadsService } from './features/downloads/downloads.service.ts';
 import { downloadsStore } from './features/downloads/downloads.store.ts';
@@ -48,12 +51,17 @@ function apiRoutes(given: AppGiven): Router {
   const api = Router();
   api.use(limitRequests(config.requestsPerMinute, MINUTE));
   api.use(refuseCrossSite);
-  const people = useSessions(api, { secret: given.sessionSecret, sessions: given.sessions, findPerson: services.findPerson });
+  const people = useSessions(api, {
+    secret: given.sessionSecret,
+    sessions: given.sessions,
+    findPerson: services.findPerson,
+  });
   api.use(express.json({ limit: LIMITS.jsonBodyBytes }));
   const limitSignUps = limitRequests(config.signUpsPerHour, 60 * MINUTE);
   api.use(sessionRoutes({ people, service: services.session, brake: new SignInBrake(now), limitSignUps }));
   api.use(shopRoutes(shopService(shopStore(database))));
   api.use(profilesRoutes(profilesService(profilesStore(database), now)));
+  api.use(cuttersRoutes(cuttersService(cuttersStore(database), now)));
   api.use(jobsRoutes(services.jobs));
   api.use(framesRoutes(services.frames, services.releases));
   api.use(downloadsRoutes(downloadsService(downloadsStore(database), makers)));
@@ -75,7 +83,12 @@ export function createApp(given: AppGiven): Express {
   app.set('query parser', 'simple');
   app.use(logRequests(given.log));
   app.use(securityHeaders(given.fromSources));
-  app.use(compression({ filter: (req, res) => !String(res.getHeader('Content-Type')).startsWith('text/event-stream') && compression.filter(req, res) }));
+  app.use(
+    compression({
+      filter: (req, res) =>
+        !String(res.getHeader('Content-Type')).startsWith('text/event-stream') && compression.filter(req, res),
+    }),
+  );
   app.get('/healthz', async (_req, res) => {
     await given.services.checkDatabase();
     res.json({ ok: true });

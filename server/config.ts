@@ -54,7 +54,12 @@ export class WrongConfig extends Error {
 export function readConfig(env: Readonly<Record<string, string | undefined>>): Config {
   const given = Object.fromEntries(Object.entries(env).filter(([, value]) => value !== undefined && value !== ''));
   const read = environment.safeParse(given);
-  if (!read.success) throw new WrongConfig(fieldErrors(read.error, given).map((f) => f.message).join('\n'));
+  if (!read.success)
+    throw new WrongConfig(
+      fieldErrors(read.error, given)
+        .map((f) => f.message)
+        .join('\n'),
+    );
   const e = read.data;
   return {
     production: e.NODE_ENV === 'production',

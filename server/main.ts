@@ -20,7 +20,12 @@ async function run(): Promise<void> {
     serve: useSources ? serveClientSources(place('.')) : serveBuiltClient(place('dist/client')),
   };
   const worker = new URL(fromSources ? './workers/make.ts' : './workers/make.js', here);
-  const running = await startServer(config, { migrations: place('drizzle'), samples: place('samples'), worker }, client, say);
+  const running = await startServer(
+    config,
+    { migrations: place('drizzle'), samples: place('samples'), worker },
+    client,
+    say,
+  );
   say(`Stilepost is ready: ${running.url}`);
 
   let stopping = false;

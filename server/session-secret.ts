@@ -12,6 +12,7 @@ export function sessionSecret(dataDir: string): string {
     if ((error as NodeJS.ErrnoException).code !== 'EEXIST') throw error;
   }
   const secret = readFileSync(path, 'utf8').trim();
-  if (secret.length < 32) throw new Error(`${path} holds no usable secret: got ${secret.length} characters, takes at least 32`);
+  if (secret.length < 32)
+    throw new Error(`${path} holds no usable secret: got ${secret.length} characters, takes at least 32`);
   return secret;
 }

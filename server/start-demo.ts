@@ -5,7 +5,12 @@ import { summarizeFrame } from './making/summarize-frame.ts';
 import type { Services } from './services.ts';
 
 /** Makes the demo scenario through the same services that people use, where no shop has been opened yet. */
-export const startDemo = (database: Database, { session, jobs, frames, releases }: Services, samples: string, say: (line: string) => void): Promise<boolean> =>
+export const startDemo = (
+  database: Database,
+  { session, jobs, frames, releases }: Services,
+  samples: string,
+  say: (line: string) => void,
+): Promise<boolean> =>
   makeDemo(
     {
       store: demoStore(database),

@@ -46,10 +46,23 @@ export async function startServer(
     const services = wireServices(database, makers, now);
     if (config.demo) await startDemo(database, services, places.samples, say);
     const sessions = new DatabaseSessions(database, now);
-    const sweep = setInterval(() => sessions.sweep().catch((error: unknown) => log.error({ err: error }, 'sessions could not be swept')), HOUR);
+    const sweep = setInterval(
+      () => void sessions.sweep().catch((error: unknown) => log.error({ err: error }, 'sessions could not be swept')),
+      HOUR,
+    );
     sweep.unref();
     const secret = config.sessionSecret ?? sessionSecret(config.dataDir);
-    const app = createApp({ config, sessionSecret: secret, database, sessions, services, makers, now, log, fromSources: client.fromSources });
+    const app = createApp({
+      config,
+      sessionSecret: secret,
+      database,
+      sessions,
+      services,
+      makers,
+      now,
+      log,
+      fromSources: client.fromSources,
+    });
     const server = createServer(app);
     await client.serve(app, server);
     finishApp(app, log);

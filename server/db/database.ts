@@ -18,7 +18,8 @@ const inTransaction = new AsyncLocalStorage<true>();
 /** Wraps a driver's database so that a query beside an open transaction is an error and not a hang. */
 export function guardDatabase(db: Queries, close: () => Promise<void>): Database {
   const outside = (): Queries => {
-    if (inTransaction.getStore()) throw new Error('database used inside its own transaction: query through the transaction');
+    if (inTransaction.getStore())
+      throw new Error('database used inside its own transaction: query through the transaction');
     return db;
   };
   return {

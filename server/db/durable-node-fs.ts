@@ -35,6 +35,8 @@ export class DurableNodeFs extends NodeFS {
       };
     };
     const preRun = (mounted.emscriptenOpts.preRun ?? []) as ((module: unknown) => void)[];
-    return { emscriptenOpts: { ...mounted.emscriptenOpts, preRun: [...preRun, addFsync] } as typeof mounted.emscriptenOpts };
+    return {
+      emscriptenOpts: { ...mounted.emscriptenOpts, preRun: [...preRun, addFsync] } as typeof mounted.emscriptenOpts,
+    };
   }
 }

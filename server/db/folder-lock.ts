@@ -33,7 +33,12 @@ export interface FolderLock {
  */
 export function lockFolder(folder: string): FolderLock {
   const path = join(folder, 'lock.json');
-  const mine: Holder = { pid: process.pid, started: processStart(process.pid) ?? 'unknown', host: hostname(), token: randomUUID() };
+  const mine: Holder = {
+    pid: process.pid,
+    started: processStart(process.pid) ?? 'unknown',
+    host: hostname(),
+    token: randomUUID(),
+  };
   const written = `${path}.${mine.token}`;
   writeFileSync(written, `${JSON.stringify(mine)}\n`);
   try {

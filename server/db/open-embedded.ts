@@ -23,7 +23,11 @@ async function migrated(client: PGlite, migrationsFolder: string, close: () => P
  * Opens the database in `dataDir`, making it when there is none. Throws FolderInUse when another process has it.
  * A folder whose making was cut short holds nothing confirmed; it is set aside and made anew.
  */
-export async function openEmbedded(dataDir: string, migrationsFolder: string, say: (line: string) => void): Promise<Database> {
+export async function openEmbedded(
+  dataDir: string,
+  migrationsFolder: string,
+  say: (line: string) => void,
+): Promise<Database> {
   mkdirSync(dataDir, { recursive: true });
   const lock = lockFolder(dataDir);
   const folder = join(dataDir, 'database');
@@ -34,7 +38,11 @@ export async function openEmbedded(dataDir: string, migrationsFolder: string, sa
       renameSync(folder, aside);
       say(`The database was not finished when it was first made. It is set aside as ${aside} and made anew.`);
     }
-    say(existsSync(made) ? `Opening the database in ${dataDir} …` : `Making a new database in ${dataDir} (once, about 10 seconds) …`);
+    say(
+      existsSync(made)
+        ? `Opening the database in ${dataDir} …`
+        : `Making a new database in ${dataDir} (once, about 10 seconds) …`,
+    );
     const client = await PGlite.create({ fs: new DurableNodeFs(folder), startParams: DURABLE });
     const tidy = keepTidy(client);
     const database = await migrated(client, migrationsFolder, async () => {
@@ -57,7 +65,10 @@ function markMade(path: string): void {
 }
 
 /** A database in memory, from a dump of a migrated one or new: for tests and tools. */
-export async function openInMemory(migrationsFolder: string, dump?: Blob): Promise<Database & { dump(): Promise<Blob> }> {
+export async function openInMemory(
+  migrationsFolder: string,
+  dump?: Blob,
+): Promise<Database & { dump(): Promise<Blob> }> {
   const client = await PGlite.create(dump ? { loadDataDir: dump } : {});
   const database = await migrated(client, migrationsFolder, () => client.close());
   return Object.assign(database, { dump: () => client.dumpDataDir('none') });

@@ -1,6 +1,20 @@
-import { boolean, customType, doublePrecision, index, integer, json, pgTable, primaryKey, text, timestamp, uniqueIndex } from 'drizzle-orm/pg-core';
+import {
+  boolean,
+  customType,
+  doublePrecision,
+  index,
+  integer,
+  json,
+  pgTable,
+  primaryKey,
+  text,
+  timestamp,
+  uniqueIndex,
+} from 'drizzle-orm/pg-core';
 import { sql } from 'drizzle-orm';
+import type { DrawerEntry } from '#shared/kernel/cutter-drawer/drawer-cutter.ts';
 import type { FileProfile } from '#shared/kernel/profiles/file-profile.ts';
+import type { EdgePreset } from '#shared/kernel/starters/edge-preset.ts';
 import type { Particulars } from '#shared/kernel/particulars/particulars.ts';
 
 /** PGlite answers Uint8Array, pg answers Buffer, which is one. */
@@ -23,7 +37,9 @@ export const users = pgTable(
   'users',
   {
     id: text().primaryKey(),
-    shopId: text('shop_id').notNull().references(() => shops.id),
+    shopId: text('shop_id')
+      .notNull()
+      .references(() => shops.id),
     name: text().notNull(),
     /** Lower case. */
     email: text().notNull(),
@@ -51,7 +67,9 @@ export const profiles = pgTable(
   'profiles',
   {
     id: text().primaryKey(),
-    shopId: text('shop_id').notNull().references(() => shops.id),
+    shopId: text('shop_id')
+      .notNull()
+      .references(() => shops.id),
     name: text().notNull(),
     profile: json().$type<FileProfile>().notNull(),
     changedAt: moment('changed_at').notNull(),
@@ -59,11 +77,47 @@ export const profiles = pgTable(
   (t) => [uniqueIndex('profiles_shop_name').on(t.shopId, sql`lower(${t.name})`)],
 );
 
+/** A shop's cutter drawer. Frames keep copies of the numbers and refer to nothing here. */
+export const cutters = pgTable(
+  'cutters',
+  {
+    id: text().primaryKey(),
+    shopId: text('shop_id')
+      .notNull()
+      .references(() => shops.id),
+    /** The cutter's own, once more for the index. */
+    name: text().notNull(),
+    /** Unit of the lengths in `cutter`. */
+    unit: text({ enum: ['in', 'mm'] }).notNull(),
+    cutter: json().$type<DrawerEntry['cutter']>().notNull(),
+    remarks: text().notNull(),
+    changedAt: moment('changed_at').notNull(),
+  },
+  (t) => [uniqueIndex('cutters_shop_name').on(t.shopId, sql`lower(${t.name})`)],
+);
+
+/** Edges of openings that a shop saved to use again. */
+export const edgePresets = pgTable(
+  'edge_presets',
+  {
+    id: text().primaryKey(),
+    shopId: text('shop_id')
+      .notNull()
+      .references(() => shops.id),
+    name: text().notNull(),
+    preset: json().$type<EdgePreset>().notNull(),
+    changedAt: moment('changed_at').notNull(),
+  },
+  (t) => [uniqueIndex('edge_presets_shop_name').on(t.shopId, sql`lower(${t.name})`)],
+);
+
 export const jobs = pgTable(
   'jobs',
   {
     id: text().primaryKey(),
-    shopId: text('shop_id').notNull().references(() => shops.id),
+    shopId: text('shop_id')
+      .notNull()
+      .references(() => shops.id),
     name: text().notNull(),
     createdAt: moment('created_at').notNull(),
     changedAt: moment('changed_at').notNull(),
@@ -77,8 +131,12 @@ export const frames = pgTable(
   'frames',
   {
     id: text().primaryKey(),
-    shopId: text('shop_id').notNull().references(() => shops.id),
-    jobId: text('job_id').notNull().references(() => jobs.id),
+    shopId: text('shop_id')
+      .notNull()
+      .references(() => shops.id),
+    jobId: text('job_id')
+      .notNull()
+      .references(() => jobs.id),
     // json, not jsonb: it keeps the order of keys and every digit as written.
     particulars: json().$type<Particulars>().notNull(),
     version: integer().notNull(),
@@ -105,7 +163,9 @@ export const frames = pgTable(
 export const draftVersions = pgTable(
   'draft_versions',
   {
-    frameId: text('frame_id').notNull().references(() => frames.id),
+    frameId: text('frame_id')
+      .notNull()
+      .references(() => frames.id),
     version: integer().notNull(),
     particulars: json().$type<Particulars>().notNull(),
   },
@@ -117,14 +177,20 @@ export const revisions = pgTable(
   'revisions',
   {
     id: text().primaryKey(),
-    shopId: text('shop_id').notNull().references(() => shops.id),
-    frameId: text('frame_id').notNull().references(() => frames.id),
+    shopId: text('shop_id')
+      .notNull()
+      .references(() => shops.id),
+    frameId: text('frame_id')
+      .notNull()
+      .references(() => frames.id),
     letter: text().notNull(),
     /** 1 for the first letter: letters do not sort by themselves (Y, AA). */
     ordinal: integer().notNull(),
     note: text().notNull(),
     author: text().notNull(),
-    authorId: text('author_id').notNull().references(() => users.id),
+    authorId: text('author_id')
+      .notNull()
+      .references(() => users.id),
     releasedAt: moment('released_at').notNull(),
     jobName: text('job_name').notNull(),
     shopName: text('shop_name').notNull(),
@@ -132,5 +198,8 @@ export const revisions = pgTable(
     file: bytes().notNull(),
     sha256: text().notNull(),
   },
-  (t) => [uniqueIndex('revisions_frame_letter').on(t.frameId, t.letter), uniqueIndex('revisions_frame_ordinal').on(t.frameId, t.ordinal)],
+  (t) => [
+    uniqueIndex('revisions_frame_letter').on(t.frameId, t.letter),
+    uniqueIndex('revisions_frame_ordinal').on(t.frameId, t.ordinal),
+  ],
 );

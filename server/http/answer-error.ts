@@ -11,18 +11,21 @@ interface HttpError extends Error {
   type?: string;
 }
 
-const isHttpError = (error: unknown): error is HttpError => error instanceof Error && 'status' in error && typeof error.status === 'number';
+const isHttpError = (error: unknown): error is HttpError =>
+  error instanceof Error && 'status' in error && typeof error.status === 'number';
 
 function fromHttpError(error: HttpError): AppError | null {
-  switch (error.type) {
-    case 'entity.too.large':
-      return new AppError('too-large', error.message, { message: `That is too large: a request takes at most ${LIMITS.jsonBodyBytes} bytes.` });
-    case 'entity.parse.failed':
-      return new AppError('invalid-input', error.message, { message: `The request is not valid JSON: ${error.message}` });
+  if (error.type === 'entity.too.large') {
+    const message = `That is too large: a request takes at most ${LIMITS.jsonBodyBytes} bytes.`;
+    return new AppError('too-large', error.message, { message });
+  }
+  if (error.type === 'entity.parse.failed') {
+    return new AppError('invalid-input', error.message, { message: `The request is not valid JSON: ${error.message}` });
   }
   // A path that is no UTF-8 names nothing.
   if (error instanceof URIError || error.status === 404) return notFound('path');
-  if (error.status >= 400 && error.status < 500) return new AppError('invalid-input', error.message, { message: error.message });
+  if (error.status >= 400 && error.status < 500)
+    return new AppError('invalid-input', error.message, { message: error.message });
   return null;
 }
 
@@ -47,26 +50,28 @@ export function toAppError(error: unknown): AppError {
 }
 
 /** The last handler: every error becomes JSON with a stable code. */
-export const answerError = (log: Logger): ErrorRequestHandler => (error, req, res, next) => {
-  const known = toAppError(error);
-  const status = statusOf(known.code);
-  if (status >= 500) log.error({ err: error, method: req.method, url: req.originalUrl }, known.message);
-  else log.info({ code: known.code, method: req.method, url: req.originalUrl }, known.message);
-  if (res.headersSent) {
-    next(error);
-    return;
-  }
-  const body: ErrorBody = {
-    code: known.code,
-    message: known.userMessage,
-    ...(known.fields && { fields: known.fields }),
-    ...(known.details !== undefined && { details: known.details }),
+export const answerError =
+  (log: Logger): ErrorRequestHandler =>
+  (error, req, res, next) => {
+    const known = toAppError(error);
+    const status = statusOf(known.code);
+    if (status >= 500) log.error({ err: error, method: req.method, url: req.originalUrl }, known.message);
+    else log.info({ code: known.code, method: req.method, url: req.originalUrl }, known.message);
+    if (res.headersSent) {
+      next(error);
+      return;
+    }
+    const body: ErrorBody = {
+      code: known.code,
+      message: known.userMessage,
+      ...(known.fields && { fields: known.fields }),
+      ...(known.details !== undefined && { details: known.details }),
+    };
+    if (known.retryAfter !== undefined) res.setHeader('Retry-After', String(Math.ceil(known.retryAfter)));
+    res.removeHeader('Content-Disposition');
+    res.setHeader('Cache-Control', 'no-store');
+    res.status(status).json(body);
   };
-  if (known.retryAfter !== undefined) res.setHeader('Retry-After', String(Math.ceil(known.retryAfter)));
-  res.removeHeader('Content-Disposition');
-  res.setHeader('Cache-Control', 'no-store');
-  res.status(status).json(body);
-};
 
 /** For paths under /api that no route took. */
 export const noSuchRoute: RequestHandler = (req) => {

@@ -10,7 +10,9 @@ export function limitRequests(limit: number, windowMs: number): RequestHandler {
     standardHeaders: 'draft-8',
     legacyHeaders: false,
     handler: (req) => {
-      throw new AppError('too-many-requests', `more than ${limit} requests in ${windowMs} ms to ${req.path}`, { retryAfter: windowMs / 1000 });
+      throw new AppError('too-many-requests', `more than ${limit} requests in ${windowMs} ms to ${req.path}`, {
+        retryAfter: windowMs / 1000,
+      });
     },
   });
 }

@@ -2,11 +2,16 @@ import type { RequestHandler } from 'express';
 import type { Logger } from 'pino';
 
 /** A line for each answered request, at level info. Headers are left out: they hold cookies. */
-export const logRequests = (log: Logger): RequestHandler => (req, res, next) => {
-  const began = performance.now();
-  res.once('close', () => {
-    const ms = Math.round(performance.now() - began);
-    log.info({ method: req.method, url: req.originalUrl, status: res.statusCode, complete: res.writableFinished, ms }, 'request');
-  });
-  next();
-};
+export const logRequests =
+  (log: Logger): RequestHandler =>
+  (req, res, next) => {
+    const began = performance.now();
+    res.once('close', () => {
+      const ms = Math.round(performance.now() - began);
+      log.info(
+        { method: req.method, url: req.originalUrl, status: res.statusCode, complete: res.writableFinished, ms },
+        'request',
+      );
+    });
+    next();
+  };

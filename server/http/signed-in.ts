@@ -32,8 +32,10 @@ export const signedIn: RequestHandler = (req: Request, _res: Response, next: Nex
 };
 
 /** Lets those pass whose role may do `act`. */
-export const allow = (act: Act): RequestHandler => (req, _res, next) => {
-  const who = whoAsks(req);
-  if (!may(who.role, act)) throw new AppError('not-allowed', `${who.role} ${who.id} may not ${act}`);
-  next();
-};
+export const allow =
+  (act: Act): RequestHandler =>
+  (req, _res, next) => {
+    const who = whoAsks(req);
+    if (!may(who.role, act)) throw new AppError('not-allowed', `${who.role} ${who.id} may not ${act}`);
+    next();
+  };

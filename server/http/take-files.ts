@@ -38,7 +38,13 @@ const upload = multer({
   storage: inMemory,
   defParamCharset: 'utf8',
   // fileSize only bounds what is read through; what is kept is bounded above.
-  limits: { files: LIMITS.frameFilesAtOnce, fields: 0, parts: LIMITS.frameFilesAtOnce, fileSize: 32 * LIMITS.frameFileBytes, headerPairs: 20 },
+  limits: {
+    files: LIMITS.frameFilesAtOnce,
+    fields: 0,
+    parts: LIMITS.frameFilesAtOnce,
+    fileSize: 32 * LIMITS.frameFileBytes,
+    headerPairs: 20,
+  },
 });
 
 /** Takes several files from the form field `field`. A form that cannot be read is 'invalid-input'. */

@@ -17,7 +17,14 @@ export function proveFrame(particulars: Particulars, profiles: readonly FileProf
       return proveLayerSet(worked, profile, { back: write('back'), front: write('front') }).checks.map(named);
     } catch (error) {
       if (!(error instanceof DrawingRefused)) throw error;
-      return [named({ name: 'frame: drawn as the file profile asks', ok: false, got: error.message, wanted: 'lines, each set on its own layer' })];
+      return [
+        named({
+          name: 'frame: drawn as the file profile asks',
+          ok: false,
+          got: error.message,
+          wanted: 'lines, each set on its own layer',
+        }),
+      ];
     }
   });
   return { ok: checks.every((check) => check.ok), checks };

@@ -28,7 +28,10 @@ const RUN: { [K in TaskKind]: (input: Tasks[K]['input']) => Promise<Tasks[K]['re
 
   'draft-sheet': async (input) => {
     const { writeDraftSheet } = await import('./write-draft-sheet.ts');
-    return { name: `${safeName(input.particulars.name, 'frame')}_draft_setup-sheet.pdf`, bytes: await writeDraftSheet(input) };
+    return {
+      name: `${safeName(input.particulars.name, 'frame')}_draft_setup-sheet.pdf`,
+      bytes: await writeDraftSheet(input),
+    };
   },
 
   proof: async ({ particulars, profiles }) => {
@@ -40,4 +43,5 @@ const RUN: { [K in TaskKind]: (input: Tasks[K]['input']) => Promise<Tasks[K]['re
 };
 
 /** Does one task in a worker thread. Throws what the makers of files throw. */
-export const runTask = <K extends TaskKind>(kind: K, input: Tasks[K]['input']): Promise<Tasks[K]['result']> => RUN[kind](input);
+export const runTask = <K extends TaskKind>(kind: K, input: Tasks[K]['input']): Promise<Tasks[K]['result']> =>
+  RUN[kind](input);

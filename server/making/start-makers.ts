@@ -24,7 +24,11 @@ const SOURCES = './load-sources.mjs';
 function startWorker(entry: URL): Worker {
   const fromSources = entry.pathname.endsWith('.ts');
   const first = fromSources ? new URL(SOURCES, import.meta.url) : entry;
-  return new Worker(first, { workerData: entry.href, execArgv: [], resourceLimits: { maxOldGenerationSizeMb: MEMORY_CAP_MB } });
+  return new Worker(first, {
+    workerData: entry.href,
+    execArgv: [],
+    resourceLimits: { maxOldGenerationSizeMb: MEMORY_CAP_MB },
+  });
 }
 
 /**
@@ -61,8 +65,10 @@ export function startMakers(entry: URL, size: number, timeCapMs = TIME_CAP_MS): 
     const answered = (answer: TaskAnswer): void => {
       settle(() => (answer.ok ? task.resolve(answer.result) : task.reject(toMakingError(task.kind, answer))), true);
     };
-    const broke = (error: Error): void => settle(() => task.reject(new Error(`a worker broke down making ${task.kind}`, { cause: error })), false);
-    const left = (code: number): void => settle(() => task.reject(new Error(`a worker ended with ${code} making ${task.kind}`)), false);
+    const broke = (error: Error): void =>
+      settle(() => task.reject(new Error(`a worker broke down making ${task.kind}`, { cause: error })), false);
+    const left = (code: number): void =>
+      settle(() => task.reject(new Error(`a worker ended with ${code} making ${task.kind}`)), false);
     const cap = setTimeout(() => {
       const message = `This takes longer than ${timeCapMs / 1000} seconds to work out and was given up. A tracing with fewer vertices will do.`;
       settle(() => task.reject(new AppError('too-large', `${task.kind} hit the time cap`, { message })), false);
@@ -83,7 +89,8 @@ export function startMakers(entry: URL, size: number, timeCapMs = TIME_CAP_MS): 
     make: <K extends TaskKind>(kind: K, input: unknown, signal?: AbortSignal) =>
       new Promise<never>((resolve, reject) => {
         if (closed) throw new Error(`no ${kind} after closing`);
-        if (queue.length >= LONGEST_QUEUE) throw new AppError('too-many-requests', `${queue.length} tasks are waiting`, { retryAfter: 10 });
+        if (queue.length >= LONGEST_QUEUE)
+          throw new AppError('too-many-requests', `${queue.length} tasks are waiting`, { retryAfter: 10 });
         queue.push({ kind, input, signal, resolve: resolve as (result: unknown) => void, reject });
         next();
       }),

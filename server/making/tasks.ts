@@ -62,4 +62,10 @@ export interface TaskMessage {
 
 export type TaskAnswer =
   | { readonly ok: true; readonly result: unknown }
-  | { readonly ok: false; readonly name: string; readonly message: string; readonly stack: string; readonly proof?: Proof };
+  | {
+      readonly ok: false;
+      readonly name: string;
+      readonly message: string;
+      readonly stack: string;
+      readonly proof?: Proof;
+    };

@@ -8,6 +8,7 @@ const VERTICES_AT_ONCE = 600;
 /** Works a frame out: on the spot when that takes about a millisecond, in a worker when it may take longer. */
 export async function workOut(makers: Makers, particulars: Particulars): Promise<WorkedSummary> {
   const { outline } = particulars;
-  const vertices = outline.kind === 'traced' ? outline.openings.reduce((n, o) => n + o.length, outline.perimeter.length) : 0;
+  const vertices =
+    outline.kind === 'traced' ? outline.openings.reduce((n, o) => n + o.length, outline.perimeter.length) : 0;
   return vertices > VERTICES_AT_ONCE ? makers.make('summary', particulars) : summarizeFrame(particulars);
 }

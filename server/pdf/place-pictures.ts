@@ -24,26 +24,26 @@ export function placePictures(pictures: readonly Captioned[], width: number): Pi
     rows[rows.length - 1]!.push(one);
     used += one.picture.width;
   }
-  return rows.map((row) => placeRow(row, width));
+  return rows.map((row) => placeRow(row, width, pictures.length === 1));
 }
 
-function placeRow(row: readonly Captioned[], width: number): Piece {
+function placeRow(row: readonly Captioned[], width: number, alone: boolean): Piece {
   const scaled = row.map((one) => {
     const scale = Math.min(1, width / one.picture.width);
     const caption =
       one.caption === ''
         ? []
-        : wrapText(one.caption, (row.length === 1 ? width : one.picture.width) / (CHARACTER_WIDTH * CAPTION));
+        : wrapText(one.caption, (alone ? width : one.picture.width) / (CHARACTER_WIDTH * CAPTION));
     return { ...one, scale, caption, height: one.picture.height * scale };
   });
   const pictureHeight = Math.max(...scaled.map((s) => s.height));
   const height = pictureHeight + Math.max(...scaled.map((s) => s.caption.length)) * LINE + 1.5;
   const draw: Piece['draw'] = (pen, x, y) => {
-    let left = row.length === 1 ? x + (width - row[0]!.picture.width * scaled[0]!.scale) / 2 : x;
+    let left = alone ? x + (width - row[0]!.picture.width * scaled[0]!.scale) / 2 : x;
     for (const { picture, scale, caption, height } of scaled) {
       drawPicture(pen, picture, left, y + (pictureHeight - height) / 2, scale);
       caption.forEach((line, i) =>
-        drawText(pen, line, row.length === 1 ? x : left, y + pictureHeight + CAPTION + i * LINE, {
+        drawText(pen, line, alone ? x : left, y + pictureHeight + CAPTION + i * LINE, {
           size: CAPTION,
           colour: 'pencil',
         }),

@@ -13,7 +13,8 @@ interface Frozen {
 /** The particulars that a revision froze. Throws when its bytes are not those that were released. */
 export function frozenParticulars(row: Frozen): Particulars {
   const sum = createHash('sha256').update(row.file).digest('hex');
-  if (sum !== row.sha256) throw new Error(`revision ${row.letter} of frame ${row.frameId}: SHA-256 is ${sum}, was ${row.sha256} at release`);
+  if (sum !== row.sha256)
+    throw new Error(`revision ${row.letter} of frame ${row.frameId}: SHA-256 is ${sum}, was ${row.sha256} at release`);
   const read = parseFrameFile(new TextDecoder().decode(row.file));
   if (!read.ok) throw new Error(`revision ${row.letter} of frame ${row.frameId}: ${read.message}`);
   return read.particulars;

@@ -77,6 +77,18 @@ export const csvProblem = z.object({
   message: z.string(),
 });
 
-/** POST /api/cutters/csv (multipart, field `file`; `keepGood=true` takes the good rows beside bad ones). */
-export const cuttersTaken = z.object({ taken: z.array(storedCutter), problems: z.array(csvProblem) });
+/** POST /api/cutters/csv?keepGood=true */
+export const csvQuery = z.strictObject({
+  keepGood: z.enum(['true', 'false'], { error: 'takes "true" or "false"' }).default('false'),
+});
+
+/**
+ * POST /api/cutters/csv (multipart, field `file`). With a problem anywhere nothing is taken, unless `keepGood=true` takes
+ * the good rows. `good`: how many rows have no problem. GET /api/cutters/csv answers the drawer as such a file.
+ */
+export const cuttersTaken = z.object({
+  taken: z.array(storedCutter),
+  good: z.number().int(),
+  problems: z.array(csvProblem),
+});
 export type CuttersTaken = z.output<typeof cuttersTaken>;

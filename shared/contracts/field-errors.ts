@@ -6,13 +6,21 @@ type Issue = z.core.$ZodIssue;
 /** What stands at a path of the input, short enough for a message. */
 function gotAt(input: unknown, path: readonly PropertyKey[]): string {
   let at: unknown = input;
-  for (const key of path) at = at !== null && typeof at === 'object' ? (at as Record<PropertyKey, unknown>)[key] : undefined;
+  for (const key of path)
+    at = at !== null && typeof at === 'object' ? (at as Record<PropertyKey, unknown>)[key] : undefined;
   if (at === undefined) return 'nothing';
   const text = typeof at === 'number' ? String(at) : JSON.stringify(at);
   return text.length > 60 ? `${text.slice(0, 57)}…` : text;
 }
 
-const KINDS: Record<string, string> = { string: 'text', number: 'a number', boolean: 'true or false', array: 'a list', object: 'an object', int: 'a whole number' };
+const KINDS: Record<string, string> = {
+  string: 'text',
+  number: 'a number',
+  boolean: 'true or false',
+  array: 'a list',
+  object: 'an object',
+  int: 'a whole number',
+};
 
 /** What the field takes. Schemas whose message starts with "takes " speak for themselves. */
 function takesOf(issue: Issue): string {
@@ -28,12 +36,18 @@ function takesOf(issue: Issue): string {
         : 'one of the forms that the format knows';
     case 'too_small':
       return issue.origin === 'string'
-        ? issue.minimum === 1 ? 'some text' : `at least ${issue.minimum} characters`
+        ? issue.minimum === 1
+          ? 'some text'
+          : `at least ${issue.minimum} characters`
         : issue.origin === 'array'
           ? `at least ${issue.minimum} of them`
           : `${issue.inclusive ? 'at least' : 'more than'} ${issue.minimum}`;
     case 'too_big':
-      return issue.origin === 'string' ? `at most ${issue.maximum} characters` : issue.origin === 'array' ? `at most ${issue.maximum} of them` : `${issue.inclusive ? 'at most' : 'less than'} ${issue.maximum}`;
+      return issue.origin === 'string'
+        ? `at most ${issue.maximum} characters`
+        : issue.origin === 'array'
+          ? `at most ${issue.maximum} of them`
+          : `${issue.inclusive ? 'at most' : 'less than'} ${issue.maximum}`;
     case 'unrecognized_keys':
       return 'only keys that the format knows';
     default:

@@ -65,12 +65,17 @@ export const releaseRequest = z.strictObject({
 export type ReleaseRequest = z.input<typeof releaseRequest>;
 
 /** `details` of 'frame-has-stops' and 'cautions-not-acknowledged': the findings that are in the way. */
-export const releaseRefused = z.object({ findings: z.array(z.object({ code: z.string(), text: z.string(), remedy: z.string() })) });
+export const releaseRefused = z.object({
+  findings: z.array(z.object({ code: z.string(), text: z.string(), remedy: z.string() })),
+});
 export type ReleaseRefused = z.infer<typeof releaseRefused>;
 
 /** `details` of 'proof-failed': the checks of each file, as far as they were made. */
 export const proofRefused = z.object({
-  proof: z.object({ ok: z.boolean(), checks: z.array(z.object({ name: z.string(), ok: z.boolean(), got: z.string(), wanted: z.string() })) }),
+  proof: z.object({
+    ok: z.boolean(),
+    checks: z.array(z.object({ name: z.string(), ok: z.boolean(), got: z.string(), wanted: z.string() })),
+  }),
 });
 export type ProofRefused = z.infer<typeof proofRefused>;
 
@@ -88,7 +93,13 @@ export type RevisionPage = z.infer<typeof revisionPage>;
  */
 export const frameFilesTaken = z.object({
   taken: z.array(z.object({ file: z.string(), frameId: z.string(), name: z.string() })),
-  refused: z.array(z.object({ file: z.string(), message: z.string(), fields: z.array(z.object({ path: z.string(), message: z.string(), got: z.string(), takes: z.string() })) })),
+  refused: z.array(
+    z.object({
+      file: z.string(),
+      message: z.string(),
+      fields: z.array(z.object({ path: z.string(), message: z.string(), got: z.string(), takes: z.string() })),
+    }),
+  ),
 });
 export type FrameFilesTaken = z.infer<typeof frameFilesTaken>;
 

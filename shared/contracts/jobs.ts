@@ -5,7 +5,12 @@ import { words } from './words.ts';
 const name = words(LIMITS.nameLength);
 
 /** Query of GET /api/jobs and GET /api/jobs/:jobId: `removed=true` lists what was put away instead of what is there. */
-export const listQuery = z.strictObject({ removed: z.enum(['true', 'false']).default('false').transform((v) => v === 'true') });
+export const listQuery = z.strictObject({
+  removed: z
+    .enum(['true', 'false'])
+    .default('false')
+    .transform((v) => v === 'true'),
+});
 
 /** POST /api/jobs. Answers a job. */
 export const jobRequest = z.strictObject({ name });
@@ -15,7 +20,13 @@ export type JobRequest = z.input<typeof jobRequest>;
 export const jobChange = z.strictObject({ name: name.optional(), removed: z.boolean().optional() });
 export type JobChange = z.input<typeof jobChange>;
 
-export const job = z.object({ id: z.string(), name: z.string(), createdAt: z.string(), changedAt: z.string(), removed: z.boolean() });
+export const job = z.object({
+  id: z.string(),
+  name: z.string(),
+  createdAt: z.string(),
+  changedAt: z.string(),
+  removed: z.boolean(),
+});
 export type Job = z.infer<typeof job>;
 
 /** GET /api/jobs. */

@@ -18,5 +18,9 @@ export function parseFrameFile(text: string): ReadFrameFile {
   const read = particulars.safeParse(data);
   if (read.success) return { ok: true, particulars: read.data };
   const fields = fieldErrors(read.error, data);
-  return { ok: false, message: `not a valid frame file: ${fields.length} ${fields.length === 1 ? 'entry' : 'entries'} to mend`, fields };
+  return {
+    ok: false,
+    message: `not a valid frame file: ${fields.length} ${fields.length === 1 ? 'entry' : 'entries'} to mend`,
+    fields,
+  };
 }

@@ -14,7 +14,13 @@ const password = z.string().min(LIMITS.passwordShortest).max(LIMITS.passwordLong
 const name = words(LIMITS.nameLength);
 
 /** POST /api/sign-up: opens a shop, with the person as its owner, and signs in. Answers a session. */
-export const signUpRequest = z.strictObject({ shopName: name, name, email, password, unit: z.enum(['in', 'mm']).default('in') });
+export const signUpRequest = z.strictObject({
+  shopName: name,
+  name,
+  email,
+  password,
+  unit: z.enum(['in', 'mm']).default('in'),
+});
 export type SignUpRequest = z.input<typeof signUpRequest>;
 
 /** POST /api/sign-in. Answers a session. */
@@ -30,7 +36,13 @@ export type DemoSignInRequest = z.input<typeof demoSignInRequest>;
 export const paper = z.enum(['A4', 'Letter']);
 export type Paper = z.infer<typeof paper>;
 
-export const shop = z.object({ id: z.string(), name: z.string(), unit: z.enum(['in', 'mm']), paper, defaultProfileId: z.string() });
+export const shop = z.object({
+  id: z.string(),
+  name: z.string(),
+  unit: z.enum(['in', 'mm']),
+  paper,
+  defaultProfileId: z.string(),
+});
 export type Shop = z.infer<typeof shop>;
 
 /** PATCH /api/shop (owner). Answers a shop. */

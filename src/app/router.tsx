@@ -28,12 +28,20 @@ export const routes: RouteObject[] = [
               { path: 'jobs', lazy: async () => ({ Component: (await import('./routes/jobs.tsx')).JobsRoute }) },
               { path: 'jobs/:jobId', lazy: async () => ({ Component: (await import('./routes/job.tsx')).JobRoute }) },
               {
+                path: 'jobs/:jobId/box',
+                lazy: async () => ({ Component: (await import('./routes/box.tsx')).BoxRoute }),
+              },
+              {
                 path: 'frames/:frameId',
                 lazy: async () => ({ Component: (await import('./routes/frame-page.tsx')).FramePageRoute }),
               },
               {
                 path: 'frames/:frameId/sheet',
                 lazy: async () => ({ Component: (await import('./routes/setup-sheet.tsx')).SetupSheetRoute }),
+              },
+              {
+                path: 'cutters',
+                lazy: async () => ({ Component: (await import('./routes/cutters.tsx')).CuttersRoute }),
               },
               {
                 path: 'profiles',

@@ -7,7 +7,14 @@ import { sessionSecret } from '../../server/session-secret.ts';
 
 describe('readConfig', () => {
   it('When nothing is set, then it listens on this machine only', () => {
-    expect(readConfig({})).toMatchObject({ port: 4300, host: '127.0.0.1', dataDir: './data', databaseUrl: undefined, trustProxy: 0, production: false });
+    expect(readConfig({})).toMatchObject({
+      port: 4300,
+      host: '127.0.0.1',
+      dataDir: './data',
+      databaseUrl: undefined,
+      trustProxy: 0,
+      production: false,
+    });
   });
 
   it('When a variable is empty, then it counts as absent', () => {
@@ -15,7 +22,9 @@ describe('readConfig', () => {
   });
 
   it('When variables are wrong, then each one is named with what it got and takes', () => {
-    expect(() => readConfig({ PORT: '70000', TRUST_PROXY: 'true', DATABASE_URL: 'mysql://x', SESSION_SECRET: 'short' })).toThrow(
+    expect(() =>
+      readConfig({ PORT: '70000', TRUST_PROXY: 'true', DATABASE_URL: 'mysql://x', SESSION_SECRET: 'short' }),
+    ).toThrow(
       /PORT: got "70000", takes a whole number from 0 to 65535\n.*DATABASE_URL: got "mysql:\/\/x", takes postgres:.*\nTRUST_PROXY: got "true".*\nSESSION_SECRET: got "short"/s,
     );
   });

@@ -48,10 +48,16 @@ export class HttpClient {
       this.#cookie = pair.endsWith('=') ? '' : pair;
     }
     const bytes = new Uint8Array(await answer.arrayBuffer());
-    return { status: answer.status, headers: answer.headers, bytes, json: <T>() => JSON.parse(new TextDecoder().decode(bytes)) as T };
+    return {
+      status: answer.status,
+      headers: answer.headers,
+      bytes,
+      json: <T>() => JSON.parse(new TextDecoder().decode(bytes)) as T,
+    };
   }
 
-  get = (path: string, headers?: Record<string, string>): Promise<Answer> => this.send('GET', path, headers ? { headers } : {});
+  get = (path: string, headers?: Record<string, string>): Promise<Answer> =>
+    this.send('GET', path, headers ? { headers } : {});
   post = (path: string, body?: unknown): Promise<Answer> => this.send('POST', path, { body });
   put = (path: string, body?: unknown): Promise<Answer> => this.send('PUT', path, { body });
   patch = (path: string, body?: unknown): Promise<Answer> => this.send('PATCH', path, { body });

@@ -12,4 +12,5 @@ const walk = (layers: readonly Layer[], prefix: string): string[] =>
   });
 
 /** Every route that the app answers, as 'GET /api/jobs/:jobId'. Routers are mounted under /api, all of them. */
-export const listRoutes = (app: Express): string[] => walk((app.router as unknown as { stack: readonly Layer[] }).stack, '').sort();
+export const listRoutes = (app: Express): string[] =>
+  walk((app.router as unknown as { stack: readonly Layer[] }).stack, '').sort();

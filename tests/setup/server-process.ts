@@ -10,9 +10,12 @@ export interface ServerProcess {
   output(): string;
 }
 
-/** Starts server/main.ts in a process of its own. Rejects with its output when it ends before it listens. */
-export function startServerProcess(env: Record<string, string>): Promise<ServerProcess> {
-  const child = spawn(process.execPath, ['--import', 'tsx', join(root, 'server/main.ts')], {
+/** Starts the server in a process of its own: server/main.ts, or tests/setup/serve-api.ts without the client. Rejects with its output when it ends before it listens. */
+export function startServerProcess(
+  entry: 'server/main.ts' | 'tests/setup/serve-api.ts',
+  env: Record<string, string>,
+): Promise<ServerProcess> {
+  const child = spawn(process.execPath, ['--import', 'tsx', join(root, entry)], {
     cwd: root,
     env: { PATH: process.env.PATH, HOME: process.env.HOME, PORT: '0', DEMO: 'off', ...env },
   });
@@ -33,6 +36,7 @@ export function startServerProcess(env: Record<string, string>): Promise<ServerP
 /** Sends a signal and waits for the end. */
 export const endProcess = (child: ChildProcess, signal: NodeJS.Signals): Promise<number | null> =>
   new Promise((resolve) => {
+    if (child.exitCode !== null || child.signalCode !== null) return resolve(child.exitCode);
     child.once('exit', (code) => resolve(code));
     child.kill(signal);
   });

@@ -35,7 +35,9 @@ interface Options {
 /** The whole server on a port of its own, on a database that is a copy of the migrated one. Its clock starts on 31 March 2026, 9:00 UTC, and stands. `beside`: on the database of that server. */
 export async function startTestServer(options: Options = {}, beside?: TestServer): Promise<TestServer> {
   const root = join(import.meta.dirname, '../..');
-  const database = beside?.database ?? (await openInMemory(join(root, 'drizzle'), new Blob([await readFile(inject('migratedDatabase'))])));
+  const database =
+    beside?.database ??
+    (await openInMemory(join(root, 'drizzle'), new Blob([await readFile(inject('migratedDatabase'))])));
   const makers = startMakers(new URL('../../server/workers/make.ts', import.meta.url), 1);
   let clock = Date.UTC(2026, 2, 31, 9);
   const now = () => new Date(clock);
@@ -43,7 +45,17 @@ export async function startTestServer(options: Options = {}, beside?: TestServer
   const log = pino({ level: 'error' });
   const config = { trustProxy: 0, signUpsPerHour: 1000, requestsPerMinute: 100_000, ...options };
   const sessions = new DatabaseSessions(database, now);
-  const app = createApp({ config, sessionSecret: 'a secret for tests, at least 32 long', database, sessions, services, makers, now, log, fromSources: false });
+  const app = createApp({
+    config,
+    sessionSecret: 'a secret for tests, at least 32 long',
+    database,
+    sessions,
+    services,
+    makers,
+    now,
+    log,
+    fromSources: false,
+  });
   finishApp(app, log);
   const server = createServer(app);
   await new Promise<void>((resolve) => server.listen(0, '127.0.0.1', resolve));

@@ -35,7 +35,9 @@ export async function makeDemo(given: DemoGiven, samples: string, say: (line: st
   if (!(await given.store.isEmpty())) return false;
   say(`Making the demo shop with ${DEMO_FRAMES.length} frames …`);
   // Read first, so that a bad sample leaves nothing behind.
-  const frames = await Promise.all(DEMO_FRAMES.map(async ({ file, note }) => ({ note, particulars: await readSample(samples, file) })));
+  const frames = await Promise.all(
+    DEMO_FRAMES.map(async ({ file, note }) => ({ note, particulars: await readSample(samples, file) })),
+  );
   const people = await given.openDemoShop(DEMO_SHOP, DEMO_PEOPLE);
   const designer = people.find((p) => p.role === 'designer')!;
   const job = await given.addJob(designer.shopId, DEMO_JOB);

@@ -52,12 +52,24 @@ export function downloadsService(store: DownloadsStore, makers: Makers) {
   }
 
   return {
-    async layerSet(shopId: string, frameId: string, letter: string, profileId: string | undefined, signal: AbortSignal): Promise<MadeFile> {
+    async layerSet(
+      shopId: string,
+      frameId: string,
+      letter: string,
+      profileId: string | undefined,
+      signal: AbortSignal,
+    ): Promise<MadeFile> {
       const row = await mustFind(shopId, frameId, letter);
       return makers.make('layer-set', setInput(row, await wanted(shopId, profileId)), signal);
     },
 
-    async setupSheet(shopId: string, frameId: string, letter: string, profileId: string | undefined, signal: AbortSignal): Promise<MadeFile> {
+    async setupSheet(
+      shopId: string,
+      frameId: string,
+      letter: string,
+      profileId: string | undefined,
+      signal: AbortSignal,
+    ): Promise<MadeFile> {
       const row = await mustFind(shopId, frameId, letter);
       return makers.make('setup-sheet', setInput(row, await wanted(shopId, profileId)), signal);
     },
@@ -69,16 +81,28 @@ export function downloadsService(store: DownloadsStore, makers: Makers) {
       return { name: `${safeName(name, 'frame')}_rev-${row.letter}.frame.json`, bytes: row.file };
     },
 
-    async draftSheet(shopId: string, frameId: string, profileId: string | undefined, signal: AbortSignal): Promise<MadeFile> {
+    async draftSheet(
+      shopId: string,
+      frameId: string,
+      profileId: string | undefined,
+      signal: AbortSignal,
+    ): Promise<MadeFile> {
       const draft = await mustFindDraft(shopId, frameId);
       const { shopName, paper, profile } = await wanted(shopId, profileId);
       const { particulars, jobName, changedBy: author } = draft;
-      return makers.make('draft-sheet', { particulars, shopName, jobName, author, changedAt: draft.changedAt.toISOString(), profile, paper }, signal);
+      return makers.make(
+        'draft-sheet',
+        { particulars, shopName, jobName, author, changedAt: draft.changedAt.toISOString(), profile, paper },
+        signal,
+      );
     },
 
     async draftFrameFile(shopId: string, frameId: string): Promise<MadeFile> {
       const { particulars } = await mustFindDraft(shopId, frameId);
-      return { name: `${safeName(particulars.name, 'frame')}_draft.frame.json`, bytes: new TextEncoder().encode(writeFrameFile(particulars)) };
+      return {
+        name: `${safeName(particulars.name, 'frame')}_draft.frame.json`,
+        bytes: new TextEncoder().encode(writeFrameFile(particulars)),
+      };
     },
 
     /** Throws 'not-found' also when no frame of the job has a revision. */
@@ -87,12 +111,18 @@ export function downloadsService(store: DownloadsStore, makers: Makers) {
       if (!job) throw notFound('job');
       const rows = await store.newestRevisions(shopId, jobId);
       if (rows.length === 0) {
-        throw new AppError('not-found', `job ${jobId} has no revision`, { message: 'No frame of this job has been released yet.' });
+        throw new AppError('not-found', `job ${jobId} has no revision`, {
+          message: 'No frame of this job has been released yet.',
+        });
       }
       const how = await wanted(shopId, profileId);
       const sets = rows.map((row) => setInput(row, how));
       const leftOut = await store.unreleased(shopId, jobId);
-      return makers.make('job-set', { jobName: job.name, shopName: how.shopName, paper: how.paper, sets, leftOut }, signal);
+      return makers.make(
+        'job-set',
+        { jobName: job.name, shopName: how.shopName, paper: how.paper, sets, leftOut },
+        signal,
+      );
     },
   };
 }

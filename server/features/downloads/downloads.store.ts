@@ -28,7 +28,12 @@ export const downloadsStore = (database: Database) => ({
 
   async findDraft(shopId: string, frameId: string) {
     const [row] = await database.queries
-      .select({ particulars: frames.particulars, changedAt: frames.changedAt, changedBy: frames.changedBy, jobName: jobs.name })
+      .select({
+        particulars: frames.particulars,
+        changedAt: frames.changedAt,
+        changedBy: frames.changedBy,
+        jobName: jobs.name,
+      })
       .from(frames)
       .innerJoin(jobs, eq(jobs.id, frames.jobId))
       .where(and(eq(frames.shopId, shopId), eq(frames.id, frameId)));

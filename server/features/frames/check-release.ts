@@ -9,9 +9,14 @@ const details = (findings: readonly Finding[]): ReleaseRefused => ({
 /** Whether findings let a frame be released: throws 'frame-has-stops', or 'cautions-not-acknowledged' with those that are left. */
 export function checkRelease(findings: readonly Finding[], acknowledged: readonly string[]): void {
   const stops = findings.filter((f) => f.level === 'stop');
-  if (stops.length > 0) throw new AppError('frame-has-stops', `release with stops: ${stops.map((f) => f.code).join(', ')}`, { details: details(stops) });
+  if (stops.length > 0)
+    throw new AppError('frame-has-stops', `release with stops: ${stops.map((f) => f.code).join(', ')}`, {
+      details: details(stops),
+    });
   const left = findings.filter((f) => f.level === 'caution' && !acknowledged.includes(f.code));
   if (left.length > 0) {
-    throw new AppError('cautions-not-acknowledged', `release with cautions: ${left.map((f) => f.code).join(', ')}`, { details: details(left) });
+    throw new AppError('cautions-not-acknowledged', `release with cautions: ${left.map((f) => f.code).join(', ')}`, {
+      details: details(left),
+    });
   }
 }

@@ -18,7 +18,11 @@ function inWords(value: unknown): string {
  * What the second of two editors is told, entry by entry: what the draft was when they began, what it is now, and what
  * they have. Where the version they began with is no longer kept, their own draft is held against the one that stands.
  */
-export function describeChanges(base: Particulars | null, theirs: Particulars, yours: Particulars | null): StaleDraft['changes'] {
+export function describeChanges(
+  base: Particulars | null,
+  theirs: Particulars,
+  yours: Particulars | null,
+): StaleDraft['changes'] {
   const from = base ?? yours ?? theirs;
   return listChanges(from, theirs)
     .slice(0, MOST_CHANGES)

@@ -35,11 +35,15 @@ export function framesRoutes(frames: FramesService, releases: ReleaseService): R
   });
 
   router.post('/frames/:frameId/revisions', allow('release'), async (req, res) => {
-    res.status(201).json(await releases.release(whoAsks(req), pathParameter(req, 'frameId'), readBody(req, releaseRequest)));
+    res
+      .status(201)
+      .json(await releases.release(whoAsks(req), pathParameter(req, 'frameId'), readBody(req, releaseRequest)));
   });
 
   router.get('/frames/:frameId/revisions/:letter', signedIn, async (req, res) => {
-    res.json(await frames.readRevision(whoAsks(req).shopId, pathParameter(req, 'frameId'), pathParameter(req, 'letter')));
+    res.json(
+      await frames.readRevision(whoAsks(req).shopId, pathParameter(req, 'frameId'), pathParameter(req, 'letter')),
+    );
   });
 
   return router;

@@ -46,7 +46,10 @@ export function framesService({ store, makers, now }: FramesGiven) {
       changes: describeChanges(base, frame.particulars, yours),
     };
     const message = `${frame.changedBy} has changed this draft since you opened it.`;
-    return new AppError('stale-draft', `draft ${frame.id}: version ${from} against ${frame.version}`, { message, details });
+    return new AppError('stale-draft', `draft ${frame.id}: version ${from} against ${frame.version}`, {
+      message,
+      details,
+    });
   }
 
   async function differsFromNewest(frame: FrameRow, particulars: Particulars): Promise<boolean> {
@@ -77,12 +80,22 @@ export function framesService({ store, makers, now }: FramesGiven) {
     /** Saves over version `from`. Throws 'stale-draft' when it is no longer the newest; what stands then is not touched. */
     async saveDraft(who: SignedIn, frameId: string, from: number, particulars: Particulars): Promise<DraftSaved> {
       const frame = await mustFind(who.shopId, frameId);
-      const saved = (version: number, changedAt: Date, draftChanged: boolean) => ({ version, changedAt: changedAt.toISOString(), draftChanged });
+      const saved = (version: number, changedAt: Date, draftChanged: boolean) => ({
+        version,
+        changedAt: changedAt.toISOString(),
+        draftChanged,
+      });
       // Saved already: the answer to an earlier try was lost on its way, or nothing was changed.
       if (alike(frame.particulars, particulars)) return saved(frame.version, frame.changedAt, frame.draftChanged);
       if (frame.version !== from) throw await stale(frame, from, particulars);
       const figures = figuresOf(await workOut(makers, particulars));
-      const draft = { particulars, figures, draftChanged: await differsFromNewest(frame, particulars), changedAt: now(), changedBy: who.name };
+      const draft = {
+        particulars,
+        figures,
+        draftChanged: await differsFromNewest(frame, particulars),
+        changedAt: now(),
+        changedBy: who.name,
+      };
       const version = await store.saveDraft(who.shopId, frameId, from, frame.letter, draft);
       if (version !== null) return saved(version, draft.changedAt, draft.draftChanged);
       // Somebody was quicker: saved, or released, which leaves the version as it is. Look again.

@@ -64,7 +64,9 @@ export const framesStore = (database: Database) => ({
         .returning({ version: frames.version });
       if (saved.length === 0) return null;
       await tx.insert(draftVersions).values({ frameId, version, particulars: draft.particulars });
-      await tx.delete(draftVersions).where(and(eq(draftVersions.frameId, frameId), lte(draftVersions.version, version - VERSIONS_KEPT)));
+      await tx
+        .delete(draftVersions)
+        .where(and(eq(draftVersions.frameId, frameId), lte(draftVersions.version, version - VERSIONS_KEPT)));
       return version;
     }),
 
@@ -78,7 +80,11 @@ export const framesStore = (database: Database) => ({
   },
 
   async setRemoved(shopId: string, frameId: string, removed: boolean): Promise<boolean> {
-    const rows = await database.queries.update(frames).set({ removed }).where(own(shopId, frameId)).returning({ id: frames.id });
+    const rows = await database.queries
+      .update(frames)
+      .set({ removed })
+      .where(own(shopId, frameId))
+      .returning({ id: frames.id });
     return rows.length > 0;
   },
 

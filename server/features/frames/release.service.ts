@@ -13,7 +13,9 @@ import type { FramesGiven, FramesService } from './frames.service.ts';
 export type ReleaseService = ReturnType<typeof releaseService>;
 
 /** One built-in profile of each flavour: what a release must prove. */
-const PROVED = (['R2007', 'R12'] as const).map((flavour) => BUILTIN_PROFILES.find((p) => p.profile.flavour === flavour)!.profile);
+const PROVED = (['R2007', 'R12'] as const).map(
+  (flavour) => BUILTIN_PROFILES.find((p) => p.profile.flavour === flavour)!.profile,
+);
 
 /** Freezing a draft under the next letter. */
 export const releaseService = ({ store, makers, now }: FramesGiven, frames: FramesService) => ({
@@ -23,7 +25,9 @@ export const releaseService = ({ store, makers, now }: FramesGiven, frames: Fram
     if (frame.version !== request.version) throw await frames.stale(frame, request.version, null);
     const { particulars } = frame;
     if (!(await frames.differsFromNewest(frame, particulars))) {
-      throw new AppError('nothing-changed', `draft of ${frameId} is revision ${frame.letter}`, { message: `Nothing was changed since revision ${frame.letter}.` });
+      throw new AppError('nothing-changed', `draft of ${frameId} is revision ${frame.letter}`, {
+        message: `Nothing was changed since revision ${frame.letter}.`,
+      });
     }
     checkRelease((await workOut(makers, particulars)).findings, request.acknowledged);
 

@@ -8,7 +8,8 @@ import type { UploadedFile } from '../../http/take-files.ts';
 import type { FramesService } from './frames.service.ts';
 
 function read({ bytes }: UploadedFile): ReadFrameFile {
-  if (bytes === null) return { ok: false, message: `too large: takes at most ${LIMITS.frameFileBytes} bytes`, fields: [] };
+  if (bytes === null)
+    return { ok: false, message: `too large: takes at most ${LIMITS.frameFileBytes} bytes`, fields: [] };
   if (bytes.length === 0) return { ok: false, message: 'the file is empty', fields: [] };
   try {
     return parseFrameFile(new TextDecoder('utf-8', { fatal: true }).decode(bytes));
@@ -18,7 +19,12 @@ function read({ bytes }: UploadedFile): ReadFrameFile {
 }
 
 /** Adds a frame for each good file, in the order sent; bad ones come back by name with what is wrong. Throws when there is no file. */
-export async function takeFrameFiles(frames: FramesService, who: SignedIn, jobId: string, files: readonly UploadedFile[]): Promise<FrameFilesTaken> {
+export async function takeFrameFiles(
+  frames: FramesService,
+  who: SignedIn,
+  jobId: string,
+  files: readonly UploadedFile[],
+): Promise<FrameFilesTaken> {
   if (files.length === 0) throw wrongField('files', 'nothing', 'one or more frame files');
   const answer: FrameFilesTaken = { taken: [], refused: [] };
   for (const file of files) {

@@ -5,11 +5,18 @@ import { frames, jobs } from '../../db/schema.ts';
 export type JobsStore = ReturnType<typeof jobsStore>;
 export type JobRow = Omit<typeof jobs.$inferSelect, 'shopId'>;
 
-const columns = { id: jobs.id, name: jobs.name, createdAt: jobs.createdAt, changedAt: jobs.changedAt, removed: jobs.removed };
+const columns = {
+  id: jobs.id,
+  name: jobs.name,
+  createdAt: jobs.createdAt,
+  changedAt: jobs.changedAt,
+  removed: jobs.removed,
+};
 const own = (shopId: string, jobId: string) => and(eq(jobs.shopId, shopId), eq(jobs.id, jobId));
 
 /** How many frames fulfil a condition. Drivers answer counts as text or as numbers. */
-const counted = (condition: ReturnType<typeof sql>) => sql<number>`count(*) filter (where ${condition})`.mapWith(Number);
+const counted = (condition: ReturnType<typeof sql>) =>
+  sql<number>`count(*) filter (where ${condition})`.mapWith(Number);
 
 /** Jobs of a shop, with figures of their frames. */
 export const jobsStore = (database: Database) => ({
@@ -56,7 +63,11 @@ export const jobsStore = (database: Database) => ({
   },
 
   /** Null when the shop has no such job. */
-  async change(shopId: string, jobId: string, change: { name?: string; removed?: boolean; changedAt: Date }): Promise<JobRow | null> {
+  async change(
+    shopId: string,
+    jobId: string,
+    change: { name?: string; removed?: boolean; changedAt: Date },
+  ): Promise<JobRow | null> {
     const [row] = await database.queries.update(jobs).set(change).where(own(shopId, jobId)).returning(columns);
     return row ?? null;
   },

@@ -22,7 +22,9 @@ function check(profile: FileProfile): void {
 
 function refuseBuiltIn(id: string): void {
   if (isBuiltIn(id)) {
-    throw new AppError('not-allowed', `change of built-in profile ${id}`, { message: 'A built-in profile cannot be changed. Make one of your own from it.' });
+    throw new AppError('not-allowed', `change of built-in profile ${id}`, {
+      message: 'A built-in profile cannot be changed. Make one of your own from it.',
+    });
   }
 }
 

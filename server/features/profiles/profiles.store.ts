@@ -31,7 +31,10 @@ export const profilesStore = (database: Database) => ({
   remove: (shopId: string, id: string, instead: string): Promise<boolean> =>
     database.transaction(async (tx) => {
       const rows = await tx.delete(profiles).where(own(shopId, id)).returning({ id: profiles.id });
-      await tx.update(shops).set({ defaultProfileId: instead }).where(and(eq(shops.id, shopId), eq(shops.defaultProfileId, id)));
+      await tx
+        .update(shops)
+        .set({ defaultProfileId: instead })
+        .where(and(eq(shops.id, shopId), eq(shops.defaultProfileId, id)));
       return rows.length > 0;
     }),
 });

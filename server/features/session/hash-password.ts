@@ -1,7 +1,8 @@
 import { hash, verify } from '@node-rs/argon2';
 
 /** argon2id with the parameters that OWASP's password storage notes give for it (19 MiB, 2 rounds, 1 lane). Node's thread pool does the work. */
-export const hashPassword = (password: string): Promise<string> => hash(password, { memoryCost: 19_456, timeCost: 2, parallelism: 1 });
+export const hashPassword = (password: string): Promise<string> =>
+  hash(password, { memoryCost: 19_456, timeCost: 2, parallelism: 1 });
 
 let nobody: Promise<string> | undefined;
 

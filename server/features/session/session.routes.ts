@@ -40,7 +40,8 @@ export function sessionRoutes({ people, service, brake, limitSignUps }: Given): 
   );
   const checkPassword = (req: Request, res: Response): Promise<SignedIn | false> =>
     new Promise((resolve, reject) => {
-      const decide = (error: unknown, who?: SignedIn | false | null) => (error ? reject(error as Error) : resolve(who || false));
+      const decide = (error: unknown, who?: SignedIn | false | null) =>
+        error ? reject(error as Error) : resolve(who || false);
       (people.authenticate('local', decide) as RequestHandler)(req, res, reject);
     });
 

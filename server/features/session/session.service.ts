@@ -1,6 +1,8 @@
 import { randomUUID } from 'node:crypto';
 import type { Role } from '#shared/contracts/roles.ts';
 import type { Session, Shop, signUpRequest } from '#shared/contracts/session.ts';
+import type { DrawerCutter } from '#shared/kernel/cutter-drawer/drawer-cutter.ts';
+import { startingCutters } from '#shared/kernel/cutter-drawer/starting-cutters.ts';
 import { BUILTIN_PROFILES } from '#shared/kernel/profiles/builtin-profiles.ts';
 import type { z } from 'zod';
 import { isUniqueViolation } from '../../db/unique-violation.ts';
@@ -10,6 +12,10 @@ import { hashPassword, passwordFits } from './hash-password.ts';
 import type { SessionStore } from './session.store.ts';
 
 export type SessionService = ReturnType<typeof sessionService>;
+
+/** What lies in the cutter drawer of a new shop. */
+const startingDrawer = (unit: Shop['unit']): DrawerCutter[] =>
+  startingCutters(unit).map((entry) => ({ id: randomUUID(), ...entry }));
 
 /** Who is here: signing up, in and out. */
 export const sessionService = (store: SessionStore, now: () => Date) => ({
@@ -29,7 +35,7 @@ export const sessionService = (store: SessionStore, now: () => Date) => ({
       createdAt,
     };
     try {
-      await store.openShop(shop, [{ ...owner, passwordHash, createdAt }]);
+      await store.openShop(shop, [{ ...owner, passwordHash, createdAt }], startingDrawer(request.unit));
     } catch (error) {
       if (isUniqueViolation(error)) throw new AppError('email-taken', 'sign-up with a taken address');
       throw error;
@@ -38,12 +44,19 @@ export const sessionService = (store: SessionStore, now: () => Date) => ({
   },
 
   /** Opens the shop that anybody may enter; its people have no password. */
-  async openDemoShop(shop: Pick<Shop, 'name' | 'unit' | 'paper'>, people: readonly Pick<SignedIn, 'name' | 'email' | 'role'>[]): Promise<SignedIn[]> {
+  async openDemoShop(
+    shop: Pick<Shop, 'name' | 'unit' | 'paper'>,
+    people: readonly Pick<SignedIn, 'name' | 'email' | 'role'>[],
+  ): Promise<SignedIn[]> {
     const shopId = randomUUID();
     const createdAt = now();
     const persons = people.map((person) => ({ ...person, id: randomUUID(), shopId }));
     const demo = { ...shop, id: shopId, defaultProfileId: BUILTIN_PROFILES[0]!.id, demo: true, createdAt };
-    await store.openShop(demo, persons.map((person) => ({ ...person, passwordHash: null, createdAt })));
+    await store.openShop(
+      demo,
+      persons.map((person) => ({ ...person, passwordHash: null, createdAt })),
+      startingDrawer(shop.unit),
+    );
     return persons;
   },
 

@@ -1,8 +1,9 @@
 import { and, eq } from 'drizzle-orm';
 import type { Shop } from '#shared/contracts/session.ts';
 import type { Role } from '#shared/contracts/roles.ts';
+import type { DrawerCutter } from '#shared/kernel/cutter-drawer/drawer-cutter.ts';
 import type { Database } from '../../db/database.ts';
-import { sessions, shops, users } from '../../db/schema.ts';
+import { cutters, sessions, shops, users } from '../../db/schema.ts';
 import type { SignedIn } from '../../http/signed-in.ts';
 
 const person = { id: users.id, shopId: users.shopId, name: users.name, email: users.email, role: users.role };
@@ -27,7 +28,10 @@ export const sessionStore = (database: Database) => ({
   },
 
   async findByEmail(email: string): Promise<{ person: SignedIn; passwordHash: string | null } | null> {
-    const [row] = await database.queries.select({ person, passwordHash: users.passwordHash }).from(users).where(eq(users.email, email));
+    const [row] = await database.queries
+      .select({ person, passwordHash: users.passwordHash })
+      .from(users)
+      .where(eq(users.email, email));
     return row ?? null;
   },
 
@@ -48,18 +52,26 @@ export const sessionStore = (database: Database) => ({
 
   async shopOf(shopId: string): Promise<Shop> {
     const [row] = await database.queries
-      .select({ id: shops.id, name: shops.name, unit: shops.unit, paper: shops.paper, defaultProfileId: shops.defaultProfileId })
+      .select({
+        id: shops.id,
+        name: shops.name,
+        unit: shops.unit,
+        paper: shops.paper,
+        defaultProfileId: shops.defaultProfileId,
+      })
       .from(shops)
       .where(eq(shops.id, shopId));
     if (!row) throw new Error(`a person belongs to shop ${shopId}, which does not exist`);
     return row;
   },
 
-  /** A shop and its first people, all or nothing. A taken e-mail address is a unique violation. */
-  async openShop(shop: NewShop, people: readonly NewPerson[]): Promise<void> {
+  /** A shop, its first people and what lies in its cutter drawer, all or nothing. A taken e-mail address is a unique violation. */
+  async openShop(shop: NewShop, people: readonly NewPerson[], drawer: readonly DrawerCutter[]): Promise<void> {
     await database.transaction(async (tx) => {
       await tx.insert(shops).values(shop);
       await tx.insert(users).values([...people]);
+      const { id: shopId, createdAt: changedAt } = shop;
+      await tx.insert(cutters).values(drawer.map((c) => ({ ...c, name: c.cutter.name, shopId, changedAt })));
     });
   },
 

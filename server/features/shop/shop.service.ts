@@ -9,7 +9,11 @@ export type ShopService = ReturnType<typeof shopService>;
 export const shopService = (store: ShopStore) => ({
   async change(shopId: string, change: ShopChange): Promise<Shop> {
     const profileId = change.defaultProfileId;
-    if (profileId !== undefined && !BUILTIN_PROFILES.some((p) => p.id === profileId) && !(await store.ownsProfile(shopId, profileId))) {
+    if (
+      profileId !== undefined &&
+      !BUILTIN_PROFILES.some((p) => p.id === profileId) &&
+      !(await store.ownsProfile(shopId, profileId))
+    ) {
       throw notFound('profile');
     }
     return store.change(shopId, change);

@@ -8,7 +8,13 @@ export type ShopStore = ReturnType<typeof shopStore>;
 /** A shop's own settings. */
 export const shopStore = (database: Database) => ({
   async change(shopId: string, change: Partial<Omit<Shop, 'id'>>): Promise<Shop> {
-    const columns = { id: shops.id, name: shops.name, unit: shops.unit, paper: shops.paper, defaultProfileId: shops.defaultProfileId };
+    const columns = {
+      id: shops.id,
+      name: shops.name,
+      unit: shops.unit,
+      paper: shops.paper,
+      defaultProfileId: shops.defaultProfileId,
+    };
     const [row] =
       Object.keys(change).length === 0
         ? await database.queries.select(columns).from(shops).where(eq(shops.id, shopId))

@@ -3,44 +3,54 @@ import type { ArcSegment, LineSegment, Segment } from '../contour/segments.ts';
 import type { Point } from '../contour/contour.ts';
 import { endColumn, endRow, firstColumn, firstRow, sampleX, sampleY, type Grid } from './grid.ts';
 
+/** Columns to a block. */
+const BLOCK = 32;
+
 /**
  * Squared distances from a band of a grid's rows to the nearest of some lines and arcs, exact, as far as each one's reach;
- * Infinity beyond. The band is used again and again: rows know which of their columns were touched.
+ * Infinity beyond. The band is used again and again: it knows which blocks of columns were touched, since lines fill little of
+ * a board.
  */
 export class DistanceBand {
   readonly grid: Grid;
   /** Row by row from the band's first; double precision, so that a sample on a wall falls on the right side of it. */
   readonly square: Float64Array;
-  private readonly from: Int32Array;
-  private readonly to: Int32Array;
+  private readonly blocks: number;
+  private readonly touched: Uint8Array;
   private first = 0;
   private end = 0;
 
   constructor(grid: Grid, rows: number) {
     this.grid = grid;
     this.square = new Float64Array(grid.columns * rows).fill(Infinity);
-    this.from = new Int32Array(rows).fill(grid.columns);
-    this.to = new Int32Array(rows);
+    this.blocks = Math.ceil(grid.columns / BLOCK);
+    this.touched = new Uint8Array(this.blocks * rows);
   }
 
   /** Begins anew on rows `first` up to but not `end` of the grid. */
   begin(first: number, end: number): void {
     const { columns } = this.grid;
-    for (let row = 0; row < this.to.length; row++) {
-      if (this.from[row]! < this.to[row]!) this.square.fill(Infinity, row * columns + this.from[row]!, row * columns + this.to[row]!);
-      this.from[row] = columns;
-      this.to[row] = 0;
+    const { blocks, touched } = this;
+    for (let at = 0; at < touched.length; at++) {
+      if (touched[at] === 0) continue;
+      touched[at] = 0;
+      const row = Math.floor(at / blocks);
+      const from = (at - row * blocks) * BLOCK;
+      this.square.fill(Infinity, row * columns + from, row * columns + Math.min(columns, from + BLOCK));
     }
     this.first = first;
     this.end = end;
   }
 
-  /** Columns of a row (counted from the grid's first) that may hold a distance, as [from, to). */
-  touchedFrom(row: number): number {
-    return this.from[row - this.first]!;
-  }
-  touchedTo(row: number): number {
-    return this.to[row - this.first]!;
+  /** Calls with each stretch of a row's columns, [from, to), that may hold a distance. */
+  eachTouched(row: number, take: (from: number, to: number) => void): void {
+    const start = (row - this.first) * this.blocks;
+    for (let block = 0; block < this.blocks; block++) {
+      if (this.touched[start + block] === 0) continue;
+      const from = block;
+      while (block < this.blocks && this.touched[start + block] !== 0) block++;
+      take(from * BLOCK, Math.min(this.grid.columns, block * BLOCK));
+    }
   }
 
   /** Index in `square` of a row's first column. */
@@ -61,9 +71,8 @@ export class DistanceBand {
   }
 
   private touch(row: number, from: number, to: number): void {
-    const at = row - this.first;
-    if (from < this.from[at]!) this.from[at] = from;
-    if (to > this.to[at]!) this.to[at] = to;
+    const start = (row - this.first) * this.blocks;
+    this.touched.fill(1, start + Math.floor(from / BLOCK), start + Math.floor((to - 1) / BLOCK) + 1);
   }
 
   private spreadPoint({ x, y }: Point, reach: number): void {

@@ -11,8 +11,8 @@ import { InsideRows } from './inside-rows.ts';
 import { RadialDepth } from './radial-depth.ts';
 import { sweepClimb } from './sweep-climb.ts';
 
-/** Rows worked at a time: small enough for the distances of a wide board to stay in the processor's cache. */
-const BAND_ROWS = 32;
+/** Samples worked at a time, as rows: few enough for their distances to stay in the processor's cache, however wide the board. */
+const BAND_SAMPLES = 32_768;
 
 /** A layer made ready for sweeping. */
 interface Sweep {
@@ -41,19 +41,18 @@ function makeReady(layer: LayerLines, cell: number): Sweep {
   };
 }
 
-/** Lowers one row of a field to what the distances in a band leave. */
-function cutRow(field: HeightField, band: DistanceBand, row: number, { radial, owner, layer }: Sweep): void {
+/** Lowers a stretch of one row of a field to what the distances in a band leave. */
+function cutStretch(field: HeightField, band: DistanceBand, row: number, from: number, to: number, { radial, owner, layer }: Sweep): void {
   const { depth, by, thickness, grid } = field;
-  const offset = row * grid.columns - band.rowStart(row);
-  const start = band.rowStart(row);
-  const to = start + band.touchedTo(row);
   const { square } = band;
-  for (let k = start + band.touchedFrom(row); k < to; k++) {
-    const away = square[k]!;
+  const start = band.rowStart(row);
+  const tip = layer.depth;
+  for (let i = from; i < to; i++) {
+    const away = square[start + i]!;
     if (away === Infinity) continue;
-    const left = radial.at(away, layer.depth);
+    const left = radial.at(away, tip);
     const d = left < thickness ? left : thickness;
-    const at = k + offset;
+    const at = row * grid.columns + i;
     if (d > depth[at]!) {
       depth[at] = d;
       by[at] = owner;
@@ -84,7 +83,7 @@ function sweepBand(field: HeightField, bands: readonly [DistanceBand, DistanceBa
   const [axes, lines] = bands;
   axes.begin(first, end);
   for (const axis of sweep.axes) axes.spread(axis, sweep.reach);
-  for (let row = first; row < end; row++) cutRow(field, axes, row, sweep);
+  for (let row = first; row < end; row++) axes.eachTouched(row, (from, to) => cutStretch(field, axes, row, from, to, sweep));
   if (sweep.pocket) {
     lines.begin(first, end);
     for (const line of sweep.pocket.lines) lines.spread(line, sweep.layer.beside);
@@ -104,9 +103,10 @@ function sweepBand(field: HeightField, bands: readonly [DistanceBand, DistanceBa
 export function* sweepFace(cut: FaceCut, grid: Grid, layers: number = cut.layers.length): Generator<number, HeightField, void> {
   const field = uncut(grid, cut.thickness);
   const sweeps = cut.layers.slice(0, layers).map((layer) => makeReady(layer, grid.cell));
-  const bands = [new DistanceBand(grid, BAND_ROWS), new DistanceBand(grid, BAND_ROWS)] as const;
-  for (let first = 0; first < grid.rows; first += BAND_ROWS) {
-    const end = Math.min(grid.rows, first + BAND_ROWS);
+  const rows = Math.max(1, Math.floor(BAND_SAMPLES / grid.columns));
+  const bands = [new DistanceBand(grid, rows), new DistanceBand(grid, rows)] as const;
+  for (let first = 0; first < grid.rows; first += rows) {
+    const end = Math.min(grid.rows, first + rows);
     for (const sweep of sweeps) sweepBand(field, bands, first, end, sweep);
     yield end / grid.rows;
   }

@@ -1,4 +1,5 @@
 import { offsetContour } from '../contour/offset-contour.ts';
+import type { Cutter } from '../cutters/cutter.ts';
 import { radiusAtHeight } from '../cutters/radius-at-height.ts';
 import type { Opening } from '../frame/members.ts';
 import type { Particulars } from '../particulars/particulars.ts';
@@ -8,17 +9,22 @@ import type { OpeningCut } from './opening-cut.ts';
 import type { OpeningProblem } from './opening-line-sets.ts';
 import { veeCorners } from './vee-corners.ts';
 
+/** How deep the tip of a V-cutter begins in an opening's corners: as deep as its flute reaches, no deeper than the board. */
+export const veeFloor = (cutter: Cutter, thickness: number): number => Math.min(cutter.fluteLength, thickness);
+
 /**
  * A V-cutter after the opening cutter, in every inside corner: sharp in the corners' plane, and leaving tan(β/2)·z a side at
- * z below it. Its tip runs as deep as the board is thick. Nothing when the edge does not ask for it or the cutter is no V.
+ * z below it. Nothing when the edge does not ask for it, the cutter is no V, or its flute
+ * does not reach below that plane.
  */
 export function cornerVeeLineSet(p: Particulars, openings: readonly Opening[], cut: OpeningCut, variant: string): { lineSets: LineSet[]; problems: OpeningProblem[] } {
   const cutter = p.cutters.corner;
-  if (p.edge.corners !== 'vee' || cutter?.kind !== 'vee') return { lineSets: [], problems: [] };
+  if (p.edge.corners !== 'vee' || cutter?.kind !== 'vee' || veeFloor(cutter, p.thickness) <= cut.planeDepth) return { lineSets: [], problems: [] };
+  const floor = veeFloor(cutter, p.thickness);
   const shapes: Shape[] = [];
   const problems: OpeningProblem[] = [];
   const settings = {
-    floor: p.thickness,
+    floor,
     plane: cut.planeDepth,
     filletRadius: radiusAtHeight(p.cutters.opening, cut.tipDepth - cut.planeDepth),
     cutter,
@@ -36,7 +42,7 @@ export function cornerVeeLineSet(p: Particulars, openings: readonly Opening[], c
   }
   if (shapes.length === 0) return { lineSets: [], problems };
   return {
-    lineSets: [{ face: 'front', set: 'CORNER_VEE', variant, cutter: 'corner', side: 'on', depth: p.thickness, passes: [p.thickness], shapes }],
+    lineSets: [{ face: 'front', set: 'CORNER_VEE', variant, cutter: 'corner', side: 'on', depth: floor, passes: [floor], shapes }],
     problems,
   };
 }

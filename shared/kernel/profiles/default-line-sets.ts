@@ -28,6 +28,7 @@ export const DEFAULT_LINE_SETS: readonly DefaultLineSet[] = [
   { face: 'front', set: 'OPENING', cutter: 'opening', colour: 5 },
   { face: 'front', set: 'OPENING_AXIS', cutter: 'opening', colour: 150 },
   { face: 'front', set: 'CORNER_LIFT', cutter: 'opening', colour: 190 },
+  { face: 'front', set: 'CORNER_VEE', cutter: 'corner', colour: 200 },
   { face: 'front', set: 'PERIMETER', cutter: 'perimeter', colour: 7 },
   { face: 'front', set: 'BLANK', cutter: null, colour: 8 },
   { face: 'front', set: LABELS, cutter: null, colour: 251 },

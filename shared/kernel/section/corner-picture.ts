@@ -1,4 +1,5 @@
 import type { Point } from '../contour/contour.ts';
+import { veeFloor } from '../line-sets/corner-vee-line-set.ts';
 import { edgeOfOpening } from '../line-sets/held-depth.ts';
 import { openingCut } from '../line-sets/opening-cut.ts';
 import type { CornerMethod, Edge, Particulars } from '../particulars/particulars.ts';
@@ -18,7 +19,7 @@ export const METHOD_WORDS: Record<CornerMethod, string> = { round: 'left round',
 /** The corner of an opening with this edge and inside angle, when it is worked by a method. */
 export function cornerSituation(p: Particulars, method: CornerMethod, angle: number, edge: Edge = edgeOfOpening(p.edge, { square: false })): CornerSituation {
   const vee = p.cutters.corner;
-  return { cutter: p.cutters.opening, cut: openingCut(p, edge), method, angle, ...(vee ? { vee: { cutter: vee, floor: p.thickness } } : {}) };
+  return { cutter: p.cutters.opening, cut: openingCut(p, edge), method, angle, ...(vee ? { vee: { cutter: vee, floor: veeFloor(vee, p.thickness) } } : {}) };
 }
 
 /**

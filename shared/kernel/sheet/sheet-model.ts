@@ -103,7 +103,7 @@ export interface SignOffBox {
 }
 
 export interface SheetPage {
-  readonly id: 'back' | 'turn' | 'front' | 'cutters';
+  readonly id: 'back' | 'turn' | 'front' | 'section' | 'cutters';
   /** Back red for the back, front blue for the front, ink otherwise. */
   readonly colour: SheetColour;
   readonly title: string;

@@ -1,6 +1,7 @@
 import type { Extents } from '../contour/contour.ts';
 import { placeExtents } from '../placing/place.ts';
 import type { Placement } from '../placing/placement.ts';
+import { SAME } from '../tolerances.ts';
 import type { WorkedFrame } from '../worked-frame.ts';
 import type { PaperShape } from './paper-picture.ts';
 import { box, disc, stroke } from './paper-shapes.ts';
@@ -77,8 +78,9 @@ function sideLine(b: Board, side: EdgeSide, inset: number, colour: SheetColour):
 
 /** Extents in a setup as a box in the picture. */
 function laid(b: Board, board: Extents, e: Extents): [number, number, number, number] {
-  const sx = b.width / (board.maxX - board.minX);
-  const sy = b.height / (board.maxY - board.minY);
+  // A board that is given too small, a stop, may have no width at all.
+  const sx = b.width / Math.max(board.maxX - board.minX, SAME);
+  const sy = b.height / Math.max(board.maxY - board.minY, SAME);
   const clip = {
     minX: Math.max(e.minX, board.minX),
     maxX: Math.min(e.maxX, board.maxX),

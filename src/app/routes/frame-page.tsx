@@ -1,6 +1,8 @@
 import { lazy, Suspense } from 'react';
 import { useQuery } from '@tanstack/react-query';
 import { useParams } from 'react-router';
+import type { DrawerCutter } from '#shared/kernel/cutter-drawer/drawer-cutter.ts';
+import { useCutters } from '../../features/cutters/api/list-cutters.ts';
 import { frameQuery } from '../../features/frame-page/api/get-frame.ts';
 import { FramePage } from '../../features/frame-page/frame-page.tsx';
 import { useProfiles } from '../../features/profiles/api/list-profiles.ts';
@@ -8,6 +10,9 @@ import { useSignedIn } from '../../features/session/signed-in.tsx';
 import { Fetched } from '../../ui/fetched.tsx';
 import { ProgressText } from '../../ui/progress-text.tsx';
 import { Sheet } from '../../ui/sheet.tsx';
+
+/** While the drawer is not there a frame can be worked on all the same. */
+const NO_DRAWER: readonly DrawerCutter[] = [];
 
 // Three dimensions are large: fetched when somebody looks.
 const CutPart = lazy(async () => ({ default: (await import('../../features/cut-part/cut-part.tsx')).CutPart }));
@@ -18,6 +23,7 @@ export function FramePageRoute() {
   const { shop, mayDo } = useSignedIn();
   const frame = useQuery({ ...frameQuery(frameId), refetchOnMount: 'always' });
   const profiles = useProfiles();
+  const cutters = useCutters();
   // Work starts from the draft as it is now: one that was fetched for a list may be older.
   if (frame.data !== undefined && frame.isFetchedAfterMount && profiles.data !== undefined) {
     return (
@@ -26,6 +32,7 @@ export function FramePageRoute() {
         frame={frame.data}
         profiles={profiles.data}
         defaultProfileId={shop.defaultProfileId}
+        drawer={cutters.data ?? NO_DRAWER}
         shopName={shop.name}
         mayEdit={mayDo('edit-frames') && !frame.data.removed}
         mayRelease={mayDo('release') && !frame.data.removed}

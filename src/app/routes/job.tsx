@@ -1,5 +1,7 @@
+import { useState } from 'react';
 import { useParams } from 'react-router';
 import type { FrameRow, JobPage } from '#shared/contracts/jobs.ts';
+import { BoxPartsDialog } from '../../features/box/box-parts-dialog.tsx';
 import { useFrame } from '../../features/frame-page/api/get-frame.ts';
 import { useJob } from '../../features/jobs/api/get-job.ts';
 import { FrameDrawing } from '../../features/jobs/frame-drawing.tsx';
@@ -10,6 +12,9 @@ import { NewFrame } from '../../features/jobs/new-frame.tsx';
 import { RenameJob } from '../../features/jobs/rename-job.tsx';
 import { useProfiles } from '../../features/profiles/api/list-profiles.ts';
 import { useSignedIn } from '../../features/session/signed-in.tsx';
+import { Button } from '../../ui/button.tsx';
+import { ButtonLink } from '../../ui/button-link.tsx';
+import { Dialog } from '../../ui/dialog.tsx';
 import { Fetched } from '../../ui/fetched.tsx';
 import { plural } from '../../ui/plural.ts';
 import { Section } from '../../ui/section.tsx';
@@ -21,6 +26,43 @@ function RowDrawing({ row }: { readonly row: FrameRow }) {
   const { data } = useFrame(row.id);
   return data ? <FrameDrawing particulars={data.particulars} /> : null;
 }
+
+/** The cut list of the box behind a frame, fetched when it is asked for. */
+function RowBoxParts({ row }: { readonly row: FrameRow }) {
+  const [open, setOpen] = useState(false);
+  return (
+    <>
+      <Button kind="quiet" aria-label={`Box parts of ${row.name}`} onClick={() => setOpen(true)}>
+        Box parts
+      </Button>
+      {open && <FrameBoxParts frameId={row.id} name={row.name} onClose={() => setOpen(false)} />}
+    </>
+  );
+}
+
+interface FrameBoxPartsProps {
+  readonly frameId: string;
+  readonly name: string;
+  readonly onClose: () => void;
+}
+
+function FrameBoxParts({ frameId, name, onClose }: FrameBoxPartsProps) {
+  const query = useFrame(frameId);
+  if (query.data) return <BoxPartsDialog particulars={query.data.particulars} onClose={onClose} />;
+  return (
+    <Dialog title={`Box parts of ${name}`} onClose={onClose}>
+      <Fetched query={query} what="the frame">
+        {() => null}
+      </Fetched>
+    </Dialog>
+  );
+}
+
+const FromABox = ({ jobId }: { readonly jobId: string }) => (
+  <ButtonLink kind="quiet" to={`/jobs/${jobId}/box`}>
+    From a box
+  </ButtonLink>
+);
 
 function findingsText(frames: readonly FrameRow[]): string {
   const total = (of: (row: FrameRow) => number) => frames.reduce((sum, row) => sum + of(row), 0);
@@ -46,7 +88,14 @@ function JobTitleBlock({ page, jobId, unknown }: JobTitleBlockProps) {
   const released = page?.frames.filter((row) => row.revision !== '').length ?? 0;
   return (
     <TitleBlock
-      action={mayEdit ? <NewFrame wide jobId={jobId} unit={shop.unit} /> : undefined}
+      action={
+        mayEdit ? (
+          <>
+            <NewFrame wide jobId={jobId} unit={shop.unit} />
+            <FromABox jobId={jobId} />
+          </>
+        ) : undefined
+      }
       actionNote={mayEdit ? 'or import frame files' : undefined}
     >
       <TitleCell label="Shop">{shop.name}</TitleCell>
@@ -85,7 +134,13 @@ export function JobRoute() {
                 frames={frames}
                 mayEdit={mayEdit}
                 drawing={(row) => <RowDrawing row={row} />}
-                newFrame={<NewFrame jobId={jobId} unit={shop.unit} />}
+                actions={(row) => <RowBoxParts row={row} />}
+                newFrame={
+                  <>
+                    <NewFrame jobId={jobId} unit={shop.unit} />
+                    <FromABox jobId={jobId} />
+                  </>
+                }
               />
             </div>
             <aside className="grid content-start gap-x-8 sm:grid-cols-2 xl:grid-cols-1 print:hidden">

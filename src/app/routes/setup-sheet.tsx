@@ -14,8 +14,6 @@ import { SetupSheetPage } from '../../features/setup-sheet/setup-sheet-page.tsx'
 import { Fetched } from '../../ui/fetched.tsx';
 import { Sheet } from '../../ui/sheet.tsx';
 
-const PAGES: readonly SheetPage['id'][] = ['back', 'turn', 'front', 'cutters'];
-
 interface ShownSheetProps {
   readonly frame: Frame;
   /** null: the draft. */
@@ -55,7 +53,7 @@ function ShownSheet({ frame, revision, stored }: ShownSheetProps) {
       jobName={frame.jobName}
       newerRevision={revision !== null && newest !== revision.letter ? newest : ''}
       pdf={`${at}/${of}/setup-sheet.pdf${revision === null ? '' : `?profile=${encodeURIComponent(stored.id)}`}`}
-      shown={PAGES.find((id) => id === search.get('page')) ?? 'back'}
+      shown={model.pages.find((page) => page.id === search.get('page'))?.id ?? 'back'}
       addressOf={addressOf}
     />
   );

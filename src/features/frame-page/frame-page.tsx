@@ -2,6 +2,7 @@ import { useQueryClient } from '@tanstack/react-query';
 import { useMemo, useState, useSyncExternalStore, type ReactNode } from 'react';
 import type { Frame } from '#shared/contracts/frames.ts';
 import type { StoredProfile } from '#shared/contracts/profiles.ts';
+import type { DrawerCutter } from '#shared/kernel/cutter-drawer/drawer-cutter.ts';
 import type { Particulars } from '#shared/kernel/particulars/particulars.ts';
 import type { WorkedFrame } from '#shared/kernel/worked-frame.ts';
 import { nextLetter } from '#shared/kernel/revisions/next-letter.ts';
@@ -9,6 +10,7 @@ import { Button } from '../../ui/button.tsx';
 import { Sheet } from '../../ui/sheet.tsx';
 import { frameQuery } from './api/get-frame.ts';
 import { FindingsList } from './findings/findings-list.tsx';
+import { DrawerProvider } from './form/drawer.ts';
 import { FormBar } from './form/form-bar.tsx';
 import { ParticularsForm } from './form/particulars-form.tsx';
 import { useUndoKeys } from './form/use-undo-keys.ts';
@@ -32,6 +34,8 @@ interface FramePageProps {
   readonly frame: Frame;
   readonly profiles: readonly StoredProfile[];
   readonly defaultProfileId: string;
+  /** The shop's cutters, to take numbers from. */
+  readonly drawer: readonly DrawerCutter[];
   readonly shopName: string;
   readonly mayEdit: boolean;
   readonly mayRelease: boolean;
@@ -68,7 +72,7 @@ function FrameWork({ renderCutPart }: Pick<FramePageProps, 'renderCutPart'>) {
 }
 
 /** The frame page: particulars at the left, both faces, findings, and the title block with the release. */
-export function FramePage({ frame, profiles, defaultProfileId, shopName, mayEdit, mayRelease, renderCutPart }: FramePageProps) {
+export function FramePage({ frame, profiles, defaultProfileId, drawer, shopName, mayEdit, mayRelease, renderCutPart }: FramePageProps) {
   const client = useQueryClient();
   const { editor, autosave, copyKept } = useDraft(frame);
   const desk = useMemo(() => createDesk(editor, !mayEdit), [editor, mayEdit]);
@@ -149,7 +153,9 @@ export function FramePage({ frame, profiles, defaultProfileId, shopName, mayEdit
             </FormBar>
             <div className="relative min-h-0 flex-1 overflow-y-auto px-4 pt-4 contain-content">
               {mayEdit && <EarlierCopyNotice frame={frame} editor={editor} onConflict={setEarlier} />}
-              <ParticularsForm />
+              <DrawerProvider value={drawer}>
+                <ParticularsForm />
+              </DrawerProvider>
             </div>
           </div>
           <FrameWork renderCutPart={renderCutPart} />

@@ -7,7 +7,9 @@ import { plural } from '../../ui/plural.ts';
 import { TitleBlock, TitleCell } from '../../ui/title-block.tsx';
 import { useDesk, useEditor } from './model/desk.ts';
 import type { EditorState } from './model/frame-editor.ts';
-import { useSettled, useSettledStore } from './model/use-settled.ts';
+import type { View } from './model/view.ts';
+import { useStore } from './model/store.ts';
+import { useSettled } from './model/use-settled.ts';
 
 /** A CSS pixel is 1/96 in by definition (CSS Values and Units, absolute lengths); screens come near to it. */
 const PX_PER_INCH = 96;
@@ -33,12 +35,12 @@ function FindingsCell() {
   );
 }
 
-const same = (scale: number): number => scale;
+const scaleOf = (view: View): number => view.scale;
 
 function ScaleCell() {
   const desk = useDesk();
   const unit = useEditor((s) => s.history.present.unit);
-  const words = scaleWords(useSettledStore(desk.scale, same), unit);
+  const words = scaleWords(useStore(desk.settledView, scaleOf), unit);
   return (
     <TitleCell label="Scale" detail={UNIT_WORDS[unit]}>
       {words}

@@ -13,6 +13,8 @@ interface FramesTableProps {
   readonly frames: readonly FrameRow[];
   /** A frame's small drawing; made only when its row is near. */
   readonly drawing: (row: FrameRow) => ReactNode;
+  /** More to do with a frame, before copying. */
+  readonly actions?: (row: FrameRow) => ReactNode;
   /** Left out for people who may not. */
   readonly onCopy?: (row: FrameRow) => void;
   readonly onPutAway?: (row: FrameRow) => void;
@@ -81,7 +83,7 @@ const COLUMNS: readonly Column<FrameRow>[] = [
   { key: 'changed', head: 'Changed', sortBy: (row) => row.changedAt, cell: (row) => <When iso={row.changedAt} /> },
 ];
 
-export function FramesTable({ frames, drawing, onCopy, onPutAway }: FramesTableProps) {
+export function FramesTable({ frames, drawing, actions, onCopy, onPutAway }: FramesTableProps) {
   const columns: Column<FrameRow>[] = [
     {
       key: 'drawing',
@@ -96,6 +98,7 @@ export function FramesTable({ frames, drawing, onCopy, onPutAway }: FramesTableP
       hideHead: true,
       cell: (row) => (
         <div className="flex flex-col items-end gap-x-4 2xl:flex-row 2xl:justify-end">
+          {actions?.(row)}
           {onCopy && (
             <Button kind="quiet" aria-label={`Copy ${row.name}`} onClick={() => onCopy(row)}>
               Copy

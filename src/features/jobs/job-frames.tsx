@@ -14,12 +14,14 @@ interface JobFramesProps {
   readonly frames: readonly FrameRow[];
   readonly mayEdit: boolean;
   readonly drawing: (row: FrameRow) => ReactNode;
+  /** More to do with a frame. */
+  readonly actions?: (row: FrameRow) => ReactNode;
   /** Offered on an empty job. */
   readonly newFrame: ReactNode;
 }
 
 /** The frames of a job, with copying, putting away and its undoing. */
-export function JobFrames({ frames, mayEdit, drawing, newFrame }: JobFramesProps) {
+export function JobFrames({ frames, mayEdit, drawing, actions, newFrame }: JobFramesProps) {
   const [putAway, setPutAway] = useState<{ id: string; name: string } | null>(null);
   const change = useChangeFrame();
   const copy = useCopyFrame();
@@ -55,6 +57,7 @@ export function JobFrames({ frames, mayEdit, drawing, newFrame }: JobFramesProps
         <FramesTable
           frames={frames}
           drawing={drawing}
+          actions={actions}
           onCopy={mayEdit ? copyRow : undefined}
           onPutAway={mayEdit ? away : undefined}
         />

@@ -7,10 +7,14 @@ const SET_WORDS: Record<string, string> = {
   DADO: 'Dados',
   SQUARING: 'Squaring edge',
   BLANK: 'Blank',
+  BEAD_INNER: 'Bead, opening side',
+  BEAD_OUTER: 'Bead, frame side',
+  QUIRK: 'Quirk',
+  QUIRK_CORNER: 'Quirk corners',
   OPENING: 'Openings, entered size',
   OPENING_AXIS: 'Openings, cutter axis',
   CORNER_LIFT: 'Corner lift',
-  CORNER_VEE: 'Openings, corner follow-up',
+  CORNER_VEE: 'Corner V',
   PERIMETER: 'Perimeter',
   LABELS: 'Labels',
 };
@@ -23,13 +27,13 @@ function carries(profile: FileProfile, set: string): boolean {
   return true;
 }
 
-/** The layer names that a template gives, for the line sets of a frame with square edges. Empty while the template is wrong. */
+/** The layer names that a template gives, for all line sets that a frame may have. Empty while the template is wrong. */
 export function LayerExample({ profile }: { readonly profile: FileProfile }) {
   const checked = checkLayerTemplate(profile.layerTemplate);
   if (!checked.ok) return <p className="text-pencil">The names show here once the template can be read.</p>;
   const rows = checked.example
     .map(({ key, name }) => ({ face: key.split('/')[0] ?? '', set: key.split('/')[1] ?? '', name }))
-    .filter(({ set }) => SET_WORDS[set] !== undefined && carries(profile, set));
+    .filter(({ set }) => carries(profile, set));
   return (
     <table className="w-full border-collapse text-left">
       <caption className="sr-only">Layer names that this template gives</caption>

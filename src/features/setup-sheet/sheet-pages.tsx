@@ -14,6 +14,7 @@ const STEP_WORDS: Record<SheetPage['id'], string> = {
   back: 'Back',
   turn: 'Turn over',
   front: 'Front',
+  section: 'Edge',
   cutters: 'Cutters',
 };
 

@@ -16,7 +16,8 @@ afterEach(() => {
 });
 
 const path = () => join(folder, 'lock.json');
-const write = (holder: object) => writeFileSync(path(), JSON.stringify({ pid: process.pid, started: 'x', host: hostname(), token: 't', ...holder }));
+const write = (holder: object) =>
+  writeFileSync(path(), JSON.stringify({ pid: process.pid, started: 'x', host: hostname(), token: 't', ...holder }));
 const startOther = () => (other = spawn(process.execPath, ['-e', 'setInterval(() => {}, 1000)']));
 
 describe('The lock of a data folder', () => {

@@ -30,7 +30,9 @@ beforeAll(async () => {
   expectStatus(await visitor.post('/api/demo-sign-in', { role: 'designer' }), 200);
   const { jobs } = jobList.parse((await visitor.get('/api/jobs')).json());
   const page = jobPage.parse((await visitor.get(`/api/jobs/${jobs[0]!.id}`)).json());
-  frames = await Promise.all(page.frames.map(async (f) => frameContract.parse((await visitor.get(`/api/frames/${f.id}`)).json())));
+  frames = await Promise.all(
+    page.frames.map(async (f) => frameContract.parse((await visitor.get(`/api/frames/${f.id}`)).json())),
+  );
 });
 afterAll(() => server.close());
 
@@ -47,10 +49,26 @@ describe('The demo scenario', () => {
     expect(frames.length).toBeGreaterThanOrEqual(6);
     const all = frames.map((f) => f.particulars);
     const text = JSON.stringify(all);
-    for (const part of ['"rows"', '"arch"', '"traced"', '"all-edges"', '"end-over-end"', '"mm"', '"tapered"', '"stopped"']) expect(text).toContain(part);
+    for (const part of [
+      '"rows"',
+      '"arch"',
+      '"traced"',
+      '"all-edges"',
+      '"end-over-end"',
+      '"mm"',
+      '"tapered"',
+      '"stopped"',
+    ])
+      expect(text).toContain(part);
     expect(all.some((p) => p.outline.kind === 'members' && p.outline.feet > 0)).toBe(true);
-    expect(all.some((p) => p.outline.kind === 'members' && 'columns' in p.outline.layout && p.outline.layout.columns.length === 3)).toBe(true);
-    expect(all.some((p) => p.outline.kind === 'traced' && p.outline.perimeter.some((v) => (v[2] ?? 0) !== 0))).toBe(true);
+    expect(
+      all.some(
+        (p) => p.outline.kind === 'members' && 'columns' in p.outline.layout && p.outline.layout.columns.length === 3,
+      ),
+    ).toBe(true);
+    expect(all.some((p) => p.outline.kind === 'traced' && p.outline.perimeter.some((v) => (v[2] ?? 0) !== 0))).toBe(
+      true,
+    );
     expect(all.some((p) => p.cutters.opening.kind === 'straight')).toBe(true);
   });
 
@@ -59,7 +77,9 @@ describe('The demo scenario', () => {
     expect(released.length).toBeGreaterThanOrEqual(4);
     expect(released.every((f) => f.revisions[0]!.letter === 'A')).toBe(true);
     expect(released.some((f) => findingsOf(f).some((x) => x.level === 'caution'))).toBe(true);
-    expect(frames.filter((f) => findingsOf(f).some((x) => x.level === 'stop')).map((f) => f.revisions.length)).toEqual([0]);
+    expect(frames.filter((f) => findingsOf(f).some((x) => x.level === 'stop')).map((f) => f.revisions.length)).toEqual([
+      0,
+    ]);
   });
 
   it.each(roles.options)('When somebody enters as %s, then they are the demo person of that role', async (role) => {
@@ -72,7 +92,9 @@ describe('The demo scenario', () => {
 
   it('When somebody tries a demo person with a password, then they do not get in', async () => {
     for (const password of ['null', 'password', ' ']) {
-      expect((await server.visitor().post('/api/sign-in', { email: DEMO_PEOPLE[0]!.email, password })).status).toBe(401);
+      expect((await server.visitor().post('/api/sign-in', { email: DEMO_PEOPLE[0]!.email, password })).status).toBe(
+        401,
+      );
     }
   });
 

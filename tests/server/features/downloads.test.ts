@@ -68,7 +68,13 @@ describe('Downloading a layer set', () => {
     const path = `/api/frames/${frame.id}/revisions/A/layer-set.zip`;
     const first = await visitor.get(path);
     server.wait(3600);
-    expectStatus(await visitor.put(`/api/frames/${frame.id}/draft`, { version: 1, particulars: aFrame({ 'setup.allowance': 1.5 }) }), 200);
+    expectStatus(
+      await visitor.put(`/api/frames/${frame.id}/draft`, {
+        version: 1,
+        particulars: aFrame({ 'setup.allowance': 1.5 }),
+      }),
+      200,
+    );
     expect((await visitor.get(path)).bytes).toEqual(first.bytes);
   });
 
@@ -91,8 +97,13 @@ describe('Downloading a layer set', () => {
   it('When the name is in another script, then the header is safe and readable all the same', async () => {
     const { visitor, frame } = await openShopWithFrame(server, aFrame({ name: 'Küche "links" / 厨房' }));
     const answer = await visitor.get(`/api/frames/${frame.id}/draft/frame-file`);
-    expect(answer.headers.get('content-disposition')).toMatch(/^attachment; filename="[\x20-\x7e]+_draft\.frame\.json"$/);
-    expect(parseFrameFile(new TextDecoder().decode(answer.bytes))).toEqual({ ok: true, particulars: frame.particulars });
+    expect(answer.headers.get('content-disposition')).toMatch(
+      /^attachment; filename="[\x20-\x7e]+_draft\.frame\.json"$/,
+    );
+    expect(parseFrameFile(new TextDecoder().decode(answer.bytes))).toEqual({
+      ok: true,
+      particulars: frame.particulars,
+    });
   });
 
   it('When the draft has a stop, then its setup sheet is still there to look at', async () => {
@@ -118,12 +129,23 @@ describe('Downloading a layer set', () => {
     const away = await addFrame(visitor, job.id, aFrame({ name: 'Put away' }));
     for (const frame of [one, two, away]) await releaseFrame(visitor, frame);
     expectStatus(await visitor.patch(`/api/frames/${away.id}`, { removed: true }), 200);
-    expectStatus(await visitor.put(`/api/frames/${two.id}/draft`, { version: 1, particulars: aFrame({ name: 'Two', 'setup.allowance': 1.5 }) }), 200);
+    expectStatus(
+      await visitor.put(`/api/frames/${two.id}/draft`, {
+        version: 1,
+        particulars: aFrame({ name: 'Two', 'setup.allowance': 1.5 }),
+      }),
+      200,
+    );
     await releaseFrame(visitor, { id: two.id, version: 2 });
 
     const files = await filesIn(expectStatus(await visitor.get(`/api/jobs/${job.id}/layer-sets.zip`), 200));
     const names = [...files.keys()];
-    expect(names.filter((n) => n.endsWith('_back.dxf')).map((n) => n.split('/').pop()).sort()).toEqual(['One_rev-A_back.dxf', 'Two_rev-B_back.dxf']);
+    expect(
+      names
+        .filter((n) => n.endsWith('_back.dxf'))
+        .map((n) => n.split('/').pop())
+        .sort(),
+    ).toEqual(['One_rev-A_back.dxf', 'Two_rev-B_back.dxf']);
     expect(names.some((n) => !n.includes('/') && n.endsWith('.pdf'))).toBe(true);
   });
 });
@@ -134,7 +156,9 @@ describe('While files are made', () => {
     await releaseFrame(visitor, frame);
     const began = performance.now();
     let done = false;
-    const downloads = Promise.all(Array.from({ length: 20 }, () => visitor.get(`/api/frames/${frame.id}/revisions/A/layer-set.zip`))).finally(() => (done = true));
+    const downloads = Promise.all(
+      Array.from({ length: 20 }, () => visitor.get(`/api/frames/${frame.id}/revisions/A/layer-set.zip`)),
+    ).finally(() => (done = true));
     const waits: number[] = [];
     while (!done) {
       const asked = performance.now();
@@ -151,8 +175,13 @@ describe('While files are made', () => {
   it('When more is asked for than can wait, then the rest is told to come back', async () => {
     const { visitor, frame } = await openShopWithFrame(server);
     await releaseFrame(visitor, frame);
-    const answers = await Promise.all(Array.from({ length: 80 }, () => visitor.get(`/api/frames/${frame.id}/draft/setup-sheet.pdf`)));
-    const counts = { made: answers.filter((a) => a.status === 200).length, later: answers.filter((a) => a.status === 429).length };
+    const answers = await Promise.all(
+      Array.from({ length: 80 }, () => visitor.get(`/api/frames/${frame.id}/draft/setup-sheet.pdf`)),
+    );
+    const counts = {
+      made: answers.filter((a) => a.status === 200).length,
+      later: answers.filter((a) => a.status === 429).length,
+    };
     expect(counts.made + counts.later).toBe(80);
     expect(counts.later).toBeGreaterThan(0);
     expect(counts.made).toBeGreaterThanOrEqual(64);

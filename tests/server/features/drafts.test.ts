@@ -1,5 +1,12 @@
-import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { draftSaved, frame as frameContract, staleDraft, type DraftSaved, type Frame, type StaleDraft } from '../../../shared/contracts/frames.ts';
+import { afterAll, beforeAll, describe, expect, it, vi } from 'vitest';
+import {
+  draftSaved,
+  frame as frameContract,
+  staleDraft,
+  type DraftSaved,
+  type Frame,
+  type StaleDraft,
+} from '../../../shared/contracts/frames.ts';
 import { jobList, jobPage } from '../../../shared/contracts/jobs.ts';
 import type { Particulars } from '../../../shared/kernel/particulars/particulars.ts';
 import { aFrame, aFrameWithCaution, aFrameWithStop } from '../../builders/particulars.ts';
@@ -14,9 +21,12 @@ let server: TestServer;
 beforeAll(async () => void (server = await startTestServer()));
 afterAll(() => server.close());
 
-const save = (visitor: HttpClient, id: string, version: number, particulars: Particulars) => visitor.put(`/api/frames/${id}/draft`, { version, particulars });
-const saved = async (...args: Parameters<typeof save>): Promise<DraftSaved> => draftSaved.parse(expectStatus(await save(...args), 200).json());
-const read = async (visitor: HttpClient, id: string): Promise<Frame> => frameContract.parse((await visitor.get(`/api/frames/${id}`)).json());
+const save = (visitor: HttpClient, id: string, version: number, particulars: Particulars) =>
+  visitor.put(`/api/frames/${id}/draft`, { version, particulars });
+const saved = async (...args: Parameters<typeof save>): Promise<DraftSaved> =>
+  draftSaved.parse(expectStatus(await save(...args), 200).json());
+const read = async (visitor: HttpClient, id: string): Promise<Frame> =>
+  frameContract.parse((await visitor.get(`/api/frames/${id}`)).json());
 
 describe('Saving a draft', () => {
   it('When a draft is saved, then it comes back as entered, one version on, with who and when', async () => {
@@ -53,7 +63,38 @@ describe('Saving a draft', () => {
     const { visitor, frame, job } = await openShopWithFrame(server);
     await saved(visitor, frame.id, 1, aFrameWithStop());
     const page = jobPage.parse((await visitor.get(`/api/jobs/${job.id}`)).json());
-    expect(page.frames[0]).toMatchObject({ id: frame.id, findings: { stops: 1 }, width: 33, height: 30.5, openings: 2, revision: '', draftChanged: true });
+    expect(page.frames[0]).toMatchObject({
+      id: frame.id,
+      findings: { stops: 1 },
+      width: 33,
+      height: 30.5,
+      openings: 2,
+      revision: '',
+      draftChanged: true,
+    });
+  });
+});
+
+describe('Working out a large tracing', () => {
+  const ring = (count: number, radius: number) =>
+    Array.from({ length: count }, (_, i): [number, number] => {
+      const angle = (2 * Math.PI * i) / count;
+      return [30 + radius * Math.cos(angle), 30 + radius * Math.sin(angle)];
+    });
+  const traced = (count: number): Particulars => ({
+    ...aFrame(),
+    outline: { kind: 'traced', perimeter: ring(count, 24), openings: [ring(count, 10)] },
+    dados: [],
+  });
+
+  it('When it has many vertices, then a worker does it and not the thread that answers; a small one is done on the spot', async () => {
+    const { visitor, frame } = await openShopWithFrame(server);
+    const make = vi.spyOn(server.makers, 'make');
+    await saved(visitor, frame.id, 1, traced(20));
+    expect(make).not.toHaveBeenCalled();
+    await saved(visitor, frame.id, 2, traced(2000));
+    expect(make).toHaveBeenCalledExactlyOnceWith('summary', traced(2000));
+    make.mockRestore();
   });
 });
 
@@ -92,14 +133,18 @@ describe('Two people on one draft', () => {
 
   it('When the version began with is no longer kept, then the two drafts are held against each other', async () => {
     const { first, frame } = await meet();
-    for (let version = 1; version <= 201; version++) await saved(first, frame.id, version, aFrame({ 'outline.width': 33 + version / 64 }));
+    for (let version = 1; version <= 201; version++)
+      await saved(first, frame.id, version, aFrame({ 'outline.width': 33 + version / 64 }));
     const { changes } = await refused(first, frame.id, 1, aFrame());
     expect(changes).toEqual([{ path: 'outline.width', yours: '33', theirs: String(33 + 201 / 64) }]);
   });
 
   it('When both save at the same moment, then one is saved and the other told', async () => {
     const { first, second, frame } = await meet();
-    const answers = await Promise.all([save(first, frame.id, 1, aFrame({ 'outline.width': 30 })), save(second, frame.id, 1, aFrame({ 'outline.width': 36 }))]);
+    const answers = await Promise.all([
+      save(first, frame.id, 1, aFrame({ 'outline.width': 30 })),
+      save(second, frame.id, 1, aFrame({ 'outline.width': 36 })),
+    ]);
     expect(answers.map((a) => a.status).sort()).toEqual([200, 409]);
     expect((await read(first, frame.id)).version).toBe(2);
   });
@@ -147,8 +192,10 @@ describe('Jobs', () => {
 
   it('When a job or a frame is put away, then it leaves the list, can be listed apart, and be brought back', async () => {
     const { visitor, job, frame } = await openShopWithFrame(server);
-    const frames = async (query = '') => jobPage.parse((await visitor.get(`/api/jobs/${job.id}${query}`)).json()).frames.map((f) => f.id);
-    const jobs = async (query = '') => jobList.parse((await visitor.get(`/api/jobs${query}`)).json()).jobs.map((j) => j.id);
+    const frames = async (query = '') =>
+      jobPage.parse((await visitor.get(`/api/jobs/${job.id}${query}`)).json()).frames.map((f) => f.id);
+    const jobs = async (query = '') =>
+      jobList.parse((await visitor.get(`/api/jobs${query}`)).json()).jobs.map((j) => j.id);
 
     expectStatus(await visitor.patch(`/api/frames/${frame.id}`, { removed: true }), 200);
     expect([await frames(), await frames('?removed=true')]).toEqual([[], [frame.id]]);

@@ -31,7 +31,8 @@ const taken = async (files: Files): Promise<FrameFilesTaken & { jobId: string }>
   const { answer, jobId } = await upload(files);
   return { ...frameFilesTaken.parse(expectStatus(answer, 200).json()), jobId };
 };
-const namesIn = async (jobId: string) => jobPage.parse((await visitor.get(`/api/jobs/${jobId}`)).json()).frames.map((f) => f.name);
+const namesIn = async (jobId: string) =>
+  jobPage.parse((await visitor.get(`/api/jobs/${jobId}`)).json()).frames.map((f) => f.name);
 
 describe('Uploading frame files', () => {
   it('When a file is good, then the frame is there, exactly as in the file', async () => {
@@ -69,13 +70,19 @@ describe('Uploading frame files', () => {
       ['large.json', 'x'.repeat(LIMITS.frameFileBytes + 1)],
       ['small.json', writeFrameFile(aFrame({ name: 'Small' }))],
     ]);
-    expect(result.refused).toMatchObject([{ file: 'large.json', message: expect.stringContaining(String(LIMITS.frameFileBytes)) as string }]);
+    expect(result.refused).toMatchObject([
+      { file: 'large.json', message: expect.stringContaining(String(LIMITS.frameFileBytes)) as string },
+    ]);
     expect(await namesIn(result.jobId)).toEqual(['Small']);
   });
 
   it('When there are too many files, or none, or in another field, then it says so and nothing is taken', async () => {
     const many = Array.from({ length: LIMITS.frameFilesAtOnce + 1 }, (_, i) => [`${i}.json`, '{}'] as const);
-    for (const { answer, jobId } of [await upload(many), await upload([]), await upload([['a.json', '{}']], 'drawings')]) {
+    for (const { answer, jobId } of [
+      await upload(many),
+      await upload([]),
+      await upload([['a.json', '{}']], 'drawings'),
+    ]) {
       expect(answer.status).toBe(400);
       expect(answer.json<{ fields: { takes: string }[] }>().fields[0]!.takes).toMatch(/files/);
       expect(await namesIn(jobId)).toEqual([]);
@@ -85,7 +92,10 @@ describe('Uploading frame files', () => {
   it('When it is no form at all, then it says so', async () => {
     const { id } = await addJob(visitor);
     expect((await visitor.post(`/api/jobs/${id}/frame-files`, { files: [] })).status).toBe(400);
-    const broken = await visitor.send('POST', `/api/jobs/${id}/frame-files`, { body: '--x\r\nbroken', headers: { 'Content-Type': 'multipart/form-data; boundary=x' } });
+    const broken = await visitor.send('POST', `/api/jobs/${id}/frame-files`, {
+      body: '--x\r\nbroken',
+      headers: { 'Content-Type': 'multipart/form-data; boundary=x' },
+    });
     expect(broken.status).toBe(400);
   });
 });

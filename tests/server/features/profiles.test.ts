@@ -17,7 +17,8 @@ beforeAll(async () => {
 afterAll(() => server.close());
 
 const aProfile = (change: object = {}) => ({ ...BUILTIN_PROFILES[0]!.profile, name: 'Ours', ...change });
-const add = async (change: object): Promise<StoredProfile> => storedProfile.parse(expectStatus(await visitor.post('/api/profiles', aProfile(change)), 201).json());
+const add = async (change: object): Promise<StoredProfile> =>
+  storedProfile.parse(expectStatus(await visitor.post('/api/profiles', aProfile(change)), 201).json());
 const list = async () => profileList.parse((await visitor.get('/api/profiles')).json()).profiles;
 
 describe('File profiles', () => {
@@ -35,18 +36,26 @@ describe('File profiles', () => {
     expect((await list())[3]!.profile).toMatchObject({ flavour: 'R12', unit: 'mm', decimals: 4 });
   });
 
-  it.each(['Taken', 'taken', BUILTIN_PROFILES[1]!.profile.name.toUpperCase()])('When the name %j is taken, then it is refused', async (name) => {
-    await visitor.post('/api/profiles', aProfile({ name: 'Taken' }));
-    const answer = await visitor.post('/api/profiles', aProfile({ name }));
-    expect(answer.status).toBe(409);
-    expect(answer.json().code).toBe('name-taken');
-  });
+  it.each(['Taken', 'taken', BUILTIN_PROFILES[1]!.profile.name.toUpperCase()])(
+    'When the name %j is taken, then it is refused',
+    async (name) => {
+      await visitor.post('/api/profiles', aProfile({ name: 'Taken' }));
+      const answer = await visitor.post('/api/profiles', aProfile({ name }));
+      expect(answer.status).toBe(409);
+      expect(answer.json().code).toBe('name-taken');
+    },
+  );
 
-  it.each(['{face}', '{colour}', 'ALL'])('When the template %j does not tell line sets apart, then the field is named', async (layerTemplate) => {
-    const answer = await visitor.post('/api/profiles', aProfile({ name: `T ${layerTemplate}`, layerTemplate }));
-    expect(answer.status).toBe(400);
-    expect(answer.json<{ fields: unknown[] }>().fields).toMatchObject([{ path: 'layerTemplate', got: JSON.stringify(layerTemplate) }]);
-  });
+  it.each(['{face}', '{colour}', 'ALL'])(
+    'When the template %j does not tell line sets apart, then the field is named',
+    async (layerTemplate) => {
+      const answer = await visitor.post('/api/profiles', aProfile({ name: `T ${layerTemplate}`, layerTemplate }));
+      expect(answer.status).toBe(400);
+      expect(answer.json<{ fields: unknown[] }>().fields).toMatchObject([
+        { path: 'layerTemplate', got: JSON.stringify(layerTemplate) },
+      ]);
+    },
+  );
 
   it('When decimals are not 4 to 6, then the field is named', async () => {
     const answer = await visitor.post('/api/profiles', aProfile({ decimals: 3 }));
@@ -69,15 +78,21 @@ describe('File profiles', () => {
 
   it("When the shop's default is deleted, then the first built-in one is the default again", async () => {
     const { id } = await add({ name: 'Default' });
-    expect(expectStatus(await visitor.patch('/api/shop', { defaultProfileId: id }), 200).json()).toMatchObject({ defaultProfileId: id });
+    expect(expectStatus(await visitor.patch('/api/shop', { defaultProfileId: id }), 200).json()).toMatchObject({
+      defaultProfileId: id,
+    });
     expectStatus(await visitor.delete(`/api/profiles/${id}`), 204);
-    expect((await visitor.get('/api/session')).json()).toMatchObject({ shop: { defaultProfileId: BUILTIN_PROFILES[0]!.id } });
+    expect((await visitor.get('/api/session')).json()).toMatchObject({
+      shop: { defaultProfileId: BUILTIN_PROFILES[0]!.id },
+    });
   });
 
   it('When a shop changes its settings, then they are in the session', async () => {
     const { visitor: owner } = await openShop(server);
     expectStatus(await owner.patch('/api/shop', { name: 'New name', unit: 'mm', paper: 'A4' }), 200);
-    expect((await owner.get('/api/session')).json()).toMatchObject({ shop: { name: 'New name', unit: 'mm', paper: 'A4' } });
+    expect((await owner.get('/api/session')).json()).toMatchObject({
+      shop: { name: 'New name', unit: 'mm', paper: 'A4' },
+    });
     expect((await owner.patch('/api/shop', {})).status).toBe(200);
     expect((await owner.patch('/api/shop', { paper: 'A0' })).status).toBe(400);
   });

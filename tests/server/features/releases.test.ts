@@ -21,7 +21,13 @@ const codeOf = (answer: { json<T>(): T }) => answer.json<{ code: string }>().cod
 
 /** A change that makes no finding: 1 in is what the frame has. */
 async function change(visitor: HttpClient, frame: Frame, allowance: number): Promise<Frame> {
-  expectStatus(await visitor.put(`/api/frames/${frame.id}/draft`, { version: frame.version, particulars: aFrame({ 'setup.allowance': allowance }) }), 200);
+  expectStatus(
+    await visitor.put(`/api/frames/${frame.id}/draft`, {
+      version: frame.version,
+      particulars: aFrame({ 'setup.allowance': allowance }),
+    }),
+    200,
+  );
   return frameContract.parse((await visitor.get(`/api/frames/${frame.id}`)).json());
 }
 
@@ -69,7 +75,9 @@ describe('Releasing a revision', () => {
     const { visitor, frame } = await openShopWithFrame(server, aFrameWithStop());
     const answer = expectStatus(await release(visitor, frame, { acknowledged: ['dado-too-deep'] }), 422);
     expect(codeOf(answer)).toBe('frame-has-stops');
-    expect(releaseRefused.parse(answer.json<{ details: unknown }>().details).findings.map((f) => f.code)).toEqual(['dado-too-deep']);
+    expect(releaseRefused.parse(answer.json<{ details: unknown }>().details).findings.map((f) => f.code)).toEqual([
+      'dado-too-deep',
+    ]);
     expect(frameContract.parse((await visitor.get(`/api/frames/${frame.id}`)).json()).revisions).toEqual([]);
   });
 
@@ -87,7 +95,9 @@ describe('Releasing a revision', () => {
     const { visitor: other } = await addPerson(server, session.shop.id, 'designer');
     await change(other, frame, 1.25);
     const answer = expectStatus(await release(visitor, frame), 409);
-    expect(answer.json<{ details: { changes: unknown[] } }>().details.changes).toEqual([{ path: 'setup.allowance', was: '1', theirs: '1.25', yours: '1' }]);
+    expect(answer.json<{ details: { changes: unknown[] } }>().details.changes).toEqual([
+      { path: 'setup.allowance', was: '1', theirs: '1.25', yours: '1' },
+    ]);
   });
 
   it('When two release at the same moment, then there is one revision', async () => {
@@ -115,7 +125,10 @@ describe('Releasing a revision', () => {
 
 describe('A released revision', () => {
   it.each([
-    ['changed', (id: string) => server.database.queries.update(revisions).set({ note: 'other' }).where(eq(revisions.frameId, id))],
+    [
+      'changed',
+      (id: string) => server.database.queries.update(revisions).set({ note: 'other' }).where(eq(revisions.frameId, id)),
+    ],
     ['removed', (id: string) => server.database.queries.delete(revisions).where(eq(revisions.frameId, id))],
     ['emptied', () => server.database.queries.execute(sql`truncate revisions`)],
     ['removed with its frame', (id: string) => server.database.queries.delete(frames).where(eq(frames.id, id))],
@@ -124,7 +137,9 @@ describe('A released revision', () => {
     await releaseFrame(visitor, frame);
     const before = await server.database.queries.select().from(revisions).where(eq(revisions.frameId, frame.id));
     await expect(act(frame.id)).rejects.toThrow();
-    expect(await server.database.queries.select().from(revisions).where(eq(revisions.frameId, frame.id))).toEqual(before);
+    expect(await server.database.queries.select().from(revisions).where(eq(revisions.frameId, frame.id))).toEqual(
+      before,
+    );
   });
 
   it('When its shop and its job are renamed, then it keeps the names it was released under', async () => {
@@ -139,7 +154,10 @@ describe('A released revision', () => {
     const { visitor, frame } = await openShopWithFrame(server);
     await releaseFrame(visitor, frame);
     await server.database.queries.execute(sql`alter table revisions disable trigger revisions_never_change`);
-    await server.database.queries.update(revisions).set({ file: new TextEncoder().encode('{}') }).where(eq(revisions.frameId, frame.id));
+    await server.database.queries
+      .update(revisions)
+      .set({ file: new TextEncoder().encode('{}') })
+      .where(eq(revisions.frameId, frame.id));
     await server.database.queries.execute(sql`alter table revisions enable trigger revisions_never_change`);
     expect((await visitor.get(`/api/frames/${frame.id}/revisions/A/frame-file`)).status).toBe(500);
     expect((await visitor.get(`/api/frames/${frame.id}/revisions/A/layer-set.zip`)).status).toBe(500);

@@ -12,12 +12,19 @@ let server: TestServer;
 beforeAll(async () => void (server = await startTestServer()));
 afterAll(() => server.close());
 
-const signedIn = async (visitor: HttpClient) => sessionContract.parse((await visitor.get('/api/session')).json()).user !== null;
-const signIn = (visitor: HttpClient, email: string, password = PASSWORD) => visitor.post('/api/sign-in', { email, password });
+const signedIn = async (visitor: HttpClient) =>
+  sessionContract.parse((await visitor.get('/api/session')).json()).user !== null;
+const signIn = (visitor: HttpClient, email: string, password = PASSWORD) =>
+  visitor.post('/api/sign-in', { email, password });
 
 describe('Signing up', () => {
   it('When somebody signs up, then a shop is theirs, they are its owner and signed in', async () => {
-    const { visitor, session } = await openShop(server, { shopName: 'Oak & Ash', name: 'Robin', email: ' Robin@Shop.Example ', unit: 'mm' });
+    const { visitor, session } = await openShop(server, {
+      shopName: 'Oak & Ash',
+      name: 'Robin',
+      email: ' Robin@Shop.Example ',
+      unit: 'mm',
+    });
     expect(session).toMatchObject({
       user: { name: 'Robin', email: 'robin@shop.example', role: 'owner' },
       shop: { name: 'Oak & Ash', unit: 'mm', paper: 'A4' },
@@ -30,14 +37,18 @@ describe('Signing up', () => {
     const email = anAddress();
     await openShop(server, { email });
     const before = await server.database.queries.$count(users);
-    const answer = await server.visitor().post('/api/sign-up', { shopName: 'S', name: 'N', email: email.toUpperCase(), password: PASSWORD });
+    const answer = await server
+      .visitor()
+      .post('/api/sign-up', { shopName: 'S', name: 'N', email: email.toUpperCase(), password: PASSWORD });
     expect(answer.status).toBe(409);
     expect(answer.json().code).toBe('email-taken');
     expect(await server.database.queries.$count(users)).toBe(before);
   });
 
   it('When entries are wrong, then each is named', async () => {
-    const answer = await server.visitor().post('/api/sign-up', { shopName: '', name: 'N', email: 'nonsense', password: 'short' });
+    const answer = await server
+      .visitor()
+      .post('/api/sign-up', { shopName: '', name: 'N', email: 'nonsense', password: 'short' });
     expect(answer.status).toBe(400);
     const paths = answer.json<{ fields: { path: string }[] }>().fields.map((f) => f.path);
     expect(paths.sort()).toEqual(['email', 'password', 'shopName']);
@@ -84,7 +95,11 @@ describe('Signing in and out', () => {
     expectStatus(await signIn(tablet, email), 200);
     const colleague = await addPerson(server, desk.session.shop.id, 'designer');
     expectStatus(await desk.visitor.post('/api/sign-out-everywhere'), 204);
-    expect([await signedIn(desk.visitor), await signedIn(tablet), await signedIn(colleague.visitor)]).toEqual([false, false, true]);
+    expect([await signedIn(desk.visitor), await signedIn(tablet), await signedIn(colleague.visitor)]).toEqual([
+      false,
+      false,
+      true,
+    ]);
   });
 
   it('When a cookie is forged, then it opens nothing', async () => {
@@ -96,7 +111,9 @@ describe('Signing in and out', () => {
 
   it('When the table of sessions is read, then it holds no session id', async () => {
     const { visitor } = await openShop(server);
-    const id = decodeURIComponent(visitor.cookie).replace(/^stilepost=s:/, '').split('.')[0]!;
+    const id = decodeURIComponent(visitor.cookie)
+      .replace(/^stilepost=s:/, '')
+      .split('.')[0]!;
     const rows = await server.database.queries.select().from(sessions);
     expect(rows.length).toBeGreaterThan(0);
     expect(JSON.stringify(rows)).not.toContain(id);
@@ -136,7 +153,9 @@ describe('Guessing passwords', () => {
 
   it('When guesses are sent all at once, then no more than five are looked at', async () => {
     const { session } = await openShop(server);
-    const answers = await Promise.all(Array.from({ length: 12 }, () => signIn(server.visitor(), session.user.email, 'wrong guess')));
+    const answers = await Promise.all(
+      Array.from({ length: 12 }, () => signIn(server.visitor(), session.user.email, 'wrong guess')),
+    );
     expect(answers.filter((a) => a.status === 401)).toHaveLength(5);
     expect(answers.filter((a) => a.status === 429)).toHaveLength(7);
   });

@@ -28,7 +28,10 @@ describe('Bad requests', () => {
   it('When the body is no JSON, then the answer is JSON and says what is wrong with it', async () => {
     const answer = await visitor.send('POST', '/api/jobs', { body: '{"name": ' });
     expect(answer.status).toBe(400);
-    expect(errorOf(answer)).toMatchObject({ code: 'invalid-input', message: expect.stringContaining('not valid JSON') as string });
+    expect(errorOf(answer)).toMatchObject({
+      code: 'invalid-input',
+      message: expect.stringContaining('not valid JSON') as string,
+    });
   });
 
   it('When the body is larger than allowed, then it is refused with the limit', async () => {
@@ -42,8 +45,15 @@ describe('Bad requests', () => {
     const answer = await visitor.post(`/api/jobs/${jobId}/frames`, { particulars });
     expect(answer.status).toBe(400);
     const { fields = [] } = errorOf(answer);
-    expect(fields.map((f) => f.path).sort()).toEqual(['particulars.colour', 'particulars.cutters.opening.kind', 'particulars.dados.0.depth']);
-    expect(fields.find((f) => f.path === 'particulars.dados.0.depth')).toMatchObject({ got: '-1', takes: 'a length above 0' });
+    expect(fields.map((f) => f.path).sort()).toEqual([
+      'particulars.colour',
+      'particulars.cutters.opening.kind',
+      'particulars.dados.0.depth',
+    ]);
+    expect(fields.find((f) => f.path === 'particulars.dados.0.depth')).toMatchObject({
+      got: '-1',
+      takes: 'a length above 0',
+    });
     for (const field of fields) expect(field.message).toContain(field.takes);
   });
 
@@ -63,14 +73,17 @@ describe('Bad requests', () => {
     expect(errorOf(answer).fields).toMatchObject([{ path: 'sort' }]);
   });
 
-  it.each(['/api/nothing', '/api/frames/%E0%A4%A', '/api/frames/%00', '/api/frames/..%2f..%2fetc%2fpasswd', '/api/frames/a%27%20or%201=1'])(
-    'When the path is %s, then it answers 404 as JSON',
-    async (path) => {
-      const answer = await visitor.get(path);
-      expect(answer.status).toBe(404);
-      expect(errorOf(answer).code).toBe('not-found');
-    },
-  );
+  it.each([
+    '/api/nothing',
+    '/api/frames/%E0%A4%A',
+    '/api/frames/%00',
+    '/api/frames/..%2f..%2fetc%2fpasswd',
+    '/api/frames/a%27%20or%201=1',
+  ])('When the path is %s, then it answers 404 as JSON', async (path) => {
+    const answer = await visitor.get(path);
+    expect(answer.status).toBe(404);
+    expect(errorOf(answer).code).toBe('not-found');
+  });
 
   it('When a body is not UTF-8 or of an unknown encoding, then it is refused and the server goes on', async () => {
     const answer = await visitor.send('POST', '/api/jobs', { body: '{}', headers: { 'Content-Encoding': 'sausage' } });

@@ -13,7 +13,8 @@ beforeAll(async () => {
 });
 afterAll(() => server.close());
 
-const addJob = (headers: Record<string, string>) => shop.visitor.send('POST', '/api/jobs', { body: { name: 'Job' }, headers });
+const addJob = (headers: Record<string, string>) =>
+  shop.visitor.send('POST', '/api/jobs', { body: { name: 'Job' }, headers });
 
 describe("Requests from another site's page", () => {
   it.each(['cross-site', 'same-site'])('When Sec-Fetch-Site says %s, then a change is refused', async (site) => {
@@ -26,9 +27,12 @@ describe("Requests from another site's page", () => {
     expect((await addJob({ 'Sec-Fetch-Site': site })).status).toBe(201);
   });
 
-  it.each(['https://elsewhere.example', 'null', 'http://127.0.0.1:1'])('When only Origin is sent and says %s, then a change is refused', async (origin) => {
-    expect((await addJob({ Origin: origin })).status).toBe(403);
-  });
+  it.each(['https://elsewhere.example', 'null', 'http://127.0.0.1:1'])(
+    'When only Origin is sent and says %s, then a change is refused',
+    async (origin) => {
+      expect((await addJob({ Origin: origin })).status).toBe(403);
+    },
+  );
 
   it('When Origin is this server, then a change is made', async () => {
     expect((await addJob({ Origin: shop.visitor.url })).status).toBe(201);
@@ -43,7 +47,9 @@ describe("Requests from another site's page", () => {
   });
 
   it('When the session cookie is set, then scripts cannot read it and other sites cannot send it', async () => {
-    const answer = await server.visitor().post('/api/sign-up', { shopName: 'S', name: 'N', email: 'cookie@shop.example', password: '0123456789' });
+    const answer = await server
+      .visitor()
+      .post('/api/sign-up', { shopName: 'S', name: 'N', email: 'cookie@shop.example', password: '0123456789' });
     expect(answer.headers.getSetCookie()).toEqual([expect.stringMatching(/^stilepost=.*HttpOnly.*SameSite=Lax/)]);
   });
 });

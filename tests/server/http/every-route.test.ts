@@ -3,7 +3,15 @@ import { role as roles, type Role } from '../../../shared/contracts/roles.ts';
 import { BUILTIN_PROFILES } from '../../../shared/kernel/profiles/builtin-profiles.ts';
 import { writeFrameFile } from '../../../shared/contracts/write-frame-file.ts';
 import { aFrame } from '../../builders/particulars.ts';
-import { addFrame, addJob, addPerson, expectStatus, openShop, releaseFrame, type SignedInVisitor } from '../../builders/shops.ts';
+import {
+  addFrame,
+  addJob,
+  addPerson,
+  expectStatus,
+  openShop,
+  releaseFrame,
+  type SignedInVisitor,
+} from '../../builders/shops.ts';
 import type { HttpClient } from '../../setup/http-client.ts';
 import { listRoutes } from '../../setup/list-routes.ts';
 import { allowSlowMachine } from '../../setup/slow-machine.ts';
@@ -16,6 +24,7 @@ interface Things {
   readonly jobId: string;
   readonly frameId: string;
   readonly profileId: string;
+  readonly cutterId: string;
 }
 
 interface Row {
@@ -31,9 +40,19 @@ interface Row {
 
 const EDITORS: readonly Role[] = ['owner', 'designer'];
 const PROFILE_EDITORS: readonly Role[] = ['owner', 'programmer'];
+const CUTTER_EDITORS: readonly Role[] = ['owner', 'programmer'];
 
 let names = 0;
 const aProfile = () => ({ ...BUILTIN_PROFILES[0]!.profile, name: `Profile ${++names}` });
+const aCutter = () => ({
+  unit: 'in',
+  cutter: { kind: 'straight', name: `Cutter ${++names}`, diameter: 0.25, fluteLength: 1 },
+});
+const aCutterFile = () => {
+  const form = new FormData();
+  form.append('file', new Blob([`name,unit,kind,diameter,flute length\nCutter ${++names},in,straight,0.25,1\n`]), 'a.csv');
+  return form;
+};
 const aFileForm = () => {
   const form = new FormData();
   form.append('files', new Blob([writeFrameFile(aFrame())]), 'a.frame.json');
@@ -56,6 +75,12 @@ const TABLE: Record<string, Row> = {
   'POST /api/profiles': { who: PROFILE_EDITORS, answers: 201, nobodys: true, body: aProfile },
   'PUT /api/profiles/:profileId': { who: PROFILE_EDITORS, answers: 200, body: aProfile },
   'DELETE /api/profiles/:profileId': { who: PROFILE_EDITORS, answers: 204 },
+  'GET /api/cutters': { who: 'signed in', answers: 200, nobodys: true },
+  'GET /api/cutters/csv': { who: 'signed in', answers: 200, nobodys: true },
+  'POST /api/cutters': { who: CUTTER_EDITORS, answers: 201, nobodys: true, body: aCutter },
+  'POST /api/cutters/csv': { who: CUTTER_EDITORS, answers: 200, nobodys: true, body: aCutterFile },
+  'PUT /api/cutters/:cutterId': { who: CUTTER_EDITORS, answers: 200, body: aCutter },
+  'DELETE /api/cutters/:cutterId': { who: CUTTER_EDITORS, answers: 200 },
   'GET /api/jobs': { who: 'signed in', answers: 200, nobodys: true },
   'POST /api/jobs': { who: EDITORS, answers: 201, nobodys: true, body: () => ({ name: 'Another job' }) },
   'GET /api/jobs/:jobId': { who: 'signed in', answers: 200 },
@@ -65,7 +90,11 @@ const TABLE: Record<string, Row> = {
   'GET /api/jobs/:jobId/layer-sets.zip': { who: 'signed in', answers: 200, query: ofProfile },
   'GET /api/frames/:frameId': { who: 'signed in', answers: 200 },
   'PATCH /api/frames/:frameId': { who: EDITORS, answers: 200, body: () => ({ removed: true }) },
-  'PUT /api/frames/:frameId/draft': { who: EDITORS, answers: 200, body: () => ({ version: 1, particulars: aFrame({ 'outline.width': 34 }) }) },
+  'PUT /api/frames/:frameId/draft': {
+    who: EDITORS,
+    answers: 200,
+    body: () => ({ version: 1, particulars: aFrame({ 'outline.width': 34 }) }),
+  },
   'GET /api/frames/:frameId/draft/frame-file': { who: 'signed in', answers: 200 },
   'GET /api/frames/:frameId/draft/setup-sheet.pdf': { who: 'signed in', answers: 200, query: ofProfile },
   'POST /api/frames/:frameId/revisions': { who: EDITORS, answers: 201, body: () => ({ version: 1 }) },
@@ -89,14 +118,21 @@ async function things(visitor: HttpClient, released: boolean): Promise<Things> {
   const frame = await addFrame(visitor, job.id);
   if (released) await releaseFrame(visitor, frame);
   const profile = expectStatus(await visitor.post('/api/profiles', aProfile()), 201).json<{ id: string }>();
-  return { jobId: job.id, frameId: frame.id, profileId: profile.id };
+  const cutter = expectStatus(await visitor.post('/api/cutters', aCutter()), 201).json<{ id: string }>();
+  return { jobId: job.id, frameId: frame.id, profileId: profile.id, cutterId: cutter.id };
 }
 
-const thingsFor = async (route: string): Promise<Things> => (route.startsWith('GET') ? myThings : things(mine.visitor, false));
+const thingsFor = async (route: string): Promise<Things> =>
+  route.startsWith('GET') ? myThings : things(mine.visitor, false);
 
 const ask = (visitor: HttpClient, route: string, row: Row, named: Things, queried = named) => {
   const [method = '', pattern = ''] = route.split(' ');
-  const path = pattern.replace(':jobId', named.jobId).replace(':frameId', named.frameId).replace(':profileId', named.profileId).replace(':letter', 'A');
+  const path = pattern
+    .replace(':jobId', named.jobId)
+    .replace(':frameId', named.frameId)
+    .replace(':profileId', named.profileId)
+    .replace(':cutterId', named.cutterId)
+    .replace(':letter', 'A');
   return visitor.send(method, `${path}${row.query?.(queried) ?? ''}`, { body: row.body?.(named) });
 };
 
@@ -107,7 +143,8 @@ beforeAll(async () => {
   theirThings = await things(theirs.visitor, true);
   myThings = await things(mine.visitor, true);
   people.set('owner', mine.visitor);
-  for (const role of roles.options) if (role !== 'owner') people.set(role, (await addPerson(server, mine.session.shop.id, role)).visitor);
+  for (const role of roles.options)
+    if (role !== 'owner') people.set(role, (await addPerson(server, mine.session.shop.id, role)).visitor);
 });
 afterAll(() => server.close());
 
@@ -122,26 +159,38 @@ describe('Every route', () => {
     expect(answer.json().code).toBe('not-signed-in');
   });
 
-  it.each(ROWS.filter(([, row]) => !row.nobodys))('When an id is of another shop, then %s answers 404 and changes nothing', async (route, row) => {
-    const before = (await theirs.visitor.get(`/api/jobs/${theirThings.jobId}`)).json();
-    const answer = await ask(mine.visitor, route, row, theirThings);
-    expect(answer.status).toBe(404);
-    expect(answer.json()).toEqual({ code: 'not-found', message: 'There is nothing here, or it is not yours to see.' });
-    expect((await theirs.visitor.get(`/api/jobs/${theirThings.jobId}`)).json()).toEqual(before);
-  });
+  it.each(ROWS.filter(([, row]) => !row.nobodys))(
+    'When an id is of another shop, then %s answers 404 and changes nothing',
+    async (route, row) => {
+      const before = (await theirs.visitor.get(`/api/jobs/${theirThings.jobId}`)).json();
+      const answer = await ask(mine.visitor, route, row, theirThings);
+      expect(answer.status).toBe(404);
+      expect(answer.json()).toEqual({
+        code: 'not-found',
+        message: 'There is nothing here, or it is not yours to see.',
+      });
+      expect((await theirs.visitor.get(`/api/jobs/${theirThings.jobId}`)).json()).toEqual(before);
+    },
+  );
 
-  it.each(ROWS.filter(([, row]) => row.query))("When only the profile is another shop's, then %s answers 404", async (route, row) => {
-    const answer = await ask(mine.visitor, route, row, myThings, theirThings);
-    expect(answer.status).toBe(404);
-  });
+  it.each(ROWS.filter(([, row]) => row.query))(
+    "When only the profile is another shop's, then %s answers 404",
+    async (route, row) => {
+      const answer = await ask(mine.visitor, route, row, myThings, theirThings);
+      expect(answer.status).toBe(404);
+    },
+  );
 
   describe.each(roles.options)('When a person is %s', (role) => {
-    it.each(ROWS.filter((r) => !isOpen(r) && r[0] !== 'POST /api/sign-out-everywhere'))('then %s lets in or answers 403, as the table says', async (route, row) => {
-      const allowed = row.who === 'signed in' || row.who.includes(role);
-      const answer = await ask(people.get(role)!, route, row, await thingsFor(route));
-      expect(answer.status).toBe(allowed ? row.answers : 403);
-      if (!allowed) expect(answer.json().code).toBe('not-allowed');
-    });
+    it.each(ROWS.filter((r) => !isOpen(r) && r[0] !== 'POST /api/sign-out-everywhere'))(
+      'then %s lets in or answers 403, as the table says',
+      async (route, row) => {
+        const allowed = row.who === 'signed in' || row.who.includes(role);
+        const answer = await ask(people.get(role)!, route, row, await thingsFor(route));
+        expect(answer.status).toBe(allowed ? row.answers : 403);
+        if (!allowed) expect(answer.json().code).toBe('not-allowed');
+      },
+    );
   });
 
   it.each(ROWS.filter(isOpen))('When nobody is signed in, then %s answers as the table says', async (route, row) => {
@@ -150,6 +199,9 @@ describe('Every route', () => {
 
   it('When a person signs out everywhere, then the table holds for that too', async () => {
     const { visitor } = await addPerson(server, mine.session.shop.id, 'operator');
-    expect((await ask(visitor, 'POST /api/sign-out-everywhere', TABLE['POST /api/sign-out-everywhere']!, theirThings)).status).toBe(204);
+    expect(
+      (await ask(visitor, 'POST /api/sign-out-everywhere', TABLE['POST /api/sign-out-everywhere']!, theirThings))
+        .status,
+    ).toBe(204);
   });
 });

@@ -6,7 +6,13 @@ parentPort.on('message', ({ input }) => {
     case 'answer':
       return parentPort.postMessage({ ok: true, result: threadId });
     case 'refuse':
-      return parentPort.postMessage({ ok: false, name: 'ProofFailed', message: 'no', stack: '', proof: { ok: false, checks: [] } });
+      return parentPort.postMessage({
+        ok: false,
+        name: 'ProofFailed',
+        message: 'no',
+        stack: '',
+        proof: { ok: false, checks: [] },
+      });
     case 'break':
       throw new Error('broken');
     case 'end':

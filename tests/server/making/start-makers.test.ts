@@ -6,8 +6,10 @@ import { allowSlowMachine } from '../../setup/slow-machine.ts';
 allowSlowMachine();
 
 let makers: Makers;
-const start = (size: number, timeCapMs?: number) => (makers = startMakers(new URL('./faulty-worker.mjs', import.meta.url), size, timeCapMs));
-const act = (what: string, signal?: AbortSignal) => makers.make('summary', { act: what } as unknown as Tasks['summary']['input'], signal) as Promise<unknown>;
+const start = (size: number, timeCapMs?: number) =>
+  (makers = startMakers(new URL('./faulty-worker.mjs', import.meta.url), size, timeCapMs));
+const act = (what: string, signal?: AbortSignal) =>
+  makers.make('summary', { act: what } as unknown as Tasks['summary']['input'], signal) as Promise<unknown>;
 afterEach(() => makers.close());
 
 describe('The pool of workers', () => {
@@ -21,14 +23,17 @@ describe('The pool of workers', () => {
     expect(new Set(await Promise.all(Array.from({ length: 20 }, () => act('answer')))).size).toBe(2);
   });
 
-  it.each(['break', 'end', 'hoard'])('When a worker comes to grief (%s), then its task fails and the next ones are done by another', async (what) => {
-    start(1);
-    const failing = act(what);
-    const next = act('answer');
-    await expect(failing).rejects.toThrow(/a worker (broke down|ended)/);
-    expect(await next).toEqual(expect.any(Number));
-    expect(await act('answer')).toEqual(expect.any(Number));
-  });
+  it.each(['break', 'end', 'hoard'])(
+    'When a worker comes to grief (%s), then its task fails and the next ones are done by another',
+    async (what) => {
+      start(1);
+      const failing = act(what);
+      const next = act('answer');
+      await expect(failing).rejects.toThrow(/a worker (broke down|ended)/);
+      expect(await next).toEqual(expect.any(Number));
+      expect(await act('answer')).toEqual(expect.any(Number));
+    },
+  );
 
   it('When a task never ends, then it is given up after its time, and the next is done', async () => {
     start(1, 5000);

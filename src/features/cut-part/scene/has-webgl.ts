@@ -3,5 +3,5 @@ export function hasWebgl(): boolean {
   const context = document.createElement('canvas').getContext('webgl2');
   // Browsers keep few contexts; this one is not wanted any more.
   context?.getExtension('WEBGL_lose_context')?.loseContext();
-  return context !== null;
+  return Boolean(context);
 }

@@ -7,6 +7,7 @@ import { Section } from '../../../ui/section.tsx';
 import { Select } from '../../../ui/select.tsx';
 import { useDesk, useEditor } from '../model/desk.ts';
 import { Entry } from './entry.tsx';
+import { TakeFromDrawer } from './take-from-drawer.tsx';
 
 const ROLES: readonly { readonly role: CutterRole; readonly heading: string }[] = [
   { role: 'dado', heading: 'Dado cutter' },
@@ -47,6 +48,7 @@ const CutterEntries = memo(function CutterEntries({ role, heading }: { readonly 
   }
   return (
     <Section heading={heading} aside={kinds.length > 1 ? undefined : KIND_WORDS[kind].toLowerCase()} level={3}>
+      <TakeFromDrawer role={role} heading={heading} />
       {/* Where one kind alone can do the work there is nothing to choose. */}
       {kinds.length > 1 && (
         <div data-entry={`${path}.kind`}>

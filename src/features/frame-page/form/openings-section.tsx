@@ -3,6 +3,8 @@ import { Section } from '../../../ui/section.tsx';
 import { useEditor } from '../model/desk.ts';
 import { LightsUp } from './lights-up.tsx';
 import { PartRow } from './part-rows.tsx';
+import { SquareEdgeEntry } from './square-edge-entry.tsx';
+import { tracedPlace } from './square-edge.ts';
 
 /** Openings of a traced outline, to read. */
 function TracedOpenings() {
@@ -12,11 +14,14 @@ function TracedOpenings() {
     <ol>
       {openings.map((opening) => (
         <li key={opening.id}>
-          <LightsUp of={() => [opening.id]} className="flex justify-between border-b border-rule py-1">
-            <span>{opening.label}</span>
-            <span>
-              {formatLength(opening.width, unit)} × {formatLength(opening.height, unit)}
-            </span>
+          <LightsUp of={() => [opening.id]} className="border-b border-rule py-1">
+            <div className="flex justify-between">
+              <span>{opening.label}</span>
+              <span>
+                {formatLength(opening.width, unit)} × {formatLength(opening.height, unit)}
+              </span>
+            </div>
+            <SquareEdgeEntry place={tracedPlace(opening)} />
           </LightsUp>
         </li>
       ))}

@@ -10,6 +10,7 @@ import { useSettled } from '../model/use-settled.ts';
 import { Entry } from './entry.tsx';
 import { betweensOf, layoutPathOf, openingsUnder, solvedSize } from './layout-words.ts';
 import { LightsUp } from './lights-up.tsx';
+import { SquareEdgeEntry } from './square-edge-entry.tsx';
 import { useLayoutEdits } from './use-layout-edits.ts';
 
 interface PartProps {
@@ -68,6 +69,7 @@ const OpeningRow = memo(function OpeningRow({ field }: PartProps) {
         {path.length > 0 ? <SizeEntry field={field} /> : <span />}
         <Entry path={`${field}.opening.arch`} label="Arch" layout="cell" optional placeholder="none" />
       </div>
+      <SquareEdgeEntry place={field} />
       {!readOnly && <PartButtons field={field} kind="opening" />}
     </LightsUp>
   );

@@ -1,10 +1,9 @@
-import { memo, useMemo } from 'react';
+import { memo } from 'react';
 import { Section } from '../../../ui/section.tsx';
 import { CuttersSection } from './cutters-section.tsx';
 import { EdgeSection } from './edge-section.tsx';
-import { useEditor } from '../model/desk.ts';
 import { Entry } from './entry.tsx';
-import { FormFactsProvider } from './form-facts.ts';
+import { FrameFacts } from './frame-facts.tsx';
 import { JointsSection } from './joints-section.tsx';
 import { MembersSection } from './members-section.tsx';
 import { OpeningsSection } from './openings-section.tsx';
@@ -23,19 +22,16 @@ const SECTIONS = [SizeSection, MembersSection, OpeningsSection, EdgeSection, Joi
 
 /** Everything a person enters for a frame, in the order in which one goes over the board. */
 export const ParticularsForm = memo(function ParticularsForm() {
-  const unit = useEditor((s) => s.history.present.unit);
-  const epoch = useEditor((s) => s.epoch);
-  const facts = useMemo(() => ({ unit, epoch }), [unit, epoch]);
   return (
-    <FormFactsProvider value={facts}>
+    <FrameFacts>
       <div data-fields="">
         {SECTIONS.map((FormSection, i) => (
           // Sections out of sight are neither laid out nor painted: a keystroke must not wait for them.
-          <div key={i} className="[contain-intrinsic-height:auto_20rem] [content-visibility:auto]">
+          <div key={i} className="-mx-2 px-2 [contain-intrinsic-height:auto_20rem] [content-visibility:auto]">
             <FormSection />
           </div>
         ))}
       </div>
-    </FormFactsProvider>
+    </FrameFacts>
   );
 });

@@ -1,4 +1,4 @@
-import { useEffect, useState } from 'react';
+import { useEffect, useRef, useState } from 'react';
 import { readField } from '#shared/kernel/particulars/read-field.ts';
 import { useDesk, useEditor } from '../model/desk.ts';
 import { useFormFacts } from './form-facts.ts';
@@ -46,12 +46,18 @@ export function useEntry(path: string, read: (text: string) => ReadText, format:
     return () => clearTimeout(timer);
   }, [takes, settled, kept]);
 
-  useEffect(() => () => editor.setWrong(path, ''), [editor, path]);
+  // The same entry may stand in the form and on the drawing: each takes back only what it said itself.
+  const isWrong = useRef(false);
+  useEffect(() => () => {
+    if (isWrong.current) editor.setWrong(path, '');
+    isWrong.current = false;
+  }, [editor, path]);
 
   function change(text: string) {
     const now = read(text);
     const problem = now.ok ? editor.edit(path, now.value) : now.takes;
     editor.setWrong(path, problem);
+    isWrong.current = problem !== '';
     setTyped({ text, value: now.ok && problem === '' ? now.value : value, epoch, takes: problem });
     setSettled(false);
   }

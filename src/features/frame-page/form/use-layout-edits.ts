@@ -6,6 +6,7 @@ import { removePart } from '#shared/kernel/particulars/remove-part.ts';
 import { splitPart } from '#shared/kernel/particulars/split-part.ts';
 import { useDesk } from '../model/desk.ts';
 import { goToEntry } from '../model/find-entry.ts';
+import type { FrameEditor } from '../model/frame-editor.ts';
 
 /** First width between parts anywhere in the layout: what a new one most likely is. */
 function betweenIn(part: LayoutPart): number | undefined {
@@ -13,16 +14,17 @@ function betweenIn(part: LayoutPart): number | undefined {
   return part.between ?? childrenOf(part).map(betweenIn).find((between) => between !== undefined);
 }
 
-/** Changes of the layout tree by button; afterwards the keyboard is where the change was made. */
-export function useLayoutEdits() {
-  const { editor } = useDesk();
-
-  function change(edit: (layout: LayoutPart) => LayoutPart, label: string, focusOn: LayoutPath): string {
+/**
+ * Changes of the layout tree, each a step of its own; each answers '' or what it could not take. `after` gets the new layout
+ * and the place in it where the change was made.
+ */
+export function layoutEdits(editor: FrameEditor, after: (layout: LayoutPart, place: LayoutPath) => void) {
+  function change(edit: (layout: LayoutPart) => LayoutPart, label: string, place: LayoutPath): string {
     const { present } = editor.store.get().history;
     if (present.outline.kind !== 'members') throw new Error('a traced outline has no layout');
     const layout = edit(present.outline.layout);
     const problem = editor.apply({ ...present, outline: { ...present.outline, layout } }, label);
-    if (problem === '') requestAnimationFrame(() => goToEntry(partField(layout, focusOn)));
+    if (problem === '') after(layout, place);
     return problem;
   }
 
@@ -45,4 +47,10 @@ export function useLayoutEdits() {
       return change((layout) => removePart(layout, path), 'Remove opening', focusOn);
     },
   };
+}
+
+/** The same by button in the form; afterwards the keyboard is where the change was made. */
+export function useLayoutEdits() {
+  const { editor } = useDesk();
+  return layoutEdits(editor, (layout, place) => requestAnimationFrame(() => goToEntry(partField(layout, place))));
 }

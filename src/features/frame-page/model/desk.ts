@@ -3,6 +3,8 @@ import type { Extents, Point } from '#shared/kernel/contour/contour.ts';
 import type { FeatureId } from '#shared/kernel/frame/members.ts';
 import type { Face } from '#shared/kernel/line-sets/line-set.ts';
 import type { EditorState, FrameEditor } from './frame-editor.ts';
+import type { Selection } from './selection.ts';
+import { settle } from './settle.ts';
 import { createStore, useStore, type Store } from './store.ts';
 import type { PageSize, View } from './view.ts';
 
@@ -27,30 +29,41 @@ export interface Measuring {
 /** What the parts of the frame page share. Each part follows only what it shows. */
 export interface Desk {
   readonly editor: FrameEditor;
+  /** The editor's state a moment late, see use-settled.ts. */
+  readonly settled: Store<EditorState>;
   readonly readOnly: boolean;
   readonly lit: Store<Lit>;
   /** Null: the board is fitted to the pages, whatever its size. */
   readonly view: Store<View | null>;
-  /** Pixels a unit, as drawn now. */
-  readonly scale: Store<number>;
+  /** The view as drawn now. */
+  readonly shown: Store<View>;
+  readonly settledView: Store<View>;
   /** Room that each page has for drawing; the smaller one where they differ. */
   readonly page: Store<PageSize>;
   /** Line sets that are switched off, by lineSetKey. */
   readonly hidden: Store<ReadonlySet<string>>;
   /** Null: not measuring. */
   readonly measuring: Store<Measuring | null>;
+  /** The opening or member picked on the drawing; null: none. */
+  readonly selection: Store<Selection | null>;
 }
 
-export const createDesk = (editor: FrameEditor, readOnly: boolean): Desk => ({
-  editor,
-  readOnly,
-  lit: createStore(NOTHING_LIT),
-  view: createStore<View | null>(null),
-  scale: createStore(1),
-  page: createStore<PageSize>({ width: 400, height: 400 }),
-  hidden: createStore<ReadonlySet<string>>(new Set()),
-  measuring: createStore<Measuring | null>(null),
-});
+export function createDesk(editor: FrameEditor, readOnly: boolean): Desk {
+  const shown = createStore<View>({ scale: 1, centre: { x: 0, y: 0 } });
+  return {
+    editor,
+    settled: settle(editor.store),
+    readOnly,
+    lit: createStore(NOTHING_LIT),
+    view: createStore<View | null>(null),
+    shown,
+    settledView: settle(shown),
+    page: createStore<PageSize>({ width: 400, height: 400 }),
+    hidden: createStore<ReadonlySet<string>>(new Set()),
+    measuring: createStore<Measuring | null>(null),
+    selection: createStore<Selection | null>(null),
+  };
+}
 
 const deskContext = createContext<Desk | null>(null);
 

@@ -1,7 +1,13 @@
 import type { Point } from '#shared/kernel/contour/contour.ts';
 import type { Placement } from '#shared/kernel/placing/placement.ts';
-import type { Measuring } from './desk.ts';
+import type { Desk, Measuring } from './desk.ts';
 import { nextPoint } from './snap-points.ts';
+
+/** Begins measuring, or ends it. What is selected is left: the arrow keys go one way or the other. */
+export function toggleMeasuring({ measuring, selection }: Desk): void {
+  selection.set(null);
+  measuring.set(measuring.get() ? null : { face: 'front', picked: [], at: null });
+}
 
 /** Takes a place as the first or second one; a third begins anew. */
 export const pickPlace = (measuring: Measuring, p: Point): Measuring => ({

@@ -22,6 +22,8 @@ export interface PageSize {
 
 /** Room about the fitted board for lines that run past it, sizes and labels. */
 const FIT_MARGIN_PX = 34;
+/** Zoom of one key or button press. */
+export const ZOOM_STEP = 1.25;
 const LEAST_SCALE = 0.02;
 const GREATEST_SCALE = 40_000;
 

@@ -24,17 +24,19 @@ function RevisionFiles({ frame, revision, profileId, main }: { readonly frame: F
   const at = `/api/frames/${encodeURIComponent(frame.id)}/revisions/${encodeURIComponent(revision.letter)}`;
   const profile = encodeURIComponent(profileId);
   return (
-    <li className="flex flex-wrap items-start gap-x-6 gap-y-2 border-b border-rule py-2.5 last:border-b-0">
-      <div className="min-w-40 flex-1">
+    <li className="flex flex-wrap items-start justify-between gap-x-6 gap-y-2 border-b border-rule py-2.5 last:border-b-0">
+      <div className="min-w-40">
         <p>
           <strong className="text-16">{revision.letter}</strong> <When iso={revision.releasedAt} />, {revision.author}
         </p>
         {revision.note !== '' && <p className="text-12 text-pencil wrap-anywhere">{revision.note}</p>}
       </div>
       <div className="flex flex-wrap items-start gap-2">
-        <DownloadButton path={`${at}/layer-set.zip?profile=${profile}`} kind={main ? 'main' : 'plain'}>
-          {`Layer set ${revision.letter}`}
-        </DownloadButton>
+        <div className="w-44">
+          <DownloadButton path={`${at}/layer-set.zip?profile=${profile}`} kind={main ? 'main' : 'plain'} wide>
+            {`Layer set ${revision.letter}`}
+          </DownloadButton>
+        </div>
         <ButtonLink to={`/frames/${encodeURIComponent(frame.id)}/sheet?revision=${encodeURIComponent(revision.letter)}&profile=${profile}`}>Setup sheet</ButtonLink>
         <ButtonLink to={`${at}/setup-sheet.pdf?profile=${profile}`} newTab>
           PDF

@@ -7,6 +7,7 @@ import type { EditorState } from '../model/frame-editor.ts';
 import { useStore } from '../model/store.ts';
 import { useSettled } from '../model/use-settled.ts';
 import { frameTransform, setupTransform, type PageSize, type View } from '../model/view.ts';
+import { SelectionOutline } from '../on-drawing/selection-outline.tsx';
 import { Board, LineSets } from './board.tsx';
 import { describeFace } from './describe-face.ts';
 import { FaceLegend } from './face-legend.tsx';
@@ -76,9 +77,8 @@ function Drawing({ face, worked, view, page }: Pick<FacePageProps, 'face' | 'wor
         <g transform={setupTransform(view, placement, page)}>
           <LineSets lineSets={work.lineSets} hidden={hidden} />
         </g>
-        <g transform={inFrameView}>
-          <LitPlaces worked={worked} scale={view.scale} />
-        </g>
+        <LitPlaces worked={worked} scale={view.scale} transform={inFrameView} />
+        <SelectionOutline worked={worked} transform={inFrameView} />
         <Pins work={work} view={view} page={page} />
         <PageLabels labels={labels} view={view} placement={placement} page={page} hiddenSets={hiddenSets} />
         {measuring && <MeasureMarks measuring={measuring} view={view} placement={placement} page={page} />}

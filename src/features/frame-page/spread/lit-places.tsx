@@ -18,12 +18,13 @@ function pathOf({ contours, dados }: WorkedFrame, id: FeatureId): string {
 /** Grows a place by half the reach each way, so that the frame drawn about it does not hide it. */
 const grown = (e: Extents, by: number): Extents => ({ minX: e.minX - by, minY: e.minY - by, maxX: e.maxX + by, maxY: e.maxY + by });
 
-/** What is lit up, in frame view: drawn alike on both faces. `scale` in pixels a unit. */
-export function LitPlaces({ worked, scale }: { readonly worked: WorkedFrame; readonly scale: number }) {
+/** What is lit up, in frame view: drawn alike on both faces. `scale` in pixels a unit, `transform` from frame view to the page. */
+export function LitPlaces({ worked, scale, transform }: { readonly worked: WorkedFrame; readonly scale: number; readonly transform: string }) {
   const { lit } = useDesk();
   const { features, places } = useStore(lit, (value) => value);
+  if (features.length === 0 && places.length === 0) return null;
   return (
-    <>
+    <g transform={transform}>
       {features.map((id) => (
         <path
           key={id}
@@ -42,6 +43,6 @@ export function LitPlaces({ worked, scale }: { readonly worked: WorkedFrame; rea
           className="fill-none stroke-stop [stroke-dasharray:6_3] [stroke-width:2.5]"
         />
       ))}
-    </>
+    </g>
   );
 }

@@ -1,12 +1,16 @@
+import { memo } from 'react';
 import type { FeatureId } from '#shared/kernel/frame/members.ts';
 import { formatLength, formatWithUnit } from '#shared/kernel/units/format-length.ts';
 import type { WorkedFrame } from '#shared/kernel/worked-frame.ts';
 import { Button } from '../../../ui/button.tsx';
-import { useDesk } from '../model/desk.ts';
+import { useDesk, useEditor } from '../model/desk.ts';
+import { toggleMeasuring } from '../model/measure.ts';
 import { useStore } from '../model/store.ts';
-import { zoomView, type View } from '../model/view.ts';
+import { zoomView, ZOOM_STEP } from '../model/view.ts';
+import { focusSpread } from '../on-drawing/focus-panel.ts';
+import { toggleWalking } from '../on-drawing/select-feature.ts';
+import { SELECTED_KEYS } from '../on-drawing/selected-words.ts';
 import { measureWords } from './measure-words.ts';
-import { KEY_ZOOM } from './use-spread-keys.ts';
 
 /** What a lit feature is, with its numbers. */
 function featureWords({ contours, dados, particulars }: WorkedFrame, id: FeatureId): string {
@@ -23,16 +27,23 @@ function featureWords({ contours, dados, particulars }: WorkedFrame, id: Feature
   return member ? `${member.label} ${formatWithUnit(member.width, unit)} wide` : '';
 }
 
-function Readout({ worked }: { readonly worked: WorkedFrame }) {
+function Readout() {
   const desk = useDesk();
   const lit = useStore(desk.lit, (value) => value);
   const measuring = useStore(desk.measuring, (value) => value);
+  const isSelecting = useStore(desk.selection, (value) => value !== null);
+  // Follows the frame only while it says something about it.
+  const isQuiet = lit.features.length === 0 && measuring === null;
+  const worked = useEditor((s) => (isQuiet ? null : s.drawn));
   const [a, b] = measuring?.picked ?? [];
   const to = b ?? measuring?.at;
-  const { unit } = worked.particulars;
   const words =
-    a && to
-      ? measureWords(a, to, unit)
+    worked === null
+      ? isSelecting
+        ? SELECTED_KEYS
+        : ''
+      : a && to
+      ? measureWords(a, to, worked.particulars.unit)
       : measuring
         ? 'Pick two places: click, or arrows and Enter'
         : lit.features
@@ -46,33 +57,35 @@ function Readout({ worked }: { readonly worked: WorkedFrame }) {
   );
 }
 
-interface SpreadBarProps {
-  readonly worked: WorkedFrame;
-  readonly view: View;
-  readonly onMeasure: () => void;
-}
-
 /** Under the spread: what is pointed at or measured, and the view by button. */
-export function SpreadBar({ worked, view, onMeasure }: SpreadBarProps) {
+export const SpreadBar = memo(function SpreadBar() {
   const desk = useDesk();
   const isMeasuring = useStore(desk.measuring, (value) => value !== null);
+  const isSelecting = useStore(desk.selection, (value) => value !== null);
+  const zoom = (factor: number) => desk.view.set(zoomView(desk.shown.get(), factor));
   return (
     <div className="flex flex-wrap items-center gap-x-3 border-t border-rule px-4 print:hidden">
-      <Readout worked={worked} />
+      <Readout />
       <div role="group" aria-label="View" className="flex gap-x-3.5 pb-0.5">
-        <Button kind="quiet" onClick={() => desk.view.set(zoomView(view, KEY_ZOOM))}>
+        <Button kind="quiet" onClick={() => zoom(ZOOM_STEP)}>
           Zoom in +
         </Button>
-        <Button kind="quiet" onClick={() => desk.view.set(zoomView(view, 1 / KEY_ZOOM))}>
+        <Button kind="quiet" onClick={() => zoom(1 / ZOOM_STEP)}>
           Zoom out −
         </Button>
         <Button kind="quiet" onClick={() => desk.view.set(null)}>
           Fit F
         </Button>
-        <Button kind="quiet" aria-pressed={isMeasuring} onClick={onMeasure}>
+        <Button kind="quiet" aria-pressed={isSelecting} onClick={() => {
+            toggleWalking(desk);
+            focusSpread();
+          }}>
+          Openings O
+        </Button>
+        <Button kind="quiet" aria-pressed={isMeasuring} onClick={() => toggleMeasuring(desk)}>
           {isMeasuring ? 'Stop measuring M' : 'Measure M'}
         </Button>
       </div>
     </div>
   );
-}
+});

@@ -5,6 +5,8 @@ import { formatLength } from '#shared/kernel/units/format-length.ts';
 import { useDesk, useEditor } from '../model/desk.ts';
 import { useStore } from '../model/store.ts';
 import { boardInFrameView, fitTo } from '../model/view.ts';
+import { SelectionPanel } from '../on-drawing/selection-panel.tsx';
+import { SelectionStatus } from '../on-drawing/selection-status.tsx';
 import { FacePage } from './face-page.tsx';
 import { legendOf, type LegendEntry } from './set-words.ts';
 import { SpreadBar } from './spread-bar.tsx';
@@ -53,9 +55,9 @@ export function Spread() {
   }, [desk, size, isUpright, backLegend, frontLegend]);
 
   const view = useMemo(() => chosen ?? fitTo(boardInFrameView(worked), page), [chosen, worked, page]);
-  useLayoutEffect(() => desk.scale.set(view.scale), [desk, view.scale]);
+  useLayoutEffect(() => desk.shown.set(view), [desk, view]);
 
-  const keys = useSpreadKeys(worked, view);
+  const pressKey = useSpreadKeys();
   const { rough } = worked.blank;
   const blank = `${formatLength(rough.maxX, unit)} × ${formatLength(rough.maxY, unit)} ${worked.blank.given ? 'board given' : 'blank'}`;
   return (
@@ -64,10 +66,11 @@ export function Spread() {
         ref={pages}
         role="group"
         tabIndex={0}
+        data-spread=""
         aria-label="Spread: both faces about the fold"
-        aria-keyshortcuts="+ - 0 F M"
-        onKeyDown={keys.onKeyDown}
-        className={`min-h-0 flex-1 focus-visible:-outline-offset-2 ${isUpright ? 'grid grid-cols-[minmax(0,1fr)_auto_minmax(0,1fr)] grid-rows-[auto_minmax(0,1fr)_auto]' : 'flex flex-col'}`}
+        aria-keyshortcuts="+ - 0 F M O"
+        onKeyDown={pressKey}
+        className={`relative min-h-0 flex-1 focus-visible:-outline-offset-2 ${isUpright ? 'grid grid-cols-[minmax(0,1fr)_auto_minmax(0,1fr)] grid-rows-[auto_minmax(0,1fr)_auto]' : 'flex flex-col'}`}
       >
         <FacePage face="back" worked={worked} view={view} page={page} legend={backLegend} heading="Back, cut first" aside={blank} className={pageLook} />
         <Fold isUpright={isUpright} />
@@ -81,8 +84,10 @@ export function Spread() {
           aside={isUpright ? 'turned side to side' : 'turned end over end'}
           className={pageLook}
         />
+        <SelectionPanel worked={worked} view={view} page={page} />
       </div>
-      <SpreadBar worked={worked} view={view} onMeasure={keys.toggleMeasuring} />
+      <SelectionStatus />
+      <SpreadBar />
     </div>
   );
 }

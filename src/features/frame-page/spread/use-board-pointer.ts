@@ -8,6 +8,7 @@ import { hitTest } from '../model/hit-test.ts';
 import { pickPlace } from '../model/measure.ts';
 import { nearestPoint, snapPoints } from '../model/snap-points.ts';
 import { fromPage, panView, zoomView, type PageSize, type View } from '../model/view.ts';
+import { selectionOf } from '../on-drawing/select-feature.ts';
 
 /** Less than this is a click, more is a drag. */
 const DRAG_PX = 4;
@@ -78,8 +79,12 @@ export function useBoardPointer({ face, worked, view, page, svg }: BoardPointer)
     const p = inFrame(onPage(event));
     const measuring = desk.measuring.get();
     if (measuring) return desk.measuring.set(pickPlace({ ...measuring, face }, caught(p)));
-    const [feature] = hitTest(worked, p, POINT_PX / view.scale);
-    if (feature !== undefined) goToEntry(entryOfFeature(worked, feature));
+    const hit = hitTest(worked, p, POINT_PX / view.scale);
+    const dado = hit.find((id) => worked.dados.some((d) => d.id === id));
+    // Dados are seen on the back alone.
+    if (face === 'back' && dado !== undefined) return void goToEntry(entryOfFeature(worked, dado));
+    const feature = [...worked.contours.openings, ...worked.contours.members].find(({ id }) => hit.includes(id));
+    desk.selection.set(feature ? selectionOf(feature, face, true, p) : null);
   }
 
   return {

@@ -1,11 +1,11 @@
 import type { KeyboardEvent } from 'react';
-import type { WorkedFrame } from '#shared/kernel/worked-frame.ts';
 import { useDesk } from '../model/desk.ts';
-import { pickPlace, stepPlace } from '../model/measure.ts';
+import { pickPlace, stepPlace, toggleMeasuring } from '../model/measure.ts';
 import { snapPoints } from '../model/snap-points.ts';
-import { panView, zoomView, type View } from '../model/view.ts';
+import { panView, zoomView, ZOOM_STEP } from '../model/view.ts';
+import { pressOnSelected } from '../on-drawing/press-key.ts';
+import { toggleWalking } from '../on-drawing/select-feature.ts';
 
-export const KEY_ZOOM = 1.25;
 const STEP_PX = 40;
 const LONG_STEP_PX = 200;
 
@@ -16,14 +16,20 @@ const ARROWS: Readonly<Record<string, { readonly right: number; readonly up: num
   ArrowDown: { right: 0, up: -1 },
 };
 
-/** The spread by keyboard. Arrows move over the board, or from place to place while measuring. */
-export function useSpreadKeys(worked: WorkedFrame, view: View) {
+/**
+ * The spread by keyboard. Arrows move over the board, or from place to place while measuring, or from opening to member while
+ * one of them is selected; with Shift they move over the board also then.
+ */
+export function useSpreadKeys() {
   const desk = useDesk();
-  const toggleMeasuring = () => desk.measuring.set(desk.measuring.get() ? null : { face: 'front', picked: [], at: null });
 
   function press(event: KeyboardEvent<HTMLElement>): boolean {
     const measuring = desk.measuring.get();
+    const view = desk.shown.get();
+    const worked = desk.editor.store.get().drawn;
     const arrow = ARROWS[event.key];
+    const isSelecting = desk.selection.get() !== null;
+    if (isSelecting && !(arrow && event.shiftKey) && pressOnSelected(desk, event.key)) return true;
     if (arrow && measuring) {
       desk.measuring.set(stepPlace(measuring, snapPoints(worked), worked[measuring.face].placement, arrow.right, arrow.up));
       return true;
@@ -37,10 +43,10 @@ export function useSpreadKeys(worked: WorkedFrame, view: View) {
     switch (event.key) {
       case '+':
       case '=':
-        desk.view.set(zoomView(view, KEY_ZOOM));
+        desk.view.set(zoomView(view, ZOOM_STEP));
         return true;
       case '-':
-        desk.view.set(zoomView(view, 1 / KEY_ZOOM));
+        desk.view.set(zoomView(view, 1 / ZOOM_STEP));
         return true;
       case '0':
       case 'f':
@@ -49,7 +55,11 @@ export function useSpreadKeys(worked: WorkedFrame, view: View) {
         return true;
       case 'm':
       case 'M':
-        toggleMeasuring();
+        toggleMeasuring(desk);
+        return true;
+      case 'o':
+      case 'O':
+        toggleWalking(desk);
         return true;
       case 'Enter':
       case ' ':
@@ -65,11 +75,8 @@ export function useSpreadKeys(worked: WorkedFrame, view: View) {
     }
   }
 
-  return {
-    toggleMeasuring,
-    onKeyDown(event: KeyboardEvent<HTMLElement>) {
-      if (event.ctrlKey || event.metaKey || event.altKey || event.target !== event.currentTarget) return;
-      if (press(event)) event.preventDefault();
-    },
+  return (event: KeyboardEvent<HTMLElement>) => {
+    if (event.ctrlKey || event.metaKey || event.altKey || event.target !== event.currentTarget) return;
+    if (press(event)) event.preventDefault();
   };
 }

@@ -1,11 +1,5 @@
-import { useMutation, useQueryClient } from '@tanstack/react-query';
 import { frame, type FrameRequest } from '#shared/contracts/frames.ts';
 import { callApi } from '../../../lib/call-api.ts';
 
 export const createFrame = ({ jobId, ...body }: FrameRequest & { jobId: string }) =>
   callApi({ method: 'POST', path: `/api/jobs/${encodeURIComponent(jobId)}/frames`, body, answer: frame });
-
-export function useCreateFrame() {
-  const client = useQueryClient();
-  return useMutation({ mutationFn: createFrame, onSuccess: () => client.invalidateQueries({ queryKey: ['jobs'] }) });
-}

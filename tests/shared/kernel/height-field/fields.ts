@@ -51,6 +51,8 @@ export function depthAt({ grid, depth }: HeightField, x: number, y: number): num
   return depth[j * grid.columns + i]!;
 }
 
+export const deepest = ({ depth }: HeightField): number => depth.reduce((most, d) => Math.max(most, d), 0);
+
 /** Every sample of a field: place, depth, and the number of the layer that cut it. */
 export function* samples({ grid, depth, by }: HeightField): Generator<{ x: number; y: number; depth: number; by: number }> {
   for (let j = 0; j < grid.rows; j++)

@@ -30,7 +30,7 @@ const aStoredFrame = (changes: Partial<Frame> = {}): Frame => ({
 
 function showFrame(changes: Partial<Frame> = {}, may = { mayEdit: true, mayRelease: true }) {
   const profiles = BUILTIN_PROFILES.map((stored) => ({ ...stored, builtIn: true }));
-  return show(<FramePage renderCutPart={() => null} frame={aStoredFrame(changes)} profiles={profiles} defaultProfileId="r2007" shopName="Tern & Alder Joinery" {...may} />);
+  return show(<FramePage renderCutPart={() => null} frame={aStoredFrame(changes)} profiles={profiles} defaultProfileId="r2007" drawer={[]} shopName="Tern & Alder Joinery" {...may} />);
 }
 
 const entry = (path: string): HTMLInputElement => document.querySelector<HTMLInputElement>(`input[data-entry="${path}"]`)!;

@@ -1,9 +1,14 @@
 import type { Request, Response } from 'express';
-import { contentDisposition } from '../../http/content-disposition.ts';
-import type { MadeFile } from '../../making/tasks.ts';
+import { contentDisposition } from './content-disposition.ts';
+import type { MadeFile } from '../making/tasks.ts';
 
 /** Sends a file under its name. `inline` lets the browser show it; a link's `download` attribute saves it all the same. */
-export function sendFile(res: Response, file: MadeFile, type: string, kind: 'attachment' | 'inline' = 'attachment'): void {
+export function sendFile(
+  res: Response,
+  file: MadeFile,
+  type: string,
+  kind: 'attachment' | 'inline' = 'attachment',
+): void {
   res.setHeader('Content-Type', type);
   res.setHeader('Content-Disposition', contentDisposition(kind, file.name));
   res.setHeader('Cache-Control', 'private, no-cache');

@@ -1,0 +1,97 @@
+import { memo, useRef, type KeyboardEvent } from 'react';
+import { formatLength } from '#shared/kernel/units/format-length.ts';
+import type { WorkedFrame } from '#shared/kernel/worked-frame.ts';
+import { Button } from '../../../ui/button.tsx';
+import { FrameFacts } from '../form/frame-facts.tsx';
+import { betweensOf } from '../form/layout-words.ts';
+import { useDesk, useEditor } from '../model/desk.ts';
+import { findSelected, type Selected, type Selection } from '../model/selection.ts';
+import { useStore } from '../model/store.ts';
+import type { PageSize, View } from '../model/view.ts';
+import { focusSpread } from './focus-panel.ts';
+import { PanelButtons } from './panel-buttons.tsx';
+import { MemberEntries, OpeningEntries, TracedEntries } from './panel-entries.tsx';
+import { selectedName, selectedSize } from './selected-words.ts';
+import { sizeFields } from './size-fields.ts';
+import { usePanelPlace } from './use-panel-place.ts';
+
+interface SelectionPanelProps {
+  /** As it is drawn. */
+  readonly worked: WorkedFrame;
+  readonly view: View;
+  readonly page: PageSize;
+}
+
+function Entries({ worked, selected }: { readonly worked: WorkedFrame; readonly selected: Selected }) {
+  const { readOnly } = useDesk();
+  const outline = useEditor((s) => s.history.present.outline);
+  const { unit } = worked.particulars;
+  const { feature, field } = selected;
+  if (outline.kind === 'traced') return 'height' in feature ? <TracedEntries opening={feature} /> : null;
+  if (field === '') return <p className="text-12">As entered, it cannot be drawn: see the findings, or undo.</p>;
+  if (!('height' in feature)) return <MemberEntries kind={feature.kind} field={field} alike={feature.path ? betweensOf(worked, feature.path).length : 1} />;
+  const path = feature.path ?? [];
+  return (
+    <>
+      <OpeningEntries field={field} {...sizeFields(outline.layout, path)} solvedWidth={formatLength(feature.width, unit)} solvedHeight={formatLength(feature.height, unit)} />
+      {!readOnly && <PanelButtons removable={path.length > 0} />}
+    </>
+  );
+}
+
+function OpenPanel({ worked, view, page, selection, selected }: SelectionPanelProps & { readonly selection: Selection; readonly selected: Selected }) {
+  const desk = useDesk();
+  const panel = useRef<HTMLDivElement>(null);
+  usePanelPlace({ panel, worked, view, page, face: selection.face, extents: selected.feature.extents });
+  const name = selectedName(selected);
+  function close() {
+    desk.selection.set({ ...selection, open: false, problem: '' });
+    focusSpread();
+  }
+  function press(event: KeyboardEvent) {
+    if (event.key !== 'Escape' || event.nativeEvent.isComposing) return;
+    event.preventDefault();
+    close();
+  }
+  return (
+    <div
+      ref={panel}
+      role="group"
+      aria-label={`${name}, on the drawing`}
+      tabIndex={-1}
+      data-selection-panel=""
+      data-fields=""
+      onKeyDown={press}
+      className="absolute top-0 left-0 flex w-62 flex-col gap-1.5 border border-ink bg-paper px-2.5 py-1.5 print:hidden pointer-coarse:w-72 pointer-coarse:[&_button]:min-h-11 pointer-coarse:[&_input]:min-h-11 pointer-coarse:[&_label]:min-h-11 pointer-coarse:[&_label]:items-center"
+    >
+      <div className="flex items-baseline justify-between gap-x-3">
+        <p className="min-w-0 truncate">
+          <span className="font-bold">{name}</span>
+        </p>
+        <Button kind="quiet" onClick={close}>
+          Close
+        </Button>
+      </div>
+      <p className="text-11 text-pencil">{selectedSize(selected, worked.particulars.unit)}</p>
+      <FrameFacts>
+        <Entries worked={worked} selected={selected} />
+      </FrameFacts>
+      {selection.problem !== '' && (
+        <p role="alert" className="text-12 text-stop">
+          Takes {selection.problem}.
+        </p>
+      )}
+    </div>
+  );
+}
+
+/** A ruled box beside what is selected, to edit it where it lies. */
+export const SelectionPanel = memo(function SelectionPanel(props: SelectionPanelProps) {
+  const { selection: store } = useDesk();
+  const selection = useStore(store, (value) => value);
+  // Follows what is entered only while something is selected.
+  const present = useEditor((s) => (selection?.open ? s.history.present : null));
+  const selected = selection?.open && present ? findSelected(props.worked.contours, present, selection) : null;
+  if (!selection || !selected) return null;
+  return <OpenPanel {...props} selection={selection} selected={selected} />;
+});
