@@ -10,6 +10,9 @@ import { cuttersStore } from './features/cutters/cutters.store.ts';
 import { downloadsRoutes } from './features/downloads/downloads.routes.ts';
 import { downloadsService } from './features/downloads/downloads.service.ts';
 import { downloadsStore } from './features/downloads/downloads.store.ts';
+import { edgePresetsRoutes } from './features/edge-presets/edge-presets.routes.ts';
+import { edgePresetsService } from './features/edge-presets/edge-presets.service.ts';
+import { edgePresetsStore } from './features/edge-presets/edge-presets.store.ts';
 import { framesRoutes } from './features/frames/frames.routes.ts';
 import { jobsRoutes } from './features/jobs/jobs.routes.ts';
 import { profilesRoutes } from './features/profiles/profiles.routes.ts';
@@ -62,6 +65,7 @@ function apiRoutes(given: AppGiven): Router {
   api.use(shopRoutes(shopService(shopStore(database))));
   api.use(profilesRoutes(profilesService(profilesStore(database), now)));
   api.use(cuttersRoutes(cuttersService(cuttersStore(database), now)));
+  api.use(edgePresetsRoutes(edgePresetsService(edgePresetsStore(database), now)));
   api.use(jobsRoutes(services.jobs));
   api.use(framesRoutes(services.frames, services.releases));
   api.use(downloadsRoutes(downloadsService(downloadsStore(database), makers)));

@@ -169,7 +169,7 @@ const outline = z.discriminatedUnion('kind', [
 
 const corners = z.enum(['lift', 'vee', 'round'], takes('"lift", "vee" or "round"')).optional();
 
-const edge = z.discriminatedUnion('style', [
+export const edge = z.discriminatedUnion('style', [
   z.strictObject({
     style: z.literal('square'),
     sizeHeldAt: z.enum(['face', 'back'], takes('"face" or "back"')),

@@ -54,3 +54,21 @@ export const DEEPEST_DADO = 2 / 3;
 
 /** How far a cutter may cut into the entered bead, or leave it standing, before a caution. Common practice, no source. */
 export const beadShave = byUnit(0.002, 0.05);
+
+/** Two stands of a cutter on its way up are not divided once their radii are this near. Unit of the frame. */
+export const CLOSEST_STANDS = 1e-9;
+
+/** Least angle that a chord of a flattened arc spans, so that a huge arc does not become endless chords. Radians. */
+export const LEAST_CHORD_ANGLE = 1e-4;
+
+/** Left in a corner, in the frame's unit: less than this is said to be nothing. */
+export const NOTHING_LEFT = 1e-6;
+
+/** Both sides of a step in a section, so that walls are drawn upright. Unit of the frame. */
+export const BESIDE_STEP = 1e-7;
+
+/** Dados whose depths differ by less are one line set. Unit of the frame. */
+export const SAME_DEPTH = 1e-6;
+
+/** Share of a corner's half angle by which looks along its walls keep off them: on a wall itself every stand only touches. */
+export const OFF_THE_WALL = 1e-3;

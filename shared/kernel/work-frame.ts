@@ -28,7 +28,8 @@ const RANK: Record<FindingLevel, number> = { stop: 0, caution: 1, note: 2 };
  */
 export function workFrame(particulars: Particulars): WorkedFrame {
   const p = particulars;
-  const { contours, findings: outlineFindings } = p.outline.kind === 'members' ? membersContours(p.outline, p.unit) : tracedContours(p.outline);
+  const { contours, findings: outlineFindings } =
+    p.outline.kind === 'members' ? membersContours(p.outline, p.unit) : tracedContours(p.outline);
 
   const dadoRadius = radiusAtHeight(p.cutters.dado, p.thickness);
   const dados = p.dados.map((dado, i) => outlineDado(dado, i, dadoRadius));
@@ -37,7 +38,10 @@ export function workFrame(particulars: Particulars): WorkedFrame {
   const front = frontLineSets(p, contours);
 
   const blank = planBlank(contours.width, contours.height, p.setup, p.blank);
-  const squaring = squaringLineSet(p, squaringLine(blank, contours.width, contours.height, p.setup, radiusAtHeight(p.cutters.squaring, p.thickness)));
+  const squaring = squaringLineSet(
+    p,
+    squaringLine(blank, contours.width, contours.height, p.setup, radiusAtHeight(p.cutters.squaring, p.thickness)),
+  );
 
   const findings: Finding[] = [
     ...outlineFindings,

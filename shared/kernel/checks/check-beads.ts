@@ -20,7 +20,12 @@ import type { Finding } from './finding.ts';
 import { atDado, atOpening, wholeFrame } from './place-finding.ts';
 
 /** A bead that cannot be, or not as entered. Nothing for square edges. */
-export function checkBeads(p: Particulars, contours: FrameContours, front: FrontLineSets, dados: readonly DadoOutline[]): Finding[] {
+export function checkBeads(
+  p: Particulars,
+  contours: FrameContours,
+  front: FrontLineSets,
+  dados: readonly DadoOutline[],
+): Finding[] {
   const { edge } = p;
   const beaded = contours.openings.filter((o) => !o.square);
   const cutters = beadCutters(p.cutters);
@@ -52,7 +57,12 @@ function checkBeadDepth(p: Particulars, edge: BeadedEdge, contours: FrameContour
   ];
 }
 
-function checkBeadCutters(p: Particulars, edge: BeadedEdge, { bead, quirk, corner }: BeadCutters, contours: FrameContours): Finding[] {
+function checkBeadCutters(
+  p: Particulars,
+  edge: BeadedEdge,
+  { bead, quirk, corner }: BeadCutters,
+  contours: FrameContours,
+): Finding[] {
   const say = (n: number) => formatWithUnit(n, p.unit);
   const places = [wholeFrame(contours, 'front')];
   const { radius: R, quirk: q } = edge.bead;
@@ -102,13 +112,22 @@ function checkBeadCutters(p: Particulars, edge: BeadedEdge, { bead, quirk, corne
   return findings;
 }
 
-const LINES: Partial<Record<BeadProblem['set'], string>> = { BEAD_INNER: 'bead, opening side', BEAD_OUTER: 'bead, frame side', QUIRK: 'quirk', QUIRK_CORNER: 'quirk’s outer wall' };
+const LINES: Partial<Record<BeadProblem['set'], string>> = {
+  BEAD_INNER: 'bead, opening side',
+  BEAD_OUTER: 'bead, frame side',
+  QUIRK: 'quirk',
+  QUIRK_CORNER: 'quirk’s outer wall',
+};
 
 const collapseFinding = ({ opening, set, offset, reason, at, radius }: BeadProblem, unit: Unit): Finding => ({
   code: 'bead-collapses',
   level: 'stop',
   text: `Opening ${opening.label}: the line ${LINES[set]}, ${formatWithUnit(offset, unit)} from the opening’s edge, ${
-    reason === 'arc' ? `has no room beside an arc of radius ${formatWithUnit(radius ?? 0, unit)}` : reason === 'crosses' ? 'crosses itself' : 'loses a side'
+    reason === 'arc'
+      ? `has no room beside an arc of radius ${formatWithUnit(radius ?? 0, unit)}`
+      : reason === 'crosses'
+        ? 'crosses itself'
+        : 'loses a side'
   }.`,
   remedy: 'Take a smaller bead or quirk, make the arc larger, or keep this opening’s edge square.',
   numbers: { offset, ...(radius === undefined ? {} : { radius }) },
@@ -130,7 +149,13 @@ interface Border {
 }
 
 /** Face must be left between the quirks of two openings, and between a quirk and the frame's edge. */
-function checkFaceBetween(p: Particulars, edge: BeadedEdge, beaded: readonly Opening[], contours: FrameContours, atPlane: number): Finding[] {
+function checkFaceBetween(
+  p: Particulars,
+  edge: BeadedEdge,
+  beaded: readonly Opening[],
+  contours: FrameContours,
+  atPlane: number,
+): Finding[] {
   const wallOf = (o: Opening): Contour | undefined => {
     const wall = offsetContour(o.contour, atPlane + 2 * edge.bead.radius + edge.bead.quirk);
     return wall.ok ? wall.contour : undefined;
@@ -140,14 +165,17 @@ function checkFaceBetween(p: Particulars, edge: BeadedEdge, beaded: readonly Ope
     return contour ? [{ name: `opening ${opening.label}`, opening, contour }] : [];
   });
   const others: Border[] = [
-    ...contours.openings.filter((o) => o.square).map((opening) => ({ name: `opening ${opening.label}`, opening, contour: opening.contour })),
+    ...contours.openings
+      .filter((o) => o.square)
+      .map((opening) => ({ name: `opening ${opening.label}`, opening, contour: opening.contour })),
     { name: 'the frame’s edge', contour: contours.perimeter },
   ];
   const findings: Finding[] = [];
   walls.forEach((wall, i) => {
     for (const other of [...walls.slice(i + 1), ...others]) {
       const inside = other.opening
-        ? containsPoint(wall.contour, other.contour.vertices[0]!) || containsPoint(other.contour, wall.contour.vertices[0]!)
+        ? containsPoint(wall.contour, other.contour.vertices[0]!) ||
+          containsPoint(other.contour, wall.contour.vertices[0]!)
         : !containsPoint(other.contour, wall.contour.vertices[0]!);
       if (!inside && !findMeeting(wall.contour, other.contour)) continue;
       const between = leastDistance(wall.opening!.contour, other.opening?.contour ?? other.contour);
@@ -166,7 +194,12 @@ function checkFaceBetween(p: Particulars, edge: BeadedEdge, beaded: readonly Ope
 }
 
 /** Dados whose floor comes near the bead or quirk above them. */
-function checkUnderBead(p: Particulars, edge: BeadedEdge, beaded: readonly Opening[], dados: readonly DadoOutline[]): Finding[] {
+function checkUnderBead(
+  p: Particulars,
+  edge: BeadedEdge,
+  beaded: readonly Opening[],
+  dados: readonly DadoOutline[],
+): Finding[] {
   const least = leastUnderBead(p.unit);
   const reach = 2 * edge.bead.radius + edge.bead.quirk;
   return dados.flatMap((dado) => {
@@ -198,7 +231,10 @@ function checkShave(p: Particulars, edge: BeadedEdge, beaded: readonly Opening[]
     {
       code: 'bead-shaved',
       level: 'caution',
-      text: below >= above ? `A cutter’s flank takes ${formatWithUnit(below, p.unit)} off the bead, ${formatWithUnit(belowAt, p.unit)} from the opening’s edge.` : `The cutters leave ${formatWithUnit(above, p.unit)} standing on the bead.`,
+      text:
+        below >= above
+          ? `A cutter’s flank takes ${formatWithUnit(below, p.unit)} off the bead, ${formatWithUnit(belowAt, p.unit)} from the opening’s edge.`
+          : `The cutters leave ${formatWithUnit(above, p.unit)} standing on the bead.`,
       remedy: 'Take an opening cutter with a smaller side angle, or a straight one; look at the section.',
       numbers: { below, above, belowAt },
       places: beaded.map((o) => atOpening(o)),

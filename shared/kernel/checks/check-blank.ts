@@ -9,11 +9,19 @@ import { wholeFrame } from './place-finding.ts';
 
 /** Frame against blank, blank against sheet, and room for the perimeter cutter. */
 export function checkBlank(p: Particulars, contours: FrameContours, plan: BlankPlan): Finding[] {
-  return [...checkFrameOnBlank(p, contours, plan), ...checkSheet(p, contours, plan), ...checkAllowance(p, contours, plan)];
+  return [
+    ...checkFrameOnBlank(p, contours, plan),
+    ...checkSheet(p, contours, plan),
+    ...checkAllowance(p, contours, plan),
+  ];
 }
 
 /** What a given blank leaves beyond the frame on the sides away from the squared corner. */
-function farAllowance(p: Particulars, { width, height }: FrameContours, { rough }: BlankPlan): { x: number; y: number } {
+function farAllowance(
+  p: Particulars,
+  { width, height }: FrameContours,
+  { rough }: BlankPlan,
+): { x: number; y: number } {
   const { allowance: k, trim: t, squaring } = p.setup;
   // All edges squared: the far sides are trimmed too, and need their trim.
   const trims = squaring === 'all-edges' ? 2 * t : t;

@@ -11,7 +11,12 @@ import type { Finding } from './finding.ts';
 import { atDado } from './place-finding.ts';
 
 /** Each dado by itself: against its cutter, the board, the frame, its panel and its ends. */
-export function checkDados(p: Particulars, contours: FrameContours, outlines: readonly DadoOutline[], radius: number): Finding[] {
+export function checkDados(
+  p: Particulars,
+  contours: FrameContours,
+  outlines: readonly DadoOutline[],
+  radius: number,
+): Finding[] {
   return outlines.flatMap((outline) => {
     const dado = p.dados[outline.index]!;
     return [
@@ -104,25 +109,48 @@ function checkClearance(p: Particulars, dado: Dado, o: DadoOutline): Finding[] {
   ];
 }
 
-const inBox = (e: Extents, q: Point) => q.x >= e.minX - WELD && q.x <= e.maxX + WELD && q.y >= e.minY - WELD && q.y <= e.maxY + WELD;
+const inBox = (e: Extents, q: Point) =>
+  q.x >= e.minX - WELD && q.x <= e.maxX + WELD && q.y >= e.minY - WELD && q.y <= e.maxY + WELD;
 
 /** Open ends must run out of the frame; ends that meet must lie in a dado that crosses them, over their whole width. */
-function checkEnds(dado: Dado, o: DadoOutline, all: readonly DadoOutline[], { perimeter }: FrameContours, radius: number): Finding[] {
+function checkEnds(
+  dado: Dado,
+  o: DadoOutline,
+  all: readonly DadoOutline[],
+  { perimeter }: FrameContours,
+  radius: number,
+): Finding[] {
   const vertical = dado.runs === 'vertical';
   const { minX, maxX, minY, maxY } = o.extents;
   return ([0, 1] as const).flatMap((end): Finding[] => {
     const along = vertical ? (end === 0 ? minY : maxY) : end === 0 ? minX : maxX;
     const corners: Point[] = vertical
-      ? [{ x: minX, y: along }, { x: maxX, y: along }]
-      : [{ x: along, y: minY }, { x: along, y: maxY }];
+      ? [
+          { x: minX, y: along },
+          { x: maxX, y: along },
+        ]
+      : [
+          { x: along, y: minY },
+          { x: along, y: maxY },
+        ];
     const where = vertical ? (end === 0 ? 'lower' : 'upper') : end === 0 ? 'left' : 'right';
-    const common = { level: 'caution', numbers: { along, radius }, places: [atDado(o)], field: entry(o, `ends.${end}`) } as const;
+    const common = {
+      level: 'caution',
+      numbers: { along, radius },
+      places: [atDado(o)],
+      field: entry(o, `ends.${end}`),
+    } as const;
     const kind = dado.ends[end];
     if (kind === 'open') {
       // The cutter's centre, half a width in from the end, must have reached the edge.
       const back = end === 0 ? radius : -radius;
       const centres = corners.map((c) => (vertical ? { x: c.x, y: c.y + back } : { x: c.x + back, y: c.y }));
-      const inside = centres.some((c) => containsPoint(perimeter, vertical ? { x: c.x, y: c.y - Math.sign(back) * WELD } : { x: c.x - Math.sign(back) * WELD, y: c.y }));
+      const inside = centres.some((c) =>
+        containsPoint(
+          perimeter,
+          vertical ? { x: c.x, y: c.y - Math.sign(back) * WELD } : { x: c.x - Math.sign(back) * WELD, y: c.y },
+        ),
+      );
       if (inside)
         return [
           {
@@ -134,7 +162,9 @@ function checkEnds(dado: Dado, o: DadoOutline, all: readonly DadoOutline[], { pe
         ];
     }
     if (kind === 'meets') {
-      const crossing = all.some((other) => other !== o && corners.every((c) => inBox(other.extents, c)) && other.depth >= o.depth - SAME);
+      const crossing = all.some(
+        (other) => other !== o && corners.every((c) => inBox(other.extents, c)) && other.depth >= o.depth - SAME,
+      );
       if (!crossing)
         return [
           {

@@ -12,8 +12,15 @@ import { atOpening } from './place-finding.ts';
 export function checkOpeningCuts(problems: readonly OpeningProblem[], cut: OpeningCut, unit: Unit): Finding[] {
   const axis = formatWithUnit(cut.axisOffset, unit);
   return problems.map(({ opening, reason, at, radius }): Finding => {
-    const place = { face: 'front', features: [opening.id], extents: { minX: at.x, minY: at.y, maxX: at.x, maxY: at.y } } as const;
-    const common = { level: 'stop', numbers: { axisOffset: cut.axisOffset, ...(radius === undefined ? {} : { radius }) } } as const;
+    const place = {
+      face: 'front',
+      features: [opening.id],
+      extents: { minX: at.x, minY: at.y, maxX: at.x, maxY: at.y },
+    } as const;
+    const common = {
+      level: 'stop',
+      numbers: { axisOffset: cut.axisOffset, ...(radius === undefined ? {} : { radius }) },
+    } as const;
     switch (reason) {
       case 'small':
         return {
@@ -58,7 +65,8 @@ export function checkOpeningPlaces({ perimeter, openings }: FrameContours): Find
     });
   }
   for (let i = 0; i < openings.length; i++)
-    for (let j = i + 1; j < openings.length; j++) if (overlap(openings[i]!, openings[j]!)) findings.push(overlapFinding(openings[i]!, openings[j]!));
+    for (let j = i + 1; j < openings.length; j++)
+      if (overlap(openings[i]!, openings[j]!)) findings.push(overlapFinding(openings[i]!, openings[j]!));
   return findings;
 }
 
@@ -66,7 +74,11 @@ function overlap(a: Opening, b: Opening): boolean {
   const p = a.extents;
   const q = b.extents;
   if (p.minX > q.maxX || q.minX > p.maxX || p.minY > q.maxY || q.minY > p.maxY) return false;
-  return findMeeting(a.contour, b.contour) !== undefined || containsPoint(a.contour, b.contour.vertices[0]!) || containsPoint(b.contour, a.contour.vertices[0]!);
+  return (
+    findMeeting(a.contour, b.contour) !== undefined ||
+    containsPoint(a.contour, b.contour.vertices[0]!) ||
+    containsPoint(b.contour, a.contour.vertices[0]!)
+  );
 }
 
 const overlapFinding = (a: Opening, b: Opening): Finding => ({

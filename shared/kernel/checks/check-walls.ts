@@ -20,7 +20,11 @@ interface Prepared {
   readonly sides: readonly Segment[];
 }
 
-const line = (ax: number, ay: number, bx: number, by: number): Segment => ({ kind: 'line', a: { x: ax, y: ay }, b: { x: bx, y: by } });
+const line = (ax: number, ay: number, bx: number, by: number): Segment => ({
+  kind: 'line',
+  a: { x: ax, y: ay },
+  b: { x: bx, y: by },
+});
 
 /** Board left between a dado and openings, the frame's edge and other dados, at the entered sizes; frame view. */
 export function checkWalls(p: Particulars, contours: FrameContours, outlines: readonly DadoOutline[]): Finding[] {
@@ -58,18 +62,36 @@ const thin = (text: string, remedy: string, wall: number, places: Finding['place
 
 /** How far a dado reaches into an opening's extents, across its direction. */
 function reachInto({ dado, outline: { extents: d } }: Prepared, o: Extents): number {
-  return dado.runs === 'vertical' ? Math.min(d.maxX - o.minX, o.maxX - d.minX) : Math.min(d.maxY - o.minY, o.maxY - d.minY);
+  return dado.runs === 'vertical'
+    ? Math.min(d.maxX - o.minX, o.maxX - d.minX)
+    : Math.min(d.maxY - o.minY, o.maxY - d.minY);
 }
 
-function checkOpening(d: Prepared, opening: Opening, segments: readonly Segment[], least: number, unit: Unit): Finding[] {
+function checkOpening(
+  d: Prepared,
+  opening: Opening,
+  segments: readonly Segment[],
+  least: number,
+  unit: Unit,
+): Finding[] {
   if (gap(d.outline.extents, opening.extents) >= least) return [];
-  const inside = containsPoint(opening.contour, d.box.vertices[0]!) || containsPoint(d.box, opening.contour.vertices[0]!);
+  const inside =
+    containsPoint(opening.contour, d.box.vertices[0]!) || containsPoint(d.box, opening.contour.vertices[0]!);
   const wall = inside ? 0 : leastDistance(d.sides, segments, least);
   if (wall >= least - WELD) return [];
   const places = [atDado(d.outline), atOpening(opening, 'both')];
   const field = `dados.${d.outline.index}.at`;
   const remedy = 'Move the dado or make the member wider.';
-  if (wall > WELD) return [thin(`Only ${formatWithUnit(wall, unit)} of board between dado ${d.dado.part} and opening ${opening.label}.`, remedy, wall, places, field)];
+  if (wall > WELD)
+    return [
+      thin(
+        `Only ${formatWithUnit(wall, unit)} of board between dado ${d.dado.part} and opening ${opening.label}.`,
+        remedy,
+        wall,
+        places,
+        field,
+      ),
+    ];
   const reach = reachInto(d, opening.extents);
   const width = d.dado.panel + d.dado.clearance;
   const text =
@@ -86,22 +108,50 @@ function edgeSides({ dado, outline: { extents: e } }: Prepared): Segment[] {
   const low = dado.ends[0] !== 'open';
   const high = dado.ends[1] !== 'open';
   return dado.runs === 'vertical'
-    ? [line(e.minX, e.minY, e.minX, e.maxY), line(e.maxX, e.minY, e.maxX, e.maxY), ...(low ? [line(e.minX, e.minY, e.maxX, e.minY)] : []), ...(high ? [line(e.minX, e.maxY, e.maxX, e.maxY)] : [])]
-    : [line(e.minX, e.minY, e.maxX, e.minY), line(e.minX, e.maxY, e.maxX, e.maxY), ...(low ? [line(e.minX, e.minY, e.minX, e.maxY)] : []), ...(high ? [line(e.maxX, e.minY, e.maxX, e.maxY)] : [])];
+    ? [
+        line(e.minX, e.minY, e.minX, e.maxY),
+        line(e.maxX, e.minY, e.maxX, e.maxY),
+        ...(low ? [line(e.minX, e.minY, e.maxX, e.minY)] : []),
+        ...(high ? [line(e.minX, e.maxY, e.maxX, e.maxY)] : []),
+      ]
+    : [
+        line(e.minX, e.minY, e.maxX, e.minY),
+        line(e.minX, e.maxY, e.maxX, e.maxY),
+        ...(low ? [line(e.minX, e.minY, e.minX, e.maxY)] : []),
+        ...(high ? [line(e.maxX, e.minY, e.maxX, e.maxY)] : []),
+      ];
 }
 
 const middle = ({ dado, outline: { extents: e } }: Prepared): Segment =>
-  dado.runs === 'vertical' ? line((e.minX + e.maxX) / 2, e.minY, (e.minX + e.maxX) / 2, e.maxY) : line(e.minX, (e.minY + e.maxY) / 2, e.maxX, (e.minY + e.maxY) / 2);
+  dado.runs === 'vertical'
+    ? line((e.minX + e.maxX) / 2, e.minY, (e.minX + e.maxX) / 2, e.maxY)
+    : line(e.minX, (e.minY + e.maxY) / 2, e.maxX, (e.minY + e.maxY) / 2);
 
-function checkEdge(d: Prepared, perimeter: readonly Segment[], contours: FrameContours, least: number, unit: Unit): Finding[] {
+function checkEdge(
+  d: Prepared,
+  perimeter: readonly Segment[],
+  contours: FrameContours,
+  least: number,
+  unit: Unit,
+): Finding[] {
   const centre = middle(d);
   // Edges that the dado runs out through are meant to be open.
   const edges = perimeter.filter((edge) => intersectSegments(centre, edge).length === 0);
   const wall = leastDistance(edgeSides(d), edges, least);
   if (wall >= least - WELD) return [];
   const broken = wall <= WELD;
-  const text = broken ? `Dado ${d.dado.part} breaks out at the frame’s edge along its side.` : `Only ${formatWithUnit(wall, unit)} of board between dado ${d.dado.part} and the frame’s edge.`;
-  return [thin(text, 'Move the dado away from the edge.', broken ? 0 : wall, [atDado(d.outline), wholeFrame(contours, 'back')], `dados.${d.outline.index}.at`)];
+  const text = broken
+    ? `Dado ${d.dado.part} breaks out at the frame’s edge along its side.`
+    : `Only ${formatWithUnit(wall, unit)} of board between dado ${d.dado.part} and the frame’s edge.`;
+  return [
+    thin(
+      text,
+      'Move the dado away from the edge.',
+      broken ? 0 : wall,
+      [atDado(d.outline), wholeFrame(contours, 'back')],
+      `dados.${d.outline.index}.at`,
+    ),
+  ];
 }
 
 function checkOther(d: Prepared, other: Prepared, least: number, unit: Unit): Finding[] {
@@ -119,4 +169,3 @@ function checkOther(d: Prepared, other: Prepared, least: number, unit: Unit): Fi
     ),
   ];
 }
-

@@ -3,25 +3,42 @@ import { radiusAtHeight } from '../cutters/radius-at-height.ts';
 import type { CornerResidue } from '../line-sets/corner-residue.ts';
 import type { OpeningCut } from '../line-sets/opening-cut.ts';
 import type { Particulars } from '../particulars/particulars.ts';
-import { SAME } from '../tolerances.ts';
-import { formatWithUnit } from '../units/format-length.ts';
+import { NOTHING_LEFT, SAME } from '../tolerances.ts';
+import { formatDecimal, formatWithUnit } from '../units/format-length.ts';
 import type { Finding } from './finding.ts';
 import { atOpening, wholeFrame } from './place-finding.ts';
 
 /** What a person should know before cutting, without having to change it. */
-export function makeNotes(p: Particulars, contours: FrameContours, cut: OpeningCut, residues: readonly CornerResidue[]): Finding[] {
+export function makeNotes(
+  p: Particulars,
+  contours: FrameContours,
+  cut: OpeningCut,
+  residues: readonly CornerResidue[],
+): Finding[] {
   if (contours.openings.length === 0) return notchNote(p, contours);
-  return [...heldNote(p, contours, cut), ...residueNotes(p, contours, residues), ...offcutNotes(p, contours, cut), ...notchNote(p, contours)];
+  return [
+    ...heldNote(p, contours, cut),
+    ...residueNotes(p, contours, residues),
+    ...offcutNotes(p, contours, cut),
+    ...notchNote(p, contours),
+  ];
 }
 
 /** Which edge is entered and which follows from the cutter. */
 function heldNote(p: Particulars, contours: FrameContours, cut: OpeningCut): Finding[] {
   if (cut.atFace - cut.atBack < SAME) return [];
   const say = (n: number) => formatWithUnit(n, p.unit);
-  const where = cut.heldDepth === 0 ? 'the face' : cut.heldDepth === p.thickness ? 'the back' : `the bead’s base, ${say(cut.heldDepth)} below the face`;
+  const where =
+    cut.heldDepth === 0
+      ? 'the face'
+      : cut.heldDepth === p.thickness
+        ? 'the back'
+        : `the bead’s base, ${say(cut.heldDepth)} below the face`;
   const follows = [
     ...(cut.atFace > SAME ? [`at the face each opening is larger by ${say(cut.atFace)} a side`] : []),
-    ...(cut.atBack < -SAME ? [`at the back ${cut.atFace > SAME ? '' : 'each opening is '}smaller by ${say(-cut.atBack)} a side`] : []),
+    ...(cut.atBack < -SAME
+      ? [`at the back ${cut.atFace > SAME ? '' : 'each opening is '}smaller by ${say(-cut.atBack)} a side`]
+      : []),
   ];
   return [
     {
@@ -41,17 +58,18 @@ function residueNotes(p: Particulars, contours: FrameContours, residues: readonl
   for (const r of residues) byAngle.set(r.angle.toFixed(6), [...(byAngle.get(r.angle.toFixed(6)) ?? []), r]);
   return [...byAngle.values()].map((group) => {
     const { angle, levels } = group[0]!;
-    const degrees = Number(((angle * 180) / Math.PI).toFixed(2));
+    const degrees = formatDecimal((angle * 180) / Math.PI, 2);
     const face = levels[0]!;
     const middle = levels[2]!;
-    const leaves = (l: typeof face) => (l.lifted.diagonal < 1e-6 ? 'nothing' : formatWithUnit(Number(l.lifted.diagonal.toFixed(6)), p.unit));
+    const leaves = (l: typeof face) =>
+      l.lifted.diagonal < NOTHING_LEFT ? 'nothing' : formatWithUnit(l.lifted.diagonal, p.unit);
     const ids = new Set(group.map((r) => r.opening));
     return {
       code: 'corner-residue',
       level: 'note',
       text: `Inside corners of ${degrees}°: ${leaves(face)} is left on the diagonal at the face, ${leaves(middle)} at half the thickness.`,
       remedy: '',
-      numbers: { angle: degrees, face: face.lifted.diagonal, half: middle.lifted.diagonal, back: levels[3]!.lifted.diagonal },
+      numbers: { angle, face: face.lifted.diagonal, half: middle.lifted.diagonal, back: levels[3]!.lifted.diagonal },
       places: contours.openings.filter((o) => ids.has(o.id)).map((o) => atOpening(o)),
     } satisfies Finding;
   });
@@ -60,7 +78,7 @@ function residueNotes(p: Particulars, contours: FrameContours, residues: readonl
 /** Size of the piece that comes free in each opening, at its larger face: the opening less the cutter's way on both sides. */
 function offcutNotes(p: Particulars, contours: FrameContours, cut: OpeningCut): Finding[] {
   const kerf = cut.axisOffset + radiusAtHeight(p.cutters.opening, cut.tipDepth - p.thickness);
-  const bySize = new Map<string, { width: number; height: number; of: typeof contours.openings[number][] }>();
+  const bySize = new Map<string, { width: number; height: number; of: (typeof contours.openings)[number][] }>();
   for (const o of contours.openings) {
     const width = o.width - 2 * kerf;
     const height = o.height - 2 * kerf;

@@ -10,6 +10,10 @@ export const wholeFrame = (c: FrameContours, face: Face | 'both' = 'both'): Find
   extents: { minX: 0, minY: 0, maxX: c.width, maxY: c.height },
 });
 
-export const atOpening = (o: Opening, face: Face | 'both' = 'front'): FindingPlace => ({ face, features: [o.id], extents: o.extents });
+export const atOpening = (o: Opening, face: Face | 'both' = 'front'): FindingPlace => ({
+  face,
+  features: [o.id],
+  extents: o.extents,
+});
 
 export const atDado = (d: DadoOutline): FindingPlace => ({ face: 'back', features: [d.id], extents: d.extents });

@@ -14,7 +14,8 @@ function arcCrossings(arc: ArcSegment, p: Point): number {
   }
   cuts.push(end);
   cuts.sort((a, b) => (sweep > 0 ? a - b : b - a));
-  const yAt = (i: number) => (i === 0 ? arc.a.y : i === cuts.length - 1 ? arc.b.y : centre.y + radius * Math.sin(cuts[i]!));
+  const yAt = (i: number) =>
+    i === 0 ? arc.a.y : i === cuts.length - 1 ? arc.b.y : centre.y + radius * Math.sin(cuts[i]!);
   let crossings = 0;
   for (let i = 1; i < cuts.length; i++) {
     if (yAt(i - 1) <= p.y === yAt(i) <= p.y) continue;
@@ -30,7 +31,8 @@ export function containsPoint(contour: Contour, p: Point): boolean {
   let crossings = 0;
   for (const s of segmentsOf(contour)) {
     if (s.kind === 'arc') crossings += arcCrossings(s, p);
-    else if (s.a.y <= p.y !== s.b.y <= p.y && s.a.x + ((p.y - s.a.y) / (s.b.y - s.a.y)) * (s.b.x - s.a.x) > p.x) crossings++;
+    else if (s.a.y <= p.y !== s.b.y <= p.y && s.a.x + ((p.y - s.a.y) / (s.b.y - s.a.y)) * (s.b.x - s.a.x) > p.x)
+      crossings++;
   }
   return crossings % 2 === 1;
 }

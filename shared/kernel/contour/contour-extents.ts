@@ -32,7 +32,8 @@ export function contourExtents(contour: Contour): Extents {
   for (const segment of segmentsOf(contour)) {
     if (segment.kind !== 'arc') continue;
     for (const [angle, x, y] of QUARTERS)
-      if (sweepHolds(segment, angle)) crowns.push({ x: segment.centre.x + x * segment.radius, y: segment.centre.y + y * segment.radius });
+      if (sweepHolds(segment, angle))
+        crowns.push({ x: segment.centre.x + x * segment.radius, y: segment.centre.y + y * segment.radius });
   }
   return joinExtents(box, ...(crowns.length > 0 ? [pointExtents(crowns)] : []));
 }

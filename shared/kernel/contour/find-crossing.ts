@@ -16,7 +16,9 @@ function isJoint(p: Entry, q: Entry, count: number, point: Point): boolean {
   const first = Math.min(p.index, q.index);
   const second = Math.max(p.index, q.index);
   const early = p.index < q.index ? p.segment : q.segment;
-  return (second === first + 1 && near(point, early.b)) || (first === 0 && second === count - 1 && near(point, early.a));
+  return (
+    (second === first + 1 && near(point, early.b)) || (first === 0 && second === count - 1 && near(point, early.a))
+  );
 }
 
 const entriesOf = (contour: Contour): Entry[] =>

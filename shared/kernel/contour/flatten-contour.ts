@@ -1,3 +1,4 @@
+import { LEAST_CHORD_ANGLE } from '../tolerances.ts';
 import type { Contour, Point } from './contour.ts';
 import { segmentsOf, type ArcSegment } from './segments.ts';
 
@@ -16,7 +17,7 @@ export function flattenContour(contour: Contour, chord: number): Point[] {
     if (segment.kind === 'line') continue;
     // Sagitta of a chord over angle θ: R(1 − cos θ/2).
     const step = 2 * Math.acos(Math.max(-1, 1 - chord / segment.radius));
-    const pieces = Math.max(1, Math.ceil(Math.abs(segment.sweep) / Math.max(step, 1e-4)));
+    const pieces = Math.max(1, Math.ceil(Math.abs(segment.sweep) / Math.max(step, LEAST_CHORD_ANGLE)));
     for (let i = 1; i < pieces; i++) out.push(pointOnArc(segment, i / pieces));
   }
   if (!contour.closed && contour.vertices.length > 0) out.push(contour.vertices[contour.vertices.length - 1]!);

@@ -5,14 +5,21 @@ import { directionAt, sweepHolds, type ArcSegment, type Segment } from './segmen
 
 /** Rectangle that surely holds a segment: exact for a line, the chord grown by the sagitta (or the whole circle) for an arc. */
 export function segmentBounds(s: Segment): Extents {
-  const box = { minX: Math.min(s.a.x, s.b.x), minY: Math.min(s.a.y, s.b.y), maxX: Math.max(s.a.x, s.b.x), maxY: Math.max(s.a.y, s.b.y) };
+  const box = {
+    minX: Math.min(s.a.x, s.b.x),
+    minY: Math.min(s.a.y, s.b.y),
+    maxX: Math.max(s.a.x, s.b.x),
+    maxY: Math.max(s.a.y, s.b.y),
+  };
   if (s.kind === 'line') return box;
   const grow = s.radius * (1 - Math.cos(Math.min(Math.PI, Math.abs(s.sweep) / 2)));
   return { minX: box.minX - grow, minY: box.minY - grow, maxX: box.maxX + grow, maxY: box.maxY + grow };
 }
 
 const carrierOf = (s: Segment): Carrier =>
-  s.kind === 'line' ? { kind: 'line', at: s.a, direction: directionAt(s, 'start') } : { kind: 'circle', centre: s.centre, radius: s.radius };
+  s.kind === 'line'
+    ? { kind: 'line', at: s.a, direction: directionAt(s, 'start') }
+    : { kind: 'circle', centre: s.centre, radius: s.radius };
 
 /** Whether a point of a segment's carrier lies on the segment, ends included within WELD. */
 function holds(s: Segment, p: Point): boolean {
@@ -30,7 +37,10 @@ const sameCircle = (s: ArcSegment, t: ArcSegment) =>
   Math.hypot(s.centre.x - t.centre.x, s.centre.y - t.centre.y) <= WELD && Math.abs(s.radius - t.radius) <= WELD;
 
 /** Ends of one segment that lie on the other, for segments on one carrier: where an overlap begins and ends. */
-const overlapEnds = (s: Segment, t: Segment): Point[] => [...[t.a, t.b].filter((p) => holds(s, p)), ...[s.a, s.b].filter((p) => holds(t, p))];
+const overlapEnds = (s: Segment, t: Segment): Point[] => [
+  ...[t.a, t.b].filter((p) => holds(s, p)),
+  ...[s.a, s.b].filter((p) => holds(t, p)),
+];
 
 /** Points where two segments meet, touch or, when they lie on one carrier, where their overlap begins and ends. */
 export function intersectSegments(s: Segment, t: Segment): Point[] {

@@ -13,7 +13,10 @@ export function rectangle(e: Extents): Contour {
 }
 
 /** A closed contour of straight lines. */
-export const polygon = (points: readonly Point[]): Contour => ({ closed: true, vertices: points.map((p) => ({ x: p.x, y: p.y, bulge: 0 })) });
+export const polygon = (points: readonly Point[]): Contour => ({
+  closed: true,
+  vertices: points.map((p) => ({ x: p.x, y: p.y, bulge: 0 })),
+});
 
 /** The same contour run the other way: each bulge moves to the segment's other end and changes its sign. */
 export function reverseContour(contour: Contour): Contour {
@@ -29,7 +32,8 @@ export function reverseContour(contour: Contour): Contour {
 }
 
 /** The contour run counter-clockwise. */
-export const counterClockwise = (contour: Contour): Contour => (contourArea(contour) < 0 ? reverseContour(contour) : contour);
+export const counterClockwise = (contour: Contour): Contour =>
+  contourArea(contour) < 0 ? reverseContour(contour) : contour;
 
 /** A closed contour without vertices that repeat the one before them (nearer than WELD). */
 export function dropRepeats(contour: Contour): Contour {

@@ -29,7 +29,8 @@ function newBulge(arc: ArcSegment, radius: number, a: Point, b: Point): number |
   return runs ? Math.tan(left / 4) : undefined;
 }
 
-const runsOn = (s: Segment, a: Point, b: Point) => (b.x - a.x) * (s.b.x - s.a.x) + (b.y - a.y) * (s.b.y - s.a.y) > 0 && Math.hypot(b.x - a.x, b.y - a.y) > WELD;
+const runsOn = (s: Segment, a: Point, b: Point) =>
+  (b.x - a.x) * (s.b.x - s.a.x) + (b.y - a.y) * (s.b.y - s.a.y) > 0 && Math.hypot(b.x - a.x, b.y - a.y) > WELD;
 
 /**
  * A closed contour moved `distance` to the right of its direction of travel: outwards for a counter-clockwise one, inwards
@@ -45,7 +46,8 @@ export function offsetContour(contour: Contour, distance: number): OffsetContour
   const joints: Point[] = [];
   for (let i = 0; i < n; i++) {
     const after = segments[i]!;
-    if (after.kind === 'arc' && offsetRadius(after, distance) <= WELD) return { ok: false, reason: 'arc', at: after.a, radius: after.radius };
+    if (after.kind === 'arc' && offsetRadius(after, distance) <= WELD)
+      return { ok: false, reason: 'arc', at: after.a, radius: after.radius };
     const joint = offsetJoint(segments[i === 0 ? n - 1 : i - 1]!, after, distance);
     if (!joint) return { ok: false, reason: 'collapse', at: after.a };
     joints.push(joint);

@@ -11,7 +11,11 @@ export const offsetRadius = (arc: { readonly radius: number; readonly sweep: num
 function offsetCarrier(segment: Segment, distance: number): Carrier | undefined {
   if (segment.kind === 'line') {
     const direction = directionAt(segment, 'start');
-    return { kind: 'line', at: { x: segment.a.x + direction.y * distance, y: segment.a.y - direction.x * distance }, direction };
+    return {
+      kind: 'line',
+      at: { x: segment.a.x + direction.y * distance, y: segment.a.y - direction.x * distance },
+      direction,
+    };
   }
   const radius = offsetRadius(segment, distance);
   return radius > 0 ? { kind: 'circle', centre: segment.centre, radius } : undefined;

@@ -12,7 +12,10 @@ function nearestOnLine(s: LineSegment, p: Point): Point {
 function nearestOnArc(s: ArcSegment, p: Point): Point {
   const away = Math.hypot(p.x - s.centre.x, p.y - s.centre.y);
   if (away > 0 && sweepHolds(s, Math.atan2(p.y - s.centre.y, p.x - s.centre.x)))
-    return { x: s.centre.x + ((p.x - s.centre.x) * s.radius) / away, y: s.centre.y + ((p.y - s.centre.y) * s.radius) / away };
+    return {
+      x: s.centre.x + ((p.x - s.centre.x) * s.radius) / away,
+      y: s.centre.y + ((p.y - s.centre.y) * s.radius) / away,
+    };
   return Math.hypot(p.x - s.a.x, p.y - s.a.y) <= Math.hypot(p.x - s.b.x, p.y - s.b.y) ? s.a : s.b;
 }
 

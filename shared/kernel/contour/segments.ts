@@ -64,7 +64,10 @@ export function directionAt(segment: Segment, end: 'start' | 'end'): Point {
   }
   const at = end === 'start' ? segment.a : segment.b;
   const side = segment.sweep > 0 ? 1 : -1;
-  return { x: (-side * (at.y - segment.centre.y)) / segment.radius, y: (side * (at.x - segment.centre.x)) / segment.radius };
+  return {
+    x: (-side * (at.y - segment.centre.y)) / segment.radius,
+    y: (side * (at.x - segment.centre.x)) / segment.radius,
+  };
 }
 
 /** Whether the angle (radians) lies within an arc's sweep, its ends included with `slack` radians. */

@@ -19,12 +19,21 @@ export function membersContours(outline: MembersOutline, unit: Unit): SolvedFram
   const { width, height, stiles, rails, feet } = outline;
   const findings: Finding[] = [];
   const whole: Extents = { minX: 0, minY: 0, maxX: width, maxY: height };
-  const space: Extents = { minX: stiles.left, maxX: width - stiles.right, minY: feet + rails.bottom, maxY: height - rails.top };
+  const space: Extents = {
+    minX: stiles.left,
+    maxX: width - stiles.right,
+    minY: feet + rails.bottom,
+    maxY: height - rails.top,
+  };
   const shortX = space.minX - space.maxX;
   const shortY = space.minY - space.maxY;
   if (shortX >= 0) findings.push(noRoom('stiles', 'width', width, shortX, whole, 'outline.width', unit));
-  if (shortY >= 0) findings.push(noRoom(feet > 0 ? 'rails and feet' : 'rails', 'height', height, shortY, whole, 'outline.height', unit));
-  if (findings.length > 0) return { contours: { width, height, perimeter: rectangle(whole), openings: [], members: [] }, findings };
+  if (shortY >= 0)
+    findings.push(
+      noRoom(feet > 0 ? 'rails and feet' : 'rails', 'height', height, shortY, whole, 'outline.height', unit),
+    );
+  if (findings.length > 0)
+    return { contours: { width, height, perimeter: rectangle(whole), openings: [], members: [] }, findings };
 
   const solved = solveLayout(outline.layout, space);
   for (const misfit of solved.misfits) findings.push(misfitFinding(misfit, unit));
@@ -35,7 +44,13 @@ export function membersContours(outline: MembersOutline, unit: Unit): SolvedFram
     else openings.push(made);
   });
   return {
-    contours: { width, height, perimeter: perimeterOf(outline), openings, members: [...outerMembers(outline), ...solved.betweens.map(betweenMember)] },
+    contours: {
+      width,
+      height,
+      perimeter: perimeterOf(outline),
+      openings,
+      members: [...outerMembers(outline), ...solved.betweens.map(betweenMember)],
+    },
     findings,
   };
 }
@@ -114,11 +129,22 @@ function makeOpening({ part, path, extents }: SolvedOpening, index: number, unit
       field: fieldOfPath(path, 'opening.arch'),
     };
   }
-  return { id: `opening-${index}`, label, contour: openingContour(extents, arch), extents, width, height, arch, square: part.opening.edge === 'square', path };
+  return {
+    id: `opening-${index}`,
+    label,
+    contour: openingContour(extents, arch),
+    extents,
+    width,
+    height,
+    arch,
+    square: part.opening.edge === 'square',
+    path,
+  };
 }
 
 /** Path of an entry of the layout tree within the particulars: steps do not say whether they are columns or rows, so both ends agree on "at". */
-const fieldOfPath = (path: readonly number[], entry: string) => ['outline.layout', ...path.map(String), entry].join('.');
+const fieldOfPath = (path: readonly number[], entry: string) =>
+  ['outline.layout', ...path.map(String), entry].join('.');
 
 function misfitFinding({ path, along, over, extents }: LayoutMisfit, unit: Unit): Finding {
   const parts = along === 'width' ? 'Columns and mid-stiles' : 'Rows and mid-rails';
@@ -126,7 +152,12 @@ function misfitFinding({ path, along, over, extents }: LayoutMisfit, unit: Unit)
   return {
     code: 'members-do-not-add-up',
     level: 'stop',
-    text: over > 0 ? `${parts} are ${much} too long for the ${along} they share.` : over < 0 ? `${parts} are ${much} short of the ${along} they share.` : `${parts} leave nothing of the ${along} for the parts without a size.`,
+    text:
+      over > 0
+        ? `${parts} are ${much} too long for the ${along} they share.`
+        : over < 0
+          ? `${parts} are ${much} short of the ${along} they share.`
+          : `${parts} leave nothing of the ${along} for the parts without a size.`,
     remedy: `Take ${much} ${over > 0 ? 'off' : 'onto'} one of them, or leave one part without a size: it takes what is left.`,
     numbers: { over },
     places: [{ face: 'both', features: [], extents }],
@@ -134,7 +165,15 @@ function misfitFinding({ path, along, over, extents }: LayoutMisfit, unit: Unit)
   };
 }
 
-function noRoom(members: string, along: string, size: number, short: number, extents: Extents, field: string, unit: Unit): Finding {
+function noRoom(
+  members: string,
+  along: string,
+  size: number,
+  short: number,
+  extents: Extents,
+  field: string,
+  unit: Unit,
+): Finding {
   return {
     code: 'members-do-not-add-up',
     level: 'stop',

@@ -10,7 +10,8 @@ export interface MergedDado {
   readonly of: readonly FeatureId[];
 }
 
-const touch = (a: Extents, b: Extents) => a.minX <= b.maxX + WELD && b.minX <= a.maxX + WELD && a.minY <= b.maxY + WELD && b.minY <= a.maxY + WELD;
+const touch = (a: Extents, b: Extents) =>
+  a.minX <= b.maxX + WELD && b.minX <= a.maxX + WELD && a.minY <= b.maxY + WELD && b.minY <= a.maxY + WELD;
 
 /** Groups of dados that hang together. */
 function components(dados: readonly DadoOutline[]): DadoOutline[][] {

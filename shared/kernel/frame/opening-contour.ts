@@ -10,7 +10,8 @@ export function openingContour(extents: Extents, arch: number): Contour {
   if (arch === 0) return rectangle(extents);
   const { minX, minY, maxX, maxY } = extents;
   const width = maxX - minX;
-  if (!(arch > 0 && arch <= width / 2 && arch < maxY - minY)) throw new RangeError(`arch: got ${arch}, takes up to ${width / 2}, and less than ${maxY - minY}`);
+  if (!(arch > 0 && arch <= width / 2 && arch < maxY - minY))
+    throw new RangeError(`arch: got ${arch}, takes up to ${width / 2}, and less than ${maxY - minY}`);
   const springing = maxY - arch;
   return {
     closed: true,
@@ -24,4 +25,5 @@ export function openingContour(extents: Extents, arch: number): Contour {
 }
 
 /** Radius of an arch, R = (c²/4 + h²) / 2h. Infinite for no rise. */
-export const archRadius = (width: number, rise: number): number => (rise === 0 ? Infinity : (width * width) / 8 / rise + rise / 2);
+export const archRadius = (width: number, rise: number): number =>
+  rise === 0 ? Infinity : (width * width) / 8 / rise + rise / 2;

@@ -13,7 +13,10 @@ export function outlineDado(dado: Dado, index: number, radius: number): DadoOutl
     id: `dado-${index}`,
     part: dado.part,
     index,
-    extents: dado.runs === 'vertical' ? { minX: low, maxX: high, minY: from, maxY: to } : { minX: from, maxX: to, minY: low, maxY: high },
+    extents:
+      dado.runs === 'vertical'
+        ? { minX: low, maxX: high, minY: from, maxY: to }
+        : { minX: from, maxX: to, minY: low, maxY: high },
     depth: dado.depth,
   };
 }

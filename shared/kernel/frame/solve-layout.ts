@@ -66,10 +66,26 @@ function solvePart(part: LayoutPart, space: Extents, path: LayoutPath, solved: S
     const end = isLast ? length : gone + size;
     const slice = (from: number, to: number): Extents =>
       across
-        ? { minX: space.minX + from, maxX: to === length ? space.maxX : space.minX + to, minY: space.minY, maxY: space.maxY }
-        : { minX: space.minX, maxX: space.maxX, maxY: space.maxY - from, minY: to === length ? space.minY : space.maxY - to };
+        ? {
+            minX: space.minX + from,
+            maxX: to === length ? space.maxX : space.minX + to,
+            minY: space.minY,
+            maxY: space.maxY,
+          }
+        : {
+            minX: space.minX,
+            maxX: space.maxX,
+            maxY: space.maxY - from,
+            minY: to === length ? space.minY : space.maxY - to,
+          };
     solvePart(child, slice(gone, end), [...path, i], solved);
-    if (!isLast) solved.betweens.push({ path, kind: across ? 'mid-stile' : 'mid-rail', index: i, extents: slice(end, end + part.between) });
+    if (!isLast)
+      solved.betweens.push({
+        path,
+        kind: across ? 'mid-stile' : 'mid-rail',
+        index: i,
+        extents: slice(end, end + part.between),
+      });
     gone = end + part.between;
   });
 }

@@ -13,7 +13,8 @@ const read = (vertices: readonly TracedVertex[]): Contour =>
   dropRepeats({ closed: true, vertices: vertices.map(([x, y, bulge = 0]) => ({ x, y, bulge })) });
 
 /** A contour needs three corners, or two joined by an arc, to have an inside. */
-const hasInside = (c: Contour) => c.vertices.length >= 3 || (c.vertices.length === 2 && c.vertices.some((v) => v.bulge !== 0));
+const hasInside = (c: Contour) =>
+  c.vertices.length >= 3 || (c.vertices.length === 2 && c.vertices.some((v) => v.bulge !== 0));
 
 const crossesItself = (what: string, field: string, id: string, at: Point): Finding => ({
   code: 'outline-crosses-itself',
@@ -31,7 +32,8 @@ export function tracedContours(outline: TracedOutline): SolvedFrame {
   const raw = read(outline.perimeter);
   const box = contourExtents(raw.vertices.length > 0 ? raw : { closed: true, vertices: [{ x: 0, y: 0, bulge: 0 }] });
   const move = { sx: 1, sy: 1, dx: -box.minX, dy: -box.minY } as const;
-  const normal = (contour: Contour) => (hasInside(contour) ? counterClockwise(placeContour(move, contour)) : placeContour(move, contour));
+  const normal = (contour: Contour) =>
+    hasInside(contour) ? counterClockwise(placeContour(move, contour)) : placeContour(move, contour);
 
   const perimeter = normal(raw);
   const checkLine = (what: string, field: string, id: string, contour: Contour): boolean => {
@@ -48,7 +50,19 @@ export function tracedContours(outline: TracedOutline): SolvedFrame {
     const label = openingLabel(i);
     if (!checkLine(`Opening ${label}`, `outline.openings.${i}`, `opening-${i}`, contour)) return;
     const extents = contourExtents(contour);
-    openings.push({ id: `opening-${i}`, label, contour, extents, width: extents.maxX - extents.minX, height: extents.maxY - extents.minY, arch: 0, square: outline.squareOpenings?.includes(i) ?? false });
+    openings.push({
+      id: `opening-${i}`,
+      label,
+      contour,
+      extents,
+      width: extents.maxX - extents.minX,
+      height: extents.maxY - extents.minY,
+      arch: 0,
+      square: outline.squareOpenings?.includes(i) ?? false,
+    });
   });
-  return { contours: { width: box.maxX - box.minX, height: box.maxY - box.minY, perimeter, openings, members: [] }, findings };
+  return {
+    contours: { width: box.maxX - box.minX, height: box.maxY - box.minY, perimeter, openings, members: [] },
+    findings,
+  };
 }

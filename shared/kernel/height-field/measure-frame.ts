@@ -24,8 +24,8 @@ function* again(worked: WorkedFrame, stage: Stage, whole: CutPart, found: Differ
   const { cell } = whole.grid;
   const margin = AGAIN_CELLS * cell;
   const grid = makeGrid({ minX: found.x - margin, maxX: found.x + margin, minY: found.y - margin, maxY: found.y + margin }, cell / FINER);
-  const part = yield* cutBoard(stage, grid, whole);
-  const finer = (yield* findDifference(worked, part, found.face))[found.kind];
+  const part = yield* shareOf(cutBoard(stage, grid, whole), 0, 0.5);
+  const finer = (yield* shareOf(findDifference(worked, part, found.face), 0.5, 1))[found.kind];
   return finer && finer.off > found.off ? finer : found;
 }
 

@@ -29,7 +29,8 @@ export interface BeadProblem {
 
 /** The cutters of a beaded edge when all are there and of the right kind; undefined otherwise (the cutter check says so). */
 export function beadCutters({ bead, quirk, corner }: Particulars['cutters']): BeadCutters | undefined {
-  const is = <K extends Cutter['kind']>(cutter: Cutter | undefined, kind: K): cutter is Extract<Cutter, { kind: K }> => cutter?.kind === kind;
+  const is = <K extends Cutter['kind']>(cutter: Cutter | undefined, kind: K): cutter is Extract<Cutter, { kind: K }> =>
+    cutter?.kind === kind;
   return is(bead, 'beading') && is(quirk, 'straight') && is(corner, 'vee') ? { bead, quirk, corner } : undefined;
 }
 
@@ -43,14 +44,23 @@ export function quirkOffsets({ radius, quirk }: BeadedEdge['bead'], diameter: nu
   const inner = 2 * radius;
   if (spare <= SAME) return [inner + quirk / 2];
   const steps = Math.ceil(spare / (diameter * (1 - QUIRK_OVERLAP)) - SAME);
-  return Array.from({ length: steps + 1 }, (_, i) => inner + diameter / 2 + (i === steps ? spare : (i * spare) / steps));
+  return Array.from(
+    { length: steps + 1 },
+    (_, i) => inner + diameter / 2 + (i === steps ? spare : (i * spare) / steps),
+  );
 }
 
 /**
  * Bead, quirk and quirk corner lines of the beaded openings, frame view. Outward offsets from the opening's edge, for bead
  * radius R, quirk q and tip flat t: bead −t/2 and 2R + t/2, quirk 2R + q/2; all at the bead's base, e + R below the face.
  */
-export function beadLineSets(p: Particulars, edge: BeadedEdge, cutters: BeadCutters, openings: readonly Opening[], cut: OpeningCut): { lineSets: LineSet[]; problems: BeadProblem[] } {
+export function beadLineSets(
+  p: Particulars,
+  edge: BeadedEdge,
+  cutters: BeadCutters,
+  openings: readonly Opening[],
+  cut: OpeningCut,
+): { lineSets: LineSet[]; problems: BeadProblem[] } {
   const { radius, quirk } = edge.bead;
   const flat = cutters.bead.tipFlat;
   const depth = beadBase(edge);
@@ -76,9 +86,16 @@ export function beadLineSets(p: Particulars, edge: BeadedEdge, cutters: BeadCutt
     }
     const wall = moved('QUIRK_CORNER', 2 * radius + quirk);
     if (!wall) continue;
-    const corners = veeCorners(wall, { floor: depth, plane: 0, filletRadius: cutters.quirk.diameter / 2, cutter: cutters.corner, chord: drawingChord(p.unit) });
+    const corners = veeCorners(wall, {
+      floor: depth,
+      plane: 0,
+      filletRadius: cutters.quirk.diameter / 2,
+      cutter: cutters.corner,
+      chord: drawingChord(p.unit),
+    });
     for (const points of corners.paths) put('QUIRK_CORNER', { kind: 'climb', points, of: [opening.id] });
-    for (const at of corners.missed) problems.push({ opening, set: 'QUIRK_CORNER', offset: 2 * radius + quirk, reason: 'collapse', at });
+    for (const at of corners.missed)
+      problems.push({ opening, set: 'QUIRK_CORNER', offset: 2 * radius + quirk, reason: 'collapse', at });
   }
 
   const roles = { BEAD_INNER: 'bead', BEAD_OUTER: 'bead', QUIRK: 'quirk', QUIRK_CORNER: 'corner' } as const;

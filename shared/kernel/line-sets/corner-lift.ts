@@ -1,5 +1,6 @@
 import type { Point, Point3 } from '../contour/contour.ts';
 import { offsetJoint } from '../contour/offset-joint.ts';
+import { CLOSEST_STANDS } from '../tolerances.ts';
 import type { InsideCorner } from './inside-corners.ts';
 import type { LiftSample } from './lift-samples.ts';
 
@@ -13,8 +14,6 @@ export interface LiftSettings {
   /** Largest distance of a chord from the curve that the axis follows beside an arc. */
   readonly chord: number;
 }
-
-const CLOSEST = 1e-9;
 
 /**
  * The axis' way up into an inside corner, from full depth to the sharp corner: for each sample it stands where both sides,
@@ -43,7 +42,8 @@ export function cornerLift(corner: InsideCorner, settings: LiftSettings): Point3
     const b = samples[i]!;
     const next = axis(b.radius);
     if (!next) return undefined;
-    if (!follow(axis, settings.chord, a, standing, b, next, (p, height) => points.push({ ...p, z: z(height) }))) return undefined;
+    if (!follow(axis, settings.chord, a, standing, b, next, (p, height) => points.push({ ...p, z: z(height) })))
+      return undefined;
     standing = next;
   }
   return points;
@@ -64,7 +64,7 @@ function follow(
   const at = axis(middle.radius);
   if (!at) return false;
   const off = Math.hypot(at.x - (from.x + to.x) / 2, at.y - (from.y + to.y) / 2);
-  if (off > chord && a.radius - b.radius > CLOSEST)
+  if (off > chord && a.radius - b.radius > CLOSEST_STANDS)
     return follow(axis, chord, a, from, middle, at, put) && follow(axis, chord, middle, at, b, to, put);
   put(to, b.height);
   return true;

@@ -17,9 +17,15 @@ export const veeFloor = (cutter: Cutter, thickness: number): number => Math.min(
  * z below it. Nothing when the edge does not ask for it, the cutter is no V, or its flute
  * does not reach below that plane.
  */
-export function cornerVeeLineSet(p: Particulars, openings: readonly Opening[], cut: OpeningCut, variant: string): { lineSets: LineSet[]; problems: OpeningProblem[] } {
+export function cornerVeeLineSet(
+  p: Particulars,
+  openings: readonly Opening[],
+  cut: OpeningCut,
+  variant: string,
+): { lineSets: LineSet[]; problems: OpeningProblem[] } {
   const cutter = p.cutters.corner;
-  if (p.edge.corners !== 'vee' || cutter?.kind !== 'vee' || veeFloor(cutter, p.thickness) <= cut.planeDepth) return { lineSets: [], problems: [] };
+  if (p.edge.corners !== 'vee' || cutter?.kind !== 'vee' || veeFloor(cutter, p.thickness) <= cut.planeDepth)
+    return { lineSets: [], problems: [] };
   const floor = veeFloor(cutter, p.thickness);
   const shapes: Shape[] = [];
   const problems: OpeningProblem[] = [];
@@ -42,7 +48,18 @@ export function cornerVeeLineSet(p: Particulars, openings: readonly Opening[], c
   }
   if (shapes.length === 0) return { lineSets: [], problems };
   return {
-    lineSets: [{ face: 'front', set: 'CORNER_VEE', variant, cutter: 'corner', side: 'on', depth: floor, passes: [floor], shapes }],
+    lineSets: [
+      {
+        face: 'front',
+        set: 'CORNER_VEE',
+        variant,
+        cutter: 'corner',
+        side: 'on',
+        depth: floor,
+        passes: [floor],
+        shapes,
+      },
+    ],
     problems,
   };
 }

@@ -31,7 +31,12 @@ function liftedDiagonal(cutter: Cutter, cut: OpeningCut, angle: number, z: numbe
 }
 
 /** Residue at the face and at a quarter, half and all of the thickness, for each angle among an opening's corners. */
-export function findCornerResidue(cutter: Cutter, cut: OpeningCut, thickness: number, openings: readonly Opening[]): CornerResidue[] {
+export function findCornerResidue(
+  cutter: Cutter,
+  cut: OpeningCut,
+  thickness: number,
+  openings: readonly Opening[],
+): CornerResidue[] {
   const byAngle = new Map<string, CornerResidue['levels']>();
   const levelsAt = (angle: number) => {
     const key = angle.toFixed(6);

@@ -27,16 +27,26 @@ export function frontLineSets(p: Particulars, contours: FrameContours): FrontLin
   const own = contours.openings.filter((o) => p.edge.style === 'square' || !o.square);
   const square = contours.openings.filter((o) => !own.includes(o));
   const cutters = beadCutters(p.cutters);
-  const beaded = p.edge.style === 'beaded' && cutters ? beadLineSets(p, p.edge, cutters, own, cut) : { lineSets: [], problems: [] };
+  const beaded =
+    p.edge.style === 'beaded' && cutters ? beadLineSets(p, p.edge, cutters, own, cut) : { lineSets: [], problems: [] };
   const groups = [
     { openings: own, cut, variant: '' },
-    { openings: square, cut: openingCut(p, edgeOfOpening(p.edge, { square: true })), variant: own.length > 0 ? 'SQUARE' : '' },
+    {
+      openings: square,
+      cut: openingCut(p, edgeOfOpening(p.edge, { square: true })),
+      variant: own.length > 0 ? 'SQUARE' : '',
+    },
   ].filter((g) => g.openings.length > 0);
 
   const cuts = groups.map((g) => openingLineSets(p, g.openings, g.cut, g.variant));
   const vees = groups.map((g) => cornerVeeLineSet(p, g.openings, g.cut, g.variant));
   return {
-    lineSets: [...beaded.lineSets, ...cuts.flatMap((c) => c.lineSets), ...vees.flatMap((v) => v.lineSets), perimeterLineSet(p, contours.perimeter)],
+    lineSets: [
+      ...beaded.lineSets,
+      ...cuts.flatMap((c) => c.lineSets),
+      ...vees.flatMap((v) => v.lineSets),
+      perimeterLineSet(p, contours.perimeter),
+    ],
     problems: [...cuts, ...vees].flatMap((c) => c.problems),
     beadProblems: beaded.problems,
     residues: groups.flatMap((g) => findCornerResidue(p.cutters.opening, g.cut, p.thickness, g.openings)),

@@ -2,7 +2,13 @@ import type { BeadedEdge, Edge, SquareEdge } from '../particulars/particulars.ts
 
 /** The edge of one opening: a frame's edge, or the square edge that an opening keeps in a beaded frame (true at the face, or at the back when the frame's sizes are). */
 export const edgeOfOpening = (edge: Edge, opening: { readonly square: boolean }): Edge =>
-  edge.style === 'beaded' && opening.square ? ({ style: 'square', sizeHeldAt: edge.sizeHeldAt === 'back' ? 'back' : 'face', corners: edge.corners } satisfies SquareEdge) : edge;
+  edge.style === 'beaded' && opening.square
+    ? ({
+        style: 'square',
+        sizeHeldAt: edge.sizeHeldAt === 'back' ? 'back' : 'face',
+        corners: edge.corners,
+      } satisfies SquareEdge)
+    : edge;
 
 /** Depth of a bead's base below the face, e + R: all bead lines lie there. */
 export const beadBase = ({ bead }: BeadedEdge): number => bead.radius + bead.drop;
@@ -12,7 +18,8 @@ export function heldDepth(edge: Edge, thickness: number): number {
   const at = edge.sizeHeldAt ?? 'bead base';
   if (at === 'face') return 0;
   if (at === 'back') return thickness;
-  if (edge.style !== 'beaded') throw new RangeError('size held at the bead base: got a square edge, takes a beaded one');
+  if (edge.style !== 'beaded')
+    throw new RangeError('size held at the bead base: got a square edge, takes a beaded one');
   return beadBase(edge);
 }
 

@@ -1,6 +1,7 @@
 import type { Cutter } from '../cutters/cutter.ts';
 import { heightAtRadius } from '../cutters/height-at-radius.ts';
 import { radiusAtHeight } from '../cutters/radius-at-height.ts';
+import { CLOSEST_STANDS } from '../tolerances.ts';
 
 /** One stand of the cutter on its way up into a corner: its radius in the corner's plane, and its tip's height below that plane. */
 export interface LiftSample {
@@ -20,8 +21,6 @@ function overreach(cutter: Cutter, a: LiftSample, b: LiftSample): number {
   return most;
 }
 
-const CLOSEST = 1e-9;
-
 /**
  * Stands from tip height `height` below the corner's plane up to 0, on h(ρ), dense enough that between two of them the cutter reaches at most `chord`
  * beyond the sides. A pointed cutter, and a tapered one's flank, need their ends only: there h(ρ) is straight.
@@ -31,7 +30,7 @@ export function liftSamples(cutter: Cutter, height: number, chord: number): Lift
   const from = radiusAtHeight(cutter, height);
   const samples: LiftSample[] = [{ radius: from, height }];
   const divide = (a: LiftSample, b: LiftSample): void => {
-    if (a.radius - b.radius > CLOSEST && overreach(cutter, a, b) > chord) {
+    if (a.radius - b.radius > CLOSEST_STANDS && overreach(cutter, a, b) > chord) {
       const middle = at((a.radius + b.radius) / 2);
       divide(a, middle);
       divide(middle, b);

@@ -21,12 +21,23 @@ export interface OpeningCut {
 }
 
 /** Depths and offsets that follow from an edge (the frame's, unless another is given), the board and the opening cutter. */
-export function openingCut({ edge: frameEdge, thickness, cutters, setup }: Particulars, edge: Edge = frameEdge): OpeningCut {
+export function openingCut(
+  { edge: frameEdge, thickness, cutters, setup }: Particulars,
+  edge: Edge = frameEdge,
+): OpeningCut {
   const cutter = cutters.opening;
   const tipDepth = throughDepth(cutter, thickness, setup.spoilboard);
   const held = heldDepth(edge, thickness);
   const plane = cornerDepth(edge);
   const axisOffset = radiusAtHeight(cutter, tipDepth - held);
   const widerAt = (depth: number) => radiusAtHeight(cutter, tipDepth - depth) - axisOffset;
-  return { tipDepth, heldDepth: held, planeDepth: plane, axisOffset, atFace: widerAt(0), atBack: widerAt(thickness), atPlane: widerAt(plane) };
+  return {
+    tipDepth,
+    heldDepth: held,
+    planeDepth: plane,
+    axisOffset,
+    atFace: widerAt(0),
+    atBack: widerAt(thickness),
+    atPlane: widerAt(plane),
+  };
 }

@@ -22,23 +22,37 @@ export interface OpeningProblem {
 /** The axis of an opening's cut, or why there is none. */
 function axisOf(opening: Opening, cut: OpeningCut): Contour | OpeningProblem {
   const { extents, width, height } = opening;
-  if (Math.min(width, height) < 2 * cut.axisOffset) return { opening, reason: 'small', at: { x: extents.minX, y: extents.minY } };
+  if (Math.min(width, height) < 2 * cut.axisOffset)
+    return { opening, reason: 'small', at: { x: extents.minX, y: extents.minY } };
   const moved = offsetContour(opening.contour, -cut.axisOffset);
   return moved.ok ? moved.contour : { opening, reason: moved.reason, at: moved.at, radius: moved.radius };
 }
 
 /** How the cutter climbs into the corners of openings with this cut; undefined for a cutter that cannot. */
-function liftSettings({ edge, cutters: { opening: cutter }, unit }: Particulars, cut: OpeningCut): LiftSettings | undefined {
+function liftSettings(
+  { edge, cutters: { opening: cutter }, unit }: Particulars,
+  cut: OpeningCut,
+): LiftSettings | undefined {
   if (!canLift(cutter) || edge.corners === 'round') return undefined;
   const chord = liftChord(unit);
-  return { samples: liftSamples(cutter, cut.tipDepth - cut.planeDepth, chord), widening: cut.atPlane, planeDepth: cut.planeDepth, chord };
+  return {
+    samples: liftSamples(cutter, cut.tipDepth - cut.planeDepth, chord),
+    widening: cut.atPlane,
+    planeDepth: cut.planeDepth,
+    chord,
+  };
 }
 
 /**
  * The entered openings of one kind of edge, their axes and their corner lifts, frame view; openings that cannot be cut come
  * back as problems. `variant` tells the sets of square openings apart in a frame that has beaded ones too.
  */
-export function openingLineSets(particulars: Particulars, openings: readonly Opening[], cut: OpeningCut, variant: string): { lineSets: LineSet[]; problems: OpeningProblem[] } {
+export function openingLineSets(
+  particulars: Particulars,
+  openings: readonly Opening[],
+  cut: OpeningCut,
+  variant: string,
+): { lineSets: LineSet[]; problems: OpeningProblem[] } {
   const cutter = particulars.cutters.opening;
   const problems: OpeningProblem[] = [];
   const entered: Shape[] = [];
@@ -69,6 +83,7 @@ export function openingLineSets(particulars: Particulars, openings: readonly Ope
     lineSets.push({ ...common, set: 'OPENING', side: 'inside', passes, shapes: entered });
     lineSets.push({ ...common, set: 'OPENING_AXIS', side: 'on', passes, shapes: axes });
   }
-  if (lifts.length > 0) lineSets.push({ ...common, set: 'CORNER_LIFT', side: 'on', passes: [cut.tipDepth], shapes: lifts });
+  if (lifts.length > 0)
+    lineSets.push({ ...common, set: 'CORNER_LIFT', side: 'on', passes: [cut.tipDepth], shapes: lifts });
   return { lineSets, problems };
 }

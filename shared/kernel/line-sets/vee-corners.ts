@@ -26,7 +26,10 @@ function foot(s: Segment, p: Point): Point {
     return { x: s.a.x + along * d.x, y: s.a.y + along * d.y };
   }
   const away = Math.hypot(p.x - s.centre.x, p.y - s.centre.y);
-  return { x: s.centre.x + ((p.x - s.centre.x) * s.radius) / away, y: s.centre.y + ((p.y - s.centre.y) * s.radius) / away };
+  return {
+    x: s.centre.x + ((p.x - s.centre.x) * s.radius) / away,
+    y: s.centre.y + ((p.y - s.centre.y) * s.radius) / away,
+  };
 }
 
 /** A point on a wall moved inwards, to the left of its direction of travel. */
@@ -36,7 +39,10 @@ function inwards(s: Segment, p: Point, distance: number): Point {
     return { x: p.x - d.y * distance, y: p.y + d.x * distance };
   }
   const radius = offsetRadius(s, -distance);
-  return { x: s.centre.x + ((p.x - s.centre.x) * radius) / s.radius, y: s.centre.y + ((p.y - s.centre.y) * radius) / s.radius };
+  return {
+    x: s.centre.x + ((p.x - s.centre.x) * radius) / s.radius,
+    y: s.centre.y + ((p.y - s.centre.y) * radius) / s.radius,
+  };
 }
 
 /** Points between two places on a wall's inward offset, ends included; chords of an arc stay within `chord` of it. */
@@ -60,7 +66,10 @@ function along(s: Segment, from: Point, to: Point, distance: number, chord: numb
  * cutter before begins, up into the corner, back down, and out along the other wall. The V's flank touches the walls in the
  * plane: its axis runs ρ = (floor − plane) · tan(β/2) inside. Corners whose walls meet no more once moved in are `missed`.
  */
-export function veeCorners(wall: Contour, { floor, plane, filletRadius, cutter, chord }: VeeCornerSettings): { paths: Point3[][]; missed: Point[] } {
+export function veeCorners(
+  wall: Contour,
+  { floor, plane, filletRadius, cutter, chord }: VeeCornerSettings,
+): { paths: Point3[][]; missed: Point[] } {
   const reach = radiusAtHeight(cutter, floor - plane);
   const paths: Point3[][] = [];
   const missed: Point[] = [];

@@ -9,5 +9,9 @@ import type { LayoutPart } from './particulars.ts';
  */
 export function addPart(layout: LayoutPart, path: LayoutPath): LayoutPart {
   const part = partAt(layout, path);
-  return replacePart(layout, path, withChildren(part, [...childrenOf(part), { opening: { label: nextLabel(layout) } }]));
+  return replacePart(
+    layout,
+    path,
+    withChildren(part, [...childrenOf(part), { opening: { label: nextLabel(layout) } }]),
+  );
 }

@@ -23,7 +23,8 @@ function collect(from: unknown, to: unknown, path: string, into: Change[]): void
   if (isList(from) && isList(to) && from.length === to.length) {
     from.forEach((value, i) => collect(value, to[i], under(i), into));
   } else if (isRecord(from) && isRecord(to) && sameKind(from, to)) {
-    for (const key of new Set([...Object.keys(from), ...Object.keys(to)])) collect(from[key], to[key], under(key), into);
+    for (const key of new Set([...Object.keys(from), ...Object.keys(to)]))
+      collect(from[key], to[key], under(key), into);
   } else {
     into.push({ path, from, to });
   }

@@ -39,14 +39,30 @@ export function newDado(particulars: Particulars): Dado {
   const foot = particulars.outline.kind === 'members' ? particulars.outline.feet : 0;
   const rightAt = width - setback - panel;
 
-  const upright = (part: string, at: number): Dado => ({ part, runs: 'vertical', at, ...common, from: 0, to: height, ends: ['open', 'open'] });
+  const upright = (part: string, at: number): Dado => ({
+    part,
+    runs: 'vertical',
+    at,
+    ...common,
+    from: 0,
+    to: height,
+    ends: ['open', 'open'],
+  });
   if (!named(particulars, 'Left end')) return upright('Left end', setback);
   if (!named(particulars, 'Right end')) return upright('Right end', rightAt);
 
   const ends = particulars.dados.filter(isEnd).toSorted((a, b) => a.at - b.at);
   const from = ends[0] ? ends[0].at + ends[0].panel : setback;
   const to = ends.length > 1 ? ends[ends.length - 1]!.at : width - setback;
-  const level = (part: string, at: number): Dado => ({ part, runs: 'horizontal', at, ...common, from, to, ends: ['meets', 'meets'] });
+  const level = (part: string, at: number): Dado => ({
+    part,
+    runs: 'horizontal',
+    at,
+    ...common,
+    from,
+    to,
+    ends: ['meets', 'meets'],
+  });
   if (!named(particulars, 'Bottom')) return level('Bottom', foot + (inch ? 0.5 : 12));
   if (!named(particulars, 'Top')) return level('Top', height - setback - panel);
 

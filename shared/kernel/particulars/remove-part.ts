@@ -20,7 +20,8 @@ export function removePart(layout: LayoutPart, path: LayoutPath): LayoutPart {
   const parent = partAt(layout, above);
   const left = childrenOf(parent).toSpliced(index, 1);
   const [only] = left;
-  if (only === undefined) return replacePart(layout, above, { opening: {}, ...(parent.size === undefined ? {} : { size: parent.size }) });
+  if (only === undefined)
+    return replacePart(layout, above, { opening: {}, ...(parent.size === undefined ? {} : { size: parent.size }) });
   if (left.length === 1) return replacePart(layout, above, resized(only, parent.size));
   const fixed = left.every((part) => part.size !== undefined);
   const kept = fixed ? left.with(-1, resized(left[left.length - 1]!, undefined)) : left;

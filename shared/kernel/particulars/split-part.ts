@@ -10,12 +10,7 @@ import type { LayoutPart } from './particulars.ts';
  * since both heads then lie at the top; of rows it does not.
  * Throws when the path leads nowhere.
  */
-export function splitPart(
-  layout: LayoutPart,
-  path: LayoutPath,
-  into: 'columns' | 'rows',
-  between: number,
-): LayoutPart {
+export function splitPart(layout: LayoutPart, path: LayoutPath, into: 'columns' | 'rows', between: number): LayoutPart {
   const { size, ...first } = partAt(layout, path);
   const arch = into === 'columns' && 'opening' in first ? first.opening.arch : undefined;
   const second: LayoutPart = { opening: { label: nextLabel(layout), ...(arch === undefined ? {} : { arch }) } };

@@ -6,7 +6,13 @@ import { placeShape } from './place.ts';
 import type { Placement } from './placement.ts';
 
 /** Line sets of one face in frame view, laid on the board in that face's setup, with those that belong to the board and the blank last. */
-export function placeLineSets(face: Face, placement: Placement, board: Extents, lineSets: readonly LineSet[], boardLineSets: readonly LineSet[]): FaceWork {
+export function placeLineSets(
+  face: Face,
+  placement: Placement,
+  board: Extents,
+  lineSets: readonly LineSet[],
+  boardLineSets: readonly LineSet[],
+): FaceWork {
   const blank: LineSet = {
     face,
     set: 'BLANK',

@@ -33,4 +33,9 @@ export function placeShape(pl: Placement, shape: Shape): Shape {
 }
 
 /** The placement that takes everything back. */
-export const unplace = (pl: Placement): Placement => ({ sx: pl.sx, sy: pl.sy, dx: pl.sx === 1 ? -pl.dx : pl.dx, dy: pl.sy === 1 ? -pl.dy : pl.dy });
+export const unplace = (pl: Placement): Placement => ({
+  sx: pl.sx,
+  sy: pl.sy,
+  dx: pl.sx === 1 ? -pl.dx : pl.dx,
+  dy: pl.sy === 1 ? -pl.dy : pl.dy,
+});

@@ -5,6 +5,7 @@ import { openingCut } from '../line-sets/opening-cut.ts';
 import type { CornerMethod, Edge, Particulars } from '../particulars/particulars.ts';
 import type { PaperPicture, PaperShape } from '../sheet/paper-picture.ts';
 import { linePath, stroke } from '../sheet/paper-shapes.ts';
+import { NOTHING_LEFT } from '../tolerances.ts';
 import { formatLength, formatWithUnit } from '../units/format-length.ts';
 import { cornerSlices, type CornerSituation, type CornerSlice } from './corner-view.ts';
 import { chooseEnlargement } from './enlarge.ts';
@@ -12,14 +13,28 @@ import { chooseEnlargement } from './enlarge.ts';
 const PANEL = 42;
 const GAP = 4;
 const TEXT = 2.6;
-const LEAST_SHOWN = 1e-6;
 
-export const METHOD_WORDS: Record<CornerMethod, string> = { round: 'left round', lift: 'climbing into the corner', vee: 'V-cutter after it' };
+export const METHOD_WORDS: Record<CornerMethod, string> = {
+  round: 'left round',
+  lift: 'climbing into the corner',
+  vee: 'V-cutter after it',
+};
 
 /** The corner of an opening with this edge and inside angle, when it is worked by a method. */
-export function cornerSituation(p: Particulars, method: CornerMethod, angle: number, edge: Edge = edgeOfOpening(p.edge, { square: false })): CornerSituation {
+export function cornerSituation(
+  p: Particulars,
+  method: CornerMethod,
+  angle: number,
+  edge: Edge = edgeOfOpening(p.edge, { square: false }),
+): CornerSituation {
   const vee = p.cutters.corner;
-  return { cutter: p.cutters.opening, cut: openingCut(p, edge), method, angle, ...(vee ? { vee: { cutter: vee, floor: veeFloor(vee, p.thickness) } } : {}) };
+  return {
+    cutter: p.cutters.opening,
+    cut: openingCut(p, edge),
+    method,
+    angle,
+    ...(vee ? { vee: { cutter: vee, floor: veeFloor(vee, p.thickness) } } : {}),
+  };
 }
 
 /**
@@ -28,7 +43,7 @@ export function cornerSituation(p: Particulars, method: CornerMethod, angle: num
  */
 export function cornerPicture(p: Particulars, method: CornerMethod, angle: number, edge?: Edge): PaperPicture {
   const slices = cornerSlices(cornerSituation(p, method, angle, edge), p.thickness);
-  const reach = Math.max(...slices.flatMap((s) => s.left.map((q) => Math.hypot(q.x, q.y))), LEAST_SHOWN);
+  const reach = Math.max(...slices.flatMap((s) => s.left.map((q) => Math.hypot(q.x, q.y))), NOTHING_LEFT);
   const { text, scale } = chooseEnlargement(reach * 1.5, reach * 1.5, p.unit, { width: PANEL, height: PANEL });
   const say = slices.map((s) => `${depthWords(s.depth, p)}: ${leftWords(s, p)}`);
   return {
@@ -37,13 +52,24 @@ export function cornerPicture(p: Particulars, method: CornerMethod, angle: numbe
     description: `What is left in an inside corner, ${METHOD_WORDS[method]}. ${say.join('; ')}.`,
     shapes: [
       ...slices.flatMap((slice, i) => panel(slice, i * (PANEL + GAP), angle, scale, p)),
-      { kind: 'text', text: `Scale ${text}, ${METHOD_WORDS[method]}`, x: 0, y: PANEL + 15, size: TEXT, anchor: 'start', bold: true, colour: 'ink' },
+      {
+        kind: 'text',
+        text: `Scale ${text}, ${METHOD_WORDS[method]}`,
+        x: 0,
+        y: PANEL + 15,
+        size: TEXT,
+        anchor: 'start',
+        bold: true,
+        colour: 'ink',
+      },
     ],
   };
 }
 
-const depthWords = (depth: number, p: Particulars) => (depth === 0 ? 'at the face' : depth === p.thickness ? 'at the back' : `${formatWithUnit(depth, p.unit)} below`);
-const leftWords = ({ diagonal }: CornerSlice, p: Particulars) => (diagonal < LEAST_SHOWN * 10 ? 'nothing left' : `${formatLength(Number(diagonal.toFixed(5)), p.unit)} left`);
+const depthWords = (depth: number, p: Particulars) =>
+  depth === 0 ? 'at the face' : depth === p.thickness ? 'at the back' : `${formatWithUnit(depth, p.unit)} below`;
+const leftWords = ({ diagonal }: CornerSlice, p: Particulars) =>
+  diagonal < 10 * NOTHING_LEFT ? 'nothing left' : `${formatLength(Number(diagonal.toFixed(5)), p.unit)} left`;
 
 /** One depth: the corner at the lower left of its panel, one wall along the bottom. */
 function panel(slice: CornerSlice, left: number, angle: number, scale: number, p: Particulars): PaperShape[] {
@@ -58,14 +84,42 @@ function panel(slice: CornerSlice, left: number, angle: number, scale: number, p
   const wall = (direction: number): PaperShape => {
     const dx = Math.cos(direction);
     const dy = Math.sin(direction);
-    const most = Math.min(dx > 1e-9 ? (PANEL - 4) / dx : Infinity, dy > 1e-9 ? (PANEL - 4) / dy : Infinity, dx < -1e-9 ? (origin.x - left) / -dx : Infinity);
+    const most = Math.min(
+      ...[(PANEL - 4) / dx, (PANEL - 4) / dy, (origin.x - left) / -dx].filter((length) => length > 0),
+    );
     return stroke([origin, { x: origin.x + dx * most, y: origin.y - dy * most }], { colour: 'ink', weight: 'thick' });
   };
   return [
-    ...(slice.diagonal < LEAST_SHOWN * 10 ? [] : [{ kind: 'path', d: linePath(slice.left.map(at), true), fill: 'board', line: { colour: 'front', weight: 'thin' } } as const]),
+    ...(slice.diagonal < 10 * NOTHING_LEFT
+      ? []
+      : [
+          {
+            kind: 'path',
+            d: linePath(slice.left.map(at), true),
+            fill: 'board',
+            line: { colour: 'front', weight: 'thin' },
+          } as const,
+        ]),
     wall(0),
     wall(angle),
-    { kind: 'text', text: depthWords(slice.depth, p), x: left, y: PANEL + 4, size: TEXT, anchor: 'start', colour: 'ink' },
-    { kind: 'text', text: leftWords(slice, p), x: left, y: PANEL + 8, size: TEXT, anchor: 'start', bold: true, colour: 'ink' },
+    {
+      kind: 'text',
+      text: depthWords(slice.depth, p),
+      x: left,
+      y: PANEL + 4,
+      size: TEXT,
+      anchor: 'start',
+      colour: 'ink',
+    },
+    {
+      kind: 'text',
+      text: leftWords(slice, p),
+      x: left,
+      y: PANEL + 8,
+      size: TEXT,
+      anchor: 'start',
+      bold: true,
+      colour: 'ink',
+    },
   ];
 }

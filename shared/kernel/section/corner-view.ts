@@ -4,6 +4,7 @@ import { canLift } from '../cutters/height-at-radius.ts';
 import { radiusAtHeight } from '../cutters/radius-at-height.ts';
 import type { OpeningCut } from '../line-sets/opening-cut.ts';
 import type { CornerMethod } from '../particulars/particulars.ts';
+import { OFF_THE_WALL } from '../tolerances.ts';
 
 /** An inside corner between straight sides, and what is done in it. */
 export interface CornerSituation {
@@ -79,11 +80,12 @@ export function cornerSlice(situation: CornerSituation, z: number): CornerSlice 
   const reach = 1 / Math.sin(angle / 2);
   const climbs = method !== 'round' && canLift(cutter);
   const stands = standsOf(cutter, cut.planeDepth, cut.tipDepth, z, reach, climbs);
-  if (method === 'vee' && vee && vee.floor > z) stands.push(...standsOf(vee.cutter, cut.planeDepth, vee.floor, z, reach, true));
+  if (method === 'vee' && vee && vee.floor > z)
+    stands.push(...standsOf(vee.cutter, cut.planeDepth, vee.floor, z, reach, true));
   const wallInside = radiusAtHeight(cutter, cut.tipDepth - cut.planeDepth) - radiusAtHeight(cutter, cut.tipDepth - z);
   const corner = wallInside * reach;
   // Just off the walls themselves: there every stand only touches.
-  const widest = (angle / 2) * (1 - 1e-3);
+  const widest = (angle / 2) * (1 - OFF_THE_WALL);
   const left: Point[] = [{ x: 0, y: 0 }];
   for (let i = 0; i <= RAYS; i++) {
     const phi = widest * ((2 * i) / RAYS - 1);

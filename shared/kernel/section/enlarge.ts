@@ -5,7 +5,12 @@ import type { Unit } from '../units/unit.ts';
 const ENLARGEMENTS = [500, 400, 300, 200, 100, 80, 50, 40, 30, 20, 10, 8, 5, 4, 3, 2, 1];
 
 /** The largest standard enlargement at which width × height (in `unit`) stays within `room` (millimetres of paper), and its millimetres of paper per unit. */
-export function chooseEnlargement(width: number, height: number, unit: Unit, room: { readonly width: number; readonly height: number }): { readonly text: string; readonly scale: number } {
+export function chooseEnlargement(
+  width: number,
+  height: number,
+  unit: Unit,
+  room: { readonly width: number; readonly height: number },
+): { readonly text: string; readonly scale: number } {
   const mm = millimetresPerUnit(unit);
   const times = ENLARGEMENTS.find((n) => width * mm * n <= room.width && height * mm * n <= room.height);
   if (times !== undefined) return { text: `${times} : 1`, scale: times * mm };

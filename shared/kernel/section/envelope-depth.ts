@@ -2,7 +2,8 @@ import { heightAtRadius } from '../cutters/height-at-radius.ts';
 import type { SectionPass } from './section-passes.ts';
 
 /** Depth that one pass leaves at y; negative where it leaves the face alone. */
-export const passDepthAt = (pass: SectionPass, y: number): number => pass.tipDepth - heightAtRadius(pass.cutter, Math.abs(y - pass.offset));
+export const passDepthAt = (pass: SectionPass, y: number): number =>
+  pass.tipDepth - heightAtRadius(pass.cutter, Math.abs(y - pass.offset));
 
 /**
  * Depth of the true section at y, outward from the opening's edge: the lower envelope of all passes, clipped at the face

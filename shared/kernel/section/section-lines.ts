@@ -2,6 +2,7 @@ import type { Point } from '../contour/contour.ts';
 import { heightAtRadius } from '../cutters/height-at-radius.ts';
 import { radiusAtHeight } from '../cutters/radius-at-height.ts';
 import type { BeadedEdge } from '../particulars/particulars.ts';
+import { BESIDE_STEP } from '../tolerances.ts';
 import { envelopeDepth } from './envelope-depth.ts';
 import { intendedDepth } from './intended-depth.ts';
 import type { SectionPass } from './section-passes.ts';
@@ -9,8 +10,6 @@ import type { SectionWindow } from './section-window.ts';
 
 /** Points drawn along a curve of the section. */
 const STEPS = 360;
-/** Both sides of a step in the section, so that walls are drawn upright. */
-const BESIDE = 1e-7;
 
 /** Where the envelope may jump or bend: axes, flat tips and full widths of all passes, within the window. */
 function breaks(passes: readonly SectionPass[], { minY, maxY }: SectionWindow): number[] {
@@ -19,7 +18,8 @@ function breaks(passes: readonly SectionPass[], { minY, maxY }: SectionWindow): 
   for (const { cutter, offset, tipDepth } of passes) {
     const flat = cutter.kind === 'beading' ? cutter.tipFlat / 2 : cutter.kind === 'straight' ? cutter.diameter / 2 : 0;
     for (const reach of [0, flat, radiusAtHeight(cutter, tipDepth)])
-      for (const side of [-1, 1]) for (const beside of [-BESIDE, 0, BESIDE]) at.add(offset + side * reach + beside);
+      for (const side of [-1, 1])
+        for (const beside of [-BESIDE_STEP, 0, BESIDE_STEP]) at.add(offset + side * reach + beside);
   }
   return [...at].filter((y) => y >= minY && y <= maxY).sort((a, b) => a - b);
 }
@@ -53,5 +53,8 @@ export function profileLine({ cutter, offset, tipDepth }: SectionPass, top: numb
     if (R < highest) side.push({ x: t / 2 + R, y: tipDepth - heightAtRadius(cutter, t / 2 + R) });
     side.sort((a, b) => b.y - a.y || a.x - b.x);
   }
-  return [...side.map((p) => ({ x: offset - p.x, y: p.y })).reverse(), ...side.map((p) => ({ x: offset + p.x, y: p.y }))];
+  return [
+    ...side.map((p) => ({ x: offset - p.x, y: p.y })).reverse(),
+    ...side.map((p) => ({ x: offset + p.x, y: p.y })),
+  ];
 }

@@ -27,10 +27,23 @@ export function sectionPasses(p: Particulars, edge: Edge = p.edge): SectionPass[
     const base = beadBase(edge);
     const { bead, quirk } = cutters;
     passes.push({ set: 'BEAD_INNER', role: 'bead', cutter: bead, offset: -bead.tipFlat / 2, tipDepth: base });
-    passes.push({ set: 'BEAD_OUTER', role: 'bead', cutter: bead, offset: 2 * radius + bead.tipFlat / 2, tipDepth: base });
-    for (const offset of quirkOffsets(edge.bead, quirk.diameter)) passes.push({ set: 'QUIRK', role: 'quirk', cutter: quirk, offset, tipDepth: base });
+    passes.push({
+      set: 'BEAD_OUTER',
+      role: 'bead',
+      cutter: bead,
+      offset: 2 * radius + bead.tipFlat / 2,
+      tipDepth: base,
+    });
+    for (const offset of quirkOffsets(edge.bead, quirk.diameter))
+      passes.push({ set: 'QUIRK', role: 'quirk', cutter: quirk, offset, tipDepth: base });
   }
   const cutter = p.cutters.opening;
-  passes.push({ set: 'OPENING_AXIS', role: 'opening', cutter, offset: -radiusAtHeight(cutter, cut.tipDepth - cut.planeDepth), tipDepth: cut.tipDepth });
+  passes.push({
+    set: 'OPENING_AXIS',
+    role: 'opening',
+    cutter,
+    offset: -radiusAtHeight(cutter, cut.tipDepth - cut.planeDepth),
+    tipDepth: cut.tipDepth,
+  });
   return passes;
 }

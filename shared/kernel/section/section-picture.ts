@@ -18,8 +18,18 @@ const ROW = 5;
 const TALLEST = 90;
 const TEXT = 2.6;
 
-const COLOURS: Partial<Record<SectionPass['set'], SheetColour>> = { BEAD_INNER: 'bead', BEAD_OUTER: 'bead', QUIRK: 'bead', OPENING_AXIS: 'front' };
-const WORDS: Partial<Record<SectionPass['set'], string>> = { BEAD_INNER: 'bead', BEAD_OUTER: 'bead', QUIRK: 'quirk', OPENING_AXIS: 'opening' };
+const COLOURS: Partial<Record<SectionPass['set'], SheetColour>> = {
+  BEAD_INNER: 'bead',
+  BEAD_OUTER: 'bead',
+  QUIRK: 'bead',
+  OPENING_AXIS: 'front',
+};
+const WORDS: Partial<Record<SectionPass['set'], string>> = {
+  BEAD_INNER: 'bead',
+  BEAD_OUTER: 'bead',
+  QUIRK: 'quirk',
+  OPENING_AXIS: 'opening',
+};
 const hair = { colour: 'pencil', weight: 'hairline' } as const;
 
 interface Frame {
@@ -35,10 +45,17 @@ interface Frame {
 export function sectionPicture(p: Particulars, edge: Edge = p.edge): PaperPicture {
   const passes = sectionPasses(p, edge);
   const window = sectionWindow(p, edge, passes);
-  const { text, scale } = chooseEnlargement(window.maxY - window.minY, window.bottom - window.top, p.unit, { width: WIDTH - MARGIN.left - MARGIN.right, height: TALLEST });
+  const { text, scale } = chooseEnlargement(window.maxY - window.minY, window.bottom - window.top, p.unit, {
+    width: WIDTH - MARGIN.left - MARGIN.right,
+    height: TALLEST,
+  });
   const rows = offsetsOf(edge, passes);
   const head = 7 + rows.length * ROW;
-  const frame: Frame = { window, x: (y) => MARGIN.left + (y - window.minY) * scale, y: (depth) => head + (depth - window.top) * scale };
+  const frame: Frame = {
+    window,
+    x: (y) => MARGIN.left + (y - window.minY) * scale,
+    y: (depth) => head + (depth - window.top) * scale,
+  };
   const bottom = frame.y(window.bottom);
   return {
     width: WIDTH,
@@ -51,8 +68,25 @@ export function sectionPicture(p: Particulars, edge: Edge = p.edge): PaperPictur
       ...scar(p, edge, passes, frame),
       ...rows.flatMap((row, i) => offsetRow(row, 6 + i * ROW, p, frame)),
       ...depthsOf(p, edge, passes).flatMap((d, i) => depthMark(d, i, p, frame)),
-      { kind: 'text', text: `Scale ${text}`, x: MARGIN.left, y: bottom + 6, size: TEXT, anchor: 'start', bold: true, colour: 'ink' },
-      { kind: 'text', text: 'opening at the left, frame at the right', x: MARGIN.left + 30, y: bottom + 6, size: TEXT, anchor: 'start', colour: 'pencil' },
+      {
+        kind: 'text',
+        text: `Scale ${text}`,
+        x: MARGIN.left,
+        y: bottom + 6,
+        size: TEXT,
+        anchor: 'start',
+        bold: true,
+        colour: 'ink',
+      },
+      {
+        kind: 'text',
+        text: 'opening at the left, frame at the right',
+        x: MARGIN.left + 30,
+        y: bottom + 6,
+        size: TEXT,
+        anchor: 'start',
+        colour: 'pencil',
+      },
     ],
   };
 }
@@ -67,23 +101,48 @@ function board(p: Particulars, passes: readonly SectionPass[], frame: Frame): Pa
   const area = [...line, { x: maxY, y: floor }, { x: minY, y: floor }];
   return [
     { kind: 'path', d: linePath(onPaper(area, frame), true), fill: 'board' },
-    stroke(onPaper([{ x: minY, y: 0 }, { x: maxY, y: 0 }], frame), { ...hair, dash: 'dashed' }),
-    stroke(onPaper(line.filter((q) => q.y < floor - SAME || q.x > 0), frame), { colour: 'ink', weight: 'thick' }),
+    stroke(
+      onPaper(
+        [
+          { x: minY, y: 0 },
+          { x: maxY, y: 0 },
+        ],
+        frame,
+      ),
+      { ...hair, dash: 'dashed' },
+    ),
+    stroke(
+      onPaper(
+        line.filter((q) => q.y < floor - SAME || q.x > 0),
+        frame,
+      ),
+      { colour: 'ink', weight: 'thick' },
+    ),
   ];
 }
 
 function cutterShapes(pass: SectionPass, frame: Frame): PaperShape[] {
   const { window } = frame;
   const colour = COLOURS[pass.set] ?? 'ink';
-  const axis = clipLine([{ x: pass.offset, y: window.top }, { x: pass.offset, y: Math.min(pass.tipDepth, window.bottom) }], window);
+  const axis = clipLine(
+    [
+      { x: pass.offset, y: window.top },
+      { x: pass.offset, y: Math.min(pass.tipDepth, window.bottom) },
+    ],
+    window,
+  );
   return [
-    ...clipLine(profileLine(pass, window.top), window).map((run) => stroke(onPaper(run, frame), { colour, weight: 'thin' })),
+    ...clipLine(profileLine(pass, window.top), window).map((run) =>
+      stroke(onPaper(run, frame), { colour, weight: 'thin' }),
+    ),
     ...axis.map((run) => stroke(onPaper(run, frame), { colour, weight: 'hairline', dash: 'chain' })),
   ];
 }
 
 const entered = (line: readonly Point[], frame: Frame): PaperShape[] =>
-  clipLine(line, frame.window).map((run) => stroke(onPaper(run, frame), { colour: 'stop', weight: 'thin', dash: 'dotted' }));
+  clipLine(line, frame.window).map((run) =>
+    stroke(onPaper(run, frame), { colour: 'stop', weight: 'thin', dash: 'dotted' }),
+  );
 
 /** The face that the bead's frame-side pass scars beyond the quirk. */
 function scar(p: Particulars, edge: Edge, passes: readonly SectionPass[], frame: Frame): PaperShape[] {
@@ -94,8 +153,23 @@ function scar(p: Particulars, edge: Edge, passes: readonly SectionPass[], frame:
   if (to - from <= SAME) return [];
   const y = frame.y(0) - 2.2;
   return [
-    stroke([{ x: frame.x(from), y }, { x: frame.x(to), y }], { colour: 'caution', weight: 'heavy' }),
-    { kind: 'text', text: `scar ${formatWithUnit(to - from, p.unit)}`, x: frame.x(to) + 1, y: y + 0.8, size: TEXT, anchor: 'start', bold: true, colour: 'caution' },
+    stroke(
+      [
+        { x: frame.x(from), y },
+        { x: frame.x(to), y },
+      ],
+      { colour: 'caution', weight: 'heavy' },
+    ),
+    {
+      kind: 'text',
+      text: `scar ${formatWithUnit(to - from, p.unit)}`,
+      x: frame.x(to) + 1,
+      y: y + 0.8,
+      size: TEXT,
+      anchor: 'start',
+      bold: true,
+      colour: 'caution',
+    },
   ];
 }
 
@@ -107,7 +181,11 @@ interface Offset {
 
 /** All offsets from the opening's edge, innermost first. */
 function offsetsOf(edge: Edge, passes: readonly SectionPass[]): Offset[] {
-  const axes = passes.map((pass): Offset => ({ text: `${WORDS[pass.set]} axis`, to: pass.offset, colour: COLOURS[pass.set] ?? 'ink' }));
+  const axes = passes.map((pass): Offset => ({
+    text: `${WORDS[pass.set]} axis`,
+    to: pass.offset,
+    colour: COLOURS[pass.set] ?? 'ink',
+  }));
   const edges: Offset[] =
     edge.style === 'beaded'
       ? [
@@ -124,13 +202,39 @@ function offsetRow({ text, to, colour }: Offset, y: number, p: Particulars, fram
   const end = frame.x(to);
   const right = end >= zero;
   const shapes: PaperShape[] = [
-    stroke([{ x: zero, y: y - 1 }, { x: zero, y: frame.y(0) }], hair),
-    stroke([{ x: end, y: y - 1 }, { x: end, y: frame.y(frame.window.top) }], hair),
-    stroke([{ x: zero, y }, { x: end, y }], { colour, weight: 'hairline' }),
+    stroke(
+      [
+        { x: zero, y: y - 1 },
+        { x: zero, y: frame.y(0) },
+      ],
+      hair,
+    ),
+    stroke(
+      [
+        { x: end, y: y - 1 },
+        { x: end, y: frame.y(frame.window.top) },
+      ],
+      hair,
+    ),
+    stroke(
+      [
+        { x: zero, y },
+        { x: end, y },
+      ],
+      { colour, weight: 'hairline' },
+    ),
   ];
   if (Math.abs(end - zero) > 4) shapes.push(arrowHead({ x: end, y }, right ? 0 : Math.PI, 1.6, colour));
   const at = Math.max(zero, end) + 1.5;
-  shapes.push({ kind: 'text', text: `${formatLength(to, p.unit)}  ${text}`, x: at, y: y + 0.9, size: TEXT, anchor: 'start', colour });
+  shapes.push({
+    kind: 'text',
+    text: `${formatLength(to, p.unit)}  ${text}`,
+    x: at,
+    y: y + 0.9,
+    size: TEXT,
+    anchor: 'start',
+    colour,
+  });
   return shapes;
 }
 
@@ -159,9 +263,35 @@ function depthMark({ text, depth }: Depth, index: number, p: Particulars, frame:
   // The texts of two depths that are near one another keep apart.
   const textY = index === 0 && y - face < 8 ? Math.min(y, face) - 1.6 : y + 3.2;
   return [
-    stroke([{ x: edge - 2, y }, { x: x + 1.5, y }], hair),
-    stroke([{ x: edge, y: face }, { x: x + 1.5, y: face }], hair),
-    stroke([{ x, y: face }, { x, y }], { colour: 'ink', weight: 'hairline' }),
-    { kind: 'text', text: `${formatLength(depth, p.unit)} ${text}`, x: x + 2.2, y: textY, size: TEXT, anchor: 'start', colour: 'ink' },
+    stroke(
+      [
+        { x: edge - 2, y },
+        { x: x + 1.5, y },
+      ],
+      hair,
+    ),
+    stroke(
+      [
+        { x: edge, y: face },
+        { x: x + 1.5, y: face },
+      ],
+      hair,
+    ),
+    stroke(
+      [
+        { x, y: face },
+        { x, y },
+      ],
+      { colour: 'ink', weight: 'hairline' },
+    ),
+    {
+      kind: 'text',
+      text: `${formatLength(depth, p.unit)} ${text}`,
+      x: x + 2.2,
+      y: textY,
+      size: TEXT,
+      anchor: 'start',
+      colour: 'ink',
+    },
   ];
 }

@@ -16,10 +16,22 @@ export function sectionWindow(p: Particulars, edge: Edge, passes: readonly Secti
   const opening = passes.find((pass) => pass.set === 'OPENING_AXIS')!;
   const reach = radiusAtHeight(opening.cutter, opening.tipDepth);
   if (edge.style === 'square') {
-    return { minY: opening.offset - 1.3 * reach, maxY: Math.max(3 * reach, p.thickness * 0.4), top: -0.12 * p.thickness, bottom: Math.max(opening.tipDepth, p.thickness) * 1.06 };
+    return {
+      minY: opening.offset - 1.3 * reach,
+      maxY: Math.max(3 * reach, p.thickness * 0.4),
+      top: -0.12 * p.thickness,
+      bottom: Math.max(opening.tipDepth, p.thickness) * 1.06,
+    };
   }
   const { radius: R, quirk: q } = edge.bead;
-  const scarEnd = Math.max(...passes.map((pass) => (pass.role === 'bead' ? pass.offset + radiusAtHeight(pass.cutter, pass.tipDepth) : 0)));
+  const scarEnd = Math.max(
+    ...passes.map((pass) => (pass.role === 'bead' ? pass.offset + radiusAtHeight(pass.cutter, pass.tipDepth) : 0)),
+  );
   const maxY = Math.max(2 * R + q, scarEnd) + 0.8 * R;
-  return { minY: Math.max(opening.offset - 0.6 * reach, -1.6 * R - 0.6 * reach), maxY, top: -0.5 * R, bottom: beadBase(edge) + 0.6 * R };
+  return {
+    minY: Math.max(opening.offset - 0.6 * reach, -1.6 * R - 0.6 * reach),
+    maxY,
+    top: -0.5 * R,
+    bottom: beadBase(edge) + 0.6 * R,
+  };
 }

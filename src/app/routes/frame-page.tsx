@@ -1,8 +1,10 @@
 import { lazy, Suspense } from 'react';
 import { useQuery } from '@tanstack/react-query';
 import { useParams } from 'react-router';
+import type { StoredEdgePreset } from '#shared/contracts/edge-presets.ts';
 import type { DrawerCutter } from '#shared/kernel/cutter-drawer/drawer-cutter.ts';
 import { useCutters } from '../../features/cutters/api/list-cutters.ts';
+import { useEdgePresets } from '../../features/frame-page/api/list-edge-presets.ts';
 import { frameQuery } from '../../features/frame-page/api/get-frame.ts';
 import { FramePage } from '../../features/frame-page/frame-page.tsx';
 import { useProfiles } from '../../features/profiles/api/list-profiles.ts';
@@ -11,8 +13,9 @@ import { Fetched } from '../../ui/fetched.tsx';
 import { ProgressText } from '../../ui/progress-text.tsx';
 import { Sheet } from '../../ui/sheet.tsx';
 
-/** While the drawer is not there a frame can be worked on all the same. */
+/** While the shop's drawer and edges are not there a frame can be worked on all the same. */
 const NO_DRAWER: readonly DrawerCutter[] = [];
+const NO_EDGES: readonly StoredEdgePreset[] = [];
 
 // Three dimensions are large: fetched when somebody looks.
 const CutPart = lazy(async () => ({ default: (await import('../../features/cut-part/cut-part.tsx')).CutPart }));
@@ -24,6 +27,7 @@ export function FramePageRoute() {
   const frame = useQuery({ ...frameQuery(frameId), refetchOnMount: 'always' });
   const profiles = useProfiles();
   const cutters = useCutters();
+  const edges = useEdgePresets();
   // Work starts from the draft as it is now: one that was fetched for a list may be older.
   if (frame.data !== undefined && frame.isFetchedAfterMount && profiles.data !== undefined) {
     return (
@@ -33,6 +37,7 @@ export function FramePageRoute() {
         profiles={profiles.data}
         defaultProfileId={shop.defaultProfileId}
         drawer={cutters.data ?? NO_DRAWER}
+        savedEdges={edges.data ?? NO_EDGES}
         shopName={shop.name}
         mayEdit={mayDo('edit-frames') && !frame.data.removed}
         mayRelease={mayDo('release') && !frame.data.removed}

@@ -73,7 +73,9 @@ export function BoxPage({ shopName, job, unit: shopUnit, mayEdit, busy, error, o
     const first = form.current?.querySelector<HTMLElement>('[aria-invalid=true]');
     if (worked === undefined || Object.keys(wrong).length > 0 || first) {
       setRefusal('An entry of the box is wrong. Mend what is marked, then create the frame.');
-      first?.focus();
+      first?.focus({ preventScroll: true });
+      // In the middle, so that what it takes is seen below it.
+      first?.scrollIntoView({ block: 'center' });
       return;
     }
     setRefusal('');
@@ -95,7 +97,7 @@ export function BoxPage({ shopName, job, unit: shopUnit, mayEdit, busy, error, o
               </Button>
             ) : undefined
           }
-          actionNote={mayEdit ? 'then change it on its page' : 'Designers and the owner create frames'}
+          actionNote={mayEdit ? refusal || 'then change it on its page' : 'Designers and the owner create frames'}
         >
           <TitleCell label="Shop">{shopName}</TitleCell>
           <TitleCell label="Job" main>

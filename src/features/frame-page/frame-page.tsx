@@ -1,6 +1,7 @@
 import { useQueryClient } from '@tanstack/react-query';
 import { useMemo, useState, useSyncExternalStore, type ReactNode } from 'react';
 import type { Frame } from '#shared/contracts/frames.ts';
+import type { StoredEdgePreset } from '#shared/contracts/edge-presets.ts';
 import type { StoredProfile } from '#shared/contracts/profiles.ts';
 import type { DrawerCutter } from '#shared/kernel/cutter-drawer/drawer-cutter.ts';
 import type { Particulars } from '#shared/kernel/particulars/particulars.ts';
@@ -13,6 +14,7 @@ import { FindingsList } from './findings/findings-list.tsx';
 import { DrawerProvider } from './form/drawer.ts';
 import { FormBar } from './form/form-bar.tsx';
 import { ParticularsForm } from './form/particulars-form.tsx';
+import { SavedEdgesProvider } from './form/saved-edges.ts';
 import { useUndoKeys } from './form/use-undo-keys.ts';
 import { FrameTitleBlock } from './frame-title-block.tsx';
 import { createDesk, DeskProvider, useEditor } from './model/desk.ts';
@@ -36,6 +38,7 @@ interface FramePageProps {
   readonly defaultProfileId: string;
   /** The shop's cutters, to take numbers from. */
   readonly drawer: readonly DrawerCutter[];
+  readonly savedEdges: readonly StoredEdgePreset[];
   readonly shopName: string;
   readonly mayEdit: boolean;
   readonly mayRelease: boolean;
@@ -44,7 +47,13 @@ interface FramePageProps {
 }
 
 /** What the middle shows beside the findings. */
-function Shown({ view, renderCutPart }: { readonly view: FrameView; readonly renderCutPart: (worked: WorkedFrame) => ReactNode }) {
+function Shown({
+  view,
+  renderCutPart,
+}: {
+  readonly view: FrameView;
+  readonly renderCutPart: (worked: WorkedFrame) => ReactNode;
+}) {
   const worked = useEditor((s) => s.drawn);
   if (view === 'faces') return <Spread />;
   return (
@@ -65,14 +74,30 @@ function FrameWork({ renderCutPart }: Pick<FramePageProps, 'renderCutPart'>) {
       <ViewBar view={view} onView={setView} />
       <div className={`flex min-h-0 min-w-0 flex-1 flex-col ${isUpright ? '' : 'xl:flex-row'}`}>
         <Shown view={view} renderCutPart={renderCutPart} />
-        <FindingsList className={isUpright ? 'max-h-24 shrink-0 border-t border-ink [@media(min-height:60rem)]:max-h-44' : 'max-h-24 shrink-0 border-t border-ink xl:max-h-none xl:w-80 xl:border-t-0 xl:border-l'} />
+        <FindingsList
+          className={
+            isUpright
+              ? 'max-h-24 shrink-0 border-t border-ink [@media(min-height:60rem)]:max-h-44'
+              : 'max-h-24 shrink-0 border-t border-ink xl:max-h-none xl:w-80 xl:border-t-0 xl:border-l'
+          }
+        />
       </div>
     </div>
   );
 }
 
 /** The frame page: particulars at the left, both faces, findings, and the title block with the release. */
-export function FramePage({ frame, profiles, defaultProfileId, drawer, shopName, mayEdit, mayRelease, renderCutPart }: FramePageProps) {
+export function FramePage({
+  frame,
+  profiles,
+  defaultProfileId,
+  drawer,
+  savedEdges,
+  shopName,
+  mayEdit,
+  mayRelease,
+  renderCutPart,
+}: FramePageProps) {
   const client = useQueryClient();
   const { editor, autosave, copyKept } = useDraft(frame);
   const desk = useMemo(() => createDesk(editor, !mayEdit), [editor, mayEdit]);
@@ -86,7 +111,15 @@ export function FramePage({ frame, profiles, defaultProfileId, drawer, shopName,
 
   const present = () => editor.store.get().history.present;
   const stale: TwoDrafts | null =
-    saving.kind === 'stale' ? { base: saving.base, mine: present(), theirs: saving.stale.particulars, changedBy: saving.stale.changedBy, changedAt: saving.stale.changedAt } : earlier;
+    saving.kind === 'stale'
+      ? {
+          base: saving.base,
+          mine: present(),
+          theirs: saving.stale.particulars,
+          changedBy: saving.stale.changedBy,
+          changedAt: saving.stale.changedAt,
+        }
+      : earlier;
 
   /** Goes on with `chosen`; the other draft is one step back. */
   function settle(drafts: TwoDrafts, chosen: Particulars) {
@@ -133,7 +166,11 @@ export function FramePage({ frame, profiles, defaultProfileId, drawer, shopName,
         bare
         title={frame.particulars.name}
         showTitle={false}
-        crumbs={[{ label: 'Jobs', to: '/jobs' }, { label: frame.jobName, to: `/jobs/${frame.jobId}` }, { label: frame.particulars.name }]}
+        crumbs={[
+          { label: 'Jobs', to: '/jobs' },
+          { label: frame.jobName, to: `/jobs/${frame.jobId}` },
+          { label: frame.particulars.name },
+        ]}
         titleBlock={
           <FrameTitleBlock
             frame={frame}
@@ -154,7 +191,9 @@ export function FramePage({ frame, profiles, defaultProfileId, drawer, shopName,
             <div className="relative min-h-0 flex-1 overflow-y-auto px-4 pt-4 contain-content">
               {mayEdit && <EarlierCopyNotice frame={frame} editor={editor} onConflict={setEarlier} />}
               <DrawerProvider value={drawer}>
-                <ParticularsForm />
+                <SavedEdgesProvider value={savedEdges}>
+                  <ParticularsForm />
+                </SavedEdgesProvider>
               </DrawerProvider>
             </div>
           </div>
@@ -170,8 +209,24 @@ export function FramePage({ frame, profiles, defaultProfileId, drawer, shopName,
             onLater={() => setLater(true)}
           />
         )}
-        {dialog === 'release' && <ReleaseDialog frameId={frame.id} letter={letter} autosave={autosave} onReleased={onReleased} onClose={() => setDialog(null)} />}
-        {dialog === 'files' && <FilesDialog frame={frame} profiles={profiles} defaultProfileId={defaultProfileId} released={released} onClose={() => setDialog(null)} />}
+        {dialog === 'release' && (
+          <ReleaseDialog
+            frameId={frame.id}
+            letter={letter}
+            autosave={autosave}
+            onReleased={onReleased}
+            onClose={() => setDialog(null)}
+          />
+        )}
+        {dialog === 'files' && (
+          <FilesDialog
+            frame={frame}
+            profiles={profiles}
+            defaultProfileId={defaultProfileId}
+            released={released}
+            onClose={() => setDialog(null)}
+          />
+        )}
       </Sheet>
     </DeskProvider>
   );

@@ -30,7 +30,7 @@ const Lines = ({ lines }: { readonly lines: readonly string[] }) => (
 );
 
 function Change({ result, particulars }: { readonly result: ChangedFrame | undefined } & Pick<Frame, 'particulars'>) {
-  if (result === undefined) return <span className="text-pencil">enter a length</span>;
+  if (result === undefined) return <span className="text-pencil">no length yet</span>;
   if (!result.ok) {
     return (
       <span className="wrap-anywhere">
@@ -52,8 +52,8 @@ function Follows({ result, unit }: { readonly result: ChangedFrame | undefined; 
       {result.stayed.length > 0 && (
         <p className="text-caution">
           <strong>Caution: </strong>
-          {result.stayed.map(({ part }) => part).join(', ')} could follow in more than one way and stays. Look at it on
-          the frame’s page.
+          Left where it stood, because it could follow in more than one way:{' '}
+          {result.stayed.map(({ part }) => part).join(', ')}. Look at it on the frame’s page.
         </p>
       )}
     </>

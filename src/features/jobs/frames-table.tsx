@@ -3,6 +3,7 @@ import { Link } from 'react-router';
 import type { FrameRow } from '#shared/contracts/jobs.ts';
 import { Button } from '../../ui/button.tsx';
 import { ButtonLink } from '../../ui/button-link.tsx';
+import { Checkbox } from '../../ui/checkbox.tsx';
 import { Length } from '../../ui/length.tsx';
 import { Table, type Column } from '../../ui/table.tsx';
 import { When } from '../../ui/when.tsx';
@@ -13,6 +14,11 @@ interface FramesTableProps {
   readonly frames: readonly FrameRow[];
   /** A frame's small drawing; made only when its row is near. */
   readonly drawing: (row: FrameRow) => ReactNode;
+  /** Frames that are chosen, and how to choose; left out where nothing can be done with them. */
+  readonly choosing?: {
+    readonly chosen: ReadonlySet<string>;
+    readonly onChosen: (id: string, chosen: boolean) => void;
+  };
   /** More to do with a frame, before copying. */
   readonly actions?: (row: FrameRow) => ReactNode;
   /** Left out for people who may not. */
@@ -83,8 +89,24 @@ const COLUMNS: readonly Column<FrameRow>[] = [
   { key: 'changed', head: 'Changed', sortBy: (row) => row.changedAt, cell: (row) => <When iso={row.changedAt} /> },
 ];
 
-export function FramesTable({ frames, drawing, actions, onCopy, onPutAway }: FramesTableProps) {
+export function FramesTable({ frames, drawing, choosing, actions, onCopy, onPutAway }: FramesTableProps) {
   const columns: Column<FrameRow>[] = [
+    ...(choosing
+      ? [
+          {
+            key: 'choose',
+            head: 'Choose',
+            hideHead: true,
+            cell: ({ id, name }: FrameRow) => (
+              <Checkbox
+                label={<span className="sr-only">{`Choose ${name}`}</span>}
+                checked={choosing.chosen.has(id)}
+                onChecked={(chosen) => choosing.onChosen(id, chosen)}
+              />
+            ),
+          },
+        ]
+      : []),
     {
       key: 'drawing',
       head: 'Front',

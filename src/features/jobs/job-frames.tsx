@@ -8,6 +8,7 @@ import { UndoNotice } from '../../ui/undo-notice.tsx';
 import { useChangeFrame } from './api/change-frame.ts';
 import { useCopyFrame } from './api/copy-frame.ts';
 import { copyName } from './copy-name.ts';
+import { FrameChoice } from './frame-choice.tsx';
 import { FramesTable } from './frames-table.tsx';
 
 interface JobFramesProps {
@@ -23,10 +24,13 @@ interface JobFramesProps {
 /** The frames of a job, with copying, putting away and its undoing. */
 export function JobFrames({ frames, mayEdit, drawing, actions, newFrame }: JobFramesProps) {
   const [putAway, setPutAway] = useState<{ id: string; name: string } | null>(null);
+  const [chosen, setChosen] = useState<ReadonlySet<string>>(new Set());
   const change = useChangeFrame();
   const copy = useCopyFrame();
   const failed = change.error ?? copy.error;
 
+  const choose = (id: string, isChosen: boolean) =>
+    setChosen((now) => new Set(isChosen ? [...now, id] : [...now].filter((other) => other !== id)));
   const away = ({ id, name }: FrameRow) =>
     change.mutate({ frameId: id, change: { removed: true } }, { onSuccess: () => setPutAway({ id, name }) });
   const back = (frameId: string) =>
@@ -54,13 +58,17 @@ export function JobFrames({ frames, mayEdit, drawing, actions, newFrame }: JobFr
         </UndoNotice>
       )}
       {frames.length > 0 ? (
-        <FramesTable
-          frames={frames}
-          drawing={drawing}
-          actions={actions}
-          onCopy={mayEdit ? copyRow : undefined}
-          onPutAway={mayEdit ? away : undefined}
-        />
+        <>
+          {mayEdit && <FrameChoice frames={frames} chosen={chosen} onChosen={setChosen} />}
+          <FramesTable
+            frames={frames}
+            drawing={drawing}
+            choosing={mayEdit ? { chosen, onChosen: choose } : undefined}
+            actions={actions}
+            onCopy={mayEdit ? copyRow : undefined}
+            onPutAway={mayEdit ? away : undefined}
+          />
+        </>
       ) : mayEdit ? (
         <Empty title="No frames yet" actions={newFrame}>
           A new frame begins as a two-opening base frame that can be cut as it stands; change its size and openings on

@@ -107,10 +107,17 @@ describe('When a stop or the proof forbids the set, then the exit code is 1, the
   });
 
   test('a template that is good as such and clashes on this frame', async () => {
-    const particulars = workedExample({ dados: [dado(), dado({ at: 20, depth: 0.2501 })] });
-    const { code, out, err } = await run(saveFrame(particulars), '--out', outFolder());
+    // Names are cut off at 31 characters, and this cutter's name alone has more.
+    const { cutters } = workedExample();
+    const name = 'a tapered cutter with a remarkably long name';
+    const particulars = workedExample({ cutters: { ...cutters, opening: { ...cutters.opening, name } } });
+    const profile = save(
+      'long.json',
+      JSON.stringify({ ...BUILTIN_PROFILES[0]!.profile, layerTemplate: '{face}_{cutter}_{set}' }),
+    );
+    const { code, out, err } = await run(saveFrame(particulars), '--out', outFolder(), '--profile', profile);
     expect({ code, out, written: existsSync(outFolder()) }).toEqual({ code: 1, out: '', written: false });
-    expect(err).toMatch(/^proof: .*would both be on layer BACK_DADO_D0250/m);
+    expect(err).toMatch(/^proof: .*would both be on layer FRONT_A.TAPERED.CUTTER/m);
   });
 });
 

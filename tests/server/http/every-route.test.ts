@@ -25,6 +25,7 @@ interface Things {
   readonly frameId: string;
   readonly profileId: string;
   readonly cutterId: string;
+  readonly presetId: string;
 }
 
 interface Row {
@@ -48,6 +49,7 @@ const aCutter = () => ({
   unit: 'in',
   cutter: { kind: 'straight', name: `Cutter ${++names}`, diameter: 0.25, fluteLength: 1 },
 });
+const anEdge = () => ({ name: `Edge ${++names}`, unit: 'in', edge: { style: 'square', sizeHeldAt: 'face' }, cutters: {} });
 const aCutterFile = () => {
   const form = new FormData();
   form.append('file', new Blob([`name,unit,kind,diameter,flute length\nCutter ${++names},in,straight,0.25,1\n`]), 'a.csv');
@@ -81,6 +83,9 @@ const TABLE: Record<string, Row> = {
   'POST /api/cutters/csv': { who: CUTTER_EDITORS, answers: 200, nobodys: true, body: aCutterFile },
   'PUT /api/cutters/:cutterId': { who: CUTTER_EDITORS, answers: 200, body: aCutter },
   'DELETE /api/cutters/:cutterId': { who: CUTTER_EDITORS, answers: 200 },
+  'GET /api/edge-presets': { who: 'signed in', answers: 200, nobodys: true },
+  'POST /api/edge-presets': { who: EDITORS, answers: 201, nobodys: true, body: anEdge },
+  'DELETE /api/edge-presets/:presetId': { who: EDITORS, answers: 204 },
   'GET /api/jobs': { who: 'signed in', answers: 200, nobodys: true },
   'POST /api/jobs': { who: EDITORS, answers: 201, nobodys: true, body: () => ({ name: 'Another job' }) },
   'GET /api/jobs/:jobId': { who: 'signed in', answers: 200 },
@@ -119,7 +124,8 @@ async function things(visitor: HttpClient, released: boolean): Promise<Things> {
   if (released) await releaseFrame(visitor, frame);
   const profile = expectStatus(await visitor.post('/api/profiles', aProfile()), 201).json<{ id: string }>();
   const cutter = expectStatus(await visitor.post('/api/cutters', aCutter()), 201).json<{ id: string }>();
-  return { jobId: job.id, frameId: frame.id, profileId: profile.id, cutterId: cutter.id };
+  const preset = expectStatus(await visitor.post('/api/edge-presets', anEdge()), 201).json<{ id: string }>();
+  return { jobId: job.id, frameId: frame.id, profileId: profile.id, cutterId: cutter.id, presetId: preset.id };
 }
 
 const thingsFor = async (route: string): Promise<Things> =>
@@ -132,6 +138,7 @@ const ask = (visitor: HttpClient, route: string, row: Row, named: Things, querie
     .replace(':frameId', named.frameId)
     .replace(':profileId', named.profileId)
     .replace(':cutterId', named.cutterId)
+    .replace(':presetId', named.presetId)
     .replace(':letter', 'A');
   return visitor.send(method, `${path}${row.query?.(queried) ?? ''}`, { body: row.body?.(named) });
 };

@@ -9,7 +9,13 @@ interface SaveDraft extends DraftRequest {
 }
 
 const saveDraft = ({ frameId, keepalive, ...body }: SaveDraft) =>
-  callApi({ method: 'PUT', path: `/api/frames/${encodeURIComponent(frameId)}/draft`, body, answer: draftSaved, keepalive });
+  callApi({
+    method: 'PUT',
+    path: `/api/frames/${encodeURIComponent(frameId)}/draft`,
+    body,
+    answer: draftSaved,
+    keepalive,
+  });
 
 /** Saves the draft that started from `version`. Fails with 'stale-draft' when somebody else saved meanwhile. */
 export const useSaveDraft = () =>

@@ -35,14 +35,27 @@ const FindingRow = memo(function FindingRow({ index, level, text, remedy, hasEnt
   function zoomThere() {
     const { drawn } = editor.store.get();
     const places = finding()?.places ?? [];
-    if (places.length > 0) view.set(viewOfPlaces(drawn, places.map((place) => place.extents), page.get()));
+    if (places.length > 0)
+      view.set(
+        viewOfPlaces(
+          drawn,
+          places.map((place) => place.extents),
+          page.get(),
+        ),
+      );
   }
   function goThere() {
     const field = finding()?.field;
     if (field !== undefined) goToEntry(entryOf(editor.store.get().history.present, field));
   }
   return (
-    <li onPointerEnter={on} onPointerLeave={off} onFocus={on} onBlur={off} className="flex flex-wrap items-baseline gap-x-3 border-b border-rule px-4 py-1 last:border-b-0 hover:bg-board-light @xl:flex-nowrap">
+    <li
+      onPointerEnter={on}
+      onPointerLeave={off}
+      onFocus={on}
+      onBlur={off}
+      className="flex flex-wrap items-baseline gap-x-3 border-b border-rule px-4 py-1 last:border-b-0 hover:bg-board-light @xl:flex-nowrap"
+    >
       <strong className={`w-16 flex-1 @xl:flex-none ${COLOURS[level]}`}>{WORDS[level]}</strong>
       <p className="order-last basis-full wrap-anywhere @xl:order-none @xl:min-w-0 @xl:flex-1">
         {text} {remedy !== '' && <span className="text-pencil">{remedy}</span>}
@@ -76,7 +89,15 @@ export function FindingsList({ className }: { readonly className: string }) {
       ) : (
         <ul className="text-12">
           {findings.map((f, i) => (
-            <FindingRow key={i} index={i} level={f.level} text={f.text} remedy={f.remedy} hasEntry={f.field !== undefined} hasPlace={f.places.length > 0} />
+            <FindingRow
+              key={i}
+              index={i}
+              level={f.level}
+              text={f.text}
+              remedy={f.remedy}
+              hasEntry={f.field !== undefined}
+              hasPlace={f.places.length > 0}
+            />
           ))}
         </ul>
       )}

@@ -19,10 +19,23 @@ const ROLES: readonly { readonly role: CutterRole; readonly heading: string }[] 
   { role: 'corner', heading: 'Corner cutter' },
 ];
 
-const KIND_WORDS: Record<CutterKind, string> = { straight: 'Straight', tapered: 'Tapered', vee: 'V', beading: 'Beading' };
+const KIND_WORDS: Record<CutterKind, string> = {
+  straight: 'Straight',
+  tapered: 'Tapered',
+  vee: 'V',
+  beading: 'Beading',
+};
 
 /** The numbers that give a kind of cutter its shape. */
-const SHAPES: Record<CutterKind, readonly { readonly key: string; readonly label: string; readonly kind: 'length' | 'number'; readonly suffix?: string }[]> = {
+const SHAPES: Record<
+  CutterKind,
+  readonly {
+    readonly key: string;
+    readonly label: string;
+    readonly kind: 'length' | 'number';
+    readonly suffix?: string;
+  }[]
+> = {
   straight: [{ key: 'diameter', label: 'Diameter', kind: 'length' }],
   tapered: [
     { key: 'tipRadius', label: 'Tip radius', kind: 'length' },
@@ -35,7 +48,13 @@ const SHAPES: Record<CutterKind, readonly { readonly key: string; readonly label
   ],
 };
 
-const CutterEntries = memo(function CutterEntries({ role, heading }: { readonly role: CutterRole; readonly heading: string }) {
+const CutterEntries = memo(function CutterEntries({
+  role,
+  heading,
+}: {
+  readonly role: CutterRole;
+  readonly heading: string;
+}) {
   const { editor, readOnly } = useDesk();
   const kind = useEditor((s) => s.history.present.cutters[role]?.kind);
   const path = `cutters.${role}`;
@@ -52,7 +71,14 @@ const CutterEntries = memo(function CutterEntries({ role, heading }: { readonly 
       {/* Where one kind alone can do the work there is nothing to choose. */}
       {kinds.length > 1 && (
         <div data-entry={`${path}.kind`}>
-          <Select label="Kind" layout="row" options={kinds.map((value) => ({ value, label: KIND_WORDS[value] }))} value={kind} onValue={changeKind} disabled={readOnly} />
+          <Select
+            label="Kind"
+            layout="row"
+            options={kinds.map((value) => ({ value, label: KIND_WORDS[value] }))}
+            value={kind}
+            onValue={changeKind}
+            disabled={readOnly}
+          />
         </div>
       )}
       {SHAPES[kind].map(({ key, ...entry }) => (

@@ -7,6 +7,7 @@ import { Section } from '../../../ui/section.tsx';
 import { useDesk, useEditor } from '../model/desk.ts';
 import { Entry } from './entry.tsx';
 import { SwitchEntry } from './switch-entry.tsx';
+import { TakeEdge } from './take-edge.tsx';
 
 const STYLES = [
   { value: 'square', label: 'Square' },
@@ -52,8 +53,15 @@ function StyleChoice({ style }: { readonly style: 'square' | 'beaded' }) {
     const { present } = editor.store.get().history;
     const preset = usualEdgePresets(present.unit).find((p) => p.edge.style === wanted);
     if (wanted === style || preset === undefined) return;
-    const { bead = preset.cutters.bead, quirk = preset.cutters.quirk, corner = preset.cutters.corner } = present.cutters;
-    const dressed = applyEdgePreset(present, { ...preset, cutters: wanted === 'beaded' ? { bead, quirk, corner } : {} });
+    const {
+      bead = preset.cutters.bead,
+      quirk = preset.cutters.quirk,
+      corner = preset.cutters.corner,
+    } = present.cutters;
+    const dressed = applyEdgePreset(present, {
+      ...preset,
+      cutters: wanted === 'beaded' ? { bead, quirk, corner } : {},
+    });
     editor.apply(dressed, wanted === 'beaded' ? 'Beaded edges' : 'Square edges');
   }
   return (
@@ -70,6 +78,7 @@ export function EdgeSection() {
   return (
     <Section heading="Edge of the openings">
       <StyleChoice style={style} />
+      <TakeEdge />
       {isBeaded && (
         <>
           <Entry path="edge.bead.radius" label="Bead radius" />
@@ -77,7 +86,12 @@ export function EdgeSection() {
           <Entry path="edge.bead.quirk" label="Quirk" />
         </>
       )}
-      <SwitchEntry path="edge.sizeHeldAt" label="Size held at" options={isBeaded ? BEADED : FACE_OR_BACK} whenAbsent="bead base" />
+      <SwitchEntry
+        path="edge.sizeHeldAt"
+        label="Size held at"
+        options={isBeaded ? BEADED : FACE_OR_BACK}
+        whenAbsent="bead base"
+      />
       <CornersChoice />
     </Section>
   );

@@ -28,13 +28,16 @@ function readText(kind: NonNullable<EntryProps['kind']>, optional: boolean, unit
   if (trimmed === '' && optional) return { ok: true, value: undefined };
   if (kind === 'text') return { ok: true, value: trimmed };
   if (kind === 'length') return parseLength(trimmed, unit);
-  return /^[+-]?(\d+\.?\d*|\.\d+)$/.test(trimmed) ? { ok: true, value: Number(trimmed) } : { ok: false, takes: 'a number' };
+  return /^[+-]?(\d+\.?\d*|\.\d+)$/.test(trimmed)
+    ? { ok: true, value: Number(trimmed) }
+    : { ok: false, takes: 'a number' };
 }
 
 function formatValue(kind: NonNullable<EntryProps['kind']>, unit: Unit, value: unknown): string {
   if (value === undefined) return '';
   // Typed again, a rounded number would change the frame: entries show every digit and no mark.
-  if (kind === 'length') return formatLength(value as number, unit).startsWith('≈') ? String(value) : formatLength(value as number, unit);
+  if (kind === 'length')
+    return formatLength(value as number, unit).startsWith('≈') ? String(value) : formatLength(value as number, unit);
   return String(value);
 }
 
@@ -71,7 +74,10 @@ export const Entry = memo(function Entry(props: EntryProps) {
             onChange={(event) => entry.change(event.target.value)}
             onKeyDown={enterMovesOn}
             onBlur={entry.leave}
-            className={entryLook(isCell ? 'block w-full min-w-0' : 'w-24 min-w-0', kind === 'text' ? isCell ? '' : 'w-44' : 'text-right')}
+            className={entryLook(
+              isCell ? 'block w-full min-w-0' : 'w-24 min-w-0',
+              kind === 'text' ? (isCell ? '' : 'w-44') : 'text-right',
+            )}
           />
           {suffix !== undefined && <span className="text-11 text-pencil">{suffix}</span>}
         </span>

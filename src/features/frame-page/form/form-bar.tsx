@@ -14,10 +14,20 @@ export function FormBar({ children }: { readonly children: ReactNode }) {
         <span className="text-pencil">to read only</span>
       ) : (
         <>
-          <Button kind="quiet" disabled={undoLabel === '' && !hasWrong} title={undoLabel && `Undo: ${undoLabel} (Ctrl+Z)`} onClick={editor.undo}>
+          <Button
+            kind="quiet"
+            disabled={undoLabel === '' && !hasWrong}
+            title={undoLabel && `Undo: ${undoLabel} (Ctrl+Z)`}
+            onClick={editor.undo}
+          >
             Undo
           </Button>
-          <Button kind="quiet" disabled={redoLabel === ''} title={redoLabel && `Redo: ${redoLabel} (Ctrl+Shift+Z)`} onClick={editor.redo}>
+          <Button
+            kind="quiet"
+            disabled={redoLabel === ''}
+            title={redoLabel && `Redo: ${redoLabel} (Ctrl+Shift+Z)`}
+            onClick={editor.redo}
+          >
             Redo
           </Button>
         </>

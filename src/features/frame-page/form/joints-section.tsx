@@ -27,7 +27,10 @@ function useDadoEdits() {
     const { present } = editor.store.get().history;
     const dados = edit(present.dados);
     const problem = editor.apply({ ...present, dados }, label);
-    if (problem === '') requestAnimationFrame(() => goToEntry(dados.length > 0 ? `dados.${Math.min(focusOn, dados.length - 1)}.part` : 'dados'));
+    if (problem === '')
+      requestAnimationFrame(() =>
+        goToEntry(dados.length > 0 ? `dados.${Math.min(focusOn, dados.length - 1)}.part` : 'dados'),
+      );
     return problem;
   }
   const now = () => editor.store.get().history.present;
@@ -47,7 +50,10 @@ const DadoRows = memo(function DadoRows({ index }: { readonly index: number }) {
   if (part === undefined) return null;
   return (
     <div role="group" aria-label={part}>
-      <LightsUp of={(worked) => worked.dados.filter((d) => d.index === index).map((d) => d.id)} className="border-b border-rule py-1.5">
+      <LightsUp
+        of={(worked) => worked.dados.filter((d) => d.index === index).map((d) => d.id)}
+        className="border-b border-rule py-1.5"
+      >
         <div className="grid grid-cols-4 gap-x-1.5 gap-y-0.5">
           <div className="col-span-2">
             <Entry path={`${path}.part`} label="Part" kind="text" layout="cell" />

@@ -35,7 +35,15 @@ function SizeEntry({ field }: PartProps) {
     },
     [field, along],
   );
-  return <Entry path={`${field}.size`} label={along === 'width' ? 'Width' : 'Height'} layout="cell" optional placeholder={useSettled(words)} />;
+  return (
+    <Entry
+      path={`${field}.size`}
+      label={along === 'width' ? 'Width' : 'Height'}
+      layout="cell"
+      optional
+      placeholder={useSettled(words)}
+    />
+  );
 }
 
 function PartButtons({ field, kind }: PartProps & { readonly kind: 'opening' | 'columns' | 'rows' }) {
@@ -51,7 +59,8 @@ function PartButtons({ field, kind }: PartProps & { readonly kind: 'opening' | '
     <div className="flex flex-wrap gap-x-3 text-12">
       {kind === 'columns' && button('Add column', () => edits.add(path))}
       {kind === 'rows' && button('Add row', () => edits.add(path))}
-      {kind !== 'columns' && button(kind === 'opening' ? 'Into columns' : 'Column beside', () => edits.split(path, 'columns'))}
+      {kind !== 'columns' &&
+        button(kind === 'opening' ? 'Into columns' : 'Column beside', () => edits.split(path, 'columns'))}
       {kind !== 'rows' && button(kind === 'opening' ? 'Into rows' : 'Row below', () => edits.split(path, 'rows'))}
       {path.length > 0 && button('Remove', () => edits.remove(path))}
       {problem !== '' && <p className="w-full text-stop">Takes {problem}.</p>}

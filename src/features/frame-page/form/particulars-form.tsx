@@ -18,7 +18,16 @@ function NameSection() {
   );
 }
 
-const SECTIONS = [SizeSection, MembersSection, OpeningsSection, EdgeSection, JointsSection, TurningSection, CuttersSection, NameSection];
+const SECTIONS = [
+  SizeSection,
+  MembersSection,
+  OpeningsSection,
+  EdgeSection,
+  JointsSection,
+  TurningSection,
+  CuttersSection,
+  NameSection,
+];
 
 /** Everything a person enters for a frame, in the order in which one goes over the board. */
 export const ParticularsForm = memo(function ParticularsForm() {

@@ -15,7 +15,10 @@ export const SquareEdgeEntry = memo(function SquareEdgeEntry({ place }: { readon
     setProblem(editor.apply(setSquareEdge(present, place, square), square ? 'Keep an edge square' : 'Bead on an edge'));
   }
   return (
-    <div data-entry={typeof place === 'string' ? `${place}.opening.edge` : `outline.squareOpenings.${place}`} className="text-12">
+    <div
+      data-entry={typeof place === 'string' ? `${place}.opening.edge` : `outline.squareOpenings.${place}`}
+      className="text-12"
+    >
       <Checkbox label="Keep this edge square" checked={checked} onChecked={change} disabled={readOnly} />
       {problem !== '' && <p className="text-stop">Takes {problem}.</p>}
     </div>

@@ -20,7 +20,8 @@ export function keepsSquareEdge(particulars: Particulars, place: OpeningPlace): 
 export function setSquareEdge(particulars: Particulars, place: OpeningPlace, square: boolean): Particulars {
   if (typeof place === 'string') return setField(particulars, `${place}.opening.edge`, square ? 'square' : undefined);
   const { outline } = particulars;
-  if (outline.kind !== 'traced' || outline.openings[place] === undefined) throw new Error(`no traced opening at ${place}`);
+  if (outline.kind !== 'traced' || outline.openings[place] === undefined)
+    throw new Error(`no traced opening at ${place}`);
   const others = (outline.squareOpenings ?? []).filter((i) => i !== place);
   const all = square ? [...others, place].toSorted((a, b) => a - b) : others;
   return setField(particulars, 'outline.squareOpenings', all.length > 0 ? all : undefined);

@@ -16,7 +16,14 @@ interface SwitchEntryProps {
 }
 
 /** One of a few words in the particulars. Give it the same `options` object each time. */
-export const SwitchEntry = memo(function SwitchEntry({ path, label, options, asList = false, hideLabel = false, whenAbsent = '' }: SwitchEntryProps) {
+export const SwitchEntry = memo(function SwitchEntry({
+  path,
+  label,
+  options,
+  asList = false,
+  hideLabel = false,
+  whenAbsent = '',
+}: SwitchEntryProps) {
   const { editor, readOnly } = useDesk();
   const value = useEditor((s) => (readField(s.history.present, path) as string | undefined) ?? whenAbsent);
   const wrong = useEditor((s) => s.wrong.get(path) ?? '');
@@ -24,6 +31,21 @@ export const SwitchEntry = memo(function SwitchEntry({ path, label, options, asL
     editor.setWrong(path, editor.edit(path, picked));
     editor.leaveEntry();
   };
-  const common = { label, options, value, onValue: pick, disabled: readOnly, error: wrong === '' ? '' : `Takes ${wrong}.` };
-  return <div data-entry={path}>{asList ? <Select {...common} layout="stack" hideLabel={hideLabel} /> : <Choice {...common} hideLabel={hideLabel} />}</div>;
+  const common = {
+    label,
+    options,
+    value,
+    onValue: pick,
+    disabled: readOnly,
+    error: wrong === '' ? '' : `Takes ${wrong}.`,
+  };
+  return (
+    <div data-entry={path}>
+      {asList ? (
+        <Select {...common} layout="stack" hideLabel={hideLabel} />
+      ) : (
+        <Choice {...common} hideLabel={hideLabel} />
+      )}
+    </div>
+  );
 });

@@ -31,7 +31,10 @@ export function TakeFromDrawer({ role, heading }: { readonly role: CutterRole; r
     <Select
       label="Take from the drawer"
       layout="stack"
-      options={[{ value: '', label: 'none of the drawer’s', unavailable: 'pick one' }, ...fitting.map((entry) => optionOf(entry, unit))]}
+      options={[
+        { value: '', label: 'not in the drawer', unavailable: 'pick one' },
+        ...fitting.map((entry) => optionOf(entry, unit)),
+      ]}
       value={current}
       onValue={take}
       disabled={readOnly}

@@ -48,10 +48,13 @@ export function useEntry(path: string, read: (text: string) => ReadText, format:
 
   // The same entry may stand in the form and on the drawing: each takes back only what it said itself.
   const isWrong = useRef(false);
-  useEffect(() => () => {
-    if (isWrong.current) editor.setWrong(path, '');
-    isWrong.current = false;
-  }, [editor, path]);
+  useEffect(
+    () => () => {
+      if (isWrong.current) editor.setWrong(path, '');
+      isWrong.current = false;
+    },
+    [editor, path],
+  );
 
   function change(text: string) {
     const now = read(text);
@@ -71,7 +74,8 @@ export function useEntry(path: string, read: (text: string) => ReadText, format:
   return {
     value,
     text: kept?.text ?? format(value),
-    error: takes !== '' && settled ? `Got ${kept?.text.trim() ? `“${kept.text.trim()}”` : 'nothing'}; takes ${takes}.` : '',
+    error:
+      takes !== '' && settled ? `Got ${kept?.text.trim() ? `“${kept.text.trim()}”` : 'nothing'}; takes ${takes}.` : '',
     change,
     leave,
   };

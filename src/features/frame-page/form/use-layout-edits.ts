@@ -11,7 +11,12 @@ import type { FrameEditor } from '../model/frame-editor.ts';
 /** First width between parts anywhere in the layout: what a new one most likely is. */
 function betweenIn(part: LayoutPart): number | undefined {
   if ('opening' in part) return undefined;
-  return part.between ?? childrenOf(part).map(betweenIn).find((between) => between !== undefined);
+  return (
+    part.between ??
+    childrenOf(part)
+      .map(betweenIn)
+      .find((between) => between !== undefined)
+  );
 }
 
 /**
@@ -40,7 +45,8 @@ export function layoutEdits(editor: FrameEditor, after: (layout: LayoutPart, pla
       const between = betweenIn(layoutNow()) ?? (inches ? 1.5 : 38);
       return change((layout) => splitPart(layout, path, into, between), `Split into ${into}`, [...path, 1]);
     },
-    add: (path: LayoutPath): string => change((layout) => addPart(layout, path), 'Add opening', [...path, childrenOf(partAt(layoutNow(), path)).length]),
+    add: (path: LayoutPath): string =>
+      change((layout) => addPart(layout, path), 'Add opening', [...path, childrenOf(partAt(layoutNow(), path)).length]),
     remove(path: LayoutPath): string {
       const left = childrenOf(partAt(layoutNow(), path.slice(0, -1))).length - 1;
       const focusOn = left > 1 ? [...path.slice(0, -1), Math.min(path.at(-1)!, left - 1)] : path.slice(0, -1);

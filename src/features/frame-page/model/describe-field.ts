@@ -72,13 +72,16 @@ const ROLES: Readonly<Record<string, string>> = {
   corner: 'Corner cutter',
 };
 
-const withDetail = (thing: string, rest: string): string => (rest === '' ? thing : `${thing}, ${LAST_WORDS[rest] ?? rest}`);
+const withDetail = (thing: string, rest: string): string =>
+  rest === '' ? thing : `${thing}, ${LAST_WORDS[rest] ?? rest}`;
 
 /** "opening A", or for a divided part "column 2, row 1". */
 function describePart(particulars: Particulars, field: string): string {
   const part = readField(particulars, field) as { opening?: { label?: string } } | undefined;
   if (part?.opening?.label) return `Opening ${part.opening.label}`;
-  const steps = [...field.matchAll(/(columns|rows)\.(\d+)/g)].map(([, kind, i]) => `${kind === 'columns' ? 'column' : 'row'} ${Number(i) + 1}`);
+  const steps = [...field.matchAll(/(columns|rows)\.(\d+)/g)].map(
+    ([, kind, i]) => `${kind === 'columns' ? 'column' : 'row'} ${Number(i) + 1}`,
+  );
   const words = steps.join(', ');
   return words === '' ? 'Openings' : words[0]!.toUpperCase() + words.slice(1);
 }

@@ -78,7 +78,8 @@ export function useDesk(): Desk {
 /** Part of the editor's state; it must be the same object for the same value. */
 export const useEditor = <Part>(select: (state: EditorState) => Part): Part => useStore(useDesk().editor.store, select);
 
-const sameList = (a: readonly unknown[], b: readonly unknown[]): boolean => a.length === b.length && a.every((v, i) => v === b[i]);
+const sameList = (a: readonly unknown[], b: readonly unknown[]): boolean =>
+  a.length === b.length && a.every((v, i) => v === b[i]);
 
 /** Lights features up; the same ones again change nothing. */
 export function light(lit: Store<Lit>, features: readonly FeatureId[], places: readonly Extents[] = []): void {

@@ -45,7 +45,9 @@ export function goToEntry(path: string): boolean {
     const exact = document.querySelector<HTMLElement>(`[data-entry="${CSS.escape(at)}"]`);
     const marked = exact ?? document.querySelector<HTMLElement>(`[data-entry^="${CSS.escape(at)}."]`);
     // A switch is marked as a whole.
-    const entry = marked?.matches('fieldset, div') ? marked.querySelector<HTMLElement>('input:checked, select, input, button') : marked;
+    const entry = marked?.matches('fieldset, div')
+      ? marked.querySelector<HTMLElement>('input:checked, select, input, button')
+      : marked;
     if (!entry) continue;
     entry.focus({ preventScroll: true });
     entry.scrollIntoView({ block: 'center' });

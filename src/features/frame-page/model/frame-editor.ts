@@ -38,7 +38,8 @@ export interface FrameEditor {
 
 /** Whether every opening could be laid out: where members do not add up some are missing, and the last good drawing stays. */
 const isDrawable = ({ particulars: { outline }, contours }: WorkedFrame): boolean =>
-  contours.openings.length === (outline.kind === 'members' ? openingParts(outline.layout).length : outline.openings.length);
+  contours.openings.length ===
+  (outline.kind === 'members' ? openingParts(outline.layout).length : outline.openings.length);
 
 /**
  * What the contract finds wrong in the first level of the particulars that `path` leads into ('dados' for
@@ -49,14 +50,22 @@ function errorsNear(candidate: Particulars, path: string): FieldError[] {
   const read = key === '' ? contract.safeParse(candidate) : contract.shape[key].safeParse(candidate[key]);
   if (read.success) return [];
   const errors = fieldErrors(read.error, key === '' ? candidate : candidate[key]);
-  return key === '' ? errors : errors.map((error) => ({ ...error, path: error.path === '' ? key : `${key}.${error.path}` }));
+  return key === ''
+    ? errors
+    : errors.map((error) => ({ ...error, path: error.path === '' ? key : `${key}.${error.path}` }));
 }
 
 const NOTHING_WRONG: ReadonlyMap<string, string> = new Map();
 
 export function createFrameEditor(initial: Particulars): FrameEditor {
   const first = workFrame(initial);
-  const store = createStore<EditorState>({ history: startHistory(initial), worked: first, drawn: first, epoch: 0, wrong: NOTHING_WRONG });
+  const store = createStore<EditorState>({
+    history: startHistory(initial),
+    worked: first,
+    drawn: first,
+    epoch: 0,
+    wrong: NOTHING_WRONG,
+  });
 
   /** What is wrong with particulars, said for the entry at `path`; '' when nothing is. */
   function problem(candidate: Particulars, path: string): string {

@@ -17,7 +17,13 @@ export const pickPlace = (measuring: Measuring, p: Point): Measuring => ({
 });
 
 /** Steps to the next place to the right (or left, −1) and up (or down, −1) as the page shows it. `points` in frame view, not empty. */
-export function stepPlace(measuring: Measuring, points: readonly Point[], pl: Placement, right: number, up: number): Measuring {
+export function stepPlace(
+  measuring: Measuring,
+  points: readonly Point[],
+  pl: Placement,
+  right: number,
+  up: number,
+): Measuring {
   if (measuring.at === null) return { ...measuring, at: points[0]! };
   const next = nextPoint(points, measuring.at, right * pl.sx, up * pl.sy);
   return next === null ? measuring : { ...measuring, at: next };

@@ -34,7 +34,8 @@ const OUTER: Readonly<Record<FeatureId, string>> = {
   'rail-bottom': 'outline.rails.bottom',
 };
 
-const isPrefix = (a: LayoutPath, of: LayoutPath): boolean => a.length <= of.length && a.every((step, i) => step === of[i]);
+const isPrefix = (a: LayoutPath, of: LayoutPath): boolean =>
+  a.length <= of.length && a.every((step, i) => step === of[i]);
 
 /** The part at `path`; undefined where the path leads nowhere. */
 function partThere(layout: LayoutPart, path: LayoutPath): LayoutPart | undefined {
@@ -57,7 +58,8 @@ function fieldOf({ outline }: Particulars, kind: Selected['kind'], { id, path }:
 
 /** What a selection means in the frame as drawn and as entered; null when it is gone. */
 export function findSelected(contours: FrameContours, present: Particulars, { id, path }: Selection): Selected | null {
-  const opening = path === null ? contours.openings.find((o) => o.id === id && o.path === undefined) : openingAt(contours, path);
+  const opening =
+    path === null ? contours.openings.find((o) => o.id === id && o.path === undefined) : openingAt(contours, path);
   if (opening) return { kind: 'opening', feature: opening, field: fieldOf(present, 'opening', opening) };
   const member = contours.members.find((m) => m.id === id);
   return member ? { kind: 'member', feature: member, field: fieldOf(present, 'member', member) } : null;

@@ -7,7 +7,12 @@ import type { WorkedFrame } from '#shared/kernel/worked-frame.ts';
 /** The places that measuring catches, frame view: corners of perimeter, openings, dados and both boards. */
 export function snapPoints({ contours, dados, back, front }: WorkedFrame): Point[] {
   const boards = [back, front].map((face) => rectangle(placeExtents(unplace(face.placement), face.board)));
-  const all = [contours.perimeter, ...contours.openings.map((o) => o.contour), ...dados.map((d) => rectangle(d.extents)), ...boards];
+  const all = [
+    contours.perimeter,
+    ...contours.openings.map((o) => o.contour),
+    ...dados.map((d) => rectangle(d.extents)),
+    ...boards,
+  ];
   return all.flatMap((contour) => contour.vertices.map(({ x, y }) => ({ x, y })));
 }
 

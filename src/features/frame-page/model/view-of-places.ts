@@ -29,6 +29,7 @@ function overlap(all: readonly Extents[]): Extents | null {
 export function viewOfPlaces(worked: WorkedFrame, places: readonly Extents[], page: PageSize): View {
   const whole = fitTo(boardInFrameView(worked), page);
   const near = fitTo(overlap(places) ?? union(places), page, Math.min(page.width, page.height) * FREE_SHARE);
-  const nearest = Math.min(page.width, page.height) / (NEAREST_SHARE * Math.max(worked.contours.width, worked.contours.height));
+  const nearest =
+    Math.min(page.width, page.height) / (NEAREST_SHARE * Math.max(worked.contours.width, worked.contours.height));
   return { centre: near.centre, scale: Math.max(whole.scale, Math.min(near.scale, nearest)) };
 }

@@ -65,7 +65,10 @@ export const toPage = (view: View, pl: Placement, page: PageSize, p: Point): Poi
 export function zoomView(view: View, factor: number, about: Point = view.centre): View {
   const scale = clampScale(view.scale * factor);
   const kept = view.scale / scale;
-  return { scale, centre: { x: about.x + (view.centre.x - about.x) * kept, y: about.y + (view.centre.y - about.y) * kept } };
+  return {
+    scale,
+    centre: { x: about.x + (view.centre.x - about.x) * kept, y: about.y + (view.centre.y - about.y) * kept },
+  };
 }
 
 /** Moves the board by pixels on the page with this placement; on the other page it goes the mirrored way. */

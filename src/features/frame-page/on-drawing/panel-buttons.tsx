@@ -12,7 +12,7 @@ export function PanelButtons({ removable }: { readonly removable: boolean }) {
     focusSpread();
   }
   return (
-    <div className="flex flex-wrap gap-x-3 text-12">
+    <div className="flex flex-wrap gap-x-2">
       <Button kind="quiet" onClick={() => splitSelected(desk, 'columns')}>
         Into columns C
       </Button>

@@ -14,8 +14,7 @@ const ROOM_PX = 8;
 
 const clamp = (v: number, min: number, max: number): number => Math.max(min, Math.min(max, v));
 
-const isFree = (a: Box, b: Box, room: number): boolean =>
-  a.left + a.width + room <= b.left || b.left + b.width + room <= a.left || a.top + a.height + room <= b.top || b.top + b.height + room <= a.top;
+const isFree = (a: Box, b: Box): boolean => a.left + a.width <= b.left || b.left + b.width <= a.left || a.top + a.height <= b.top || b.top + b.height <= a.top;
 
 interface PanelPlacing {
   readonly spread: PageSize;
@@ -37,20 +36,21 @@ export function placePanel({ spread, panel, own, other, now }: PanelPlacing): Po
   const low = spread.height - panel.height - ROOM_PX;
   const at = (x: number, y: number): Point => ({ x: Math.round(clamp(x, ROOM_PX, Math.max(ROOM_PX, right))), y: Math.round(clamp(y, ROOM_PX, Math.max(ROOM_PX, low))) });
   const boxAt = (p: Point): Box => ({ left: p.x, top: p.y, ...panel });
-  if (now && isFree(boxAt(now), own, 0) && now.x === at(now.x, now.y).x && now.y === at(now.x, now.y).y) return now;
+  if (now && isFree(boxAt(now), own) && now.x === at(now.x, now.y).x && now.y === at(now.x, now.y).y) return now;
 
-  const level = own.top + own.height / 2 - panel.height / 2;
-  const upright = own.left + own.width / 2 - panel.width / 2;
-  const beside = [
-    at(own.left + own.width + ROOM_PX, level),
-    at(own.left - panel.width - ROOM_PX, level),
-    at(upright, own.top + own.height + ROOM_PX),
-    at(upright, own.top - panel.height - ROOM_PX),
-  ];
+  const beside = (box: Box): Point[] => {
+    const level = box.top + box.height / 2 - panel.height / 2;
+    const upright = box.left + box.width / 2 - panel.width / 2;
+    return [
+      at(box.left + box.width + ROOM_PX, level),
+      at(box.left - panel.width - ROOM_PX, level),
+      at(upright, box.top + box.height + ROOM_PX),
+      at(upright, box.top - panel.height - ROOM_PX),
+    ];
+  };
   const corners = [at(right, ROOM_PX), at(ROOM_PX, ROOM_PX), at(right, low), at(ROOM_PX, low)];
-  const all = [...beside, ...corners];
-  const free = all.filter((p) => isFree(boxAt(p), own, 0));
-  const best = free.find((p) => isFree(boxAt(p), other, 0)) ?? free[0];
+  const free = [...beside(own), ...beside(other), ...corners].filter((p) => isFree(boxAt(p), own));
+  const best = free.find((p) => isFree(boxAt(p), other)) ?? free[0];
   if (best) return best;
   const away = (p: Point): number => Math.hypot(p.x + panel.width / 2 - own.left - own.width / 2, p.y + panel.height / 2 - own.top - own.height / 2);
   return corners.reduce((a, b) => (away(b) > away(a) ? b : a));

@@ -62,7 +62,7 @@ function OpenPanel({ worked, view, page, selection, selected }: SelectionPanelPr
       data-selection-panel=""
       data-fields=""
       onKeyDown={press}
-      className="absolute top-0 left-0 flex w-62 flex-col gap-1.5 border border-ink bg-paper px-2.5 py-1.5 print:hidden pointer-coarse:w-72 pointer-coarse:[&_button]:min-h-11 pointer-coarse:[&_input]:min-h-11 pointer-coarse:[&_label]:min-h-11 pointer-coarse:[&_label]:items-center"
+      className="absolute top-0 left-0 flex w-56 flex-col gap-1.5 border border-ink bg-paper px-2 py-1.5 print:hidden pointer-coarse:w-60 pointer-coarse:[&_button]:min-h-11 pointer-coarse:[&_input]:min-h-11 pointer-coarse:[&_label]:min-h-11 pointer-coarse:[&_label]:items-center"
     >
       <div className="flex items-baseline justify-between gap-x-3">
         <p className="min-w-0 truncate">

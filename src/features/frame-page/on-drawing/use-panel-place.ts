@@ -17,10 +17,18 @@ interface PanelPlace {
   readonly extents: Extents;
 }
 
+/** Where the spread's parts are on the screen. */
+interface Laid {
+  readonly spread: DOMRect;
+  readonly back: DOMRect;
+  readonly front: DOMRect;
+}
+
+const rectOf = (spread: Element, face: Face): DOMRect => spread.querySelector(`[data-face="${face}"]`)!.getBoundingClientRect();
+
 /** What can be seen of a rectangle of frame view on a page, in pixels of the spread. */
-function boxOn(spread: Element, face: Face, { worked, view, page, extents }: PanelPlace): Box {
-  const area = spread.querySelector(`[data-face="${face}"]`)!.getBoundingClientRect();
-  const origin = spread.getBoundingClientRect();
+function boxOn(laid: Laid, face: Face, { worked, view, page, extents }: PanelPlace): Box {
+  const area = laid[face];
   const { placement } = worked[face];
   const a = toPage(view, placement, page, { x: extents.minX, y: extents.minY });
   const b = toPage(view, placement, page, { x: extents.maxX, y: extents.maxY });
@@ -28,8 +36,8 @@ function boxOn(spread: Element, face: Face, { worked, view, page, extents }: Pan
   const left = within(Math.min(a.x, b.x), area.width);
   const top = within(Math.min(a.y, b.y), area.height);
   return {
-    left: area.left - origin.left + left,
-    top: area.top - origin.top + top,
+    left: area.left - laid.spread.left + left,
+    top: area.top - laid.spread.top + top,
     width: within(Math.max(a.x, b.x), area.width) - left,
     height: within(Math.max(a.y, b.y), area.height) - top,
   };
@@ -37,16 +45,26 @@ function boxOn(spread: Element, face: Face, { worked, view, page, extents }: Pan
 
 /** Keeps the panel beside what it edits, on whichever page there is room. */
 export function usePanelPlace(place: PanelPlace): void {
-  const { panel, face } = place;
+  const { panel, worked, page, face } = place;
   const size = usePageSize(panel);
+  const { flip } = worked.blank;
+  const laid = useRef<Laid | null>(null);
   const now = useRef<Point | null>(null);
+
+  // Asking where things are makes the browser lay the page out, for which a keystroke should not wait.
   useLayoutEffect(() => {
     const spread = panel.current?.closest('[data-spread]');
-    if (!panel.current || !spread || size === null) return;
-    const { width, height } = spread.getBoundingClientRect();
-    const own = boxOn(spread, face, place);
-    const other = boxOn(spread, face === 'back' ? 'front' : 'back', place);
-    now.current = placePanel({ spread: { width, height }, panel: size, own, other, now: now.current });
-    panel.current.style.transform = `translate(${now.current.x}px, ${now.current.y}px)`;
+    laid.current = spread ? { spread: spread.getBoundingClientRect(), back: rectOf(spread, 'back'), front: rectOf(spread, 'front') } : null;
+  }, [panel, page, flip, size]);
+
+  useLayoutEffect(() => {
+    if (!panel.current || !laid.current || size === null) return;
+    const { width, height } = laid.current.spread;
+    const own = boxOn(laid.current, face, place);
+    const other = boxOn(laid.current, face === 'back' ? 'front' : 'back', place);
+    const next = placePanel({ spread: { width, height }, panel: size, own, other, now: now.current });
+    if (next === now.current) return;
+    now.current = next;
+    panel.current.style.transform = `translate(${next.x}px, ${next.y}px)`;
   });
 }

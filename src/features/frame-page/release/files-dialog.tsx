@@ -20,7 +20,17 @@ interface FilesDialogProps {
   readonly onClose: () => void;
 }
 
-function RevisionFiles({ frame, revision, profileId, main }: { readonly frame: Frame; readonly revision: Revision; readonly profileId: string; readonly main: boolean }) {
+function RevisionFiles({
+  frame,
+  revision,
+  profileId,
+  main,
+}: {
+  readonly frame: Frame;
+  readonly revision: Revision;
+  readonly profileId: string;
+  readonly main: boolean;
+}) {
   const at = `/api/frames/${encodeURIComponent(frame.id)}/revisions/${encodeURIComponent(revision.letter)}`;
   const profile = encodeURIComponent(profileId);
   return (
@@ -37,7 +47,11 @@ function RevisionFiles({ frame, revision, profileId, main }: { readonly frame: F
             {`Layer set ${revision.letter}`}
           </DownloadButton>
         </div>
-        <ButtonLink to={`/frames/${encodeURIComponent(frame.id)}/sheet?revision=${encodeURIComponent(revision.letter)}&profile=${profile}`}>Setup sheet</ButtonLink>
+        <ButtonLink
+          to={`/frames/${encodeURIComponent(frame.id)}/sheet?revision=${encodeURIComponent(revision.letter)}&profile=${profile}`}
+        >
+          Setup sheet
+        </ButtonLink>
         <ButtonLink to={`${at}/setup-sheet.pdf?profile=${profile}`} newTab>
           PDF
         </ButtonLink>
@@ -68,7 +82,13 @@ export function FilesDialog({ frame, profiles, defaultProfileId, released, onClo
             <Section heading="Revisions" aside="newest first" level={3}>
               <ul aria-label="Revisions">
                 {frame.revisions.map((revision, i) => (
-                  <RevisionFiles key={revision.letter} frame={frame} revision={revision} profileId={profileId} main={i === 0} />
+                  <RevisionFiles
+                    key={revision.letter}
+                    frame={frame}
+                    revision={revision}
+                    profileId={profileId}
+                    main={i === 0}
+                  />
                 ))}
               </ul>
             </Section>

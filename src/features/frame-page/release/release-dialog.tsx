@@ -85,7 +85,9 @@ export function ReleaseDialog({ frameId, letter, autosave, onReleased, onClose }
         </>
       }
     >
-      <p className="mb-3">The frame is frozen as it is now and cannot be changed any more. Work goes on in the draft.</p>
+      <p className="mb-3">
+        The frame is frozen as it is now and cannot be changed any more. Work goes on in the draft.
+      </p>
       {notSaved && (
         <Notice level="stop" word="Not released" live>
           The draft could not be saved first. See why in the title block.
@@ -96,7 +98,11 @@ export function ReleaseDialog({ frameId, letter, autosave, onReleased, onClose }
           {sayError(release.error)}
         </Notice>
       )}
-      {wrong > 0 && <Notice level="stop">{plural(wrong, 'entry', 'entries')} of the form could not be taken. Mend or undo that first.</Notice>}
+      {wrong > 0 && (
+        <Notice level="stop">
+          {plural(wrong, 'entry', 'entries')} of the form could not be taken. Mend or undo that first.
+        </Notice>
+      )}
       {stops.map((f, i) => (
         <Notice key={i} level="stop">
           {f.text} {f.remedy}
@@ -105,7 +111,14 @@ export function ReleaseDialog({ frameId, letter, autosave, onReleased, onClose }
       {cautions.length > 0 && (
         <Section heading="Cautions" aside={left === 0 ? 'all looked at' : `${left} to look at`} level={3}>
           {cautions.map((f, i) => (
-            <Checkbox key={i} label={f.text} hint={f.remedy} checked={looked.has(f.text)} onChecked={(checked) => look(f.text, checked)} disabled={stopped} />
+            <Checkbox
+              key={i}
+              label={f.text}
+              hint={f.remedy}
+              checked={looked.has(f.text)}
+              onChecked={(checked) => look(f.text, checked)}
+              disabled={stopped}
+            />
           ))}
         </Section>
       )}
@@ -118,7 +131,15 @@ export function ReleaseDialog({ frameId, letter, autosave, onReleased, onClose }
           </ul>
         </Section>
       )}
-      <TextField label="What this revision is for, or what changed" lines={3} value={note} onValue={setNote} maxLength={LIMITS.noteLength} hint="Stands on the setup sheet." disabled={stopped} />
+      <TextField
+        label="What this revision is for, or what changed"
+        lines={3}
+        value={note}
+        onValue={setNote}
+        maxLength={LIMITS.noteLength}
+        hint="Stands on the setup sheet."
+        disabled={stopped}
+      />
     </Dialog>
   );
 }

@@ -32,7 +32,14 @@ export function EarlierCopyNotice({ frame, editor, onConflict }: EarlierCopyNoti
   function takeUp() {
     if (copy === null) return;
     if (copy.version === frame.version) editor.apply(copy.mine, 'Work kept in this browser');
-    else onConflict({ base: copy.base, mine: copy.mine, theirs: editor.store.get().history.present, changedBy: frame.changedBy, changedAt: frame.changedAt });
+    else
+      onConflict({
+        base: copy.base,
+        mine: copy.mine,
+        theirs: editor.store.get().history.present,
+        changedBy: frame.changedBy,
+        changedAt: frame.changedAt,
+      });
     done();
   }
   return (

@@ -13,7 +13,8 @@ export function entryWords(path: string, value: unknown, unit: Unit): string {
   if (value === undefined) return 'nothing';
   if (typeof value === 'number') return NO_LENGTH.test(path) ? String(value) : formatLength(value, unit);
   if (typeof value === 'string') return value;
-  if (Array.isArray(value)) return path === 'dados' ? `${value.length} ${value.length === 1 ? 'dado' : 'dados'}` : `a list of ${value.length}`;
+  if (Array.isArray(value))
+    return path === 'dados' ? `${value.length} ${value.length === 1 ? 'dado' : 'dados'}` : `a list of ${value.length}`;
   if (value === null || typeof value !== 'object') return String(value);
   if (isPart(value)) {
     const count = openingParts(value).length;

@@ -35,8 +35,10 @@ export function FrameFileButtons() {
   const [refused, setRefused] = useState<Refused | null>(null);
 
   async function take(file: File) {
-    const refuse = (message: string, fields: readonly FieldError[] = []) => setRefused({ file: file.name, message, fields });
-    if (file.size > LIMITS.frameFileBytes) return refuse(`too large: it has ${file.size} bytes, a frame file has at most ${LIMITS.frameFileBytes}`);
+    const refuse = (message: string, fields: readonly FieldError[] = []) =>
+      setRefused({ file: file.name, message, fields });
+    if (file.size > LIMITS.frameFileBytes)
+      return refuse(`too large: it has ${file.size} bytes, a frame file has at most ${LIMITS.frameFileBytes}`);
     const read = parseFrameFile(await file.text());
     if (!read.ok) return refuse(read.message, read.fields);
     editor.apply(read.particulars, `Import ${file.name}`);

@@ -8,7 +8,9 @@ import type { Autosave } from '../model/autosave.ts';
 export function LeaveDialog({ autosave, copyKept }: { readonly autosave: Autosave; readonly copyKept: boolean }) {
   const state = useSyncExternalStore(autosave.store.subscribe, autosave.store.get);
   const isStuck = state.kind === 'not-saved' || state.kind === 'stale';
-  const blocker = useBlocker(({ currentLocation, nextLocation }) => isStuck && currentLocation.pathname !== nextLocation.pathname);
+  const blocker = useBlocker(
+    ({ currentLocation, nextLocation }) => isStuck && currentLocation.pathname !== nextLocation.pathname,
+  );
   if (blocker.state !== 'blocked') return null;
   return (
     <Dialog
@@ -24,7 +26,11 @@ export function LeaveDialog({ autosave, copyKept }: { readonly autosave: Autosav
       }
     >
       {state.kind === 'not-saved' && <p className="mb-2">{state.why}</p>}
-      <p>{copyKept ? 'A copy is kept in this browser and offered when this frame is opened here again.' : 'No copy could be kept in this browser: leaving loses them.'}</p>
+      <p>
+        {copyKept
+          ? 'A copy is kept in this browser and offered when this frame is opened here again.'
+          : 'No copy could be kept in this browser: leaving loses them.'}
+      </p>
     </Dialog>
   );
 }

@@ -29,7 +29,8 @@ export function SavingCell({ autosave, copyKept, onChoose }: SavingCellProps) {
       return (
         <TitleCell label="Draft" detail={detail}>
           <span role="alert" data-saving={state.kind} className="text-12">
-            <strong className="text-stop">not saved:</strong> {state.why} {copyKept ? '' : 'No copy could be kept in this browser: do not close the page.'}
+            <strong className="text-stop">not saved:</strong> {state.why}{' '}
+            {copyKept ? '' : 'No copy could be kept in this browser: do not close the page.'}
           </span>{' '}
           <Button kind="quiet" onClick={() => void autosave.flush()}>
             {state.retries ? 'Try now' : 'Try again'}

@@ -48,7 +48,10 @@ function rowsOf({ base, mine, theirs }: TwoDrafts): Row[] {
   const paths = new Set([...listChanges(base, mine), ...listChanges(base, theirs)].map((change) => change.path));
   const words = (p: Particulars, path: string): string => {
     const now = readField(p, path);
-    return p !== base && listChanges(base, p).every((c) => c.path !== path && !c.path.startsWith(`${path}.`) && !path.startsWith(`${c.path}.`))
+    return p !== base &&
+      listChanges(base, p).every(
+        (c) => c.path !== path && !c.path.startsWith(`${path}.`) && !path.startsWith(`${c.path}.`),
+      )
       ? 'as it was'
       : entryWords(path, now, base.unit);
   };
@@ -84,7 +87,8 @@ export function StaleDialog({ drafts, onMine, onTheirs, onMerged, onLater }: Sta
       }
     >
       <p className="mb-3">
-        {changedBy} saved it <When iso={changedAt} />. Your changes are still here and not saved yet. Whatever you choose, undo brings the other back.
+        {changedBy} saved it <When iso={changedAt} />. Your changes are still here and not saved yet. Whatever you
+        choose, undo brings the other back.
       </p>
       <Table caption="Entries that either of you changed" columns={COLUMNS} rows={rows} rowKey={(row) => row.path} />
       <p className="mt-3 text-12">

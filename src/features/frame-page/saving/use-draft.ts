@@ -30,9 +30,18 @@ export function useDraft(frame: Frame): Draft {
       saved: frame.particulars,
       judge: judgeSave,
       async save(draft) {
-        const keepalive = document.visibilityState === 'hidden' && JSON.stringify(draft.particulars).length < KEEPALIVE_BYTES;
-        const saved = await saveDraft({ frameId: frame.id, ...draft, particulars: draft.particulars as Frame['particulars'], keepalive });
-        client.setQueryData(frameQuery(frame.id).queryKey, (now) => now && { ...now, ...saved, particulars: draft.particulars as Frame['particulars'] });
+        const keepalive =
+          document.visibilityState === 'hidden' && JSON.stringify(draft.particulars).length < KEEPALIVE_BYTES;
+        const saved = await saveDraft({
+          frameId: frame.id,
+          ...draft,
+          particulars: draft.particulars as Frame['particulars'],
+          keepalive,
+        });
+        client.setQueryData(
+          frameQuery(frame.id).queryKey,
+          (now) => now && { ...now, ...saved, particulars: draft.particulars as Frame['particulars'] },
+        );
         return saved;
       },
     });
@@ -45,7 +54,14 @@ export function useDraft(frame: Frame): Draft {
       clearTimeout(timer);
       const mine = editor.store.get().history.present;
       if (mine === autosave.saved()) return;
-      setCopyKept(keepCopy(localStorage, frame.id, { version: autosave.version(), base: autosave.saved(), mine, at: new Date().toISOString() }));
+      setCopyKept(
+        keepCopy(localStorage, frame.id, {
+          version: autosave.version(),
+          base: autosave.saved(),
+          mine,
+          at: new Date().toISOString(),
+        }),
+      );
     };
     let last = editor.store.get().history.present;
     const offEditor = editor.store.subscribe(() => {

@@ -18,7 +18,11 @@ export const Board = memo(function Board({ worked, face }: { readonly worked: Wo
     return (
       <>
         <path d={outer} className="fill-board" />
-        <path d={perimeter + openings} vectorEffect="non-scaling-stroke" className="fill-none stroke-pencil [stroke-width:1] [stroke-dasharray:5_4]" />
+        <path
+          d={perimeter + openings}
+          vectorEffect="non-scaling-stroke"
+          className="fill-none stroke-pencil [stroke-width:1] [stroke-dasharray:5_4]"
+        />
       </>
     );
   }
@@ -31,11 +35,24 @@ export const Board = memo(function Board({ worked, face }: { readonly worked: Wo
 });
 
 const Lines = memo(function Lines({ lineSet }: { readonly lineSet: LineSet }) {
-  return <path d={lineSetPath(lineSet)} fillRule="evenodd" vectorEffect="non-scaling-stroke" className={SET_LOOK[lineSet.set]} />;
+  return (
+    <path
+      d={lineSetPath(lineSet)}
+      fillRule="evenodd"
+      vectorEffect="non-scaling-stroke"
+      className={SET_LOOK[lineSet.set]}
+    />
+  );
 });
 
 /** The line sets of a face that are switched on, in setup coordinates. */
-export const LineSets = memo(function LineSets({ lineSets, hidden }: { readonly lineSets: readonly LineSet[]; readonly hidden: ReadonlySet<string> }) {
+export const LineSets = memo(function LineSets({
+  lineSets,
+  hidden,
+}: {
+  readonly lineSets: readonly LineSet[];
+  readonly hidden: ReadonlySet<string>;
+}) {
   return lineSets.map((lineSet) => {
     const key = lineSetKey(lineSet);
     return hidden.has(key) ? null : <Lines key={key} lineSet={lineSet} />;

@@ -14,7 +14,13 @@ function Swatch({ set }: { readonly set: SetName }) {
 }
 
 /** The line sets of a face in cutting order; each is a switch for its lines. */
-export const FaceLegend = memo(function FaceLegend({ entries, face }: { readonly entries: readonly LegendEntry[]; readonly face: string }) {
+export const FaceLegend = memo(function FaceLegend({
+  entries,
+  face,
+}: {
+  readonly entries: readonly LegendEntry[];
+  readonly face: string;
+}) {
   const desk = useDesk();
   const hidden = useStore(desk.hidden, (value) => value);
   function toggle(key: string) {

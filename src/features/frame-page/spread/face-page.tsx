@@ -89,12 +89,23 @@ function Drawing({ face, worked, view, page }: Pick<FacePageProps, 'face' | 'wor
 }
 
 /** One page of the spread: heading, drawing, legend. */
-export const FacePage = memo(function FacePage({ face, worked, view, page, legend, heading, aside, className }: FacePageProps) {
+export const FacePage = memo(function FacePage({
+  face,
+  worked,
+  view,
+  page,
+  legend,
+  heading,
+  aside,
+  className,
+}: FacePageProps) {
   const colour = face === 'back' ? 'text-back' : 'text-front';
   return (
     <section aria-label={heading} className={`min-h-0 min-w-0 px-4 pt-2 pb-1 ${className}`}>
       {/* Of a size that its words do not change, so that new words are laid out here and nowhere else. */}
-      <div className={`flex h-5 justify-between gap-x-3 overflow-hidden font-bold whitespace-nowrap contain-strict ${colour}`}>
+      <div
+        className={`flex h-5 justify-between gap-x-3 overflow-hidden font-bold whitespace-nowrap contain-strict ${colour}`}
+      >
         <h2>{heading}</h2>
         <p className="min-w-0 truncate">{aside}</p>
       </div>

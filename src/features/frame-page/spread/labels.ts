@@ -35,7 +35,10 @@ function backLabels(worked: WorkedFrame): Label[] {
     const upright = given.runs === 'vertical';
     // Off the middle, where a dado that crosses is least likely to be.
     const along = upright ? 0.62 : 0.25;
-    const middle = { x: upright ? (e.minX + e.maxX) / 2 : e.minX + along * (e.maxX - e.minX), y: upright ? e.minY + along * (e.maxY - e.minY) : (e.minY + e.maxY) / 2 };
+    const middle = {
+      x: upright ? (e.minX + e.maxX) / 2 : e.minX + along * (e.maxX - e.minX),
+      y: upright ? e.minY + along * (e.maxY - e.minY) : (e.minY + e.maxY) / 2,
+    };
     // Words stand on the side towards the middle of the frame, where there is board beside the dado.
     const towards = upright ? (middle.x > contours.width / 2 ? -1 : 1) : middle.y > contours.height / 2 ? -1 : 1;
     const width = formatLength(upright ? e.maxX - e.minX : e.maxY - e.minY, unit);
@@ -43,7 +46,9 @@ function backLabels(worked: WorkedFrame): Label[] {
       ...free,
       key: dado.id,
       text: `${dado.part} ${width} × ${formatLength(dado.depth, unit)}`,
-      at: upright ? { x: towards > 0 ? e.maxX : e.minX, y: middle.y } : { x: middle.x, y: towards > 0 ? e.maxY : e.minY },
+      at: upright
+        ? { x: towards > 0 ? e.maxX : e.minX, y: middle.y }
+        : { x: middle.x, y: towards > 0 ? e.maxY : e.minY },
       dx: upright ? towards * back.placement.sx * 10 : 0,
       dy: upright ? 0 : -towards * back.placement.sy * 10,
       turned: upright,
@@ -64,13 +69,34 @@ function frontLabels({ contours, particulars, front }: WorkedFrame): Label[] {
     const arch = o.arch > 0 ? `, arch ${formatLength(o.arch, unit)}` : '';
     return [
       { ...common, key: `${o.id}-label`, text: o.label, dy: -9 },
-      { ...common, key: `${o.id}-size`, text: `${formatLength(o.width, unit)} × ${formatLength(o.height, unit)}${arch}`, dy: 9, turnedRoom: o.height / 2 },
+      {
+        ...common,
+        key: `${o.id}-size`,
+        text: `${formatLength(o.width, unit)} × ${formatLength(o.height, unit)}${arch}`,
+        dy: 9,
+        turnedRoom: o.height / 2,
+      },
     ];
   });
   return [
     ...openings,
-    { ...free, key: 'width', text: `${formatLength(contours.width, unit)} frame`, at: { x: contours.width / 2, y: board.maxY }, dy: -12, colour: 'ink' },
-    { ...free, key: 'height', text: `${formatLength(contours.height, unit)} frame`, at: { x: board.maxX, y: contours.height / 2 }, dx: 14, turned: true, colour: 'ink' },
+    {
+      ...free,
+      key: 'width',
+      text: `${formatLength(contours.width, unit)} frame`,
+      at: { x: contours.width / 2, y: board.maxY },
+      dy: -12,
+      colour: 'ink',
+    },
+    {
+      ...free,
+      key: 'height',
+      text: `${formatLength(contours.height, unit)} frame`,
+      at: { x: board.maxX, y: contours.height / 2 },
+      dx: 14,
+      turned: true,
+      colour: 'ink',
+    },
   ];
 }
 
@@ -78,11 +104,31 @@ function frontLabels({ contours, particulars, front }: WorkedFrame): Label[] {
 function boardLabels(worked: WorkedFrame, face: Face): Label[] {
   const { placement, board } = worked[face];
   const toFrame = (p: Point): Point => placePoint(unplace(placement), p);
-  const pins: Label = { ...free, key: 'pins', text: 'pins', at: toFrame({ x: 0, y: 0 }), dx: 28, dy: 20, colour: 'pencil' };
+  const pins: Label = {
+    ...free,
+    key: 'pins',
+    text: 'pins',
+    at: toFrame({ x: 0, y: 0 }),
+    dx: 28,
+    dy: 20,
+    colour: 'pencil',
+  };
   if (face === 'front') return [pins];
-  const squaring: Label = { ...free, key: 'squaring', text: 'squaring edge', at: toFrame({ x: board.maxX * 0.65, y: worked.blank.squaredCorner.y }), dy: worked.blank.flip === 'side-to-side' ? 20 : -14, colour: 'back', room: board.maxX / 2, hiddenWith: 'SQUARING' };
+  const squaring: Label = {
+    ...free,
+    key: 'squaring',
+    text: 'squaring edge',
+    at: toFrame({ x: board.maxX * 0.65, y: worked.blank.squaredCorner.y }),
+    dy: worked.blank.flip === 'side-to-side' ? 20 : -14,
+    colour: 'back',
+    room: board.maxX / 2,
+    hiddenWith: 'SQUARING',
+  };
   return [pins, squaring];
 }
 
 /** All words of a face. */
-export const labelsOf = (worked: WorkedFrame, face: Face): Label[] => [...(face === 'back' ? backLabels(worked) : frontLabels(worked)), ...boardLabels(worked, face)];
+export const labelsOf = (worked: WorkedFrame, face: Face): Label[] => [
+  ...(face === 'back' ? backLabels(worked) : frontLabels(worked)),
+  ...boardLabels(worked, face),
+];

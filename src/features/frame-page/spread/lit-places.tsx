@@ -11,15 +11,29 @@ function pathOf({ contours, dados }: WorkedFrame, id: FeatureId): string {
   if (id === 'perimeter') return svgPath(contours.perimeter);
   const opening = contours.openings.find((o) => o.id === id);
   if (opening) return svgPath(opening.contour);
-  const at: Extents | undefined = dados.find((d) => d.id === id)?.extents ?? contours.members.find((m) => m.id === id)?.extents;
+  const at: Extents | undefined =
+    dados.find((d) => d.id === id)?.extents ?? contours.members.find((m) => m.id === id)?.extents;
   return at ? extentsPath(at) : '';
 }
 
 /** Grows a place by half the reach each way, so that the frame drawn about it does not hide it. */
-const grown = (e: Extents, by: number): Extents => ({ minX: e.minX - by, minY: e.minY - by, maxX: e.maxX + by, maxY: e.maxY + by });
+const grown = (e: Extents, by: number): Extents => ({
+  minX: e.minX - by,
+  minY: e.minY - by,
+  maxX: e.maxX + by,
+  maxY: e.maxY + by,
+});
 
 /** What is lit up, in frame view: drawn alike on both faces. `scale` in pixels a unit, `transform` from frame view to the page. */
-export function LitPlaces({ worked, scale, transform }: { readonly worked: WorkedFrame; readonly scale: number; readonly transform: string }) {
+export function LitPlaces({
+  worked,
+  scale,
+  transform,
+}: {
+  readonly worked: WorkedFrame;
+  readonly scale: number;
+  readonly transform: string;
+}) {
   const { lit } = useDesk();
   const { features, places } = useStore(lit, (value) => value);
   if (features.length === 0 && places.length === 0) return null;
@@ -31,7 +45,11 @@ export function LitPlaces({ worked, scale, transform }: { readonly worked: Worke
           data-lit={id}
           d={pathOf(worked, id)}
           vectorEffect="non-scaling-stroke"
-          className={id.startsWith('dado-') ? 'fill-back/55 stroke-ink [stroke-width:2]' : 'fill-front/20 stroke-front [stroke-width:2]'}
+          className={
+            id.startsWith('dado-')
+              ? 'fill-back/55 stroke-ink [stroke-width:2]'
+              : 'fill-front/20 stroke-front [stroke-width:2]'
+          }
         />
       ))}
       {places.map((place, i) => (

@@ -5,7 +5,17 @@ import { toPage, type PageSize, type View } from '../model/view.ts';
 const ARM_PX = 7;
 
 /** The picked places, the line between them, and where the next pick would be. */
-export function MeasureMarks({ measuring, view, placement, page }: { measuring: Measuring; view: View; placement: Placement; page: PageSize }) {
+export function MeasureMarks({
+  measuring,
+  view,
+  placement,
+  page,
+}: {
+  measuring: Measuring;
+  view: View;
+  placement: Placement;
+  page: PageSize;
+}) {
   const { picked, at } = measuring;
   const places = picked.length < 2 && at ? [...picked, at] : picked;
   const onPage = places.map((p) => toPage(view, placement, page, p));

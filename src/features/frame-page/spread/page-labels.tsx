@@ -12,9 +12,26 @@ const LINE_PX = 16;
 
 /** A halo of the board's colour keeps words readable across lines. */
 const HALO = 'stroke-board [paint-order:stroke] [stroke-width:4]';
-const COLOURS: Record<Label['colour'], string> = { back: 'fill-back', front: 'fill-front', ink: 'fill-ink', pencil: 'fill-pencil' };
+const COLOURS: Record<Label['colour'], string> = {
+  back: 'fill-back',
+  front: 'fill-front',
+  ink: 'fill-ink',
+  pencil: 'fill-pencil',
+};
 
-const Words = memo(function Words({ x, y, turned, text, look }: { x: number; y: number; turned: boolean; text: string; look: string }) {
+const Words = memo(function Words({
+  x,
+  y,
+  turned,
+  text,
+  look,
+}: {
+  x: number;
+  y: number;
+  turned: boolean;
+  text: string;
+  look: string;
+}) {
   // Moved by a group about the words: moving the words themselves, by x and y or a transform of their own, has the browser
   // lay them out anew, which takes longer than all lines of both faces together.
   return (
@@ -47,7 +64,16 @@ export function PageLabels({ labels, view, placement, page, hiddenSets }: PageLa
         const { x, y } = toPage(view, placement, page, label.at);
         // Turned words stand below what is written above them. Whole pixels keep the type sharp, and unchanged words unchanged.
         const down = fitsTurned ? length / 2 : label.dy;
-        return <Words key={label.key} x={Math.round(x + label.dx)} y={Math.round(y + down)} turned={label.turned || fitsTurned} text={label.text} look={label.onBoard ? `${COLOURS[label.colour]} ${HALO}` : COLOURS[label.colour]} />;
+        return (
+          <Words
+            key={label.key}
+            x={Math.round(x + label.dx)}
+            y={Math.round(y + down)}
+            turned={label.turned || fitsTurned}
+            text={label.text}
+            look={label.onBoard ? `${COLOURS[label.colour]} ${HALO}` : COLOURS[label.colour]}
+          />
+        );
       })}
     </g>
   );

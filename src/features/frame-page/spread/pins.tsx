@@ -14,6 +14,8 @@ export function Pins({ work, view, page }: { readonly work: FaceWork; readonly v
   ];
   return places.map(({ at, dx, dy }, i) => {
     const p = toPage(view, placement, page, placePoint(unplace(placement), at));
-    return <circle key={i} cx={p.x + dx} cy={p.y + dy} r={RADIUS_PX} className="fill-paper stroke-ink [stroke-width:1.25]" />;
+    return (
+      <circle key={i} cx={p.x + dx} cy={p.y + dy} r={RADIUS_PX} className="fill-paper stroke-ink [stroke-width:1.25]" />
+    );
   });
 }

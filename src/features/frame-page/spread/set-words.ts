@@ -41,6 +41,11 @@ export function legendOf(lineSets: readonly LineSet[], unit: Unit): LegendEntry[
     if (lineSet.cutter !== null && !sameCut) order += 1;
     before = lineSet.set;
     const several = lineSets.filter((other) => other.set === lineSet.set).length > 1;
-    return { key: lineSetKey(lineSet), order: lineSet.cutter === null ? 0 : order, words: wordsOf(lineSet, several, unit), set: lineSet.set };
+    return {
+      key: lineSetKey(lineSet),
+      order: lineSet.cutter === null ? 0 : order,
+      words: wordsOf(lineSet, several, unit),
+      set: lineSet.set,
+    };
   });
 }

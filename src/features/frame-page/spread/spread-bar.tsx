@@ -22,7 +22,8 @@ function featureWords({ contours, dados, particulars }: WorkedFrame, id: Feature
     return `${dado.part} dado ${formatLength(width, unit)} × ${formatLength(length, unit)}, ${formatLength(dado.depth, unit)} deep`;
   }
   const opening = contours.openings.find((o) => o.id === id);
-  if (opening) return `Opening ${opening.label} ${formatLength(opening.width, unit)} × ${formatLength(opening.height, unit)}`;
+  if (opening)
+    return `Opening ${opening.label} ${formatLength(opening.width, unit)} × ${formatLength(opening.height, unit)}`;
   const member = contours.members.find((m) => m.id === id);
   return member ? `${member.label} ${formatWithUnit(member.width, unit)} wide` : '';
 }
@@ -43,15 +44,19 @@ function Readout() {
         ? SELECTED_KEYS
         : ''
       : a && to
-      ? measureWords(a, to, worked.particulars.unit)
-      : measuring
-        ? 'Pick two places: click, or arrows and Enter'
-        : lit.features
-            .map((id) => featureWords(worked, id))
-            .filter(Boolean)
-            .join('; ');
+        ? measureWords(a, to, worked.particulars.unit)
+        : measuring
+          ? 'Pick two places: click, or arrows and Enter'
+          : lit.features
+              .map((id) => featureWords(worked, id))
+              .filter(Boolean)
+              .join('; ');
   return (
-    <p data-readout="" role={b ? 'status' : undefined} className="h-8 min-w-0 flex-1 basis-60 content-center overflow-hidden text-11 text-pencil max-lg:basis-full">
+    <p
+      data-readout=""
+      role={b ? 'status' : undefined}
+      className="h-8 min-w-0 flex-1 basis-60 content-center overflow-hidden text-11 text-pencil max-lg:basis-full"
+    >
       {words}
     </p>
   );
@@ -76,10 +81,14 @@ export const SpreadBar = memo(function SpreadBar() {
         <Button kind="quiet" onClick={() => desk.view.set(null)}>
           Fit F
         </Button>
-        <Button kind="quiet" aria-pressed={isSelecting} onClick={() => {
+        <Button
+          kind="quiet"
+          aria-pressed={isSelecting}
+          onClick={() => {
             toggleWalking(desk);
             focusSpread();
-          }}>
+          }}
+        >
           Openings O
         </Button>
         <Button kind="quiet" aria-pressed={isMeasuring} onClick={() => toggleMeasuring(desk)}>

@@ -1,4 +1,4 @@
-import { useLayoutEffect, useMemo, useRef } from 'react';
+import { memo, useLayoutEffect, useMemo, useRef } from 'react';
 import type { LineSet } from '#shared/kernel/line-sets/line-set.ts';
 import type { Unit } from '#shared/kernel/units/unit.ts';
 import { formatLength } from '#shared/kernel/units/format-length.ts';
@@ -21,7 +21,10 @@ function useLegend(lineSets: readonly LineSet[], unit: Unit): readonly LegendEnt
 
 function Fold({ isUpright }: { readonly isUpright: boolean }) {
   return (
-    <div aria-hidden="true" className={`relative shrink-0 border-dashed border-ink ${isUpright ? 'row-span-3 border-l' : 'border-t'}`}>
+    <div
+      aria-hidden="true"
+      className={`relative shrink-0 border-dashed border-ink ${isUpright ? 'row-span-3 border-l' : 'border-t'}`}
+    >
       <span
         className={`absolute bg-paper text-11 whitespace-nowrap ${isUpright ? 'top-1/2 left-0 -translate-x-1/2 -translate-y-1/2 rotate-180 py-2 [writing-mode:vertical-rl]' : 'top-0 left-1/2 -translate-x-1/2 -translate-y-1/2 px-2'}`}
       >
@@ -32,7 +35,7 @@ function Fold({ isUpright }: { readonly isUpright: boolean }) {
 }
 
 /** Both faces as two pages about the fold, side by side or one above the other as the board is turned. */
-export function Spread() {
+export const Spread = memo(function Spread() {
   const desk = useDesk();
   const worked = useEditor((s) => s.drawn);
   const chosen = useStore(desk.view, (value) => value);
@@ -47,7 +50,9 @@ export function Spread() {
 
   // One scale serves both pages, so that the smaller one counts.
   useLayoutEffect(() => {
-    const areas = [...(pages.current?.querySelectorAll('[data-drawing-area]') ?? [])].map((area) => area.getBoundingClientRect());
+    const areas = [...(pages.current?.querySelectorAll('[data-drawing-area]') ?? [])].map((area) =>
+      area.getBoundingClientRect(),
+    );
     const width = Math.round(Math.min(...areas.map((area) => area.width)));
     const height = Math.round(Math.min(...areas.map((area) => area.height)));
     const now = desk.page.get();
@@ -72,7 +77,16 @@ export function Spread() {
         onKeyDown={pressKey}
         className={`relative min-h-0 flex-1 focus-visible:-outline-offset-2 ${isUpright ? 'grid grid-cols-[minmax(0,1fr)_auto_minmax(0,1fr)] grid-rows-[auto_minmax(0,1fr)_auto]' : 'flex flex-col'}`}
       >
-        <FacePage face="back" worked={worked} view={view} page={page} legend={backLegend} heading="Back, cut first" aside={blank} className={pageLook} />
+        <FacePage
+          face="back"
+          worked={worked}
+          view={view}
+          page={page}
+          legend={backLegend}
+          heading="Back, cut first"
+          aside={blank}
+          className={pageLook}
+        />
         <Fold isUpright={isUpright} />
         <FacePage
           face="front"
@@ -90,4 +104,4 @@ export function Spread() {
       <SpreadBar />
     </div>
   );
-}
+});

@@ -60,7 +60,8 @@ export function useBoardPointer({ face, worked, view, page, svg }: BoardPointer)
     const others = [...down.current].filter(([id]) => id !== event.pointerId).map(([, p]) => p);
     const [other] = others;
     if (other) {
-      const ratio = Math.hypot(now.x - other.x, now.y - other.y) / Math.max(1, Math.hypot(before.x - other.x, before.y - other.y));
+      const ratio =
+        Math.hypot(now.x - other.x, now.y - other.y) / Math.max(1, Math.hypot(before.x - other.x, before.y - other.y));
       desk.view.set(zoomView(view, ratio, inFrame({ x: (now.x + other.x) / 2, y: (now.y + other.y) / 2 })));
     } else {
       desk.view.set(panView(view, placement, now.x - before.x, now.y - before.y));

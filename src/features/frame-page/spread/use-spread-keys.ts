@@ -31,7 +31,9 @@ export function useSpreadKeys() {
     const isSelecting = desk.selection.get() !== null;
     if (isSelecting && !(arrow && event.shiftKey) && pressOnSelected(desk, event.key)) return true;
     if (arrow && measuring) {
-      desk.measuring.set(stepPlace(measuring, snapPoints(worked), worked[measuring.face].placement, arrow.right, arrow.up));
+      desk.measuring.set(
+        stepPlace(measuring, snapPoints(worked), worked[measuring.face].placement, arrow.right, arrow.up),
+      );
       return true;
     }
     if (arrow) {

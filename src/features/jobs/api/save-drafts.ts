@@ -1,11 +1,16 @@
 import { useMutation, useQueryClient } from '@tanstack/react-query';
-import { draftSaved, type DraftRequest } from '#shared/contracts/frames.ts';
+import { draftSaved } from '#shared/contracts/frames.ts';
+import type { Particulars } from '#shared/kernel/particulars/particulars.ts';
 import { isCode } from '../../../lib/api-error.ts';
 import { callApi } from '../../../lib/call-api.ts';
 import { sayError } from '../../../lib/say-error.ts';
+import { asFrameRequest } from '../as-frame-request.ts';
 
-export interface DraftToSave extends DraftRequest {
+export interface DraftToSave {
   readonly frameId: string;
+  /** The one it started from. */
+  readonly version: number;
+  readonly particulars: Particulars;
 }
 
 /** What became of one draft. 'left': the person stopped before its turn. */
@@ -20,9 +25,15 @@ interface SaveDrafts {
   readonly onOutcome: (outcome: DraftOutcome) => void;
 }
 
-async function saveDraft({ frameId, ...body }: DraftToSave): Promise<DraftOutcome> {
+async function saveDraft({ frameId, version, particulars }: DraftToSave): Promise<DraftOutcome> {
   try {
-    await callApi({ method: 'PUT', path: `/api/frames/${encodeURIComponent(frameId)}/draft`, body, answer: draftSaved });
+    const body = { version, ...asFrameRequest(particulars) };
+    await callApi({
+      method: 'PUT',
+      path: `/api/frames/${encodeURIComponent(frameId)}/draft`,
+      body,
+      answer: draftSaved,
+    });
     return { frameId, became: 'saved' };
   } catch (error) {
     // The session has ended: no other draft would be saved either, and the page asks to sign in again.
@@ -42,12 +53,9 @@ export function useSaveDrafts() {
         onOutcome(stopped() ? { frameId: draft.frameId, became: 'left' } : await saveDraft(draft));
     },
     networkMode: 'always',
-    onSettled: async (_data, _error, { drafts }) => {
-      await Promise.all(
-        [['jobs'], ...drafts.map(({ frameId }) => ['frames', frameId])].map((queryKey) =>
-          client.invalidateQueries({ queryKey }),
-        ),
-      );
+    onSettled: (_data, _error, { drafts }) => {
+      for (const queryKey of [['jobs'], ...drafts.map(({ frameId }) => ['frames', frameId])])
+        void client.invalidateQueries({ queryKey });
     },
   });
 }

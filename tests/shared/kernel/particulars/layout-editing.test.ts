@@ -1,7 +1,14 @@
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
 import { addPart } from '#shared/kernel/particulars/add-part.ts';
-import { childrenOf, everyPart, openingParts, partAt, partField, replacePart } from '#shared/kernel/particulars/layout-parts.ts';
+import {
+  childrenOf,
+  everyPart,
+  openingParts,
+  partAt,
+  partField,
+  replacePart,
+} from '#shared/kernel/particulars/layout-parts.ts';
 import { nextLabel } from '#shared/kernel/particulars/next-label.ts';
 import type { LayoutPart } from '#shared/kernel/particulars/particulars.ts';
 import { readField } from '#shared/kernel/particulars/read-field.ts';
@@ -10,7 +17,10 @@ import { splitPart } from '#shared/kernel/particulars/split-part.ts';
 import { exampleFrame } from './example-frame.ts';
 
 const layout: LayoutPart = {
-  columns: [{ opening: { label: 'A', arch: 1.5 }, size: 12 }, { rows: [{ opening: { label: 'B' } }, { opening: { label: 'C' } }], between: 1.25 }],
+  columns: [
+    { opening: { label: 'A', arch: 1.5 }, size: 12 },
+    { rows: [{ opening: { label: 'B' } }, { opening: { label: 'C' } }], between: 1.25 },
+  ],
   between: 1.5,
 };
 
@@ -24,7 +34,10 @@ describe('splitPart', () => {
   });
 
   test('When an arched opening is split into columns, then both heads are arched', () => {
-    expect(childrenOf(partAt(splitPart(layout, [0], 'columns', 2), [0]))).toEqual([{ opening: { label: 'A', arch: 1.5 } }, { opening: { label: 'D', arch: 1.5 } }]);
+    expect(childrenOf(partAt(splitPart(layout, [0], 'columns', 2), [0]))).toEqual([
+      { opening: { label: 'A', arch: 1.5 } },
+      { opening: { label: 'D', arch: 1.5 } },
+    ]);
   });
 
   test('When a divided part is split, then it stands whole in the first half', () => {
@@ -53,7 +66,10 @@ describe('removePart', () => {
   });
 
   test('When only parts with fixed sizes are left, then the last of them is freed', () => {
-    const three: LayoutPart = { columns: [{ opening: {}, size: 5 }, { opening: {}, size: 6 }, { opening: {} }], between: 1 };
+    const three: LayoutPart = {
+      columns: [{ opening: {}, size: 5 }, { opening: {}, size: 6 }, { opening: {} }],
+      between: 1,
+    };
     expect(removePart(three, [2])).toEqual({ columns: [{ opening: {}, size: 5 }, { opening: {} }], between: 1 });
   });
 
@@ -70,8 +86,14 @@ describe('any layout', () => {
       part: fc.oneof(
         { maxDepth: 3 },
         fc.constant<LayoutPart>({ opening: {} }),
-        fc.record({ columns: children, between: fc.constant(1.5), size }, { requiredKeys: ['columns', 'between'] }) as fc.Arbitrary<LayoutPart>,
-        fc.record({ rows: children, between: fc.constant(1.5), size }, { requiredKeys: ['rows', 'between'] }) as fc.Arbitrary<LayoutPart>,
+        fc.record(
+          { columns: children, between: fc.constant(1.5), size },
+          { requiredKeys: ['columns', 'between'] },
+        ) as fc.Arbitrary<LayoutPart>,
+        fc.record(
+          { rows: children, between: fc.constant(1.5), size },
+          { requiredKeys: ['rows', 'between'] },
+        ) as fc.Arbitrary<LayoutPart>,
       ),
     };
   }).part;
@@ -93,13 +115,16 @@ describe('any layout', () => {
       fc.property(part, (layout) => {
         if (exampleFrame.outline.kind !== 'members') throw new Error('the example has members');
         const particulars = { ...exampleFrame, outline: { ...exampleFrame.outline, layout } };
-        for (const { path, part } of everyPart(layout)) expect(readField(particulars, partField(layout, path))).toBe(part);
+        for (const { path, part } of everyPart(layout))
+          expect(readField(particulars, partField(layout, path))).toBe(part);
       }),
     );
   });
 });
 
 test('When A to Z are taken, then the next label is AA', () => {
-  const columns = Array.from({ length: 26 }, (_, i): LayoutPart => ({ opening: { label: String.fromCharCode(65 + i) } }));
+  const columns = Array.from({ length: 26 }, (_, i): LayoutPart => ({
+    opening: { label: String.fromCharCode(65 + i) },
+  }));
   expect(nextLabel({ columns, between: 1 })).toBe('AA');
 });

@@ -15,7 +15,11 @@ describe('listChanges', () => {
   });
 
   test('When entries differ, come and go, then each is listed with what it was and is', () => {
-    const to = change(base, { thickness: 0.5, 'outline.layout.columns.0.size': 10, 'outline.layout.columns.1.opening.label': undefined });
+    const to = change(base, {
+      thickness: 0.5,
+      'outline.layout.columns.0.size': 10,
+      'outline.layout.columns.1.opening.label': undefined,
+    });
     expect(listChanges(base, to)).toEqual([
       { path: 'thickness', from: 0.75, to: 0.5 },
       { path: 'outline.layout.columns.0.size', from: undefined, to: 10 },
@@ -31,13 +35,24 @@ describe('listChanges', () => {
 
 describe('mergeParticulars', () => {
   test('When two people change other entries, then both changes stand', () => {
-    const merged = mergeParticulars(base, change(base, { 'outline.width': 34 }), change(base, { 'outline.height': 40 }));
+    const merged = mergeParticulars(
+      base,
+      change(base, { 'outline.width': 34 }),
+      change(base, { 'outline.height': 40 }),
+    );
     expect(merged).toEqual({ particulars: change(base, { 'outline.width': 34, 'outline.height': 40 }), leftOut: [] });
   });
 
   test('When both change one entry, then theirs stands and mine is named as left out', () => {
-    const merged = mergeParticulars(base, change(base, { 'outline.width': 34, thickness: 0.5 }), change(base, { 'outline.width': 35 }));
-    expect(merged).toEqual({ particulars: change(base, { 'outline.width': 35, thickness: 0.5 }), leftOut: ['outline.width'] });
+    const merged = mergeParticulars(
+      base,
+      change(base, { 'outline.width': 34, thickness: 0.5 }),
+      change(base, { 'outline.width': 35 }),
+    );
+    expect(merged).toEqual({
+      particulars: change(base, { 'outline.width': 35, thickness: 0.5 }),
+      leftOut: ['outline.width'],
+    });
   });
 
   test('When both change one entry alike, then nothing is left out', () => {

@@ -26,10 +26,17 @@ describe('setField', () => {
     const sized = setField(exampleFrame, 'outline.layout.columns.0.size', 12);
     expect(readField(sized, 'outline.layout.columns.0.size')).toBe(12);
     expect(setField(sized, 'outline.layout.columns.0.size', undefined)).toEqual(exampleFrame);
-    expect(Object.keys(readField(setField(sized, 'outline.layout.columns.0.size', undefined), 'outline.layout.columns.0') as object)).toEqual(['opening']);
+    expect(
+      Object.keys(
+        readField(setField(sized, 'outline.layout.columns.0.size', undefined), 'outline.layout.columns.0') as object,
+      ),
+    ).toEqual(['opening']);
   });
 
-  test.each(['dados.0.depth', 'outline.layout.rows.0', 'blank.width', 'outline.layout.columns.x'])('When the path %s leads nowhere, then it throws and names it', (path) => {
-    expect(() => setField(exampleFrame, path, 1)).toThrow(path);
-  });
+  test.each(['dados.0.depth', 'outline.layout.rows.0', 'blank.width', 'outline.layout.columns.x'])(
+    'When the path %s leads nowhere, then it throws and names it',
+    (path) => {
+      expect(() => setField(exampleFrame, path, 1)).toThrow(path);
+    },
+  );
 });

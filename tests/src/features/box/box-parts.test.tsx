@@ -7,22 +7,23 @@ import { BoxPartsDialog } from '../../../../src/features/box/box-parts-dialog.ts
 import { show } from '../../show.tsx';
 
 const FRAME = newFrame('in', 'B33 two-door base');
-/** The whole text at once: what each keystroke does is the length field's own test. */
+/** Types the whole text and leaves the field: what each keystroke does is the length field's own test. */
 function enter(input: HTMLElement, value: string) {
   fireEvent.change(input, { target: { value } });
+  fireEvent.blur(input);
 }
 const row = (name: RegExp) => within(screen.getByRole('row', { name }));
 
 describe('BoxPartsDialog', () => {
-  it('When the depth of the box is not given, then it says so, and with it the size has its growth', async () => {
-    const { user } = show(<BoxPartsDialog particulars={FRAME} onClose={() => undefined} />);
+  it('When the depth of the box is not given, then it says so, and with it the size has its growth', () => {
+    show(<BoxPartsDialog particulars={FRAME} onClose={() => undefined} />);
     expect(row(/^Left end/).getByText('depth not given')).toBeTruthy();
     enter(screen.getByLabelText('Depth of the box'), '20');
     expect(row(/^Left end/).getByText('20 1/4')).toBeTruthy();
   });
 
-  it('When dados run out through the edge, then the overhang there is asked for and taken off', async () => {
-    const { user } = show(<BoxPartsDialog particulars={FRAME} onClose={() => undefined} />);
+  it('When dados run out through the edge, then the overhang there is asked for and taken off', () => {
+    show(<BoxPartsDialog particulars={FRAME} onClose={() => undefined} />);
     expect(row(/^Left end/).getByText('30 1/2')).toBeTruthy();
     enter(screen.getByLabelText('Overhang at the bottom'), '1/2');
     expect(row(/^Left end/).getByText('30')).toBeTruthy();

@@ -40,7 +40,8 @@ describe('When the workshop is asked for a slice', () => {
 
   test('then through the dado it shows the board less its depth', () => {
     const { positions } = slice(0.6);
-    const zs = new Set(Array.from({ length: positions.length / 3 }, (_, i) => positions[3 * i + 2]!.toFixed(6)));
+    const points = Array.from({ length: positions.length / 3 }, (_, i) => ({ y: positions[3 * i + 1]!, z: positions[3 * i + 2]! }));
+    const zs = new Set(points.filter(({ y }) => y > 0 && y < 8).map(({ z }) => z.toFixed(6)));
     expect([...zs].sort()).toEqual(['-0.500000', '0.000000']);
   });
 

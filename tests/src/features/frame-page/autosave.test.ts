@@ -10,13 +10,21 @@ const wide = (width: number): Particulars => setField(base, 'outline.width', wid
 
 /** A server whose answers are given one by one. */
 function setUp() {
-  const calls: { draft: { version: number; particulars: Particulars }; answer: (version: number) => void; refuse: (failure: SaveFailure) => void }[] = [];
+  const calls: {
+    draft: { version: number; particulars: Particulars };
+    answer: (version: number) => void;
+    refuse: (failure: SaveFailure) => void;
+  }[] = [];
   const autosave = createAutosave({
     version: 1,
     saved: base,
     save: (draft) =>
       new Promise((resolve, reject) => {
-        calls.push({ draft, answer: (version) => resolve({ version }), refuse: (failure) => reject(failure as unknown as Error) });
+        calls.push({
+          draft,
+          answer: (version) => resolve({ version }),
+          refuse: (failure) => reject(failure as unknown as Error),
+        });
       }),
     judge: (error) => error as SaveFailure,
   });

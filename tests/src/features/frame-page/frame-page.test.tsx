@@ -30,17 +30,38 @@ const aStoredFrame = (changes: Partial<Frame> = {}): Frame => ({
 
 function showFrame(changes: Partial<Frame> = {}, may = { mayEdit: true, mayRelease: true }) {
   const profiles = BUILTIN_PROFILES.map((stored) => ({ ...stored, builtIn: true }));
-  return show(<FramePage renderCutPart={() => null} frame={aStoredFrame(changes)} profiles={profiles} defaultProfileId="r2007" drawer={[]} shopName="Tern & Alder Joinery" {...may} />);
+  return show(
+    <FramePage
+      renderCutPart={() => null}
+      frame={aStoredFrame(changes)}
+      profiles={profiles}
+      defaultProfileId="r2007"
+      drawer={[]}
+      savedEdges={[]}
+      shopName="Tern & Alder Joinery"
+      {...may}
+    />,
+  );
 }
 
-const entry = (path: string): HTMLInputElement => document.querySelector<HTMLInputElement>(`input[data-entry="${path}"]`)!;
+const entry = (path: string): HTMLInputElement =>
+  document.querySelector<HTMLInputElement>(`input[data-entry="${path}"]`)!;
 const drawing = (face: 'back' | 'front'): Element => document.querySelector(`svg[data-face="${face}"]`)!;
-const pathsOf = (face: 'back' | 'front'): string[] => [...drawing(face).querySelectorAll('path')].map((path) => path.getAttribute('d') ?? '');
-const litOn = (face: 'back' | 'front'): (string | null)[] => [...drawing(face).querySelectorAll('[data-lit]')].map((path) => path.getAttribute('data-lit'));
+const pathsOf = (face: 'back' | 'front'): string[] =>
+  [...drawing(face).querySelectorAll('path')].map((path) => path.getAttribute('d') ?? '');
+const litOn = (face: 'back' | 'front'): (string | null)[] =>
+  [...drawing(face).querySelectorAll('[data-lit]')].map((path) => path.getAttribute('data-lit'));
 
 beforeEach(() => {
   localStorage.clear();
-  vi.stubGlobal('ResizeObserver', class { observe() {} unobserve() {} disconnect() {} });
+  vi.stubGlobal(
+    'ResizeObserver',
+    class {
+      observe() {}
+      unobserve() {}
+      disconnect() {}
+    },
+  );
   // jsdom has no layout, and so no scrolling into sight.
   Element.prototype.scrollIntoView = () => undefined;
   Element.prototype.getBoundingClientRect = () => new DOMRect(0, 0, PAGE.width, PAGE.height);
@@ -50,7 +71,11 @@ beforeEach(() => {
 });
 
 const savesTo = (answer: (body: { version: number; particulars: Particulars }) => Response) =>
-  answerCalls((call) => (call.method === 'PUT' && call.path === '/api/frames/f1/draft' ? answer(call.body as { version: number; particulars: Particulars }) : undefined));
+  answerCalls((call) =>
+    call.method === 'PUT' && call.path === '/api/frames/f1/draft'
+      ? answer(call.body as { version: number; particulars: Particulars })
+      : undefined,
+  );
 
 describe('frame page: entries', () => {
   test('When a size is typed, then both faces are drawn anew at once, as the kernel works the frame out', () => {
@@ -106,11 +131,27 @@ describe('frame page: entries', () => {
       await user.keyboard('{Enter}');
       order.push((document.activeElement as HTMLElement).dataset.entry);
     }
-    expect(order).toEqual(['outline.height', 'thickness', 'outline.stiles.left', 'outline.stiles.right', 'outline.rails.top', 'outline.rails.bottom', 'outline.feet', 'outline.layout.between']);
+    expect(order).toEqual([
+      'outline.height',
+      'thickness',
+      'outline.stiles.left',
+      'outline.stiles.right',
+      'outline.rails.top',
+      'outline.rails.bottom',
+      'outline.feet',
+      'outline.layout.between',
+    ]);
   });
 
   test('When a person may only read, then entries cannot be typed in and nothing offers to change them', () => {
-    showFrame({ revisions: [{ letter: 'B', note: '', author: 'Ada Fell', releasedAt: '2026-05-04T10:00:00.000Z', sha256: '0'.repeat(64) }] }, { mayEdit: false, mayRelease: false });
+    showFrame(
+      {
+        revisions: [
+          { letter: 'B', note: '', author: 'Ada Fell', releasedAt: '2026-05-04T10:00:00.000Z', sha256: '0'.repeat(64) },
+        ],
+      },
+      { mayEdit: false, mayRelease: false },
+    );
     expect(entry('outline.width').readOnly).toBe(true);
     expect(screen.queryByText('Undo')).toBeNull();
     expect(screen.queryByText('Add a dado')).toBeNull();
@@ -124,7 +165,11 @@ describe('frame page: openings and joints', () => {
     const opening = entry('outline.layout.columns.0.opening.label').closest('div.border-b') as HTMLElement;
     within(opening).getByText('Into rows').focus();
     await user.keyboard('{Enter}');
-    await waitFor(() => expect((document.activeElement as HTMLElement).dataset.entry).toBe('outline.layout.columns.0.rows.1.opening.label'));
+    await waitFor(() =>
+      expect((document.activeElement as HTMLElement).dataset.entry).toBe(
+        'outline.layout.columns.0.rows.1.opening.label',
+      ),
+    );
     expect(entry('outline.layout.columns.0.rows.1.opening.label').value).toBe('C');
     expect(entry('outline.layout.columns.0.rows.0.opening.label').value).toBe('A');
     await user.keyboard('{Control>}z{/Control}');
@@ -143,7 +188,13 @@ describe('frame page: openings and joints', () => {
   });
 
   test('When the outline is traced, then its extents and openings are shown to read', () => {
-    const square = (a: number, b: number) => [[a, a], [b, a], [b, b], [a, b]] as [number, number][];
+    const square = (a: number, b: number) =>
+      [
+        [a, a],
+        [b, a],
+        [b, b],
+        [a, b],
+      ] as [number, number][];
     const outline = { kind: 'traced' as const, perimeter: square(0, 20), openings: [square(3, 17)] };
     showFrame({ particulars: { ...workedExample({ dados: [dado({ to: 20 })] }), outline } as Frame['particulars'] });
     expect(screen.getByText(/Traced outline/).textContent).toBe('Traced outline, 20 × 20');
@@ -163,13 +214,16 @@ describe('frame page: spread', () => {
     fireEvent(drawing(face), new MouseEvent('pointermove', { bubbles: true, clientX, clientY }));
   }
 
-  test.each(['back', 'front'] as const)('When a dado is pointed at on the %s, then the same one lights up on both faces', (face) => {
-    showFrame();
-    // In the dado of the left end, where the left stile lies over it.
-    pointAt(face, 0.6, 15);
-    expect(litOn('back')).toEqual(['dado-0', 'stile-left']);
-    expect(litOn('front')).toEqual(['dado-0', 'stile-left']);
-  });
+  test.each(['back', 'front'] as const)(
+    'When a dado is pointed at on the %s, then the same one lights up on both faces',
+    (face) => {
+      showFrame();
+      // In the dado of the left end, where the left stile lies over it.
+      pointAt(face, 0.6, 15);
+      expect(litOn('back')).toEqual(['dado-0', 'stile-left']);
+      expect(litOn('front')).toEqual(['dado-0', 'stile-left']);
+    },
+  );
 
   test('When an opening is pointed at, then it lights up on both faces, and nothing does once the pointer has left', () => {
     showFrame();
@@ -209,12 +263,15 @@ describe('frame page: spread', () => {
     document.querySelector<HTMLElement>('[aria-label^="Spread"]')!.focus();
     // Begins at the lower left corner of the frame; the next corner to the right is that of opening A, 1 3/4 along and 1 1/4 up.
     await user.keyboard('m{ArrowRight}{Enter}{ArrowUp}{Enter}');
-    expect(document.querySelector('[data-readout]')!.textContent).toMatch(/^Distance .* in \(.* mm\); across .* in \(.* mm\); up .* in \(.* mm\)$/);
+    expect(document.querySelector('[data-readout]')!.textContent).toMatch(
+      /^Distance .* in \(.* mm\); across .* in \(.* mm\); up .* in \(.* mm\)$/,
+    );
   });
 
   test('When somebody cannot see the drawing, then each face is told in words', () => {
     showFrame();
-    const words = (face: 'back' | 'front') => document.getElementById(drawing(face).getAttribute('aria-describedby')!)!.textContent;
+    const words = (face: 'back' | 'front') =>
+      document.getElementById(drawing(face).getAttribute('aria-describedby')!)!.textContent;
     // Back setup of the worked example, spec 2: Left end at x 33.245 to 34.005, squared edges right and bottom.
     expect(words('back')).toContain('Left end, 1/4 deep, from 33.245 to 34.005 across');
     expect(words('back')).toContain('Squared edges: right and bottom.');
@@ -246,7 +303,9 @@ describe('frame page: saving', () => {
     fireEvent.change(entry('outline.width'), { target: { value: '34' } });
     expect(screen.getByText('saving')).toBeTruthy();
     await screen.findByText('saved', {}, { timeout: 3000 });
-    expect(seen.map((call) => call.body)).toEqual([{ version: 4, particulars: setField(workedExample(), 'outline.width', 34) }]);
+    expect(seen.map((call) => call.body)).toEqual([
+      { version: 4, particulars: setField(workedExample(), 'outline.width', 34) },
+    ]);
   });
 
   test('When somebody else saved meanwhile, then both changes are shown, and keeping mine where theirs changed nothing keeps both', async () => {
@@ -255,12 +314,27 @@ describe('frame page: saving', () => {
     const seen = savesTo((body) =>
       body.version === version
         ? json({ version: ++version, changedAt: '2026-05-04T10:01:00.000Z', draftChanged: true })
-        : json({ code: 'stale-draft', message: 'stale', details: { version, particulars: theirs, changedBy: 'Ben Ousel', changedAt: '2026-05-04T10:00:30.000Z', changes: [] } }, 409),
+        : json(
+            {
+              code: 'stale-draft',
+              message: 'stale',
+              details: {
+                version,
+                particulars: theirs,
+                changedBy: 'Ben Ousel',
+                changedAt: '2026-05-04T10:00:30.000Z',
+                changes: [],
+              },
+            },
+            409,
+          ),
     );
     const { user } = showFrame();
     fireEvent.change(entry('outline.width'), { target: { value: '34' } });
     const dialog = await screen.findByRole('dialog', {}, { timeout: 3000 });
-    const cells = within(dialog).getAllByRole('row').map((row) => [...row.children].map((cell) => cell.textContent));
+    const cells = within(dialog)
+      .getAllByRole('row')
+      .map((row) => [...row.children].map((cell) => cell.textContent));
     expect(cells).toEqual([
       ['Entry', 'Was', 'Yours', 'Theirs'],
       ['Width', '33', '34', 'as it was'],
@@ -277,7 +351,10 @@ describe('frame page: saving', () => {
 
   test('When work did not reach the server last time, then it is offered, and taken up it is one step that undo takes back', async () => {
     const mine = setField(workedExample(), 'outline.width', 36);
-    localStorage.setItem('stilepost.unsaved.f1', JSON.stringify({ version: 4, base: workedExample(), mine, at: '2026-05-04T09:00:00.000Z' }));
+    localStorage.setItem(
+      'stilepost.unsaved.f1',
+      JSON.stringify({ version: 4, base: workedExample(), mine, at: '2026-05-04T09:00:00.000Z' }),
+    );
     savesTo(() => json({ version: 5, changedAt: '2026-05-04T10:01:00.000Z', draftChanged: true }));
     const { user } = showFrame();
     expect(entry('outline.width').value).toBe('33');
@@ -292,10 +369,15 @@ describe('frame page: saving', () => {
 describe('frame page: frame files', () => {
   test('When a frame file with mistakes is imported, then each is named and the frame stays as it was', async () => {
     const { user } = showFrame();
-    const file = new File([JSON.stringify({ ...workedExample(), thickness: 'thick', colour: 'red' })], 'kitchen.frame.json');
+    const file = new File(
+      [JSON.stringify({ ...workedExample(), thickness: 'thick', colour: 'red' })],
+      'kitchen.frame.json',
+    );
     await user.upload(screen.getByLabelText('Frame file to import'), file);
     const dialog = await screen.findByRole('dialog');
-    expect(within(dialog).getByText('thickness').closest('li')!.textContent).toContain('got "thick", takes a length above 0');
+    expect(within(dialog).getByText('thickness').closest('li')!.textContent).toContain(
+      'got "thick", takes a length above 0',
+    );
     expect(within(dialog).getByText('colour')).toBeTruthy();
     expect(entry('thickness').value).toBe('3/4');
   });

@@ -1,7 +1,14 @@
 import { describe, expect, test } from 'vitest';
 import { newFrame } from '#shared/kernel/particulars/new-frame.ts';
 import { setField } from '#shared/kernel/particulars/set-field.ts';
-import { closeEntry, record, redo, startHistory, undo, type History } from '../../../../src/features/frame-page/model/history.ts';
+import {
+  closeEntry,
+  record,
+  redo,
+  startHistory,
+  undo,
+  type History,
+} from '../../../../src/features/frame-page/model/history.ts';
 
 const start = newFrame('in', 'Base');
 const type = (history: History, path: string, ...values: number[]): History =>
@@ -34,7 +41,11 @@ describe('history of a frame', () => {
   });
 
   test('When typing goes on right after an undo, then it does not join the step before', () => {
-    const again = type(undo(type(closeEntry(type(startHistory(start), 'outline.width', 36)), 'outline.width', 40)), 'outline.width', 41);
+    const again = type(
+      undo(type(closeEntry(type(startHistory(start), 'outline.width', 36)), 'outline.width', 40)),
+      'outline.width',
+      41,
+    );
     expect(undo(again).present.outline).toMatchObject({ width: 36 });
   });
 
@@ -47,7 +58,8 @@ describe('history of a frame', () => {
 
   test('When more steps are made than are kept, then the oldest ones go and undo still works', () => {
     let history = startHistory(start);
-    for (let i = 0; i < 400; i += 1) history = record(history, setField(history.present, 'thickness', 0.5 + i / 1000), `step ${i}`);
+    for (let i = 0; i < 400; i += 1)
+      history = record(history, setField(history.present, 'thickness', 0.5 + i / 1000), `step ${i}`);
     expect(history.past).toHaveLength(300);
     expect(undo(history).present.thickness).toBe(0.5 + 398 / 1000);
   });

@@ -1,7 +1,13 @@
 import { beforeEach, describe, expect, test } from 'vitest';
 import { newFrame } from '#shared/kernel/particulars/new-frame.ts';
 import { setField } from '#shared/kernel/particulars/set-field.ts';
-import { dropCopy, dropEarlierCopy, findEarlierCopy, keepCopy, type UnsavedCopy } from '../../../../src/features/frame-page/model/unsaved-copy.ts';
+import {
+  dropCopy,
+  dropEarlierCopy,
+  findEarlierCopy,
+  keepCopy,
+  type UnsavedCopy,
+} from '../../../../src/features/frame-page/model/unsaved-copy.ts';
 
 const base = newFrame('in', 'Base');
 const copy: UnsavedCopy = { version: 3, base, mine: setField(base, 'thickness', 0.7), at: '2026-05-04T10:00:00.000Z' };
@@ -27,14 +33,21 @@ describe('unsaved copy', () => {
     expect(findEarlierCopy(localStorage, 'one')).toBeNull();
   });
 
-  test.each(['not JSON', '{"version":1}'])('When what was kept cannot be read (%s), then there is none and it is dropped', (text) => {
-    localStorage.setItem('stilepost.unsaved.one', text);
-    expect(findEarlierCopy(localStorage, 'one')).toBeNull();
-    expect(localStorage).toHaveLength(0);
-  });
+  test.each(['not JSON', '{"version":1}'])(
+    'When what was kept cannot be read (%s), then there is none and it is dropped',
+    (text) => {
+      localStorage.setItem('stilepost.unsaved.one', text);
+      expect(findEarlierCopy(localStorage, 'one')).toBeNull();
+      expect(localStorage).toHaveLength(0);
+    },
+  );
 
   test('When the browser refuses to keep it, then that is answered', () => {
-    const full = { setItem: () => { throw new DOMException('full', 'QuotaExceededError'); } } as unknown as Storage;
+    const full = {
+      setItem: () => {
+        throw new DOMException('full', 'QuotaExceededError');
+      },
+    } as unknown as Storage;
     expect(keepCopy(full, 'one', copy)).toBe(false);
   });
 });

@@ -5,40 +5,64 @@ import { setField } from '#shared/kernel/particulars/set-field.ts';
 import { workFrame } from '#shared/kernel/work-frame.ts';
 import { hitTest } from '../../../../src/features/frame-page/model/hit-test.ts';
 import { nearestPoint, nextPoint, snapPoints } from '../../../../src/features/frame-page/model/snap-points.ts';
-import { boardInFrameView, fitTo, fromPage, panView, setupTransform, toPage, zoomView } from '../../../../src/features/frame-page/model/view.ts';
+import {
+  boardInFrameView,
+  fitTo,
+  fromPage,
+  panView,
+  setupTransform,
+  toPage,
+  zoomView,
+} from '../../../../src/features/frame-page/model/view.ts';
 
 const page = { width: 400, height: 300 };
-const frames = (['side-to-side', 'end-over-end'] as const).map((flip) => workFrame(setField(newFrame('in', 'Base'), 'setup.flip', flip)));
-const faces = frames.flatMap((worked) => [worked.back, worked.front].map((work) => ({ worked, work, name: `${worked.blank.flip}, ${work.face}` })));
+const frames = (['side-to-side', 'end-over-end'] as const).map((flip) =>
+  workFrame(setField(newFrame('in', 'Base'), 'setup.flip', flip)),
+);
+const faces = frames.flatMap((worked) =>
+  [worked.back, worked.front].map((work) => ({ worked, work, name: `${worked.blank.flip}, ${work.face}` })),
+);
 
 describe('view of the spread', () => {
   test.each(faces)('When a place goes to the page and back ($name), then it is the same place', ({ worked, work }) => {
     const view = fitTo(boardInFrameView(worked), page);
     fc.assert(
-      fc.property(fc.double({ min: -50, max: 50, noNaN: true }), fc.double({ min: -50, max: 50, noNaN: true }), (x, y) => {
-        const back = fromPage(view, work.placement, page, toPage(view, work.placement, page, { x, y }));
-        expect(back.x).toBeCloseTo(x, 9);
-        expect(back.y).toBeCloseTo(y, 9);
-      }),
+      fc.property(
+        fc.double({ min: -50, max: 50, noNaN: true }),
+        fc.double({ min: -50, max: 50, noNaN: true }),
+        (x, y) => {
+          const back = fromPage(view, work.placement, page, toPage(view, work.placement, page, { x, y }));
+          expect(back.x).toBeCloseTo(x, 9);
+          expect(back.y).toBeCloseTo(y, 9);
+        },
+      ),
     );
   });
 
   test.each(faces)('When the board is fitted ($name), then the whole of it is on the page', ({ worked, work }) => {
     const view = fitTo(boardInFrameView(worked), page);
-    const [scale, , , , e, f] = /matrix\((.*)\)/.exec(setupTransform(view, work.placement, page))![1]!.split(' ').map(Number) as [number, number, number, number, number, number];
-    const corners = [work.board.minX, work.board.maxX].map((x) => scale * x + e).concat([work.board.minY, work.board.maxY].map((y) => f - scale * y));
+    const [scale, , , , e, f] = /matrix\((.*)\)/
+      .exec(setupTransform(view, work.placement, page))![1]!
+      .split(' ')
+      .map(Number) as [number, number, number, number, number, number];
+    const corners = [work.board.minX, work.board.maxX]
+      .map((x) => scale * x + e)
+      .concat([work.board.minY, work.board.maxY].map((y) => f - scale * y));
     for (const x of corners.slice(0, 2)) expect(x > 0 && x < page.width).toBe(true);
     for (const y of corners.slice(2)) expect(y > 0 && y < page.height).toBe(true);
   });
 
-  test.each(faces)('When it zooms about a place ($name), then that place stays where it is on the page', ({ worked, work }) => {
-    const view = fitTo(boardInFrameView(worked), page);
-    const place = { x: 3, y: 7 };
-    const before = toPage(view, work.placement, page, place);
-    const after = toPage(zoomView(view, 2.5, place), work.placement, page, place);
-    expect(after.x).toBeCloseTo(before.x, 9);
-    expect(after.y).toBeCloseTo(before.y, 9);
-  });
+  test.each(faces)(
+    'When it zooms about a place ($name), then that place stays where it is on the page',
+    ({ worked, work }) => {
+      const view = fitTo(boardInFrameView(worked), page);
+      const place = { x: 3, y: 7 };
+      const before = toPage(view, work.placement, page, place);
+      const after = toPage(zoomView(view, 2.5, place), work.placement, page, place);
+      expect(after.x).toBeCloseTo(before.x, 9);
+      expect(after.y).toBeCloseTo(before.y, 9);
+    },
+  );
 
   test.each(faces)('When the board is dragged ($name), then it follows the pointer', ({ worked, work }) => {
     const view = fitTo(boardInFrameView(worked), page);
@@ -64,7 +88,10 @@ describe('pointing', () => {
 
   test('When a place lies in an opening, a member or a dado, then that is found', () => {
     for (const opening of worked.contours.openings) {
-      const middle = { x: (opening.extents.minX + opening.extents.maxX) / 2, y: (opening.extents.minY + opening.extents.maxY) / 2 };
+      const middle = {
+        x: (opening.extents.minX + opening.extents.maxX) / 2,
+        y: (opening.extents.minY + opening.extents.maxY) / 2,
+      };
       expect(hitTest(worked, middle, 0)).toContain(opening.id);
     }
     for (const dado of worked.dados) {
@@ -76,7 +103,10 @@ describe('pointing', () => {
 
   test('When a place is near a corner, then measuring catches the corner; when far, nothing', () => {
     const points = snapPoints(worked);
-    expect(nearestPoint(points, { x: worked.contours.width + 0.01, y: -0.01 }, 0.1)).toEqual({ x: worked.contours.width, y: 0 });
+    expect(nearestPoint(points, { x: worked.contours.width + 0.01, y: -0.01 }, 0.1)).toEqual({
+      x: worked.contours.width,
+      y: 0,
+    });
     expect(nearestPoint(points, { x: -30, y: -30 }, 0.1)).toBeNull();
   });
 
