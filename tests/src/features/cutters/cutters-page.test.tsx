@@ -4,8 +4,11 @@ import type { StoredCutter } from '#shared/contracts/cutters.ts';
 import { newFrame } from '#shared/kernel/particulars/new-frame.ts';
 import type { Particulars } from '#shared/kernel/particulars/particulars.ts';
 import { CuttersPage } from '../../../../src/features/cutters/cutters-page.tsx';
+import { allowSlowMachine } from '../../../setup/slow-machine.ts';
 import { answerCalls, json } from '../../answer-calls.ts';
 import { show } from '../../show.tsx';
+
+allowSlowMachine();
 
 const STRAIGHT: StoredCutter = {
   id: 's',

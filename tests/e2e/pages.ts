@@ -1,0 +1,44 @@
+import type { Page } from '@playwright/test';
+import { expect } from './watched-test.ts';
+import { openDemo } from './steps.ts';
+
+/** Every page by its path in src/app/router.tsx; tests/architecture/pages.test.ts sees to it that none is left out. */
+export const OPEN_PAGES = ['sign-in', 'sign-up', '*'];
+export const SHOP_PAGES = [
+  'jobs',
+  'jobs/:jobId',
+  'jobs/:jobId/box',
+  'frames/:frameId',
+  'frames/:frameId/sheet',
+  'cutters',
+  'profiles',
+  'shop',
+];
+
+/** Ids of the demo's job and of its first frame. */
+export interface DemoIds {
+  readonly jobId: string;
+  readonly frameId: string;
+}
+
+/** Opens the demo shop and finds the ids by following its links. */
+export async function demoIds(page: Page): Promise<DemoIds> {
+  await openDemo(page);
+  await page.getByRole('link', { name: 'Fenwick Lane kitchen' }).first().click();
+  await expect(page).toHaveURL(/\/jobs\/[^/]+$/);
+  const jobId = new URL(page.url()).pathname.split('/')[2]!;
+  const link = page.locator('table a[href^="/frames/"]').first();
+  const frameId = (await link.getAttribute('href'))!.split('/')[2]!;
+  return { jobId, frameId };
+}
+
+/** Goes to a page and waits until it has what it shows. */
+export async function visit(page: Page, path: string, ids: DemoIds = { jobId: '', frameId: '' }): Promise<void> {
+  const address = path.replace('*', 'no-such-page').replace(':jobId', ids.jobId).replace(':frameId', ids.frameId);
+  await page.goto(`/${address}`);
+  await expect(page.getByRole('heading').first()).toBeVisible();
+  await page.waitForLoadState('networkidle');
+}
+
+/** A file name for a page. */
+export const pageName = (path: string): string => path.replace('*', 'not-found').replace(/[/:]+/g, '-');
