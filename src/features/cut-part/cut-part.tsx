@@ -53,7 +53,7 @@ export function CutPart({ worked, profile = BUILTIN_PROFILES[0]!.profile }: CutP
 
   return (
     <div className="flex min-h-0 flex-1 flex-col gap-4 roomy:flex-row">
-      <div className="flex min-w-0 flex-1 flex-col gap-1.5">
+      <div className="relative flex min-h-0 min-w-0 flex-1 flex-col gap-1.5">
         <div className="flex flex-wrap items-center gap-x-6 gap-y-1">
           <div className="w-56">
             <Choice label="Seen from" hideLabel options={faces} value={view.shown} onValue={view.show} />
@@ -69,7 +69,7 @@ export function CutPart({ worked, profile = BUILTIN_PROFILES[0]!.profile }: CutP
         </div>
         {isSolid ? <SolidPicture {...shared} onLost={() => setIsSolid(false)} /> : <FlatPicture {...shared} />}
       </div>
-      <div className="w-full shrink-0 overflow-y-auto roomy:w-72">
+      <div className="relative w-full shrink-0 overflow-y-auto roomy:w-72">
         <Section heading="Steps" aside={`${done} of ${steps.length}`} level={3}>
           <StepList steps={steps} colours={colours} done={done} onDone={view.setDone} />
         </Section>

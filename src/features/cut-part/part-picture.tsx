@@ -54,6 +54,8 @@ function PictureNews({ asked, stop, again }: { readonly asked: Asked<unknown>; r
   );
 }
 
+/** Room for two lines, so that the picture keeps its size from step to step. */
+const STATUS_LOOK = 'min-h-9 text-12';
 const KEYS = 'Arrows turn, with Shift they move; + and − zoom, 0 holds as at first, Enter looks closer at the middle.';
 
 /** The part in three dimensions. */
@@ -97,7 +99,7 @@ export function SolidPicture({ client, files, view, colours, tokens, onLost }: P
       <p id={`${id}-keys`} className="text-11 text-pencil">
         Drag to turn, with Shift or the right button to move, wheel or two fingers to zoom, double-click to look closer. {KEYS}
       </p>
-      <p role="status" className="text-12">
+      <p role="status" className={STATUS_LOOK}>
         {stepSentence({ steps, done, facts, unit })}
         {picture.answer && ` Worked out every ${formatWithUnit(picture.answer.cell, unit)}.`}
       </p>
@@ -126,7 +128,7 @@ export function FlatPicture({ client, files, view, colours, tokens }: PartPictur
       <p id={`${id}-says`} className="sr-only">
         {describePart({ steps, done, place, shown: face, plane: null, facts, unit })}
       </p>
-      <p role="status" className="text-12">
+      <p role="status" className={STATUS_LOOK}>
         {stepSentence({ steps, done, facts, unit })}
       </p>
     </>

@@ -38,4 +38,5 @@ export const NO_LENGTH: readonly NumberEntry[] = ['number', 'includedAngle', 'si
 const isNumberEntry = (entry: string): entry is NumberEntry => entry in NUMBER_WORDS;
 
 /** Name of an entry that was changed, as draftsTouched tells it. */
-export const changeWords = (entry: string): string => (isNumberEntry(entry) ? NUMBER_WORDS[entry].toLowerCase() : entry);
+export const changeWords = (entry: string): string =>
+  isNumberEntry(entry) ? NUMBER_WORDS[entry].toLowerCase() : entry;

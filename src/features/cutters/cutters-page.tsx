@@ -41,7 +41,8 @@ export function CuttersPage({ cutters, shopName, unit, mayEdit, mayEditFrames }:
   const failed = remove.error ?? putBack.error;
   const isRemoved = done?.answer.cutter === null;
 
-  const take = (before: StoredCutter) => remove.mutate(before.id, { onSuccess: (answer) => setDone({ before, answer }) });
+  const take = (before: StoredCutter) =>
+    remove.mutate(before.id, { onSuccess: (answer) => setDone({ before, answer }) });
   const undo = ({ before: { unit: its, cutter, remarks } }: Done) =>
     putBack.mutate({ unit: its, cutter, remarks }, { onSuccess: () => setDone(null) });
   const openNew = () => setEditing({ stored: null });

@@ -17,8 +17,7 @@ interface NoCuttersProps {
 export function NoCutters({ unit, mayEdit, onNew }: NoCuttersProps) {
   const take = useImportCutters();
   const file = () => new File([writeCuttersCsv(startingCutters(unit))], 'common-sizes.csv', { type: 'text/csv' });
-  if (!mayEdit)
-    return <Empty title="The drawer is empty">Programmers and the owner put cutters into it.</Empty>;
+  if (!mayEdit) return <Empty title="The drawer is empty">Programmers and the owner put cutters into it.</Empty>;
   return (
     <>
       {take.isError && (

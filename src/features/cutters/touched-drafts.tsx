@@ -66,7 +66,10 @@ export function TouchedDrafts({ before, answer, mayEditFrames }: TouchedDraftsPr
       <ul className="mt-1">
         {drafts.map(({ frameId, frameName, jobName, roles }) => (
           <li key={frameId}>
-            <Link to={`/frames/${frameId}`} className="underline decoration-rule underline-offset-4 hover:decoration-ink">
+            <Link
+              to={`/frames/${frameId}`}
+              className="underline decoration-rule underline-offset-4 hover:decoration-ink"
+            >
               {frameName}
             </Link>
             , {jobName}: {roles.map((role) => ROLE_WORDS[role]).join(', ')}

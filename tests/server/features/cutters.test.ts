@@ -47,17 +47,24 @@ describe('The cutter drawer', () => {
   it.each([
     ['in', 'Straight 3/8', 0.375],
     ['mm', 'Straight 10', 10],
-  ] as const)('When a shop in %s is new, then its drawer holds common sizes of that unit', async (unit, name, diameter) => {
-    const { visitor: fresh } = await openShop(server, { unit });
-    const cutters = await list(fresh);
-    expect(new Set(cutters.map((c) => c.unit))).toEqual(new Set([unit]));
-    expect(new Set(cutters.map((c) => c.cutter.kind))).toEqual(new Set(['straight', 'tapered', 'vee', 'beading']));
-    expect(cutters.find((c) => c.cutter.name === name)?.cutter).toMatchObject({ kind: 'straight', diameter });
-  });
+  ] as const)(
+    'When a shop in %s is new, then its drawer holds common sizes of that unit',
+    async (unit, name, diameter) => {
+      const { visitor: fresh } = await openShop(server, { unit });
+      const cutters = await list(fresh);
+      expect(new Set(cutters.map((c) => c.unit))).toEqual(new Set([unit]));
+      expect(new Set(cutters.map((c) => c.cutter.kind))).toEqual(new Set(['straight', 'tapered', 'vee', 'beading']));
+      expect(cutters.find((c) => c.cutter.name === name)?.cutter).toMatchObject({ kind: 'straight', diameter });
+    },
+  );
 
   it('When a cutter is put in, then it is in the list with what was entered', async () => {
     const { id } = await add('Ours', { number: 7, maxPass: 0.5 });
-    expect((await list()).find((c) => c.id === id)).toEqual({ id, ...aCutter('Ours', { number: 7, maxPass: 0.5 }), remarks: '' });
+    expect((await list()).find((c) => c.id === id)).toEqual({
+      id,
+      ...aCutter('Ours', { number: 7, maxPass: 0.5 }),
+      remarks: '',
+    });
   });
 
   it('When its numbers cannot be, then each field is named with what it takes', async () => {
@@ -67,7 +74,9 @@ describe('The cutter drawer', () => {
       { path: 'cutter.diameter', got: '-1', takes: 'a length above 0' },
     ]);
     const deep = await visitor.post('/api/cutters', aCutter('Deep', { maxPass: 2 }));
-    expect(deep.json<{ fields: unknown[] }>().fields).toMatchObject([{ path: 'cutter.maxPass', takes: 'at most the flute length, 1' }]);
+    expect(deep.json<{ fields: unknown[] }>().fields).toMatchObject([
+      { path: 'cutter.maxPass', takes: 'at most the flute length, 1' },
+    ]);
   });
 
   it.each([
@@ -108,14 +117,33 @@ describe('A change of a cutter', () => {
     const { visitor: owner } = await openShop(server);
     const job = await addJob(owner, 'Kitchen');
     const uses = await addFrame(owner, job.id, newFrame('in', 'Uses it'));
-    await addFrame(owner, job.id, setField(setField(setField(newFrame('in', 'Another size'), 'cutters.dado.diameter', 0.25), 'cutters.squaring.diameter', 0.25), 'cutters.perimeter.diameter', 0.25));
-    await addFrame(owner, job.id, setField(newFrame('in', 'Only the dado'), 'cutters.squaring.name', 'Of the other machine'));
+    await addFrame(
+      owner,
+      job.id,
+      setField(
+        setField(
+          setField(newFrame('in', 'Another size'), 'cutters.dado.diameter', 0.25),
+          'cutters.squaring.diameter',
+          0.25,
+        ),
+        'cutters.perimeter.diameter',
+        0.25,
+      ),
+    );
+    await addFrame(
+      owner,
+      job.id,
+      setField(newFrame('in', 'Only the dado'), 'cutters.squaring.name', 'Of the other machine'),
+    );
     const away = await addFrame(owner, job.id, newFrame('in', 'Put away'));
     expectStatus(await owner.patch(`/api/frames/${away.id}`, { removed: true }), 200);
     await releaseFrame(owner, uses, ['thin-wall']);
 
     const { id, cutter } = await named('Straight 3/8', owner);
-    const answer = expectStatus(await owner.put(`/api/cutters/${id}`, { unit: 'in', cutter: { ...cutter, diameter: 0.374 } }), 200);
+    const answer = expectStatus(
+      await owner.put(`/api/cutters/${id}`, { unit: 'in', cutter: { ...cutter, diameter: 0.374 } }),
+      200,
+    );
     const changed = cutterChanged.parse(answer.json());
     expect(changed.changes).toEqual(['diameter']);
     expect(changed.cutter?.cutter).toMatchObject({ diameter: 0.374 });
@@ -124,8 +152,13 @@ describe('A change of a cutter', () => {
       ['Only the dado', 'Kitchen', ['dado', 'perimeter']],
     ]);
     // The draft and the revision keep their own copy until somebody saves another.
-    expect((await owner.get(`/api/frames/${uses.id}`)).json()).toMatchObject({ version: 1, particulars: { cutters: { dado: { diameter: 0.375 } } } });
-    expect((await owner.get(`/api/frames/${uses.id}/revisions/A`)).json()).toMatchObject({ particulars: { cutters: { dado: { diameter: 0.375 } } } });
+    expect((await owner.get(`/api/frames/${uses.id}`)).json()).toMatchObject({
+      version: 1,
+      particulars: { cutters: { dado: { diameter: 0.375 } } },
+    });
+    expect((await owner.get(`/api/frames/${uses.id}/revisions/A`)).json()).toMatchObject({
+      particulars: { cutters: { dado: { diameter: 0.375 } } },
+    });
   });
 
   it('When only the remarks change, then no draft is touched', async () => {
@@ -133,12 +166,22 @@ describe('A change of a cutter', () => {
     await addFrame(owner, (await addJob(owner)).id, newFrame('in', 'Frame'));
     const { id, unit, cutter } = await named('Straight 3/8', owner);
     const answer = await owner.put(`/api/cutters/${id}`, { unit, cutter, remarks: 'Sharpened' });
-    expect(cutterChanged.parse(answer.json())).toMatchObject({ cutter: { remarks: 'Sharpened' }, changes: [], drafts: [] });
+    expect(cutterChanged.parse(answer.json())).toMatchObject({
+      cutter: { remarks: 'Sharpened' },
+      changes: [],
+      drafts: [],
+    });
   });
 
   it('When a millimetre cutter is taken out, then inch drafts that carry it are listed too, and it can be put back', async () => {
     const { visitor: owner } = await openShop(server, { unit: 'mm' });
-    const metric = expectStatus(await owner.post('/api/cutters', { unit: 'mm', cutter: { kind: 'straight', name: 'Exact 9.525', diameter: 9.525, fluteLength: 31.75, maxPass: 12.7 } }), 201).json<StoredCutter>();
+    const metric = expectStatus(
+      await owner.post('/api/cutters', {
+        unit: 'mm',
+        cutter: { kind: 'straight', name: 'Exact 9.525', diameter: 9.525, fluteLength: 31.75, maxPass: 12.7 },
+      }),
+      201,
+    ).json<StoredCutter>();
     await addFrame(owner, (await addJob(owner)).id, newFrame('in', 'In inches'));
     const answer = cutterChanged.parse(expectStatus(await owner.delete(`/api/cutters/${metric.id}`), 200).json());
     expect(answer).toMatchObject({ cutter: null, changes: ['removed'], drafts: [{ frameName: 'In inches' }] });
@@ -159,15 +202,26 @@ describe('Cutters as CSV', () => {
     expect(file.headers.get('content-disposition')).toContain('cutters.csv');
     const answer = await taken([new TextDecoder().decode(file.bytes)], '', other);
     expect(answer.problems).toEqual([]);
-    const bare = (cutters: readonly StoredCutter[]) => cutters.map(({ unit, cutter, remarks }) => ({ unit, cutter, remarks }));
+    const bare = (cutters: readonly StoredCutter[]) =>
+      cutters.map(({ unit, cutter, remarks }) => ({ unit, cutter, remarks }));
     expect(bare(await list(other))).toEqual(bare(await list()));
   });
 
   it('When a row is bad, then line and column are named and nothing is taken until the good ones are asked for', async () => {
-    const lines = [HEADER, 'Good one,in,straight,0.25,1,,', 'Bad one,in,straight,wide,1,,', 'Good one,in,straight,0.5,1,,', 'Straight 3/8,in,straight,0.375,1,,'];
+    const lines = [
+      HEADER,
+      'Good one,in,straight,0.25,1,,',
+      'Bad one,in,straight,wide,1,,',
+      'Good one,in,straight,0.5,1,,',
+      'Straight 3/8,in,straight,0.375,1,,',
+    ];
     const refused = await taken(lines);
     expect(refused).toMatchObject({ taken: [], good: 1 });
-    expect(refused.problems.map(({ line, column }) => [line, column])).toEqual([[3, 'diameter'], [4, 'name'], [5, 'name']]);
+    expect(refused.problems.map(({ line, column }) => [line, column])).toEqual([
+      [3, 'diameter'],
+      [4, 'name'],
+      [5, 'name'],
+    ]);
     expect(refused.problems[0]).toMatchObject({ got: '"wide"', takes: 'a number with a decimal point, such as 9.525' });
     expect(await named('Good one')).toBeUndefined();
 
@@ -195,9 +249,15 @@ describe('Cutters as CSV', () => {
     };
     expect(await bad(() => undefined)).toMatchObject({ path: 'file', takes: 'one CSV file' });
     expect(await bad((f) => f.append('file', new Blob([HEADER]), 'a.csv'))).toMatchObject({ path: 'file' });
-    expect((await bad((f) => f.append('file', new Blob([new Uint8Array([0xff, 0xfe, 0])]), 'a.csv'))).takes).toContain('UTF-8');
-    expect((await bad((f) => f.append('file', new Blob(['x'.repeat(DRAWER_LIMITS.csvBytes + 1)]), 'a.csv'))).takes).toContain('bytes');
-    expect((await send([HEADER], '?keepGood=perhaps')).json<{ fields: unknown[] }>().fields).toMatchObject([{ path: 'keepGood' }]);
+    expect((await bad((f) => f.append('file', new Blob([new Uint8Array([0xff, 0xfe, 0])]), 'a.csv'))).takes).toContain(
+      'UTF-8',
+    );
+    expect(
+      (await bad((f) => f.append('file', new Blob(['x'.repeat(DRAWER_LIMITS.csvBytes + 1)]), 'a.csv'))).takes,
+    ).toContain('bytes');
+    expect((await send([HEADER], '?keepGood=perhaps')).json<{ fields: unknown[] }>().fields).toMatchObject([
+      { path: 'keepGood' },
+    ]);
   });
 
   it('When the drawer would hold too many, then nothing is taken', async () => {
@@ -206,7 +266,9 @@ describe('Cutters as CSV', () => {
     const rows = Array.from({ length: DRAWER_LIMITS.cutters - held + 1 }, (_, i) => `Cutter ${i},in,straight,0.25,1,,`);
     const answer = await send([HEADER, ...rows], '', other);
     expect(answer.status).toBe(400);
-    expect(answer.json<{ fields: unknown[] }>().fields).toMatchObject([{ path: 'cutters', got: '501 in the drawer', takes: 'at most 500' }]);
+    expect(answer.json<{ fields: unknown[] }>().fields).toMatchObject([
+      { path: 'cutters', got: '501 in the drawer', takes: 'at most 500' },
+    ]);
     expect(await list(other)).toHaveLength(held);
     expect((await taken([HEADER, ...rows.slice(1)], '', other)).taken).toHaveLength(rows.length - 1);
   });

@@ -49,10 +49,19 @@ const aCutter = () => ({
   unit: 'in',
   cutter: { kind: 'straight', name: `Cutter ${++names}`, diameter: 0.25, fluteLength: 1 },
 });
-const anEdge = () => ({ name: `Edge ${++names}`, unit: 'in', edge: { style: 'square', sizeHeldAt: 'face' }, cutters: {} });
+const anEdge = () => ({
+  name: `Edge ${++names}`,
+  unit: 'in',
+  edge: { style: 'square', sizeHeldAt: 'face' },
+  cutters: {},
+});
 const aCutterFile = () => {
   const form = new FormData();
-  form.append('file', new Blob([`name,unit,kind,diameter,flute length\nCutter ${++names},in,straight,0.25,1\n`]), 'a.csv');
+  form.append(
+    'file',
+    new Blob([`name,unit,kind,diameter,flute length\nCutter ${++names},in,straight,0.25,1\n`]),
+    'a.csv',
+  );
   return form;
 };
 const aFileForm = () => {

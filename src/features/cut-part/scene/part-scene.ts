@@ -53,8 +53,13 @@ export interface SceneColours {
 const colourOf = ([r, g, b]: Rgb): Color => new Color().setRGB(r / 255, g / 255, b / 255, SRGBColorSpace);
 
 function colourCorners(out: Float32Array, by: Uint8Array, palette: readonly Rgb[]): void {
-  const colours = palette.map(colourOf);
-  for (let i = 0; i < by.length; i++) (colours[by[i]!] ?? colours[0]!).toArray(out, 3 * i);
+  const colours = palette.flatMap((rgb) => colourOf(rgb).toArray());
+  for (let i = 0; i < by.length; i++) {
+    const from = 3 * by[i]!;
+    out[3 * i] = colours[from]!;
+    out[3 * i + 1] = colours[from + 1]!;
+    out[3 * i + 2] = colours[from + 2]!;
+  }
 }
 
 /** One copy of the part: its own materials, since each copy is cut by a plane of its own. */

@@ -14,11 +14,15 @@ export function selectedNow(desk: Desk): Selected | null {
 }
 
 /** Changes of the selected opening's place in the layout. What comes of it is selected next; what went wrong is said in the panel. */
-function changeLayout(desk: Desk, change: (edits: ReturnType<typeof layoutEdits>, path: LayoutPath) => string): boolean {
+function changeLayout(
+  desk: Desk,
+  change: (edits: ReturnType<typeof layoutEdits>, path: LayoutPath) => string,
+): boolean {
   const selection = desk.selection.get();
   const selected = selectedNow(desk);
   // A part that is not there as entered, or is traced, has no field.
-  if (desk.readOnly || !selection || selected?.kind !== 'opening' || selected.field === '' || !selected.feature.path) return false;
+  if (desk.readOnly || !selection || selected?.kind !== 'opening' || selected.field === '' || !selected.feature.path)
+    return false;
   const edits = layoutEdits(desk.editor, (_layout, place) => {
     const opening = openingAt(desk.editor.store.get().drawn.contours, place);
     desk.selection.set(opening ? selectionOf(opening, selection.face, selection.open) : null);
@@ -29,7 +33,8 @@ function changeLayout(desk: Desk, change: (edits: ReturnType<typeof layoutEdits>
 }
 
 /** Splits the selected opening in two; the new one is selected. Answers false when there is nothing to split. */
-export const splitSelected = (desk: Desk, into: 'columns' | 'rows'): boolean => changeLayout(desk, (edits, path) => edits.split(path, into));
+export const splitSelected = (desk: Desk, into: 'columns' | 'rows'): boolean =>
+  changeLayout(desk, (edits, path) => edits.split(path, into));
 
 /** Removes the selected opening; the one that takes its room is selected. The only opening of a frame stays. */
 export const removeSelected = (desk: Desk): boolean =>

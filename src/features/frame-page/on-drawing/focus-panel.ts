@@ -15,4 +15,5 @@ export function focusPanel(entry: PanelEntry): void {
 }
 
 /** Puts the keyboard back on the drawing. */
-export const focusSpread = (): void => document.querySelector<HTMLElement>('[data-spread]')?.focus({ preventScroll: true });
+export const focusSpread = (): void =>
+  document.querySelector<HTMLElement>('[data-spread]')?.focus({ preventScroll: true });

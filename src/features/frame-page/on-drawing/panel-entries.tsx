@@ -7,7 +7,9 @@ import { tracedPlace } from '../form/square-edge.ts';
 import { useFormFacts } from '../form/form-facts.ts';
 import type { SizeFields } from './size-fields.ts';
 
-const Editable = ({ as, children }: { readonly as: string; readonly children: ReactNode }) => <div data-edit={as}>{children}</div>;
+const Editable = ({ as, children }: { readonly as: string; readonly children: ReactNode }) => (
+  <div data-edit={as}>{children}</div>
+);
 
 interface OpeningEntriesProps extends SizeFields {
   /** Path of the opening's part. */
@@ -18,7 +20,13 @@ interface OpeningEntriesProps extends SizeFields {
 }
 
 /** Label, sizes, arch and edge of an opening in the layout. */
-export const OpeningEntries = memo(function OpeningEntries({ field, width, height, solvedWidth, solvedHeight }: OpeningEntriesProps) {
+export const OpeningEntries = memo(function OpeningEntries({
+  field,
+  width,
+  height,
+  solvedWidth,
+  solvedHeight,
+}: OpeningEntriesProps) {
   // The size that is its own, and not that of a column or row it lies in, is what the S key means.
   const isColumn = width === `${field}.size`;
   return (
@@ -42,7 +50,14 @@ export const OpeningEntries = memo(function OpeningEntries({ field, width, heigh
         )}
       </div>
       {(width === '' || height === '') && (
-        <p className="text-11 text-pencil">{width === '' && height === '' ? 'Its size follows' : width === '' ? 'Its width follows' : 'Its height follows'} from the frame and its members.</p>
+        <p className="text-11 text-pencil">
+          {width === '' && height === ''
+            ? 'Its size follows'
+            : width === ''
+              ? 'Its width follows'
+              : 'Its height follows'}{' '}
+          from the frame and its members.
+        </p>
       )}
       <SquareEdgeEntry key={field} place={field} />
     </>
@@ -64,10 +79,23 @@ export function TracedEntries({ opening }: { readonly opening: Opening }) {
 }
 
 /** Width of a member. `alike` mid-stiles or mid-rails of one divided part have one width. */
-export const MemberEntries = memo(function MemberEntries({ kind, field, alike }: { readonly kind: Member['kind']; readonly field: string; readonly alike: number }) {
+export const MemberEntries = memo(function MemberEntries({
+  kind,
+  field,
+  alike,
+}: {
+  readonly kind: Member['kind'];
+  readonly field: string;
+  readonly alike: number;
+}) {
   return (
     <Editable as="size">
-      <Entry key={field} path={field} label={alike > 1 ? `Width of all ${alike} ${kind}s here` : 'Width'} layout="cell" />
+      <Entry
+        key={field}
+        path={field}
+        label={alike > 1 ? `Width of all ${alike} ${kind}s here` : 'Width'}
+        layout="cell"
+      />
     </Editable>
   );
 });

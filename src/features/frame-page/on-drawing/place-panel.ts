@@ -14,7 +14,8 @@ const ROOM_PX = 8;
 
 const clamp = (v: number, min: number, max: number): number => Math.max(min, Math.min(max, v));
 
-const isFree = (a: Box, b: Box): boolean => a.left + a.width <= b.left || b.left + b.width <= a.left || a.top + a.height <= b.top || b.top + b.height <= a.top;
+const isFree = (a: Box, b: Box): boolean =>
+  a.left + a.width <= b.left || b.left + b.width <= a.left || a.top + a.height <= b.top || b.top + b.height <= a.top;
 
 interface PanelPlacing {
   readonly spread: PageSize;
@@ -34,7 +35,10 @@ interface PanelPlacing {
 export function placePanel({ spread, panel, own, other, now }: PanelPlacing): Point {
   const right = spread.width - panel.width - ROOM_PX;
   const low = spread.height - panel.height - ROOM_PX;
-  const at = (x: number, y: number): Point => ({ x: Math.round(clamp(x, ROOM_PX, Math.max(ROOM_PX, right))), y: Math.round(clamp(y, ROOM_PX, Math.max(ROOM_PX, low))) });
+  const at = (x: number, y: number): Point => ({
+    x: Math.round(clamp(x, ROOM_PX, Math.max(ROOM_PX, right))),
+    y: Math.round(clamp(y, ROOM_PX, Math.max(ROOM_PX, low))),
+  });
   const boxAt = (p: Point): Box => ({ left: p.x, top: p.y, ...panel });
   if (now && isFree(boxAt(now), own) && now.x === at(now.x, now.y).x && now.y === at(now.x, now.y).y) return now;
 
@@ -52,6 +56,7 @@ export function placePanel({ spread, panel, own, other, now }: PanelPlacing): Po
   const free = [...beside(own), ...beside(other), ...corners].filter((p) => isFree(boxAt(p), own));
   const best = free.find((p) => isFree(boxAt(p), other)) ?? free[0];
   if (best) return best;
-  const away = (p: Point): number => Math.hypot(p.x + panel.width / 2 - own.left - own.width / 2, p.y + panel.height / 2 - own.top - own.height / 2);
+  const away = (p: Point): number =>
+    Math.hypot(p.x + panel.width / 2 - own.left - own.width / 2, p.y + panel.height / 2 - own.top - own.height / 2);
   return corners.reduce((a, b) => (away(b) > away(a) ? b : a));
 }

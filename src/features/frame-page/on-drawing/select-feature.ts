@@ -9,7 +9,12 @@ const middle = ({ extents: e }: Opening | Member): Point => ({ x: (e.minX + e.ma
 const isMember = (feature: Opening | Member): feature is Member => 'kind' in feature;
 
 /** A selection of an opening or member as picked on a face, at its middle unless a place in it is given. */
-export const selectionOf = (feature: Opening | Member, face: Face, open: boolean, at: Point = middle(feature)): Selection => ({
+export const selectionOf = (
+  feature: Opening | Member,
+  face: Face,
+  open: boolean,
+  at: Point = middle(feature),
+): Selection => ({
   id: feature.id,
   path: isMember(feature) ? null : (feature.path ?? null),
   face,

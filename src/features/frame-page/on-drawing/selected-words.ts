@@ -3,7 +3,8 @@ import type { Unit } from '#shared/kernel/units/unit.ts';
 import type { Selected } from '../model/selection.ts';
 
 /** What a selected opening or member is called. */
-export const selectedName = ({ kind, feature }: Selected): string => (kind === 'opening' ? `Opening ${feature.label}` : feature.label);
+export const selectedName = ({ kind, feature }: Selected): string =>
+  kind === 'opening' ? `Opening ${feature.label}` : feature.label;
 
 /** Its numbers: an opening's width and height, a member's width and length. */
 export function selectedSize({ feature }: Selected, unit: Unit): string {
@@ -12,4 +13,5 @@ export function selectedSize({ feature }: Selected, unit: Unit): string {
 }
 
 /** What the keys do while something is selected. */
-export const SELECTED_KEYS = 'Arrows go to the neighbour. Enter: edit, C: columns, R: rows, L: label, S: size, A: arch, Del: remove, Esc: leave';
+export const SELECTED_KEYS =
+  'Enter: edit, C: columns, R: rows, L: label, S: size, A: arch, Del: remove, arrows: to the neighbour, Esc: leave';

@@ -7,7 +7,13 @@ import { useStore } from '../model/store.ts';
 import { extentsPath } from '../spread/shape-path.ts';
 
 /** Outline of what is selected, drawn alike on both faces. `transform` from frame view to the page. */
-export const SelectionOutline = memo(function SelectionOutline({ worked, transform }: { readonly worked: WorkedFrame; readonly transform: string }) {
+export const SelectionOutline = memo(function SelectionOutline({
+  worked,
+  transform,
+}: {
+  readonly worked: WorkedFrame;
+  readonly transform: string;
+}) {
   const { selection: store, editor } = useDesk();
   const selection = useStore(store, (value) => value);
   const selected = selection && findSelected(worked.contours, editor.store.get().history.present, selection);

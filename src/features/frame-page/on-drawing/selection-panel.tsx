@@ -29,17 +29,35 @@ function Entries({ worked, selected }: { readonly worked: WorkedFrame; readonly 
   const { feature, field } = selected;
   if (outline.kind === 'traced') return 'height' in feature ? <TracedEntries opening={feature} /> : null;
   if (field === '') return <p className="text-12">As entered, it cannot be drawn: see the findings, or undo.</p>;
-  if (!('height' in feature)) return <MemberEntries kind={feature.kind} field={field} alike={feature.path ? betweensOf(worked, feature.path).length : 1} />;
+  if (!('height' in feature))
+    return (
+      <MemberEntries
+        kind={feature.kind}
+        field={field}
+        alike={feature.path ? betweensOf(worked, feature.path).length : 1}
+      />
+    );
   const path = feature.path ?? [];
   return (
     <>
-      <OpeningEntries field={field} {...sizeFields(outline.layout, path)} solvedWidth={formatLength(feature.width, unit)} solvedHeight={formatLength(feature.height, unit)} />
+      <OpeningEntries
+        field={field}
+        {...sizeFields(outline.layout, path)}
+        solvedWidth={formatLength(feature.width, unit)}
+        solvedHeight={formatLength(feature.height, unit)}
+      />
       {!readOnly && <PanelButtons removable={path.length > 0} />}
     </>
   );
 }
 
-function OpenPanel({ worked, view, page, selection, selected }: SelectionPanelProps & { readonly selection: Selection; readonly selected: Selected }) {
+function OpenPanel({
+  worked,
+  view,
+  page,
+  selection,
+  selected,
+}: SelectionPanelProps & { readonly selection: Selection; readonly selected: Selected }) {
   const desk = useDesk();
   const panel = useRef<HTMLDivElement>(null);
   usePanelPlace({ panel, worked, view, page, face: selection.face, extents: selected.feature.extents });

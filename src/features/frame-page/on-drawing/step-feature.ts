@@ -10,7 +10,7 @@ const outside = (v: number, min: number, max: number): number => Math.max(min - 
 
 const clamp = (v: number, min: number, max: number): number => Math.min(max, Math.max(min, v));
 
-export interface Step {
+interface Step {
   readonly feature: Opening | Member;
   /** Where in it one stands then: its middle in the direction gone, else as near as possible to where one came from. */
   readonly at: Point;
@@ -27,7 +27,13 @@ function gap(from: Extents, to: Extents, right: number, up: number): number {
  * The opening or member next to `from` in a direction of frame view, on the line through `at`; null when none lies there.
  * `right` and `up` are −1, 0 or 1, one of them 0.
  */
-export function stepFeature({ openings, members }: FrameContours, from: Opening | Member, at: Point, right: number, up: number): Step | null {
+export function stepFeature(
+  { openings, members }: FrameContours,
+  from: Opening | Member,
+  at: Point,
+  right: number,
+  up: number,
+): Step | null {
   const middle = (e: Extents): number => ((e.minX + e.maxX) / 2) * right + ((e.minY + e.maxY) / 2) * up;
   let best: Opening | Member | null = null;
   let least = Infinity;
@@ -44,6 +50,9 @@ export function stepFeature({ openings, members }: FrameContours, from: Opening 
   const { minX, maxX, minY, maxY } = best.extents;
   return {
     feature: best,
-    at: right === 0 ? { x: clamp(at.x, minX, maxX), y: (minY + maxY) / 2 } : { x: (minX + maxX) / 2, y: clamp(at.y, minY, maxY) },
+    at:
+      right === 0
+        ? { x: clamp(at.x, minX, maxX), y: (minY + maxY) / 2 }
+        : { x: (minX + maxX) / 2, y: clamp(at.y, minY, maxY) },
   };
 }

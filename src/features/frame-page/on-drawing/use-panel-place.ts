@@ -24,7 +24,8 @@ interface Laid {
   readonly front: DOMRect;
 }
 
-const rectOf = (spread: Element, face: Face): DOMRect => spread.querySelector(`[data-face="${face}"]`)!.getBoundingClientRect();
+const rectOf = (spread: Element, face: Face): DOMRect =>
+  spread.querySelector(`[data-face="${face}"]`)!.getBoundingClientRect();
 
 /** What can be seen of a rectangle of frame view on a page, in pixels of the spread. */
 function boxOn(laid: Laid, face: Face, { worked, view, page, extents }: PanelPlace): Box {
@@ -54,7 +55,9 @@ export function usePanelPlace(place: PanelPlace): void {
   // Asking where things are makes the browser lay the page out, for which a keystroke should not wait.
   useLayoutEffect(() => {
     const spread = panel.current?.closest('[data-spread]');
-    laid.current = spread ? { spread: spread.getBoundingClientRect(), back: rectOf(spread, 'back'), front: rectOf(spread, 'front') } : null;
+    laid.current = spread
+      ? { spread: spread.getBoundingClientRect(), back: rectOf(spread, 'back'), front: rectOf(spread, 'front') }
+      : null;
   }, [panel, page, flip, size]);
 
   useLayoutEffect(() => {

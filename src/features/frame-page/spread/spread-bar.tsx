@@ -55,7 +55,7 @@ function Readout() {
     <p
       data-readout=""
       role={b ? 'status' : undefined}
-      className="h-8 min-w-0 flex-1 basis-60 content-center overflow-hidden text-11 text-pencil max-lg:basis-full"
+      className="h-8 min-w-0 flex-1 basis-48 content-center overflow-hidden text-11 text-pencil max-lg:basis-full"
     >
       {words}
     </p>
@@ -67,11 +67,15 @@ export const SpreadBar = memo(function SpreadBar() {
   const desk = useDesk();
   const isMeasuring = useStore(desk.measuring, (value) => value !== null);
   const isSelecting = useStore(desk.selection, (value) => value !== null);
+  function walk() {
+    toggleWalking(desk);
+    focusSpread();
+  }
   const zoom = (factor: number) => desk.view.set(zoomView(desk.shown.get(), factor));
   return (
     <div className="flex flex-wrap items-center gap-x-3 border-t border-rule px-4 print:hidden">
       <Readout />
-      <div role="group" aria-label="View" className="flex gap-x-3.5 pb-0.5">
+      <div role="group" aria-label="View" className="flex gap-x-2.5 pb-0.5">
         <Button kind="quiet" onClick={() => zoom(ZOOM_STEP)}>
           Zoom in +
         </Button>
@@ -84,12 +88,10 @@ export const SpreadBar = memo(function SpreadBar() {
         <Button
           kind="quiet"
           aria-pressed={isSelecting}
-          onClick={() => {
-            toggleWalking(desk);
-            focusSpread();
-          }}
+          title="Walk from opening to member with the arrow keys, and edit them"
+          onClick={walk}
         >
-          Openings O
+          Edit O
         </Button>
         <Button kind="quiet" aria-pressed={isMeasuring} onClick={() => toggleMeasuring(desk)}>
           {isMeasuring ? 'Stop measuring M' : 'Measure M'}

@@ -24,14 +24,7 @@ const VEE: StoredCutter = {
 };
 
 const page = (change: object = {}) => (
-  <CuttersPage
-    cutters={[STRAIGHT, VEE]}
-    shopName="Tern & Alder Joinery"
-    unit="in"
-    mayEdit
-    mayEditFrames
-    {...change}
-  />
+  <CuttersPage cutters={[STRAIGHT, VEE]} shopName="Tern & Alder Joinery" unit="in" mayEdit mayEditFrames {...change} />
 );
 const rowOf = (name: string) => screen.getByRole('rowheader', { name }).closest('tr')!;
 const field = (label: string) => screen.getByLabelText<HTMLInputElement>(label);
@@ -58,9 +51,14 @@ describe('CuttersPage', () => {
   it('When the shape is drawn, then its outline is as wide as the numbers say', () => {
     show(page());
     const points = (name: string) =>
-      rowOf(name).querySelector('polygon')!.getAttribute('points')!.split(' ').map((pair) => pair.split(',').map(Number));
+      rowOf(name)
+        .querySelector('polygon')!
+        .getAttribute('points')!
+        .split(' ')
+        .map((pair) => pair.split(',').map(Number));
     // Circle of 3/8 in; a V of included angle 30° is 2 · 12 · tan 15° wide at 12 above its tip.
-    const width = (name: string) => Math.max(...points(name).map(([x]) => x!)) - Math.min(...points(name).map(([x]) => x!));
+    const width = (name: string) =>
+      Math.max(...points(name).map(([x]) => x!)) - Math.min(...points(name).map(([x]) => x!));
     expect(width('Straight 3/8')).toBeCloseTo(0.375, 12);
     expect(width('V 30')).toBeCloseTo(24 * Math.tan(Math.PI / 12), 12);
   });
@@ -70,7 +68,8 @@ describe('CuttersPage', () => {
     expect(screen.getAllByRole('button').map((b) => b.textContent?.trim())).toEqual(
       expect.arrayContaining(['Export as CSV']),
     );
-    for (const name of [/^Change/, /^Delete/, /^Put in/, /^Import/]) expect(screen.queryByRole('button', { name })).toBeNull();
+    for (const name of [/^Change/, /^Delete/, /^Put in/, /^Import/])
+      expect(screen.queryByRole('button', { name })).toBeNull();
   });
 
   it('When a cutter is put in, then its kind decides the fields, and lengths are sent as numbers', async () => {
@@ -111,9 +110,23 @@ describe('CuttersPage', () => {
   });
 
   it('When a change touches drafts, then they are listed with links and updated through a save with their version', async () => {
-    const changed: StoredCutter = { ...STRAIGHT, cutter: { ...STRAIGHT.cutter, diameter: 0.374 } as StoredCutter['cutter'] };
+    const changed: StoredCutter = {
+      ...STRAIGHT,
+      cutter: { ...STRAIGHT.cutter, diameter: 0.374 } as StoredCutter['cutter'],
+    };
     const draft = (id: string, particulars: Particulars, version: number) =>
-      json({ id, jobId: 'j', jobName: 'Kitchen', particulars, version, changedAt: '', changedBy: '', removed: false, revisions: [], draftChanged: true });
+      json({
+        id,
+        jobId: 'j',
+        jobName: 'Kitchen',
+        particulars,
+        version,
+        changedAt: '',
+        changedBy: '',
+        removed: false,
+        revisions: [],
+        draftChanged: true,
+      });
     const seen = answerCalls(({ method, path }) => {
       if (method === 'PUT' && path === '/api/cutters/s')
         return json({
@@ -141,13 +154,22 @@ describe('CuttersPage', () => {
 
     await user.click(screen.getByRole('button', { name: 'Update 2 drafts' }));
     await waitFor(() => expect(link.closest('li')!.textContent).toContain('updated'));
-    await waitFor(() => expect(screen.getByRole('link', { name: 'B18 drawers' }).closest('li')!.textContent).toContain('not updated: Somebody else saved'));
+    await waitFor(() =>
+      expect(screen.getByRole('link', { name: 'B18 drawers' }).closest('li')!.textContent).toContain(
+        'not updated: Somebody else saved',
+      ),
+    );
     const saves = seen.filter((call) => call.method === 'PUT' && call.path.endsWith('/draft'));
     expect(saves[0]!.body).toMatchObject({
       version: 7,
       particulars: {
         name: 'B33 base',
-        cutters: { dado: { diameter: 0.374 }, squaring: { diameter: 0.374 }, perimeter: { diameter: 0.374 }, opening: { kind: 'tapered' } },
+        cutters: {
+          dado: { diameter: 0.374 },
+          squaring: { diameter: 0.374 },
+          perimeter: { diameter: 0.374 },
+          opening: { kind: 'tapered' },
+        },
       },
     });
     expect(saves[1]!.body).toMatchObject({ version: 3 });

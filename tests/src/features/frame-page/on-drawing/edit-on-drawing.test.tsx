@@ -28,12 +28,28 @@ function showFrame(particulars: Particulars = workedExample(), mayEdit = true) {
     draftChanged: true,
   };
   const profiles = BUILTIN_PROFILES.map((stored) => ({ ...stored, builtIn: true }));
-  const shown = show(<FramePage renderCutPart={() => null} frame={frame} profiles={profiles} defaultProfileId="r2007" drawer={[]} savedEdges={[]} shopName="Tern & Alder Joinery" mayEdit={mayEdit} mayRelease={mayEdit} />);
+  const shown = show(
+    <FramePage
+      renderCutPart={() => null}
+      frame={frame}
+      profiles={profiles}
+      defaultProfileId="r2007"
+      drawer={[]}
+      savedEdges={[]}
+      shopName="Tern & Alder Joinery"
+      mayEdit={mayEdit}
+      mayRelease={mayEdit}
+    />,
+  );
   /** Clicks at a place of frame view on one face. */
   function clickAt(face: 'back' | 'front', x: number, y: number) {
     const worked = workFrame(particulars);
-    const { x: clientX, y: clientY } = toPage(fitTo(boardInFrameView(worked), PAGE), worked[face].placement, PAGE, { x, y });
-    for (const type of ['pointerdown', 'pointerup']) fireEvent(drawing(face), new MouseEvent(type, { bubbles: true, button: 0, clientX, clientY }));
+    const { x: clientX, y: clientY } = toPage(fitTo(boardInFrameView(worked), PAGE), worked[face].placement, PAGE, {
+      x,
+      y,
+    });
+    for (const type of ['pointerdown', 'pointerup'])
+      fireEvent(drawing(face), new MouseEvent(type, { bubbles: true, button: 0, clientX, clientY }));
     spread().focus();
   }
   return { ...shown, clickAt };
@@ -54,33 +70,51 @@ function panel(name: string): HTMLElement {
 }
 const noPanel = () => document.querySelector('[data-selection-panel]') === null;
 const said = () => [...document.querySelectorAll('[role="status"]')].map((p) => p.textContent).join(' ');
-const squareSwitches = () => [...document.querySelectorAll<HTMLInputElement>('input[type="checkbox"]')].filter((input) => input.labels![0]!.textContent === 'Keep this edge square');
+const squareSwitches = () =>
+  [...document.querySelectorAll<HTMLInputElement>('input[type="checkbox"]')].filter(
+    (input) => input.labels![0]!.textContent === 'Keep this edge square',
+  );
 /** What the openings are, as the front is told in words, in drawing order. */
-const labels = (): string[] => [...drawing('front').querySelectorAll('text')].map((text) => text.textContent).filter((text) => /^[A-Z]$/.test(text));
+const labels = (): string[] =>
+  [...drawing('front').querySelectorAll('text')].map((text) => text.textContent).filter((text) => /^[A-Z]$/.test(text));
 const formEntry = (path: string) => document.querySelector<HTMLInputElement>(`input[data-entry="${path}"]`);
 
 beforeEach(() => {
   localStorage.clear();
-  vi.stubGlobal('ResizeObserver', class { observe() {} unobserve() {} disconnect() {} });
+  vi.stubGlobal(
+    'ResizeObserver',
+    class {
+      observe() {}
+      unobserve() {}
+      disconnect() {}
+    },
+  );
   Element.prototype.scrollIntoView = () => undefined;
   Element.prototype.getBoundingClientRect = () => new DOMRect(0, 0, PAGE.width, PAGE.height);
   Element.prototype.hasPointerCapture = () => false;
   vi.stubGlobal('CSS', { escape: (text: string) => text });
   let version = 4;
-  answerCalls((call) => (call.method === 'PUT' && call.path === '/api/frames/f1/draft' ? json({ version: ++version, changedAt: '2026-05-04T10:01:00.000Z', draftChanged: true }) : undefined));
+  answerCalls((call) =>
+    call.method === 'PUT' && call.path === '/api/frames/f1/draft'
+      ? json({ version: ++version, changedAt: '2026-05-04T10:01:00.000Z', draftChanged: true })
+      : undefined,
+  );
 });
 
 describe('openings on the drawing: by mouse', () => {
-  test.each(['back', 'front'] as const)('When an opening is clicked on the %s, then it is outlined at the same place on both pages and its panel opens', (face) => {
-    const { clickAt } = showFrame();
-    // Within opening B, (17.25, 1.25) to (31.25, 28.75) in the worked example.
-    clickAt(face, 24, 20);
-    expect(outlined('front')).not.toBeNull();
-    expect(outlined('front')).toEqual(outlined('back'));
-    expect(selectedId()).toBe('opening-1');
-    expect(within(panel('Opening B')).getByText('14 × 27 1/2')).toBeTruthy();
-    expect(said()).toContain('Opening B, 14 × 27 1/2, selected');
-  });
+  test.each(['back', 'front'] as const)(
+    'When an opening is clicked on the %s, then it is outlined at the same place on both pages and its panel opens',
+    (face) => {
+      const { clickAt } = showFrame();
+      // Within opening B, (17.25, 1.25) to (31.25, 28.75) in the worked example.
+      clickAt(face, 24, 20);
+      expect(outlined('front')).not.toBeNull();
+      expect(outlined('front')).toEqual(outlined('back'));
+      expect(selectedId()).toBe('opening-1');
+      expect(within(panel('Opening B')).getByText('14 × 27 1/2')).toBeTruthy();
+      expect(said()).toContain('Opening B, 14 × 27 1/2, selected');
+    },
+  );
 
   test('When a dado is clicked on the back, then its entry is gone to; over the same place on the front the stile is selected', () => {
     const { clickAt } = showFrame();
@@ -98,23 +132,22 @@ describe('openings on the drawing: by mouse', () => {
     expect(noPanel()).toBe(true);
   });
 
-  test('When an opening is split and sized in its panel, then drawing and form follow, and undo takes each step back', async () => {
-    const { user, clickAt } = showFrame();
+  test('When an opening is split and sized in its panel, then drawing and form follow, and undo takes each step back', () => {
+    const { clickAt } = showFrame();
     clickAt('front', 24, 20);
-    await user.click(within(panel('Opening B')).getByText('Into rows R'));
+    fireEvent.click(within(panel('Opening B')).getByText('Into rows R'));
     expect(labels()).toEqual(['A', 'B', 'C']);
     expect(selectedId()).toBe('opening-2');
-    await user.type(within(panel('Opening C')).getByLabelText('Height'), '10');
+    fireEvent.change(within(panel('Opening C')).getByLabelText('Height'), { target: { value: '10' } });
     expect(within(panel('Opening C')).getByText('14 × 10')).toBeTruthy();
     expect(formEntry('outline.layout.columns.1.rows.1.size')!.value).toBe('10');
-    await user.tab();
-    await user.click(screen.getByText('Undo'));
+    fireEvent.click(screen.getByText('Undo'));
     expect(within(panel('Opening C')).getByText('14 × 13')).toBeTruthy();
-    await user.click(screen.getByText('Undo'));
+    fireEvent.click(screen.getByText('Undo'));
     expect(labels()).toEqual(['A', 'B']);
     // The part that C was split from.
     expect(panel('Opening B')).toBeTruthy();
-    await user.click(screen.getByText('Redo'));
+    fireEvent.click(screen.getByText('Redo'));
     expect(labels()).toEqual(['A', 'B', 'C']);
   });
 
@@ -122,21 +155,21 @@ describe('openings on the drawing: by mouse', () => {
     const { user, clickAt } = showFrame();
     clickAt('front', 24, 20);
     expect(outlined('front')!.d).not.toMatch(/A/);
-    await user.type(within(panel('Opening B')).getByLabelText('Arch'), '3');
+    fireEvent.change(within(panel('Opening B')).getByLabelText('Arch'), { target: { value: '3' } });
     expect(outlined('front')!.d).toMatch(/A/);
     expect(outlined('back')).toEqual(outlined('front'));
-    await user.type(within(panel('Opening B')).getByLabelText('Label'), '2');
+    fireEvent.change(within(panel('Opening B')).getByLabelText('Label'), { target: { value: 'B2' } });
     expect(panel('Opening B2')).toBeTruthy();
     await user.keyboard('{Control>}zz{/Control}');
     expect(outlined('front')!.d).not.toMatch(/A/);
     expect(panel('Opening B')).toBeTruthy();
   });
 
-  test('When a width and a height can be given, then they are those of the column and the row that the opening lies in', async () => {
-    const { user, clickAt } = showFrame();
+  test('When a width and a height can be given, then they are those of the column and the row that the opening lies in', () => {
+    const { clickAt } = showFrame();
     clickAt('front', 24, 20);
-    await user.click(within(panel('Opening B')).getByText('Into rows R'));
-    await user.type(within(panel('Opening C')).getByLabelText('Width'), '10');
+    fireEvent.click(within(panel('Opening B')).getByText('Into rows R'));
+    fireEvent.change(within(panel('Opening C')).getByLabelText('Width'), { target: { value: '10' } });
     // 33 − 2 × 1 3/4 − 1 1/2 − 10 are left for A.
     expect(drawing('front').textContent).toContain('18 × 27 1/2');
     expect(drawing('front').textContent).toContain('10 × 13');
@@ -145,7 +178,7 @@ describe('openings on the drawing: by mouse', () => {
   test('When an opening is removed, then its room goes to the other one, which then is the only one and stays', async () => {
     const { user, clickAt } = showFrame();
     clickAt('front', 24, 20);
-    await user.click(within(panel('Opening B')).getByText('Remove Del'));
+    fireEvent.click(within(panel('Opening B')).getByText('Remove Del'));
     expect(labels()).toEqual(['A']);
     expect(document.activeElement).toBe(spread());
     expect(within(panel('Opening A')).queryByText('Remove Del')).toBeNull();
@@ -156,17 +189,16 @@ describe('openings on the drawing: by mouse', () => {
     expect(labels()).toEqual(['A', 'B']);
   });
 
-  test('When a member is clicked, then its width can be typed, and a wrong one stays and says what it takes', async () => {
-    const { user, clickAt } = showFrame();
+  test('When a member is clicked, then its width can be typed, and a wrong one stays and says what it takes', () => {
+    const { clickAt } = showFrame();
     clickAt('front', 16.5, 15);
     const width = within(panel('Mid-stile')).getByLabelText<HTMLInputElement>('Width');
-    await user.clear(width);
-    await user.type(width, '2');
+    fireEvent.change(width, { target: { value: '2' } });
     expect(drawing('front').textContent).toContain('13 3/4 × 27 1/2');
-    await user.type(width, '2x');
-    await user.tab();
-    expect(width.value).toBe('22x');
-    expect(within(panel('Mid-stile')).getByText(/^Got “22x”; takes a length such as/)).toBeTruthy();
+    fireEvent.change(width, { target: { value: '2x' } });
+    fireEvent.blur(width);
+    expect(width.value).toBe('2x');
+    expect(within(panel('Mid-stile')).getByText(/^Got “2x”; takes a length such as/)).toBeTruthy();
   });
 });
 
@@ -271,18 +303,19 @@ describe('openings on the drawing: by keyboard', () => {
 describe('openings on the drawing: edges and tracings', () => {
   /** Offsets of a bead are drawn about an opening only where it has one. */
   const beadShapes = () => document.querySelectorAll('svg[data-face="front"] path.stroke-bead').length;
-  const beadOf = () => [...document.querySelectorAll('svg[data-face="front"] path')].map((path) => path.getAttribute('d')).join('').length;
+  const beadOf = () =>
+    [...document.querySelectorAll('svg[data-face="front"] path')].map((path) => path.getAttribute('d')).join('').length;
 
-  test('When an opening of a beaded frame keeps a square edge, then it has no bead, in the panel and the form alike, until it is undone', async () => {
-    const { user, clickAt } = showFrame(beadedExample());
+  test('When an opening of a beaded frame keeps a square edge, then it has no bead, in the panel and the form alike, until it is undone', () => {
+    const { clickAt } = showFrame(beadedExample());
     const before = beadOf();
     expect(beadShapes()).toBeGreaterThan(0);
     clickAt('front', 8, 15);
-    await user.click(within(panel('Opening A')).getByLabelText('Keep this edge square'));
+    fireEvent.click(within(panel('Opening A')).getByLabelText('Keep this edge square'));
     expect(beadOf()).toBeLessThan(before);
     // Two openings in the form, one in the panel.
     expect(squareSwitches().map((s) => s.checked)).toEqual([true, false, true]);
-    await user.click(screen.getByText('Undo'));
+    fireEvent.click(screen.getByText('Undo'));
     expect(squareSwitches().map((s) => s.checked)).toEqual([false, false, false]);
   });
 
@@ -294,8 +327,18 @@ describe('openings on the drawing: edges and tracings', () => {
   });
 
   test('When the outline is traced, then the panel shows numbers and lets the edge be square, and keys that split do nothing', async () => {
-    const square = (a: number, b: number) => [[a, a], [b, a], [b, b], [a, b]] as [number, number][];
-    const { user, clickAt } = showFrame({ ...beadedExample(), dados: [], outline: { kind: 'traced', perimeter: square(0, 20), openings: [square(3, 17)] } });
+    const square = (a: number, b: number) =>
+      [
+        [a, a],
+        [b, a],
+        [b, b],
+        [a, b],
+      ] as [number, number][];
+    const { user, clickAt } = showFrame({
+      ...beadedExample(),
+      dados: [],
+      outline: { kind: 'traced', perimeter: square(0, 20), openings: [square(3, 17)] },
+    });
     clickAt('front', 10, 10);
     const shown = within(panel('Opening A'));
     expect(shown.getByText('14 × 14')).toBeTruthy();
@@ -304,10 +347,10 @@ describe('openings on the drawing: edges and tracings', () => {
     const before = drawing('front').innerHTML;
     await user.keyboard('cr{Delete}');
     expect(drawing('front').innerHTML).toBe(before);
-    await user.click(shown.getByLabelText('Keep this edge square'));
+    fireEvent.click(shown.getByLabelText('Keep this edge square'));
     expect(drawing('front').innerHTML).not.toBe(before);
     expect(squareSwitches().map((s) => s.checked)).toEqual([true, true]);
-    await user.click(screen.getByText('Undo'));
+    fireEvent.click(screen.getByText('Undo'));
     expect(drawing('front').innerHTML).toBe(before);
   });
 });

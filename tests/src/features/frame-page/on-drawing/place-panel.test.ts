@@ -5,7 +5,8 @@ import { placePanel, type Box } from '../../../../../src/features/frame-page/on-
 const SPREAD = { width: 920, height: 460 };
 const PANEL = { width: 224, height: 240 };
 const box = (left: number, top: number, width: number, height: number): Box => ({ left, top, width, height });
-const covers = (p: { x: number; y: number }, b: Box): boolean => p.x < b.left + b.width && b.left < p.x + PANEL.width && p.y < b.top + b.height && b.top < p.y + PANEL.height;
+const covers = (p: { x: number; y: number }, b: Box): boolean =>
+  p.x < b.left + b.width && b.left < p.x + PANEL.width && p.y < b.top + b.height && b.top < p.y + PANEL.height;
 
 describe('placePanel', () => {
   test('When there is room beside the opening on neither side of its page, then the panel stands on the other page, beside the same opening there', () => {

@@ -9,7 +9,8 @@ type Way = keyof typeof WAYS;
 
 const contoursOf = (layout: LayoutPart, feet = 0) => {
   const example = workedExample();
-  return workFrame({ ...example, dados: [], outline: { ...(example.outline as MembersOutline), layout, feet } }).contours;
+  return workFrame({ ...example, dados: [], outline: { ...(example.outline as MembersOutline), layout, feet } })
+    .contours;
 };
 
 const named = (label: string): LayoutPart => ({ opening: { label } });
@@ -20,7 +21,7 @@ function walk(contours: ReturnType<typeof contoursOf>, from: string, ways: reado
   const { extents: e } = feature;
   let at = { x: (e.minX + e.maxX) / 2, y: (e.minY + e.maxY) / 2 };
   return ways.map((way) => {
-    const step = stepFeature(contours, feature, at, ...WAYS[way]);
+    const step = stepFeature(contours, feature, at, WAYS[way][0], WAYS[way][1]);
     if (step === null) return 'stays';
     ({ feature, at } = step);
     return feature.label;
@@ -28,15 +29,30 @@ function walk(contours: ReturnType<typeof contoursOf>, from: string, ways: reado
 }
 
 describe('stepFeature', () => {
-  const drawers = contoursOf({ columns: [{ rows: [named('A'), named('B'), named('C')], between: 1.5 }, named('D')], between: 1.5 });
+  const drawers = contoursOf({
+    columns: [{ rows: [named('A'), named('B'), named('C')], between: 1.5 }, named('D')],
+    between: 1.5,
+  });
 
   test('When one walks across, then openings and members come in the order in which they lie, and the last one is stayed on', () => {
-    expect(walk(drawers, 'B', ['right', 'right', 'right', 'right'])).toEqual(['Mid-stile', 'D', 'Right stile', 'stays']);
+    expect(walk(drawers, 'B', ['right', 'right', 'right', 'right'])).toEqual([
+      'Mid-stile',
+      'D',
+      'Right stile',
+      'stays',
+    ]);
     expect(walk(drawers, 'D', ['left', 'left', 'left', 'left'])).toEqual(['Mid-stile', 'B', 'Left stile', 'stays']);
   });
 
   test('When one walks up and down, then so do rows and mid-rails', () => {
-    expect(walk(drawers, 'A', ['down', 'down', 'down', 'down', 'down', 'down'])).toEqual(['Mid-rail', 'B', 'Mid-rail', 'C', 'Bottom rail', 'stays']);
+    expect(walk(drawers, 'A', ['down', 'down', 'down', 'down', 'down', 'down'])).toEqual([
+      'Mid-rail',
+      'B',
+      'Mid-rail',
+      'C',
+      'Bottom rail',
+      'stays',
+    ]);
     expect(walk(drawers, 'Bottom rail', ['up', 'up'])).toEqual(['Mid-stile', 'Top rail']);
   });
 
@@ -46,7 +62,16 @@ describe('stepFeature', () => {
   });
 
   test('When a frame has feet, then every opening and member can be walked to from the first opening', () => {
-    const contours = contoursOf({ rows: [{ columns: [named('A'), named('B')], between: 2 }, { columns: [named('C'), named('D'), named('E')], between: 1 }], between: 1.5 }, 4);
+    const contours = contoursOf(
+      {
+        rows: [
+          { columns: [named('A'), named('B')], between: 2 },
+          { columns: [named('C'), named('D'), named('E')], between: 1 },
+        ],
+        between: 1.5,
+      },
+      4,
+    );
     const all = [...contours.openings, ...contours.members];
     const middle = ({ extents: e }: (typeof all)[number]) => ({ x: (e.minX + e.maxX) / 2, y: (e.minY + e.maxY) / 2 });
     const seen = new Map([[all[0]!.id, { feature: all[0]!, at: middle(all[0]!) }]]);
