@@ -20,11 +20,17 @@ const programOf = (name: string, file: string) => join(dirname(require.resolve(`
 
 function run<Report>(program: string, args: string[], reportFile: string, count: (report: Report) => Counts): Counts {
   // NODE_ENV from outside would choose React's production build, which the component tests cannot drive.
-  const { status } = spawnSync(process.execPath, [program, ...args], {
+  const {
+    status,
+    signal,
+    error: notStarted,
+  } = spawnSync(process.execPath, [program, ...args], {
     cwd: root,
     stdio: ['ignore', 'inherit', 'inherit'],
     env: { ...process.env, NODE_ENV: 'test', PLAYWRIGHT_JSON_OUTPUT_FILE: reportFile },
   });
+  if (notStarted) console.error(`${program} could not be run: ${notStarted.message}`);
+  if (signal) console.error(`${program} was ended from outside with ${signal}`);
   let report: Report;
   try {
     report = JSON.parse(readFileSync(reportFile, 'utf8')) as Report;

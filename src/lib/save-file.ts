@@ -9,4 +9,5 @@ export function saveFile(name: string, text: string, type: string): void {
 }
 
 /** A name that is safe in any file system: its letters, digits and dashes. */
-export const safeFileName = (name: string, ending: string): string => `${name.replace(/[^A-Za-z0-9-]+/g, '-').replace(/^-+|-+$/g, '') || 'frame'}${ending}`;
+export const safeFileName = (name: string, ending: string): string =>
+  `${name.replace(/[^A-Za-z0-9-]+/g, '-').replace(/^-+|-+$/g, '') || 'frame'}${ending}`;

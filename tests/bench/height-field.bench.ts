@@ -55,7 +55,10 @@ export async function run(): Promise<BenchRow[]> {
   const { profile } = BUILTIN_PROFILES[0]!;
   const stage = finishedStage(worked, profile);
   const area: Extents = { minX: 0, minY: 0, maxX: 36, maxY: 30 };
-  const bothFaces = (cell: number) => [runThrough(sweepFace(stage.back, makeGrid(area, cell))), runThrough(sweepFace(stage.front, makeGrid(area, cell)))];
+  const bothFaces = (cell: number) => [
+    runThrough(sweepFace(stage.back, makeGrid(area, cell))),
+    runThrough(sweepFace(stage.front, makeGrid(area, cell))),
+  ];
   const whole = runThrough(cutBoard(stage, makeGrid(boardExtents(worked, stage), MM)));
   const half = (25.5 * MM) / 2;
   const corner = { minX: 1.75 - half, maxX: 1.75 + half, minY: 1.25 - half, maxY: 1.25 + half };
@@ -67,11 +70,27 @@ export async function run(): Promise<BenchRow[]> {
     return runThrough(cutBoard(fresh, makeGrid(corner, 0.05 * MM), whole));
   });
   const measured = leastTime(() => runThrough(measureFrame(worked, profile, 0.5 * MM)));
-  const row = (name: string, against: string, ratio: number, limit: number): BenchRow => ({ name, against, ratio, limit, ok: ratio <= limit });
+  const row = (name: string, against: string, ratio: number, limit: number): BenchRow => ({
+    name,
+    against,
+    ratio,
+    limit,
+    ok: ratio <= limit,
+  });
   return [
-    row('height fields of both faces, 36 × 30 in at 0.5 mm', `${ALLOWED.faces} ms of one thread`, usual / ALLOWED.faces, 1),
+    row(
+      'height fields of both faces, 36 × 30 in at 0.5 mm',
+      `${ALLOWED.faces} ms of one thread`,
+      usual / ALLOWED.faces,
+      1,
+    ),
     row('the same', 'four times the time at 1 mm', usual / (4 * coarser), LINEAR),
     row('a corner of 25.5 mm at 0.05 mm, both faces', `${ALLOWED.corner} ms of one thread`, close / ALLOWED.corner, 1),
-    row('differences from what is meant, whole board at 0.5 mm', `${ALLOWED.measured} ms of one thread`, measured / ALLOWED.measured, 1),
+    row(
+      'differences from what is meant, whole board at 0.5 mm',
+      `${ALLOWED.measured} ms of one thread`,
+      measured / ALLOWED.measured,
+      1,
+    ),
   ];
 }

@@ -63,7 +63,15 @@ function roundCorner(before: Segment, after: Segment, right: number): ArcSegment
   const start = Math.atan2(a.y - centre.y, a.x - centre.x);
   const turn = 2 * Math.PI;
   const sweep = (((Math.atan2(b.y - centre.y, b.x - centre.x) - start) % turn) + turn) % turn;
-  return { kind: 'arc', a, b, centre, radius: Math.abs(right), start, sweep: right > 0 ? sweep : sweep === 0 ? 0 : sweep - turn };
+  return {
+    kind: 'arc',
+    a,
+    b,
+    centre,
+    radius: Math.abs(right),
+    start,
+    sweep: right > 0 ? sweep : sweep === 0 ? 0 : sweep - turn,
+  };
 }
 
 /** How far along a segment a point of it lies: a length for lines, an angle for arcs. */
@@ -89,7 +97,8 @@ function cutWhereMet(raw: readonly Segment[]): Segment[] {
   raw.forEach((s, i) => {
     for (let j = i + 1; j < raw.length; j++) {
       const [p, q] = [boxes[i]!, boxes[j]!];
-      if (p.minX > q.maxX + WELD || q.minX > p.maxX + WELD || p.minY > q.maxY + WELD || q.minY > p.maxY + WELD) continue;
+      if (p.minX > q.maxX + WELD || q.minX > p.maxX + WELD || p.minY > q.maxY + WELD || q.minY > p.maxY + WELD)
+        continue;
       for (const point of intersectSegments(s, raw[j]!)) {
         cuts[i]!.push(point);
         cuts[j]!.push(point);
@@ -109,10 +118,19 @@ function keepClear(pieces: readonly Segment[], lines: readonly Segment[], distan
   const least = (distance - WELD) ** 2;
   const boxes = lines.map(segmentBounds);
   return pieces.filter((piece) => {
-    const middle = piece.kind === 'line' ? { x: (piece.a.x + piece.b.x) / 2, y: (piece.a.y + piece.b.y) / 2 } : pointOnArc(piece, 0.5);
+    const middle =
+      piece.kind === 'line'
+        ? { x: (piece.a.x + piece.b.x) / 2, y: (piece.a.y + piece.b.y) / 2 }
+        : pointOnArc(piece, 0.5);
     return lines.every((line, i) => {
       const box = boxes[i]!;
-      if (middle.x < box.minX - distance || middle.x > box.maxX + distance || middle.y < box.minY - distance || middle.y > box.maxY + distance) return true;
+      if (
+        middle.x < box.minX - distance ||
+        middle.x > box.maxX + distance ||
+        middle.y < box.minY - distance ||
+        middle.y > box.maxY + distance
+      )
+        return true;
       return squareToSegment(line, middle) >= least;
     });
   });

@@ -65,7 +65,8 @@ export function climbDepth(cutter: Cutter, cell: number): ClimbDepth {
       return (way, along, square) => {
         const steps = Math.max(1, Math.ceil(way.length / (STAMP_SHARE * cell)));
         let deepest = 0;
-        for (let i = 0; i <= steps; i++) deepest = Math.max(deepest, stand(way, along, square, (way.length * i) / steps));
+        for (let i = 0; i <= steps; i++)
+          deepest = Math.max(deepest, stand(way, along, square, (way.length * i) / steps));
         return deepest;
       };
   }

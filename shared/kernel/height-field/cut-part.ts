@@ -72,21 +72,30 @@ function insideLines(grid: Grid, lines: readonly Contour[]): MarkRow {
     marks.fill(0);
     const xs = inside.crossings(sampleY(grid, row));
     for (let c = 0; c + 1 < xs.length; c += 2)
-      for (let i = firstColumn(grid, xs[c]!), to = endColumn(grid, xs[c + 1]!); i < to; i++) if (band.square[i]! < Infinity) marks[i] = 1;
+      for (let i = firstColumn(grid, xs[c]!), to = endColumn(grid, xs[c + 1]!); i < to; i++)
+        if (band.square[i]! < Infinity) marks[i] = 1;
   };
 }
 
 /** In a region of a board that has been looked at as a whole, what was the part there is the part here. */
 function partOfWhole(grid: Grid, whole: CutPart): MarkRow {
-  const at = (value: number, min: number, count: number) => Math.min(count - 1, Math.max(0, Math.floor((value - min) / whole.grid.cell)));
+  const at = (value: number, min: number, count: number) =>
+    Math.min(count - 1, Math.max(0, Math.floor((value - min) / whole.grid.cell)));
   return (row, marks) => {
     const start = at(sampleY(grid, row), whole.grid.minY, whole.grid.rows) * whole.grid.columns;
-    for (let i = 0; i < marks.length; i++) marks[i] = whole.standing[start + at(sampleX(grid, i), whole.grid.minX, whole.grid.columns)] === PART ? 1 : 0;
+    for (let i = 0; i < marks.length; i++)
+      marks[i] = whole.standing[start + at(sampleX(grid, i), whole.grid.minX, whole.grid.columns)] === PART ? 1 : 0;
   };
 }
 
 /** Which pieces are the part: the one with most along the lines, or of a region those of which most was the part. */
-function choosePart(pieces: Int32Array, count: number, grid: Grid, lines: readonly Contour[], whole: CutPart | undefined): Uint8Array {
+function choosePart(
+  pieces: Int32Array,
+  count: number,
+  grid: Grid,
+  lines: readonly Contour[],
+  whole: CutPart | undefined,
+): Uint8Array {
   const isPart = new Uint8Array(count + 1);
   if (count === 0) return isPart;
   const found = countMarked(pieces, count, grid, whole ? partOfWhole(grid, whole) : insideLines(grid, lines));
@@ -116,13 +125,19 @@ export interface Stage {
  */
 export function combineFaces(front: HeightField, back: HeightField, stage: Stage, whole?: CutPart): CutPart {
   const { grid, thickness } = front;
-  if (back.depth.length !== front.depth.length || back.grid.minX !== grid.minX || back.grid.minY !== grid.minY || back.grid.cell !== grid.cell)
+  if (
+    back.depth.length !== front.depth.length ||
+    back.grid.minX !== grid.minX ||
+    back.grid.minY !== grid.minY ||
+    back.grid.cell !== grid.cell
+  )
     throw new RangeError('front and back: got fields on two grids, takes one grid');
   const board = stage.back.board ?? stage.front.board ?? gridExtents(grid);
   const { pieces, count } = findPieces(boardLeft(front, back.depth, board), grid);
   const isPart = choosePart(pieces, count, grid, keptWithin(stage), whole);
   const standing = new Uint8Array(pieces.length);
-  for (let at = 0; at < pieces.length; at++) standing[at] = pieces[at] === 0 ? GONE : isPart[pieces[at]!] === 1 ? PART : LOOSE;
+  for (let at = 0; at < pieces.length; at++)
+    standing[at] = pieces[at] === 0 ? GONE : isPart[pieces[at]!] === 1 ? PART : LOOSE;
   let loosePieces = 0;
   for (let piece = 1; piece <= count; piece++) loosePieces += 1 - isPart[piece]!;
   return { grid, thickness, front, back, standing, loosePieces };

@@ -63,7 +63,12 @@ export class DistanceBand {
     const box = segmentBounds(segment);
     const bottom = Math.max(this.first, firstRow(this.grid, box.minY - reach));
     const top = Math.min(this.end, endRow(this.grid, box.maxY + reach));
-    if (bottom >= top || box.minX - reach > this.grid.minX + this.grid.columns * this.grid.cell || box.maxX + reach < this.grid.minX) return;
+    if (
+      bottom >= top ||
+      box.minX - reach > this.grid.minX + this.grid.columns * this.grid.cell ||
+      box.maxX + reach < this.grid.minX
+    )
+      return;
     if (segment.kind === 'line') this.spreadLine(segment, reach, bottom, top);
     else this.spreadArc(segment, reach, bottom, top, box.minX - reach, box.maxX + reach);
     this.spreadPoint(segment.a, reach);

@@ -25,7 +25,8 @@ export function openingSection(p: Particulars, edge: Edge): EdgeSection {
   const cutter = p.cutters.opening;
   const { thickness } = p;
   const wallAt = (z: number) => radiusAtHeight(cutter, tipDepth - z) - axisOffset;
-  const wallDepth = (s: number) => (s <= -axisOffset ? thickness : Math.min(thickness, Math.max(0, tipDepth - heightAtRadius(cutter, s + axisOffset))));
+  const wallDepth = (s: number) =>
+    s <= -axisOffset ? thickness : Math.min(thickness, Math.max(0, tipDepth - heightAtRadius(cutter, s + axisOffset)));
   if (edge.style === 'square') return { depthAt: wallDepth, wallsAt: (z) => [wallAt(z)], from: atBack, to: atFace };
 
   const { radius: R, drop: e, quirk: q } = edge.bead;
@@ -37,11 +38,26 @@ export function openingSection(p: Particulars, edge: Edge): EdgeSection {
     const half = Math.sqrt(Math.max(0, R * R - (base - z) ** 2));
     return [atPlane + R - half, atPlane + R + half, outer];
   };
-  return { depthAt: (s) => (s < atPlane ? Math.max(base, wallDepth(s)) : intendedDepth(edge.bead, s - atPlane)), wallsAt, from: Math.min(atBack, atPlane), to: atPlane + 2 * R + q };
+  return {
+    depthAt: (s) => (s < atPlane ? Math.max(base, wallDepth(s)) : intendedDepth(edge.bead, s - atPlane)),
+    wallsAt,
+    from: Math.min(atBack, atPlane),
+    to: atPlane + 2 * R + q,
+  };
 }
 
 /** A dado: a flat floor and upright sides, corners as sharp as its outline's. */
-export const dadoSection = (depth: number): EdgeSection => ({ depthAt: (s) => (s <= 0 ? depth : 0), wallsAt: (z) => (z <= depth ? [0] : []), from: 0, to: 0 });
+export const dadoSection = (depth: number): EdgeSection => ({
+  depthAt: (s) => (s <= 0 ? depth : 0),
+  wallsAt: (z) => (z <= depth ? [0] : []),
+  from: 0,
+  to: 0,
+});
 
 /** The outer edge: upright, with nothing beyond it. */
-export const perimeterSection = (thickness: number): EdgeSection => ({ depthAt: (s) => (s >= 0 ? thickness : 0), wallsAt: () => [0], from: 0, to: 0 });
+export const perimeterSection = (thickness: number): EdgeSection => ({
+  depthAt: (s) => (s >= 0 ? thickness : 0),
+  wallsAt: () => [0],
+  from: 0,
+  to: 0,
+});

@@ -29,7 +29,12 @@ function toSetup(worked: WorkedFrame, face: Face, profile: FileProfile, drawing:
 }
 
 /** The rectangle of the face's blank layer. */
-function boardOf(worked: WorkedFrame, face: Face, profile: FileProfile, contoursOn: (layer: string) => Contour[]): Extents | null {
+function boardOf(
+  worked: WorkedFrame,
+  face: Face,
+  profile: FileProfile,
+  contoursOn: (layer: string) => Contour[],
+): Extents | null {
   const layer = nameLayers(worked, profile).get(`${face}/BLANK`);
   const [blank] = layer === undefined ? [] : contoursOn(layer.name);
   return blank === undefined ? null : contourExtents(blank);
@@ -46,10 +51,22 @@ export function faceLines(worked: WorkedFrame, face: Face, profile: FileProfile)
   const home = unplace(worked[face].placement);
 
   const contoursOn = (layer: string): Contour[] =>
-    drawing.entities.flatMap((e) => (e.kind === 'polyline' && e.layer === layer ? [placeContour(home, { closed: e.closed, vertices: e.vertices.map(setup) })] : []));
+    drawing.entities.flatMap((e) =>
+      e.kind === 'polyline' && e.layer === layer
+        ? [placeContour(home, { closed: e.closed, vertices: e.vertices.map(setup) })]
+        : [],
+    );
   const climbsOn = (layer: string): Point3[][] =>
-    drawing.entities.flatMap((e) => (e.kind === 'polyline3d' && e.layer === layer ? [e.points.map(setup).map((p) => ({ ...placePoint(home, p), z: p.z }))] : []));
+    drawing.entities.flatMap((e) =>
+      e.kind === 'polyline3d' && e.layer === layer
+        ? [e.points.map(setup).map((p) => ({ ...placePoint(home, p), z: p.z }))]
+        : [],
+    );
 
-  const layers = layerCuts(worked, face, profile).map((cut): LayerLines => ({ ...cut, contours: contoursOn(cut.layer), climbs: climbsOn(cut.layer) }));
+  const layers = layerCuts(worked, face, profile).map((cut): LayerLines => ({
+    ...cut,
+    contours: contoursOn(cut.layer),
+    climbs: climbsOn(cut.layer),
+  }));
   return { face, thickness: worked.particulars.thickness, board: boardOf(worked, face, profile, contoursOn), layers };
 }

@@ -1,6 +1,6 @@
 import type { FeatureId } from '../frame/members.ts';
 import type { Face } from '../line-sets/line-set.ts';
-import { WELD } from '../tolerances.ts';
+import { PROOF } from '../tolerances.ts';
 import type { WorkedFrame } from '../worked-frame.ts';
 import { PART, type CutPart } from './cut-part.ts';
 import { sampleX, sampleY } from './grid.ts';
@@ -23,7 +23,7 @@ export interface Difference {
   readonly of: FeatureId | null;
 }
 
-/** The largest of each kind; null where there is none above rounding. */
+/** The largest of each kind; null where there is none beyond what the decimals of a file round away. */
 export interface LargestDifference {
   readonly left: Difference | null;
   readonly cut: Difference | null;
@@ -44,7 +44,8 @@ function offBy(features: readonly IntendedFeature[], x: number, y: number, depth
   let aside = isLeft ? 0 : Infinity;
   for (const feature of features) {
     if (!isLeft) aside = Math.min(aside, sideways(feature, x, y, depth));
-    else if (feature.section.depthAt(feature.distance.at({ x, y })!) > depth) aside = Math.max(aside, sideways(feature, x, y, depth));
+    else if (feature.section.depthAt(feature.distance.at({ x, y })!) > depth)
+      aside = Math.max(aside, sideways(feature, x, y, depth));
   }
   return Math.min(Math.abs(intended - depth), aside);
 }
@@ -60,7 +61,11 @@ function offBy(features: readonly IntendedFeature[], x: number, y: number, depth
  *
  * Yields the share done after each row of tiles; it tells the largest of what is left and of what is cut too much.
  */
-export function* findDifference(worked: WorkedFrame, part: CutPart, face: Face): Generator<number, LargestDifference, void> {
+export function* findDifference(
+  worked: WorkedFrame,
+  part: CutPart,
+  face: Face,
+): Generator<number, LargestDifference, void> {
   const { grid, thickness, standing } = part;
   const { depth: depths } = part[face];
   const features = intendedFeatures(worked, face);
@@ -75,9 +80,8 @@ export function* findDifference(worked: WorkedFrame, part: CutPart, face: Face):
     if (through && (!isPart || gone.depth[at]! >= thickness)) return;
     const depth = isPart ? depths[index]! : thickness;
     const intended = meant.depth[at]!;
-    if (Math.abs(depth - intended) <= WELD) return;
     const kind = depth < intended ? 'left' : 'cut';
-    const most = largest[kind]?.off ?? WELD;
+    const most = largest[kind]?.off ?? PROOF;
     if (Math.abs(depth - intended) <= most) return;
     const [x, y] = [sampleX(grid, i), sampleY(grid, j)];
     const off = offBy(features, x, y, depth, intended);
@@ -90,7 +94,8 @@ export function* findDifference(worked: WorkedFrame, part: CutPart, face: Face):
       const tile: Tile = { left, right: Math.min(grid.columns, left + TILE), bottom, top };
       fillTile(meant, features, grid, tile);
       if (through) fillTile(gone, through, grid, tile);
-      for (let j = bottom; j < top; j++) for (let i = left; i < tile.right; i++) look(i, j, (j - bottom) * TILE + i - left);
+      for (let j = bottom; j < top; j++)
+        for (let i = left; i < tile.right; i++) look(i, j, (j - bottom) * TILE + i - left);
     }
     yield top / grid.rows;
   }

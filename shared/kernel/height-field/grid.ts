@@ -22,12 +22,15 @@ const MOST_SAMPLES = 64_000_000;
  */
 export function makeGrid({ minX, minY, maxX, maxY }: Extents, cell: number): Grid {
   if (!(cell > 0)) throw new RangeError(`cell: got ${cell}, takes a length above 0`);
-  if (!(maxX > minX && maxY > minY)) throw new RangeError(`region: got ${minX}, ${minY} to ${maxX}, ${maxY}, takes one with an inside`);
+  if (!(maxX > minX && maxY > minY))
+    throw new RangeError(`region: got ${minX}, ${minY} to ${maxX}, ${maxY}, takes one with an inside`);
   // A hair off a whole number of cells does not call for one more.
   const count = (length: number) => Math.max(1, Math.ceil(length / cell - 1 / 1024));
   const grid = { minX, minY, cell, columns: count(maxX - minX), rows: count(maxY - minY) };
   if (grid.columns * grid.rows > MOST_SAMPLES)
-    throw new RangeError(`cell: got ${cell}, which makes ${grid.columns} × ${grid.rows} samples; takes one that makes at most ${MOST_SAMPLES}`);
+    throw new RangeError(
+      `cell: got ${cell}, which makes ${grid.columns} × ${grid.rows} samples; takes one that makes at most ${MOST_SAMPLES}`,
+    );
   return grid;
 }
 
@@ -35,13 +38,22 @@ export const sampleX = (grid: Grid, i: number): number => grid.minX + (i + 0.5) 
 export const sampleY = (grid: Grid, j: number): number => grid.minY + (j + 0.5) * grid.cell;
 
 /** First column whose sample is at or right of x, from 0 to the count of columns. */
-export const firstColumn = (grid: Grid, x: number): number => clamp(Math.ceil((x - grid.minX) / grid.cell - 0.5), grid.columns);
+export const firstColumn = (grid: Grid, x: number): number =>
+  clamp(Math.ceil((x - grid.minX) / grid.cell - 0.5), grid.columns);
 /** One past the last column whose sample is at or left of x. */
-export const endColumn = (grid: Grid, x: number): number => clamp(Math.floor((x - grid.minX) / grid.cell - 0.5) + 1, grid.columns);
-export const firstRow = (grid: Grid, y: number): number => clamp(Math.ceil((y - grid.minY) / grid.cell - 0.5), grid.rows);
-export const endRow = (grid: Grid, y: number): number => clamp(Math.floor((y - grid.minY) / grid.cell - 0.5) + 1, grid.rows);
+export const endColumn = (grid: Grid, x: number): number =>
+  clamp(Math.floor((x - grid.minX) / grid.cell - 0.5) + 1, grid.columns);
+export const firstRow = (grid: Grid, y: number): number =>
+  clamp(Math.ceil((y - grid.minY) / grid.cell - 0.5), grid.rows);
+export const endRow = (grid: Grid, y: number): number =>
+  clamp(Math.floor((y - grid.minY) / grid.cell - 0.5) + 1, grid.rows);
 
 const clamp = (value: number, most: number): number => (value < 0 ? 0 : value > most ? most : value);
 
 /** The extents of all cells. */
-export const gridExtents = ({ minX, minY, cell, columns, rows }: Grid): Extents => ({ minX, minY, maxX: minX + columns * cell, maxY: minY + rows * cell });
+export const gridExtents = ({ minX, minY, cell, columns, rows }: Grid): Extents => ({
+  minX,
+  minY,
+  maxX: minX + columns * cell,
+  maxY: minY + rows * cell,
+});

@@ -12,18 +12,27 @@ const HALF = Math.PI / 2;
 
 /** An arc cut where it runs level, so that each piece lies on one side of its centre. */
 function edgesOf(s: Segment): Edge[] {
-  const edge = (from: number, to: number, xAt: Edge['xAt']): Edge => ({ low: Math.min(from, to), high: Math.max(from, to), xAt });
+  const edge = (from: number, to: number, xAt: Edge['xAt']): Edge => ({
+    low: Math.min(from, to),
+    high: Math.max(from, to),
+    xAt,
+  });
   if (s.kind === 'line') return [edge(s.a.y, s.b.y, (y) => s.a.x + ((y - s.a.y) / (s.b.y - s.a.y)) * (s.b.x - s.a.x))];
   const { centre, radius, start, sweep } = s;
   const [least, most] = [Math.min(start, start + sweep), Math.max(start, start + sweep)];
   const level: number[] = [];
-  for (let k = Math.ceil((least - HALF) / Math.PI); HALF + k * Math.PI < most; k++) if (HALF + k * Math.PI > least) level.push(HALF + k * Math.PI);
+  for (let k = Math.ceil((least - HALF) / Math.PI); HALF + k * Math.PI < most; k++)
+    if (HALF + k * Math.PI > least) level.push(HALF + k * Math.PI);
   if (sweep < 0) level.reverse();
   const angles = [start, ...level, start + sweep];
   const ys = [s.a.y, ...level.map((angle) => centre.y + radius * Math.sin(angle)), s.b.y];
   return angles.slice(1).map((angle, i) => {
     const side = Math.cos((angles[i]! + angle) / 2) > 0 ? 1 : -1;
-    return edge(ys[i]!, ys[i + 1]!, (y) => centre.x + side * Math.sqrt(Math.max(0, radius * radius - (y - centre.y) ** 2)));
+    return edge(
+      ys[i]!,
+      ys[i + 1]!,
+      (y) => centre.x + side * Math.sqrt(Math.max(0, radius * radius - (y - centre.y) ** 2)),
+    );
   });
 }
 

@@ -18,7 +18,10 @@ export interface TileDepths {
   readonly of: Int16Array;
 }
 
-export const makeTileDepths = (): TileDepths => ({ depth: new Float64Array(TILE * TILE), of: new Int16Array(TILE * TILE) });
+export const makeTileDepths = (): TileDepths => ({
+  depth: new Float64Array(TILE * TILE),
+  of: new Int16Array(TILE * TILE),
+});
 
 /** Segments of a feature that may be the nearest to a sample of the tile within the feature's reach. */
 function segmentsNear({ distance, reach }: IntendedFeature, grid: Grid, tile: Tile): number[] {

@@ -19,17 +19,30 @@ export interface Measured {
 const AGAIN_CELLS = 3;
 const FINER = 16;
 
-function* again(worked: WorkedFrame, stage: Stage, whole: CutPart, found: Difference | null): Generator<number, Difference | null, void> {
+function* again(
+  worked: WorkedFrame,
+  stage: Stage,
+  whole: CutPart,
+  found: Difference | null,
+): Generator<number, Difference | null, void> {
   if (!found) return null;
   const { cell } = whole.grid;
   const margin = AGAIN_CELLS * cell;
-  const grid = makeGrid({ minX: found.x - margin, maxX: found.x + margin, minY: found.y - margin, maxY: found.y + margin }, cell / FINER);
+  const grid = makeGrid(
+    { minX: found.x - margin, maxX: found.x + margin, minY: found.y - margin, maxY: found.y + margin },
+    cell / FINER,
+  );
   const part = yield* shareOf(cutBoard(stage, grid, whole), 0, 0.5);
   const finer = (yield* shareOf(findDifference(worked, part, found.face), 0.5, 1))[found.kind];
   return finer && finer.off > found.off ? finer : found;
 }
 
-function* measureFace(worked: WorkedFrame, stage: Stage, whole: CutPart, face: Face): Generator<number, LargestDifference, void> {
+function* measureFace(
+  worked: WorkedFrame,
+  stage: Stage,
+  whole: CutPart,
+  face: Face,
+): Generator<number, LargestDifference, void> {
   const { left, cut } = yield* shareOf(findDifference(worked, whole, face), 0, 0.9);
   return {
     left: yield* shareOf(again(worked, stage, whole, left), 0.9, 0.95),
@@ -42,7 +55,11 @@ function* measureFace(worked: WorkedFrame, stage: Stage, whole: CutPart, face: F
  * `cell`, then the surroundings of each place found sixteen times finer. Yields the share done. Throws DrawingRefused for a
  * frame that cannot be drawn.
  */
-export function* measureFrame(worked: WorkedFrame, profile: FileProfile, cell: number): Generator<number, Measured, void> {
+export function* measureFrame(
+  worked: WorkedFrame,
+  profile: FileProfile,
+  cell: number,
+): Generator<number, Measured, void> {
   const stage = finishedStage(worked, profile);
   const whole = yield* shareOf(cutBoard(stage, makeGrid(boardExtents(worked, stage), cell)), 0, 0.4);
   const front = yield* shareOf(measureFace(worked, stage, whole, 'front'), 0.4, 0.7);

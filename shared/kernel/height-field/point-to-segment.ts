@@ -14,7 +14,8 @@ export function squareToSegment(s: Segment, { x, y }: Point): number {
   return withinSweep(s, x, y) ? (Math.hypot(x - s.centre.x, y - s.centre.y) - s.radius) ** 2 : toEnds(s, x, y);
 }
 
-const toEnds = ({ a, b }: Segment, x: number, y: number): number => Math.min((x - a.x) ** 2 + (y - a.y) ** 2, (x - b.x) ** 2 + (y - b.y) ** 2);
+const toEnds = ({ a, b }: Segment, x: number, y: number): number =>
+  Math.min((x - a.x) ** 2 + (y - a.y) ** 2, (x - b.x) ** 2 + (y - b.y) ** 2);
 
 /** Whether an arc's centre looks across the arc at a point. */
 export function withinSweep({ centre, a, b, sweep }: Extract<Segment, { kind: 'arc' }>, x: number, y: number): boolean {

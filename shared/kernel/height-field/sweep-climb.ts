@@ -6,7 +6,15 @@ import { endColumn, endRow, firstColumn, firstRow, sampleX, sampleY } from './gr
 import type { HeightField } from './height-field.ts';
 
 /** Cuts rows `first` up to but not `end` of a field along a path in space, the cutter's tip on it (z negative below the face). */
-export function sweepClimb(field: HeightField, first: number, end: number, owner: number, cutter: Cutter, leaves: ClimbDepth, path: readonly Point3[]): void {
+export function sweepClimb(
+  field: HeightField,
+  first: number,
+  end: number,
+  owner: number,
+  cutter: Cutter,
+  leaves: ClimbDepth,
+  path: readonly Point3[],
+): void {
   const { grid, depth, by, thickness } = field;
   for (let k = 1; k < path.length; k++) {
     const a = path[k - 1]!;

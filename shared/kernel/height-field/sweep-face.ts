@@ -42,7 +42,14 @@ function makeReady(layer: LayerLines, cell: number): Sweep {
 }
 
 /** Lowers a stretch of one row of a field to what the distances in a band leave. */
-function cutStretch(field: HeightField, band: DistanceBand, row: number, from: number, to: number, { radial, owner, layer }: Sweep): void {
+function cutStretch(
+  field: HeightField,
+  band: DistanceBand,
+  row: number,
+  from: number,
+  to: number,
+  { radial, owner, layer }: Sweep,
+): void {
   const { depth, by, thickness, grid } = field;
   const { square } = band;
   const start = band.rowStart(row);
@@ -61,7 +68,13 @@ function cutStretch(field: HeightField, band: DistanceBand, row: number, from: n
 }
 
 /** Lowers to full depth what lies inside a pocket's lines and at least the cutter's radius from them. */
-function clearRow(field: HeightField, band: DistanceBand, row: number, inside: InsideRows, { owner, layer }: Sweep): void {
+function clearRow(
+  field: HeightField,
+  band: DistanceBand,
+  row: number,
+  inside: InsideRows,
+  { owner, layer }: Sweep,
+): void {
   const { depth, by, grid } = field;
   const floor = Math.min(layer.depth, field.thickness);
   const least = layer.beside ** 2;
@@ -79,17 +92,25 @@ function clearRow(field: HeightField, band: DistanceBand, row: number, inside: I
   }
 }
 
-function sweepBand(field: HeightField, bands: readonly [DistanceBand, DistanceBand], first: number, end: number, sweep: Sweep): void {
+function sweepBand(
+  field: HeightField,
+  bands: readonly [DistanceBand, DistanceBand],
+  first: number,
+  end: number,
+  sweep: Sweep,
+): void {
   const [axes, lines] = bands;
   axes.begin(first, end);
   for (const axis of sweep.axes) axes.spread(axis, sweep.reach);
-  for (let row = first; row < end; row++) axes.eachTouched(row, (from, to) => cutStretch(field, axes, row, from, to, sweep));
+  for (let row = first; row < end; row++)
+    axes.eachTouched(row, (from, to) => cutStretch(field, axes, row, from, to, sweep));
   if (sweep.pocket) {
     lines.begin(first, end);
     for (const line of sweep.pocket.lines) lines.spread(line, sweep.layer.beside);
     for (let row = first; row < end; row++) clearRow(field, lines, row, sweep.pocket.inside, sweep);
   }
-  for (const path of sweep.layer.climbs) sweepClimb(field, first, end, sweep.owner, sweep.layer.cutter, sweep.leaves, path);
+  for (const path of sweep.layer.climbs)
+    sweepClimb(field, first, end, sweep.owner, sweep.layer.cutter, sweep.leaves, path);
 }
 
 /**
@@ -100,7 +121,11 @@ function sweepBand(field: HeightField, bands: readonly [DistanceBand, DistanceBa
  *
  * Yields the share done, from 0 to 1, after each band of rows, and returns the field: whoever runs it may stop in between.
  */
-export function* sweepFace(cut: FaceCut, grid: Grid, layers: number = cut.layers.length): Generator<number, HeightField, void> {
+export function* sweepFace(
+  cut: FaceCut,
+  grid: Grid,
+  layers: number = cut.layers.length,
+): Generator<number, HeightField, void> {
   const field = uncut(grid, cut.thickness);
   const sweeps = cut.layers.slice(0, layers).map((layer) => makeReady(layer, grid.cell));
   const rows = Math.max(1, Math.floor(BAND_SAMPLES / grid.columns));

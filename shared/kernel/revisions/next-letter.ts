@@ -5,7 +5,8 @@ const LETTERS = 'ABCDEFGHJKLMNPRTUVWY';
 export function nextLetter(letter: string): string {
   if (letter === '') return 'A';
   const digits = [...letter].map((c) => LETTERS.indexOf(c));
-  if (digits.includes(-1)) throw new RangeError(`revision letter: got ${JSON.stringify(letter)}, takes letters of ${LETTERS}`);
+  if (digits.includes(-1))
+    throw new RangeError(`revision letter: got ${JSON.stringify(letter)}, takes letters of ${LETTERS}`);
   for (let i = digits.length - 1; i >= 0; i--) {
     if (digits[i]! + 1 < LETTERS.length) {
       digits[i]!++;

@@ -35,7 +35,10 @@ function asFraction(value: number): string | undefined {
 
 /** A length as people of the trade read it: inches as fractions to 1/64 where exact, else decimals. Throws when not finite. */
 export function formatLength(value: number, unit: Unit): string {
-  return (unit === 'in' && Number.isFinite(value) ? asFraction(value) : undefined) ?? formatDecimal(value, ROUNDED_DIGITS[unit]);
+  return (
+    (unit === 'in' && Number.isFinite(value) ? asFraction(value) : undefined) ??
+    formatDecimal(value, ROUNDED_DIGITS[unit])
+  );
 }
 
 /** With its unit: "30 1/2 in", "775 mm". */

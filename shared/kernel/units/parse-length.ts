@@ -1,7 +1,8 @@
 import { convertLength } from './convert-length.ts';
 import type { Unit } from './unit.ts';
 
-export type ParsedLength = { readonly ok: true; readonly value: number } | { readonly ok: false; readonly takes: string };
+export type ParsedLength =
+  { readonly ok: true; readonly value: number } | { readonly ok: false; readonly takes: string };
 
 const NUMBER = String.raw`(?<decimal>\d+\.\d*|\.\d+|\d+)`;
 const FRACTION = String.raw`(?:(?<whole>\d+)(?:\s+|\s*-\s*))?(?<top>\d+)\s*/\s*(?<bottom>\d+)`;

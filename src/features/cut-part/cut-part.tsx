@@ -4,6 +4,8 @@ import type { FileProfile } from '#shared/kernel/profiles/file-profile.ts';
 import type { WorkedFrame } from '#shared/kernel/worked-frame.ts';
 import { Checkbox } from '../../ui/checkbox.tsx';
 import { Choice } from '../../ui/choice.tsx';
+import { Notice } from '../../ui/notice.tsx';
+import { plural } from '../../ui/plural.ts';
 import { Section } from '../../ui/section.tsx';
 import { Select } from '../../ui/select.tsx';
 import { DifferenceReport } from './difference-report.tsx';
@@ -49,6 +51,7 @@ export function CutPart({ worked, profile = BUILTIN_PROFILES[0]!.profile }: CutP
     { value: 'back', label: 'Back' },
   ];
   if (isSolid) faces.push({ value: 'both', label: 'Both' });
+  const stops = files.worked.findings.filter((finding) => finding.level === 'stop').length;
   const shared = { client, files, view, colours, tokens };
 
   return (
@@ -67,6 +70,11 @@ export function CutPart({ worked, profile = BUILTIN_PROFILES[0]!.profile }: CutP
           />
           {isSolid && <Checkbox label="Leave what has come free" checked={view.loose} onChecked={view.setLoose} />}
         </div>
+        {stops > 0 && (
+          <Notice level="caution">
+            This frame has {plural(stops, 'stop')}: lines may be missing, here and in what is compared.
+          </Notice>
+        )}
         {isSolid ? <SolidPicture {...shared} onLost={() => setIsSolid(false)} /> : <FlatPicture {...shared} />}
       </div>
       <div className="relative w-full shrink-0 overflow-y-auto roomy:w-72">
@@ -75,7 +83,12 @@ export function CutPart({ worked, profile = BUILTIN_PROFILES[0]!.profile }: CutP
         </Section>
         {isSolid && (
           <Section heading="Section plane" level={3}>
-            <PlaneControls region={place.region ?? frameExtents(files.worked)} unit={files.worked.particulars.unit} plane={view.plane} onPlane={view.setPlane} />
+            <PlaneControls
+              region={place.region ?? frameExtents(files.worked)}
+              unit={files.worked.particulars.unit}
+              plane={view.plane}
+              onPlane={view.setPlane}
+            />
           </Section>
         )}
         <Section heading="Intended against cut" level={3}>
@@ -93,4 +106,9 @@ export function CutPart({ worked, profile = BUILTIN_PROFILES[0]!.profile }: CutP
   );
 }
 
-const frameExtents = ({ contours: { width, height } }: WorkedFrame) => ({ minX: 0, minY: 0, maxX: width, maxY: height });
+const frameExtents = ({ contours: { width, height } }: WorkedFrame) => ({
+  minX: 0,
+  minY: 0,
+  maxX: width,
+  maxY: height,
+});

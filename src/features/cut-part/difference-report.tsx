@@ -6,7 +6,7 @@ import { Button } from '../../ui/button.tsx';
 import { classNames } from '../../ui/class-names.ts';
 import { Notice } from '../../ui/notice.tsx';
 import { ProgressText } from '../../ui/progress-text.tsx';
-import { differenceWords, sortDifferences } from './model/difference-words.ts';
+import { differenceWords, noDifferenceWords, sortDifferences } from './model/difference-words.ts';
 import type { useAnswer } from './work/use-answer.ts';
 import type { MeasureWish } from './work/picture.ts';
 
@@ -16,17 +16,27 @@ interface DifferenceReportProps {
   readonly onShow: (place: Point, face: 'front' | 'back') => void;
 }
 
-function Found({ worked, measured, onShow }: { readonly worked: WorkedFrame; readonly measured: Measured; readonly onShow: DifferenceReportProps['onShow'] }) {
+function Found({
+  worked,
+  measured,
+  onShow,
+}: {
+  readonly worked: WorkedFrame;
+  readonly measured: Measured;
+  readonly onShow: DifferenceReportProps['onShow'];
+}) {
   const { unit } = worked.particulars;
   return (
     <>
       <dl className="text-12">
         {(['front', 'back'] as const).map((face) => {
-          const found = sortDifferences(measured[face]);
+          const found = sortDifferences(measured[face], unit);
           return (
             <div key={face} className="mb-1.5">
-              <dt className={classNames('font-bold', face === 'front' ? 'text-front' : 'text-back')}>{face === 'front' ? 'Front' : 'Back'}</dt>
-              {found.length === 0 && <dd>No difference above rounding.</dd>}
+              <dt className={classNames('font-bold', face === 'front' ? 'text-front' : 'text-back')}>
+                {face === 'front' ? 'Front' : 'Back'}
+              </dt>
+              {found.length === 0 && <dd>{noDifferenceWords(unit)}</dd>}
               {found.map((difference) => (
                 <dd key={difference.kind}>
                   {differenceWords(worked, difference)}{' '}
@@ -40,8 +50,9 @@ function Found({ worked, measured, onShow }: { readonly worked: WorkedFrame; rea
         })}
       </dl>
       <p className="text-11 text-pencil">
-        How far the surface that the files cut lies from the one entered: straight down or sideways, whichever is less. Offcuts
-        taken away. Looked for every {formatWithUnit(measured.cell, unit)}, and every {formatWithUnit(measured.fineCell, unit)} about the places found.
+        How far the surface that the files cut lies from the one entered: straight down or sideways, whichever is less.
+        Offcuts taken away. Looked for every {formatWithUnit(measured.cell, unit)}, and every{' '}
+        {formatWithUnit(measured.fineCell, unit)} about the places found.
       </p>
     </>
   );
@@ -71,6 +82,11 @@ export function DifferenceReport({ worked, asked, onShow }: DifferenceReportProp
         </Button>
       </p>
     );
-  if (at === 'failed') return <Notice level="stop" word="Not compared">{reason}</Notice>;
+  if (at === 'failed')
+    return (
+      <Notice level="stop" word="Not compared">
+        {reason}
+      </Notice>
+    );
   return answer && <Found worked={worked} measured={answer} onShow={onShow} />;
 }

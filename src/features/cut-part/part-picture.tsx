@@ -21,7 +21,15 @@ interface PartPictureProps {
 }
 
 /** Over the picture: what goes on while one is made, and why there is none. */
-function PictureNews({ asked, stop, again }: { readonly asked: Asked<unknown>; readonly stop: () => void; readonly again: () => void }) {
+function PictureNews({
+  asked,
+  stop,
+  again,
+}: {
+  readonly asked: Asked<unknown>;
+  readonly stop: () => void;
+  readonly again: () => void;
+}) {
   if (asked.at === 'ready') return null;
   return (
     <div className="absolute bottom-0 left-0 bg-paper px-3 py-1.5">
@@ -46,7 +54,12 @@ function PictureNews({ asked, stop, again }: { readonly asked: Asked<unknown>; r
         </p>
       )}
       {(asked.at === 'refused' || asked.at === 'failed') && (
-        <Notice level="stop" word={asked.at === 'refused' ? 'Cannot be cut' : 'Not shown'} live action={asked.at === 'failed' && <Button onClick={again}>Try again</Button>}>
+        <Notice
+          level="stop"
+          word={asked.at === 'refused' ? 'Cannot be cut' : 'Not shown'}
+          live
+          action={asked.at === 'failed' && <Button onClick={again}>Try again</Button>}
+        >
           {asked.reason}
         </Notice>
       )}
@@ -59,7 +72,14 @@ const STATUS_LOOK = 'min-h-9 text-12';
 const KEYS = 'Arrows turn, with Shift they move; + and − zoom, 0 holds as at first, Enter looks closer at the middle.';
 
 /** The part in three dimensions. */
-export function SolidPicture({ client, files, view, colours, tokens, onLost }: PartPictureProps & { readonly onLost: () => void }) {
+export function SolidPicture({
+  client,
+  files,
+  view,
+  colours,
+  tokens,
+  onLost,
+}: PartPictureProps & { readonly onLost: () => void }) {
   const id = useId();
   const { steps, done, place, shown, plane, loose, hold } = view;
   const { unit, setup } = files.worked.particulars;
@@ -67,7 +87,10 @@ export function SolidPicture({ client, files, view, colours, tokens, onLost }: P
   const slice = useAnswer(client, files, plane && { kind: 'slice', steps: done, region: place.region, plane });
   const palettes = useMemo(
     () => ({
-      palettes: { front: facePalette('front', steps, colours, tokens), back: facePalette('back', steps, colours, tokens) },
+      palettes: {
+        front: facePalette('front', steps, colours, tokens),
+        back: facePalette('back', steps, colours, tokens),
+      },
       inside: tokens['board'],
       ink: tokens.ink,
     }),
@@ -76,7 +99,7 @@ export function SolidPicture({ client, files, view, colours, tokens, onLost }: P
   const facts = picture.answer?.facts ?? null;
   return (
     <>
-      <div className="relative min-h-72 flex-1 border border-rule">
+      <div className="relative min-h-80 flex-1 border border-rule">
         <PartStage
           picture={picture.answer}
           colours={palettes}
@@ -97,7 +120,8 @@ export function SolidPicture({ client, files, view, colours, tokens, onLost }: P
         {describePart({ steps, done, place, shown, plane, facts, unit })}
       </p>
       <p id={`${id}-keys`} className="text-11 text-pencil">
-        Drag to turn, with Shift or the right button to move, wheel or two fingers to zoom, double-click to look closer. {KEYS}
+        Drag to turn, with Shift or the right button to move, wheel or two fingers to zoom, double-click to look closer.{' '}
+        {KEYS}
       </p>
       <p role="status" className={STATUS_LOOK}>
         {stepSentence({ steps, done, facts, unit })}
@@ -113,15 +137,21 @@ export function FlatPicture({ client, files, view, colours, tokens }: PartPictur
   const { steps, done, place, shown } = view;
   const { unit } = files.worked.particulars;
   const face = shown === 'back' ? 'back' : 'front';
-  const relief = useAnswer(client, files, { kind: 'relief', steps: done, region: place.region, face, palette: facePalette(face, steps, colours, tokens) });
+  const relief = useAnswer(client, files, {
+    kind: 'relief',
+    steps: done,
+    region: place.region,
+    face,
+    palette: facePalette(face, steps, colours, tokens),
+  });
   const facts = relief.answer?.facts ?? null;
   return (
     <>
       <Notice level="note" word="Flat picture">
-        This browser shows no three-dimensional drawings (WebGL is missing or switched off), so one face at a time is shown shaded. Everything
-        else works the same.
+        This browser shows no three-dimensional drawings (WebGL is missing or switched off), so one face at a time is
+        shown shaded. Everything else works the same.
       </Notice>
-      <div className="relative min-h-72 flex-1 border border-rule">
+      <div className="relative min-h-80 flex-1 border border-rule">
         <ReliefStage relief={relief.answer} label={`Cut part, ${face}`} describedBy={`${id}-says`} />
         <PictureNews asked={relief} stop={relief.stop} again={relief.again} />
       </div>

@@ -15,7 +15,8 @@ interface PlaneControlsProps {
 /** Places of the slider from one side of the region to the other. */
 const PLACES = 400;
 
-const rangeOf = (region: Extents, runs: Plane['runs']): [number, number] => (runs === 'upright' ? [region.minX, region.maxX] : [region.minY, region.maxY]);
+const rangeOf = (region: Extents, runs: Plane['runs']): [number, number] =>
+  runs === 'upright' ? [region.minX, region.maxX] : [region.minY, region.maxY];
 
 /** A plane across the board, to look at its inside: none, upright or level, and where. */
 export function PlaneControls({ region, unit, plane, onPlane }: PlaneControlsProps) {
@@ -46,7 +47,8 @@ export function PlaneControls({ region, unit, plane, onPlane }: PlaneControlsPro
       {plane && (
         <div>
           <label htmlFor={id}>
-            {plane.runs === 'upright' ? 'From the left edge' : 'From the lower edge'}: {formatWithUnit(snap(plane.at), unit)}
+            {plane.runs === 'upright' ? 'From the left edge' : 'From the lower edge'}:{' '}
+            {formatWithUnit(snap(plane.at), unit)}
           </label>
           <input
             id={id}

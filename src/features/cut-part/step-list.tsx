@@ -85,15 +85,25 @@ function StepRow({ heading = '', words, detail, isCut, isLast, swatch, onWalk }:
   const isBack = heading.startsWith('Back');
   return (
     <li>
-      {heading !== '' && <p className={classNames('mt-1.5 font-bold', isBack ? 'text-back' : 'text-front')}>{heading}</p>}
+      {heading !== '' && (
+        <p className={classNames('mt-1.5 font-bold', isBack ? 'text-back' : 'text-front')}>{heading}</p>
+      )}
       <button
         type="button"
         aria-current={isLast ? 'step' : undefined}
         onClick={onWalk}
-        className={classNames('flex min-h-6 w-full items-baseline gap-2 border-l-4 py-0.5 pl-1.5 text-left hover:border-pencil', isLast ? 'border-ink font-bold' : 'border-paper', !isCut && 'text-pencil')}
+        className={classNames(
+          'flex min-h-6 w-full items-baseline gap-2 border-l-4 py-0.5 pl-1.5 text-left hover:border-pencil',
+          isLast ? 'border-ink font-bold' : 'border-paper',
+          !isCut && 'text-pencil',
+        )}
       >
         <svg aria-hidden="true" viewBox="0 0 10 10" className="size-2.5 shrink-0 translate-y-px">
-          {swatch === null ? <rect width="10" height="10" className="fill-board-light stroke-pencil" /> : <rect width="10" height="10" fill={swatch} opacity={isCut ? 1 : 0.35} />}
+          {swatch === null ? (
+            <rect width="10" height="10" className="fill-board-light stroke-pencil" />
+          ) : (
+            <rect width="10" height="10" fill={swatch} opacity={isCut ? 1 : 0.35} />
+          )}
         </svg>
         <span>
           {words}

@@ -60,7 +60,15 @@ interface FrameTitleBlockProps {
 }
 
 /** Along the bottom of the frame page: where one is, how it stands, and the main action. */
-export function FrameTitleBlock({ frame, shopName, hasChanges, savingCell, action, actionNote, onFiles }: FrameTitleBlockProps) {
+export function FrameTitleBlock({
+  frame,
+  shopName,
+  hasChanges,
+  savingCell,
+  action,
+  actionNote,
+  onFiles,
+}: FrameTitleBlockProps) {
   const name = useEditor((s) => s.history.present.name);
   const [newest] = frame.revisions;
   return (

@@ -86,11 +86,13 @@ export function faceMesh(part: CutPart, face: Face, tolerance: number): FaceMesh
   const { grid } = part;
   const { side, height, kind, by } = makeRaster(part, face);
   const walk = rightTriangles({ side, height, kind }, tolerance);
-  const isLoose = (a: number, b: number, c: number) => kind[a]! >> 8 === LOOSE || kind[b]! >> 8 === LOOSE || kind[c]! >> 8 === LOOSE;
+  const isLoose = (a: number, b: number, c: number) =>
+    kind[a]! >> 8 === LOOSE || kind[b]! >> 8 === LOOSE || kind[c]! >> 8 === LOOSE;
   const isEven = (a: number, b: number, c: number) => by[a] === by[b] && by[a] === by[c];
   const isOutside = (at: number) => by[at] === OUTSIDE;
-  const deepest = (a: number, b: number): number => ((height[a]! < height[b]!) === (face === 'front') ? a : b);
-  const layerOf = (a: number, b: number, c: number): number => (isOutside(a) || isOutside(b) || isOutside(c) ? 0 : by[deepest(deepest(a, b), c)]!);
+  const deepest = (a: number, b: number): number => (height[a]! < height[b]! === (face === 'front') ? a : b);
+  const layerOf = (a: number, b: number, c: number): number =>
+    isOutside(a) || isOutside(b) || isOutside(c) ? 0 : by[deepest(deepest(a, b), c)]!;
 
   const numbers = new Int32Array(side * side);
   let corners = 0;
@@ -103,7 +105,8 @@ export function faceMesh(part: CutPart, face: Face, tolerance: number): FaceMesh
   });
 
   const mesh = new MeshBuilder(corners, partCount + looseCount);
-  const place = (at: number, layer: number) => mesh.corner(sampleX(grid, (at % side) - RING), sampleY(grid, Math.floor(at / side) - RING), height[at]!, layer);
+  const place = (at: number, layer: number) =>
+    mesh.corner(sampleX(grid, (at % side) - RING), sampleY(grid, Math.floor(at / side) - RING), height[at]!, layer);
   const shared = numbers.fill(-1);
   const share = (at: number): number => (shared[at] === -1 ? (shared[at] = place(at, by[at]!)) : shared[at]!);
   let [partAt, looseAt] = [0, 3 * partCount];

@@ -9,7 +9,12 @@ const LIGHT = [-0.4, 0.5, 0.768] as const;
 const SHADE = 0.45;
 
 /** Pixels of one face, RGBA, top row first; what is gone stays clear. Colours by who cut there, light by the slope. */
-export function shadeRelief(part: CutPart, face: Face, flip: Flip, palette: readonly Rgb[]): Uint8ClampedArray<ArrayBuffer> {
+export function shadeRelief(
+  part: CutPart,
+  face: Face,
+  flip: Flip,
+  palette: readonly Rgb[],
+): Uint8ClampedArray<ArrayBuffer> {
   const { grid, standing } = part;
   const { columns, rows, cell } = grid;
   const { depth, by } = part[face];

@@ -65,7 +65,8 @@ export type TakeTriangle = (a: number, b: number, c: number) => void;
 export function rightTriangles(raster: Raster, tolerance: number): (take: TakeTriangle) => void {
   const { side, kind } = raster;
   const last = side - 1;
-  if (last < 2 || (last & (last - 1)) !== 0) throw new RangeError(`side: got ${side}, takes a power of two and one more`);
+  if (last < 2 || (last & (last - 1)) !== 0)
+    throw new RangeError(`side: got ${side}, takes a power of two and one more`);
   const errors = findErrors(raster);
   return (take) => {
     const walk = (ax: number, ay: number, bx: number, by: number, cx: number, cy: number): void => {

@@ -22,7 +22,7 @@ interface Run {
 
 function runsOf(standing: Uint8Array): Run[] {
   const runs: Run[] = [];
-  for (let i = 0; i < standing.length; ) {
+  for (let i = 0; i < standing.length;) {
     const kind = standing[i]!;
     const from = i;
     while (i < standing.length && standing[i] === kind) i++;
@@ -33,13 +33,15 @@ function runsOf(standing: Uint8Array): Run[] {
 
 /** The slice of a part that is one sample wide: a column of samples for an upright plane, a row for a level one. Throws for a wider one. */
 export function makeSlice({ grid, thickness, front, back, standing }: CutPart): Slice {
-  if (grid.columns !== 1 && grid.rows !== 1) throw new RangeError(`slice: got ${grid.columns} × ${grid.rows} samples, takes one row or column`);
+  if (grid.columns !== 1 && grid.rows !== 1)
+    throw new RangeError(`slice: got ${grid.columns} × ${grid.rows} samples, takes one row or column`);
   const isUpright = grid.columns === 1;
   const positions: number[] = [];
   const index: number[] = [];
   const outline: number[] = [];
   let [looseFrom, outlineLooseFrom] = [-1, -1];
-  const point = (k: number, z: number): [number, number, number] => (isUpright ? [sampleX(grid, 0), sampleY(grid, k), z] : [sampleX(grid, k), sampleY(grid, 0), z]);
+  const point = (k: number, z: number): [number, number, number] =>
+    isUpright ? [sampleX(grid, 0), sampleY(grid, k), z] : [sampleX(grid, k), sampleY(grid, 0), z];
   const top = (k: number) => point(k, -front.depth[k]!);
   const under = (k: number) => point(k, back.depth[k]! - thickness);
 

@@ -19,21 +19,33 @@ const SQUARE_MM_TO_CM = 100;
 const areaWords = (area: number, unit: Unit): string =>
   unit === 'in' ? `≈${area.toFixed(2)} square inches` : `≈${(area / SQUARE_MM_TO_CM).toFixed(1)} square centimetres`;
 
-const piecesWords = (count: number) => (count === 0 ? 'Nothing has come free.' : count === 1 ? 'One piece has come free.' : `${count} pieces have come free.`);
+const piecesWords = (count: number) =>
+  count === 0 ? 'Nothing has come free.' : count === 1 ? 'One piece has come free.' : `${count} pieces have come free.`;
 
-const FACE_WORDS = { front: 'Seen from the front', back: 'Seen from the back', both: 'Both faces about the fold' } as const;
+const FACE_WORDS = {
+  front: 'Seen from the front',
+  back: 'Seen from the back',
+  both: 'Both faces about the fold',
+} as const;
 
 /** The step that was taken last, in a sentence. */
 export function stepSentence({ steps, done, facts, unit }: Pick<Looked, 'steps' | 'done' | 'facts' | 'unit'>): string {
   const step = steps[done - 1];
   if (!step) return 'The board as loaded, before any cut.';
   const area = facts?.marked[step.face][step.order];
-  const marked = area === undefined ? '' : area === 0 ? ' It leaves upright walls only here, or nothing.' : ` Its surfaces here: ${areaWords(area, unit)}.`;
+  const marked =
+    area === undefined
+      ? ''
+      : area === 0
+        ? ' It leaves upright walls only here, or nothing.'
+        : ` Its surfaces here: ${areaWords(area, unit)}.`;
   return `After step ${done} of ${steps.length}, ${step.face}, ${step.words.toLowerCase()}: ${step.detail}.${marked}`;
 }
 
 function planeWords({ runs, at }: Plane, unit: Unit): string {
-  return runs === 'upright' ? `Cut open at an upright plane ${formatWithUnit(at, unit)} from the left edge.` : `Cut open at a level plane ${formatWithUnit(at, unit)} from the lower edge.`;
+  return runs === 'upright'
+    ? `Cut open at an upright plane ${formatWithUnit(at, unit)} from the left edge.`
+    : `Cut open at a level plane ${formatWithUnit(at, unit)} from the lower edge.`;
 }
 
 /** What the picture shows, for people who do not see it. */

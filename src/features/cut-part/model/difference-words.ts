@@ -11,7 +11,10 @@ function featureWords({ contours, dados }: WorkedFrame, { of }: Difference): str
 }
 
 /** Digits of what was measured at samples: it is never exact, and is marked so. */
-const DIGITS: Record<Unit, { readonly size: number; readonly place: number }> = { in: { size: 4, place: 2 }, mm: { size: 2, place: 0 } };
+const DIGITS: Record<Unit, { readonly size: number; readonly place: number }> = {
+  in: { size: 4, place: 2 },
+  mm: { size: 2, place: 0 },
+};
 
 /** One difference in words: how much, what, where. */
 export function differenceWords(worked: WorkedFrame, difference: Difference): string {
@@ -25,5 +28,15 @@ export function differenceWords(worked: WorkedFrame, difference: Difference): st
   return `${size(off)} ${unit} ${what}${featureWords(worked, difference)}, at ${place(x)}, ${place(y)}: cut ${deep(depth)}, ${intended === 0 ? 'not meant to be' : `meant to be ${deep(intended)}`}`;
 }
 
-/** The largest differences of a face, the greater first; empty when there are none above rounding. */
-export const sortDifferences = ({ left, cut }: LargestDifference): Difference[] => [left, cut].filter((d) => d !== null).sort((a, b) => b.off - a.off);
+/** The least difference that is told, half of the last digit shown. */
+const leastOff = (unit: Unit): number => 0.5 * 10 ** -DIGITS[unit].size;
+
+/** The largest differences of a face that show in the digits said, the greater first. */
+export function sortDifferences({ left, cut }: LargestDifference, unit: Unit): Difference[] {
+  return [left, cut]
+    .filter((d) => d !== null && d.off >= leastOff(unit))
+    .sort((a, b) => b!.off - a!.off) as Difference[];
+}
+
+/** What is said where there is none. */
+export const noDifferenceWords = (unit: Unit): string => `Less than ${leastOff(unit)} ${unit} off everywhere.`;

@@ -40,7 +40,8 @@ const SHARES = [0.62, 0.4, 0.52, 0.3] as const;
 /** The step that was taken last stands out. */
 const LAST_SHARE = 0.88;
 
-const mix = (a: Rgb, b: Rgb, share: number): Rgb => [0, 1, 2].map((i) => Math.round(a[i]! + (b[i]! - a[i]!) * share)) as unknown as Rgb;
+const mix = (a: Rgb, b: Rgb, share: number): Rgb =>
+  [0, 1, 2].map((i) => Math.round(a[i]! + (b[i]! - a[i]!) * share)) as unknown as Rgb;
 
 /** The colour of each step's surfaces; `last` is the place of the step that stands out, −1 for none. */
 export function stepColours(steps: readonly Step[], last: number, tokens: Tokens): Rgb[] {

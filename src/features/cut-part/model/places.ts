@@ -39,8 +39,16 @@ function placesOf(opening: Opening, unit: Unit): Place[] {
   const corners = insideCorners(opening.contour).map(({ after }) => after.a);
   const words = cornerWords(opening, corners);
   return [
-    { key: opening.id, words: `Opening ${opening.label}`, region: { minX: minX - margin, minY: minY - margin, maxX: maxX + margin, maxY: maxY + margin } },
-    ...corners.map((at, i) => ({ key: `${opening.id}-${i}`, words: `Opening ${opening.label}, ${words[i]}`, region: regionAbout(at, unit) })),
+    {
+      key: opening.id,
+      words: `Opening ${opening.label}`,
+      region: { minX: minX - margin, minY: minY - margin, maxX: maxX + margin, maxY: maxY + margin },
+    },
+    ...corners.map((at, i) => ({
+      key: `${opening.id}-${i}`,
+      words: `Opening ${opening.label}, ${words[i]}`,
+      region: regionAbout(at, unit),
+    })),
   ];
 }
 

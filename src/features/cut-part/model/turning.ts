@@ -40,7 +40,10 @@ export const turnOn = (hold: Hold, aroundUp: number, aroundRight: number): Hold 
   turn: normal(multiply(about('right', aroundRight), multiply(about('up', aroundUp), hold.turn))),
 });
 
-export const panOn = (hold: Hold, right: number, up: number): Hold => ({ ...hold, pan: { x: hold.pan.x + right, y: hold.pan.y + up } });
+export const panOn = (hold: Hold, right: number, up: number): Hold => ({
+  ...hold,
+  pan: { x: hold.pan.x + right, y: hold.pan.y + up },
+});
 
 /** Zooms so that the place of the part at `at` (lengths from the screen's middle, right and up) stays under it. */
 export function zoomOn(hold: Hold, factor: number, at: Point = { x: 0, y: 0 }): Hold {
@@ -61,10 +64,3 @@ export function firstHold(shown: 'front' | 'back' | 'both', flip: Flip): Hold {
   if (shown === 'front') return leaning(NO_TURN);
   return leaning(about(flip === 'side-to-side' ? 'up' : 'right', Math.PI));
 }
-
-/** Straight on, without a lean. */
-export const straightHold = (shown: 'front' | 'back', flip: Flip): Hold => ({
-  turn: shown === 'front' ? NO_TURN : about(flip === 'side-to-side' ? 'up' : 'right', Math.PI),
-  zoom: 1,
-  pan: { x: 0, y: 0 },
-});

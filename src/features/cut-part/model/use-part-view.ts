@@ -51,7 +51,11 @@ export function usePartView(files: FrameFiles) {
     goTo,
     /** Looks at the surroundings of a point as closely as can be. */
     pick: (at: Point) => {
-      setPicked({ key: PICKED, words: `About ${formatLength(at.x, unit)}, ${formatLength(at.y, unit)}`, region: regionAbout(at, unit) });
+      setPicked({
+        key: PICKED,
+        words: `About ${formatLength(at.x, unit)}, ${formatLength(at.y, unit)}`,
+        region: regionAbout(at, unit),
+      });
       goTo(PICKED);
     },
     loose,

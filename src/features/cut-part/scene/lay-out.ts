@@ -22,7 +22,11 @@ const ROOM = 1.12;
  * One copy in the middle; or two about the fold as in the spread: the part turned over at the left, or above when the
  * board is turned end over end, and the part front up beside it.
  */
-export function spreadOut({ minX, minY, maxX, maxY }: Extents, thickness: number, { shown, flip }: Copies): CopyPlace[] {
+export function spreadOut(
+  { minX, minY, maxX, maxY }: Extents,
+  thickness: number,
+  { shown, flip }: Copies,
+): CopyPlace[] {
   const from = { x: (minX + maxX) / 2, y: (minY + maxY) / 2, z: -thickness / 2 };
   if (shown !== 'both') return [{ from, to: { x: 0, y: 0 }, turn: NO_TURN }];
   const isSide = flip === 'side-to-side';
@@ -34,7 +38,12 @@ export function spreadOut({ minX, minY, maxX, maxY }: Extents, thickness: number
 }
 
 /** Length of the scene that the screen is high at zoom 1, so that all copies fit a screen of this width over height. */
-export function visibleHeight({ minX, minY, maxX, maxY }: Extents, thickness: number, { shown, flip }: Copies, aspect: number): number {
+export function visibleHeight(
+  { minX, minY, maxX, maxY }: Extents,
+  thickness: number,
+  { shown, flip }: Copies,
+  aspect: number,
+): number {
   const copies = (runs: Flip) => (shown === 'both' && flip === runs ? 2 + GAP : 1);
   const width = (maxX - minX + thickness) * copies('side-to-side');
   const height = (maxY - minY + thickness) * copies('end-over-end');

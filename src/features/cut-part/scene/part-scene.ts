@@ -2,20 +2,13 @@ import {
   AmbientLight,
   BufferAttribute,
   BufferGeometry,
-  Color,
   DirectionalLight,
   DoubleSide,
-  Group,
   LineBasicMaterial,
-  LineSegments,
-  Mesh,
   MeshBasicMaterial,
-  MeshLambertMaterial,
   OrthographicCamera,
-  Plane as ClippingPlane,
   Quaternion,
   Scene,
-  SRGBColorSpace,
   Vector3,
   WebGLRenderer,
 } from 'three';
@@ -27,13 +20,12 @@ import type { Slice } from '../mesh/slice.ts';
 import { NO_TURN, type Hold } from '../model/turning.ts';
 import type { Picture, Plane, Rgb } from '../work/picture.ts';
 import { spreadOut, visibleHeight } from './lay-out.ts';
+import { BEHIND_LINES, PartCopy } from './part-copy.ts';
+import { colourCorners, colourOf } from './scene-colours.ts';
 
 /** Light that falls everywhere, and from the upper left of the screen. */
 const AMBIENT = 1.6;
 const LAMP = 2;
-
-/** Surfaces give way to lines drawn along them. */
-const BEHIND_LINES = { polygonOffset: true, polygonOffsetFactor: 1, polygonOffsetUnits: 1 };
 
 /** What is shown of a picture. */
 export interface Showing {
@@ -50,54 +42,20 @@ export interface SceneColours {
   readonly ink: Rgb;
 }
 
-const colourOf = ([r, g, b]: Rgb): Color => new Color().setRGB(r / 255, g / 255, b / 255, SRGBColorSpace);
-
-function colourCorners(out: Float32Array, by: Uint8Array, palette: readonly Rgb[]): void {
-  const colours = palette.flatMap((rgb) => colourOf(rgb).toArray());
-  for (let i = 0; i < by.length; i++) {
-    const from = 3 * by[i]!;
-    out[3 * i] = colours[from]!;
-    out[3 * i + 1] = colours[from + 1]!;
-    out[3 * i + 2] = colours[from + 2]!;
-  }
-}
-
-/** One copy of the part: its own materials, since each copy is cut by a plane of its own. */
-class Copy {
-  readonly group = new Group();
-  private readonly skin = new MeshLambertMaterial({ vertexColors: true, flatShading: true, ...BEHIND_LINES });
-  private readonly meshes: readonly [Mesh, Mesh, Mesh, LineSegments];
-
-  constructor(front: BufferGeometry, back: BufferGeometry, cap: BufferGeometry, outline: BufferGeometry, inside: MeshBasicMaterial, ink: LineBasicMaterial) {
-    this.meshes = [new Mesh(front, this.skin), new Mesh(back, this.skin), new Mesh(cap, inside), new LineSegments(outline, ink)];
-    for (const mesh of this.meshes) mesh.frustumCulled = false;
-    this.group.add(...this.meshes);
-  }
-
-  /** Keeps what lies left of an upright plane or below a level one, or the other side; frame view. */
-  cutAt(plane: Plane | null, keepsLow: boolean): void {
-    this.group.updateMatrixWorld(true);
-    const side = keepsLow ? -1 : 1;
-    const kept = plane && new ClippingPlane(plane.runs === 'upright' ? new Vector3(side, 0, 0) : new Vector3(0, side, 0), -side * plane.at);
-    this.skin.clippingPlanes = kept ? [kept.applyMatrix4(this.group.matrixWorld)] : null;
-    this.meshes[2].visible = plane !== null;
-    this.meshes[3].visible = plane !== null;
-  }
-
-  dispose(): void {
-    this.skin.dispose();
-  }
-}
-
 /** The cut part in three dimensions on a canvas. It draws after each change, at most once a frame of the screen, and never otherwise. */
 export class PartScene {
   private readonly renderer: WebGLRenderer;
   private readonly scene = new Scene();
   private readonly camera = new OrthographicCamera();
-  private readonly geometries = { front: new BufferGeometry(), back: new BufferGeometry(), cap: new BufferGeometry(), outline: new BufferGeometry() };
+  private readonly geometries = {
+    front: new BufferGeometry(),
+    back: new BufferGeometry(),
+    cap: new BufferGeometry(),
+    outline: new BufferGeometry(),
+  };
   private readonly inside = new MeshBasicMaterial({ side: DoubleSide, ...BEHIND_LINES });
   private readonly ink = new LineBasicMaterial();
-  private readonly copies: readonly [Copy, Copy];
+  private readonly copies: readonly [PartCopy, PartCopy];
   private region: Extents = { minX: 0, minY: 0, maxX: 1, maxY: 1 };
   private thickness = 1;
   private meshes: { front: FaceMesh; back: FaceMesh } | null = null;
@@ -113,7 +71,10 @@ export class PartScene {
     this.renderer.localClippingEnabled = true;
     this.renderer.setClearAlpha(0);
     const { front, back, cap, outline } = this.geometries;
-    this.copies = [new Copy(front, back, cap, outline, this.inside, this.ink), new Copy(front, back, cap, outline, this.inside, this.ink)];
+    this.copies = [
+      new PartCopy(front, back, cap, outline, this.inside, this.ink),
+      new PartCopy(front, back, cap, outline, this.inside, this.ink),
+    ];
     const lamp = new DirectionalLight(undefined, LAMP);
     lamp.position.set(-0.45, 0.6, 1);
     this.camera.add(lamp, lamp.target);
@@ -197,7 +158,11 @@ export class PartScene {
 
   /** Length of the part to one CSS pixel, as it is held. */
   lengthOfPixel(): number {
-    return visibleHeight(this.region, this.thickness, this.showing, this.size.width / this.size.height) / this.hold.zoom / this.size.height;
+    return (
+      visibleHeight(this.region, this.thickness, this.showing, this.size.width / this.size.height) /
+      this.hold.zoom /
+      this.size.height
+    );
   }
 
   private drawSoon(): void {

@@ -48,7 +48,20 @@ function useScene(canvas: RefObject<HTMLCanvasElement | null>, onLost: () => voi
 }
 
 /** The part in three dimensions: it can be turned, moved and zoomed by mouse, touch and keyboard. */
-export function PartStage({ picture, colours, showing, plane, slice, hold, onHold, onReset, onPick, onLost, label, describedBy }: PartStageProps) {
+export function PartStage({
+  picture,
+  colours,
+  showing,
+  plane,
+  slice,
+  hold,
+  onHold,
+  onReset,
+  onPick,
+  onLost,
+  label,
+  describedBy,
+}: PartStageProps) {
   const area = useRef<HTMLDivElement>(null);
   const canvas = useRef<HTMLCanvasElement>(null);
   const scene = useScene(canvas, onLost);
@@ -80,7 +93,7 @@ export function PartStage({ picture, colours, showing, plane, slice, hold, onHol
       aria-label={label}
       aria-describedby={describedBy}
       aria-keyshortcuts="ArrowLeft ArrowRight ArrowUp ArrowDown + - 0 Enter"
-      className="relative size-full cursor-grab touch-none select-none focus-visible:-outline-offset-2 active:cursor-grabbing"
+      className="absolute inset-0 cursor-grab touch-none select-none focus-visible:-outline-offset-2 active:cursor-grabbing"
       {...turning}
     >
       <canvas ref={canvas} aria-hidden="true" className="absolute inset-0 size-full" />

@@ -49,9 +49,12 @@ export function useTurning({ hold, onHold, onReset, onPick, pixel, area }: Turni
   }, [area]);
 
   function pinch(before: Point, now: Point, other: Point): void {
-    const factor = Math.hypot(now.x - other.x, now.y - other.y) / Math.max(1, Math.hypot(before.x - other.x, before.y - other.y));
+    const factor =
+      Math.hypot(now.x - other.x, now.y - other.y) / Math.max(1, Math.hypot(before.x - other.x, before.y - other.y));
     const moved = lengths({ x: (now.x - before.x) / 2, y: (now.y - before.y) / 2 });
-    onHold(zoomOn(panOn(hold, moved.x, moved.y), factor, lengths({ x: (now.x + other.x) / 2, y: (now.y + other.y) / 2 })));
+    onHold(
+      zoomOn(panOn(hold, moved.x, moved.y), factor, lengths({ x: (now.x + other.x) / 2, y: (now.y + other.y) / 2 })),
+    );
   }
 
   function drag(event: PointerEvent, before: Point): void {
@@ -65,8 +68,13 @@ export function useTurning({ hold, onHold, onReset, onPick, pixel, area }: Turni
   }
 
   function press(key: string, moves: boolean): Hold | undefined {
-    const [right, up] = ({ ArrowRight: [1, 0], ArrowLeft: [-1, 0], ArrowUp: [0, 1], ArrowDown: [0, -1] } as const)[key] ?? [0, 0];
-    if (right !== 0 || up !== 0) return moves ? panOn(hold, right * PAN_KEY_PX * pixel(), up * PAN_KEY_PX * pixel()) : turnOn(hold, right * TURN_KEY, -up * TURN_KEY);
+    const [right, up] = ({ ArrowRight: [1, 0], ArrowLeft: [-1, 0], ArrowUp: [0, 1], ArrowDown: [0, -1] } as const)[
+      key
+    ] ?? [0, 0];
+    if (right !== 0 || up !== 0)
+      return moves
+        ? panOn(hold, right * PAN_KEY_PX * pixel(), up * PAN_KEY_PX * pixel())
+        : turnOn(hold, right * TURN_KEY, -up * TURN_KEY);
     if (key === '+' || key === '=') return zoomOn(hold, KEY_ZOOM);
     if (key === '-') return zoomOn(hold, 1 / KEY_ZOOM);
     return undefined;

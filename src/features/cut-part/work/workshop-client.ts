@@ -40,7 +40,12 @@ export class WorkshopClient {
   }
 
   /** Asks about a frame; asking about another one gives up all that is open. Rejects with GivenUp when `signal` aborts, and with CannotCut. */
-  ask<W extends Wish>(frame: FrameFiles, wish: W, onProgress: (done: number) => void, signal: AbortSignal): Promise<Answers[W['kind']]> {
+  ask<W extends Wish>(
+    frame: FrameFiles,
+    wish: W,
+    onProgress: (done: number) => void,
+    signal: AbortSignal,
+  ): Promise<Answers[W['kind']]> {
     const worker = this.worker ?? this.begin();
     if (this.frame !== frame) {
       this.rejectAll(() => new GivenUp('the frame has changed'));

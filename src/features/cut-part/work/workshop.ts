@@ -50,7 +50,15 @@ export class Workshop {
     yield 0.8;
     const back = faceMesh(part, 'back', tolerance);
     yield 1;
-    return { steps, region: region ?? this.board, thickness: part.thickness, cell: part.grid.cell, front, back, facts: factsOf(part, this.stage) };
+    return {
+      steps,
+      region: region ?? this.board,
+      thickness: part.thickness,
+      cell: part.grid.cell,
+      front,
+      back,
+      facts: factsOf(part, this.stage),
+    };
   }
 
   /** The cut through the board at a plane, one sample wide and swept anew, so that it is as sharp as the region allows. */
@@ -59,7 +67,10 @@ export class Workshop {
     const area = region ?? this.board;
     const cell = Math.max(this.length(FINEST_MM), longest(area) / SLICE_SAMPLES);
     const half = cell / 2;
-    const strip = runs === 'upright' ? { ...area, minX: at - half, maxX: at + half } : { ...area, minY: at - half, maxY: at + half };
+    const strip =
+      runs === 'upright'
+        ? { ...area, minX: at - half, maxX: at + half }
+        : { ...area, minY: at - half, maxY: at + half };
     return makeSlice(yield* shareOf(cutBoard(stageAfter(this.stage, steps), makeGrid(strip, cell), whole), 0.8, 1));
   }
 
@@ -84,7 +95,8 @@ export class Workshop {
   }
 
   private *wholeAfter(steps: number): Work<CutPart> {
-    if (this.whole?.steps !== steps) this.whole = { steps, part: yield* cutBoard(stageAfter(this.stage, steps), this.gridOf(this.board)) };
+    if (this.whole?.steps !== steps)
+      this.whole = { steps, part: yield* cutBoard(stageAfter(this.stage, steps), this.gridOf(this.board)) };
     return this.whole.part;
   }
 

@@ -24,7 +24,11 @@ export function CornerView() {
   const [wanted, setWanted] = useState('');
   const [name, angle] = angles.find(([key]) => key === wanted) ?? angles[0] ?? ['', 0];
   const chosen = particulars.edge.corners ?? 'lift';
-  const pictures = useMemo(() => (name === '' ? [] : METHODS.map((m) => ({ ...m, svg: pictureSvg(cornerPicture(particulars, m.method, angle)) }))), [particulars, name, angle]);
+  const pictures = useMemo(
+    () =>
+      name === '' ? [] : METHODS.map((m) => ({ ...m, svg: pictureSvg(cornerPicture(particulars, m.method, angle)) })),
+    [particulars, name, angle],
+  );
   if (name === '') return <p>No opening has an inside corner.</p>;
 
   const take = (corners: CornerMethod) => {
@@ -35,7 +39,13 @@ export function CornerView() {
     <>
       {angles.length > 1 && (
         <div className="mb-4 w-72">
-          <Select label="Inside angle" layout="row" options={angles.map(([key]) => ({ value: key, label: `${key}°` }))} value={name} onValue={setWanted} />
+          <Select
+            label="Inside angle"
+            layout="row"
+            options={angles.map(([key]) => ({ value: key, label: `${key}°` }))}
+            value={name}
+            onValue={setWanted}
+          />
         </div>
       )}
       {pictures.map(({ method, heading, svg }) => (

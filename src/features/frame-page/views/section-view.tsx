@@ -42,10 +42,22 @@ export function SectionView() {
   const square = useMemo(() => edgeOfOpening(edge, { square: true }), [edge]);
   return (
     <>
-      {hasOwn && <EdgePicture heading={isBeaded ? 'Section across the beaded edge' : 'Section across the square edge'} particulars={particulars} edge={edge} />}
-      {hasSquare && <EdgePicture heading="Section across the edge that stays square" particulars={particulars} edge={square} />}
+      {hasOwn && (
+        <EdgePicture
+          heading={isBeaded ? 'Section across the beaded edge' : 'Section across the square edge'}
+          particulars={particulars}
+          edge={edge}
+        />
+      )}
+      {hasSquare && (
+        <EdgePicture heading="Section across the edge that stays square" particulars={particulars} edge={square} />
+      )}
       {contours.openings.length === 0 && <p>There is no opening to cut across.</p>}
-      {isBeaded && <p className="text-12 text-pencil">Thick: what is left. Thin: each cutter at its axis. Dotted red: the bead as entered.</p>}
+      {isBeaded && (
+        <p className="text-12 text-pencil">
+          Thick: what is left. Thin: each cutter at its axis. Dotted red: the bead as entered.
+        </p>
+      )}
     </>
   );
 }

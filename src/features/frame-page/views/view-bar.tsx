@@ -17,7 +17,11 @@ interface ViewBarProps {
 /** What the middle of the page shows. */
 export function ViewBar({ view, onView }: ViewBarProps) {
   return (
-    <div role="group" aria-label="What is shown" className="flex h-9 shrink-0 items-center gap-x-4 border-b border-rule px-4 print:hidden">
+    <div
+      role="group"
+      aria-label="What is shown"
+      className="flex h-9 shrink-0 items-center gap-x-4 border-b border-rule px-4 print:hidden"
+    >
       {VIEWS.map((entry) => (
         <span key={entry.view} className={entry.view === view ? 'font-bold' : ''}>
           <Button kind="quiet" aria-pressed={entry.view === view} onClick={() => onView(entry.view)}>

@@ -21,8 +21,14 @@ const bead = (changes: Partial<Bead>, more: Partial<Particulars> = {}): Particul
   return { ...base, ...more, edge: { style: 'beaded', bead: entered } satisfies BeadedEdge };
 };
 const cutters = (changes: Partial<Cutters>, p = base): Particulars => ({ ...p, cutters: { ...p.cutters, ...changes } });
-const between = (width: number): Particulars => ({ ...base, outline: { ...members, layout: { columns: [{ opening: {} }, { opening: {} }], between: width } } });
-const arched = (arch: number, width: number): Particulars => ({ ...base, outline: { ...members, width, layout: { opening: { arch } } } });
+const between = (width: number): Particulars => ({
+  ...base,
+  outline: { ...members, layout: { columns: [{ opening: {} }, { opening: {} }], between: width } },
+});
+const arched = (arch: number, width: number): Particulars => ({
+  ...base,
+  outline: { ...members, width, layout: { opening: { arch } } },
+});
 
 const CASES: Case[] = [
   {
@@ -105,8 +111,23 @@ function roundedL(radius: number): Particulars {
     ...base,
     outline: {
       kind: 'traced',
-      perimeter: [[-10, -10], [20, -10], [20, 20], [-10, 20]],
-      openings: [[[0, 0], [10, 0], [10, 5], [5 + radius, 5, -Math.tan(Math.PI / 8)], [5, 5 + radius], [5, 10], [0, 10]]],
+      perimeter: [
+        [-10, -10],
+        [20, -10],
+        [20, 20],
+        [-10, 20],
+      ],
+      openings: [
+        [
+          [0, 0],
+          [10, 0],
+          [10, 5],
+          [5 + radius, 5, -Math.tan(Math.PI / 8)],
+          [5, 5 + radius],
+          [5, 10],
+          [0, 10],
+        ],
+      ],
     },
   };
 }

@@ -34,9 +34,12 @@ describe('When the bead of the worked example is entered, then its numbers are t
     expect(e.maxY).toBeCloseTo(29.75 + offset, 6);
   });
 
-  test.each(['BEAD_INNER', 'BEAD_OUTER', 'QUIRK', 'QUIRK_CORNER'] as const)('%s lies at the base, 0.10375 below the face', (name) => {
-    expect(setOf(beadedExample(), name).depth).toBeCloseTo(0.10375, 6);
-  });
+  test.each(['BEAD_INNER', 'BEAD_OUTER', 'QUIRK', 'QUIRK_CORNER'] as const)(
+    '%s lies at the base, 0.10375 below the face',
+    (name) => {
+      expect(setOf(beadedExample(), name).depth).toBeCloseTo(0.10375, 6);
+    },
+  );
 
   test('the 30° V is 0.027800 in radius at the face when its tip is at the base', () => {
     const path = setOf(beadedExample(), 'QUIRK_CORNER').shapes[0]!;
@@ -57,7 +60,17 @@ describe('When the bead of the worked example is entered, then its numbers are t
 
   test('line sets come in cutting order, beads before openings, the perimeter last', () => {
     const names = workFrame(beadedExample()).front.lineSets.map((s) => s.set);
-    expect(names).toEqual(['BEAD_INNER', 'BEAD_OUTER', 'QUIRK', 'QUIRK_CORNER', 'OPENING', 'OPENING_AXIS', 'CORNER_LIFT', 'PERIMETER', 'BLANK']);
+    expect(names).toEqual([
+      'BEAD_INNER',
+      'BEAD_OUTER',
+      'QUIRK',
+      'QUIRK_CORNER',
+      'OPENING',
+      'OPENING_AXIS',
+      'CORNER_LIFT',
+      'PERIMETER',
+      'BLANK',
+    ]);
   });
 });
 
@@ -67,7 +80,12 @@ describe('When openings have arches or come from a drawing, then bead lines encl
     return beadedExample({
       outline: {
         kind: 'traced',
-        perimeter: [[-far, -far], [far, -far], [far, far], [-far, far]],
+        perimeter: [
+          [-far, -far],
+          [far, -far],
+          [far, far],
+          [-far, far],
+        ],
         openings: [outline.vertices.map((v): TracedVertex => [v.x, v.y, v.bulge])],
       },
       dados: [],
@@ -102,7 +120,11 @@ describe('When openings have arches or come from a drawing, then bead lines encl
     const p = beadedExample({ outline: { ...outline, layout: { opening: { arch: 1.5 } } }, dados: [] });
     // R = (c²/4 + h²)/2h over the opening's 29.5 with rise 1.5: circular segments, Machinery's Handbook.
     const R = (29.5 ** 2 / 4 + 1.5 ** 2) / 3;
-    for (const [name, offset] of [['BEAD_INNER', -0.015625], ['BEAD_OUTER', 0.203125], ['QUIRK', 0.25]] as const) {
+    for (const [name, offset] of [
+      ['BEAD_INNER', -0.015625],
+      ['BEAD_OUTER', 0.203125],
+      ['QUIRK', 0.25],
+    ] as const) {
       const { vertices } = contoursOf(setOf(p, name))[0]!;
       const i = vertices.findIndex((v) => v.bulge !== 0);
       const [a, b] = [vertices[i]!, vertices[(i + 1) % vertices.length]!];
@@ -119,13 +141,17 @@ describe('When the quirk is wider than its cutter, then it gets the lines it nee
 
   test('narrower: first and last at the cutter’s radius from the walls, no gap between', () => {
     fc.assert(
-      fc.property(fc.double({ min: 0.05, max: 0.5, noNaN: true }), fc.double({ min: 1.001, max: 6, noNaN: true }), (diameter, times) => {
-        const quirk = diameter * times;
-        const offsets = quirkOffsets({ radius: 0.1, drop: 0, quirk }, diameter);
-        expect(offsets[0]! - diameter / 2).toBeCloseTo(0.2, 9);
-        expect(offsets.at(-1)! + diameter / 2).toBeCloseTo(0.2 + quirk, 9);
-        for (let i = 1; i < offsets.length; i++) expect(offsets[i]! - offsets[i - 1]!).toBeLessThan(diameter);
-      }),
+      fc.property(
+        fc.double({ min: 0.05, max: 0.5, noNaN: true }),
+        fc.double({ min: 1.001, max: 6, noNaN: true }),
+        (diameter, times) => {
+          const quirk = diameter * times;
+          const offsets = quirkOffsets({ radius: 0.1, drop: 0, quirk }, diameter);
+          expect(offsets[0]! - diameter / 2).toBeCloseTo(0.2, 9);
+          expect(offsets.at(-1)! + diameter / 2).toBeCloseTo(0.2 + quirk, 9);
+          for (let i = 1; i < offsets.length; i++) expect(offsets[i]! - offsets[i - 1]!).toBeLessThan(diameter);
+        },
+      ),
     );
   });
 
@@ -137,7 +163,9 @@ describe('When the quirk is wider than its cutter, then it gets the lines it nee
 describe('When one opening keeps a square edge, then it is cut on layers of its own', () => {
   const outline = workedExample().outline;
   if (outline.kind !== 'members') throw new Error('members');
-  const p = beadedExample({ outline: { ...outline, layout: { columns: [{ opening: {} }, { opening: { edge: 'square' } }], between: 1.5 } } });
+  const p = beadedExample({
+    outline: { ...outline, layout: { columns: [{ opening: {} }, { opening: { edge: 'square' } }], between: 1.5 } },
+  });
 
   test('it has no bead, and its size is true at the face', () => {
     expect(contoursOf(setOf(p, 'BEAD_INNER'))).toHaveLength(1);
@@ -151,7 +179,10 @@ describe('When one opening keeps a square edge, then it is cut on layers of its 
 
 describe('When a V-cutter follows in the corners of openings', () => {
   test('it starts where both flanks touch the sides at the face, and ends in the corner', () => {
-    const p = workedExample({ edge: { style: 'square', sizeHeldAt: 'face', corners: 'vee' }, cutters: { ...workedExample().cutters, corner: beadCutterSet.corner } });
+    const p = workedExample({
+      edge: { style: 'square', sizeHeldAt: 'face', corners: 'vee' },
+      cutters: { ...workedExample().cutters, corner: beadCutterSet.corner },
+    });
     const set = setOf(p, 'CORNER_VEE');
     expect(set.shapes).toHaveLength(8);
     const path = set.shapes[0]!;

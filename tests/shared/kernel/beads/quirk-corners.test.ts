@@ -9,10 +9,41 @@ const CUTTER = { kind: 'vee', includedAngle: 30, fluteLength: 1 } as const;
 const FLOOR = 0.10375;
 const FILLET = 0.0625;
 
-const square: Contour = { closed: true, vertices: [[0, 0], [4, 0], [4, 3], [0, 3]].map(([x, y]) => ({ x: x!, y: y!, bulge: 0 })) };
-const arched: Contour = { closed: true, vertices: [{ x: 0, y: 0, bulge: 0 }, { x: 4, y: 0, bulge: 0 }, { x: 4, y: 3, bulge: 0.2 }, { x: 0, y: 3, bulge: 0 }] };
-const hollow: Contour = { closed: true, vertices: [{ x: 0, y: 0, bulge: -0.15 }, { x: 4, y: 0, bulge: -0.15 }, { x: 4, y: 3, bulge: -0.15 }, { x: 0, y: 3, bulge: -0.15 }] };
-const sharp: Contour = { closed: true, vertices: [[0, 0], [4, 0], [0, 2]].map(([x, y]) => ({ x: x!, y: y!, bulge: 0 })) };
+const square: Contour = {
+  closed: true,
+  vertices: [
+    [0, 0],
+    [4, 0],
+    [4, 3],
+    [0, 3],
+  ].map(([x, y]) => ({ x: x!, y: y!, bulge: 0 })),
+};
+const arched: Contour = {
+  closed: true,
+  vertices: [
+    { x: 0, y: 0, bulge: 0 },
+    { x: 4, y: 0, bulge: 0 },
+    { x: 4, y: 3, bulge: 0.2 },
+    { x: 0, y: 3, bulge: 0 },
+  ],
+};
+const hollow: Contour = {
+  closed: true,
+  vertices: [
+    { x: 0, y: 0, bulge: -0.15 },
+    { x: 4, y: 0, bulge: -0.15 },
+    { x: 4, y: 3, bulge: -0.15 },
+    { x: 0, y: 3, bulge: -0.15 },
+  ],
+};
+const sharp: Contour = {
+  closed: true,
+  vertices: [
+    [0, 0],
+    [4, 0],
+    [0, 2],
+  ].map(([x, y]) => ({ x: x!, y: y!, bulge: 0 })),
+};
 
 describe.each([
   ['square', square, 4],
@@ -20,7 +51,13 @@ describe.each([
   ['between hollow arcs', hollow, 4],
   ['of any angle', sharp, 3],
 ] as const)('When the quirk’s corners are %s', (_, wall, corners) => {
-  const { paths, missed } = veeCorners(wall, { floor: FLOOR, plane: 0, filletRadius: FILLET, cutter: CUTTER, chord: 0.001 });
+  const { paths, missed } = veeCorners(wall, {
+    floor: FLOOR,
+    plane: 0,
+    filletRadius: FILLET,
+    cutter: CUTTER,
+    chord: 0.001,
+  });
   const outline = flattenContour(wall, 1e-6);
 
   test('then each corner has a path', () => {

@@ -80,8 +80,12 @@ describe('When the height is asked for at a radius', () => {
     expect(heightAtRadius(vee, 0)).toBe(0);
   });
 
-  test('of a straight cutter, or at a radius below 0, then that throws', () => {
-    expect(() => heightAtRadius(straight, 0.1)).toThrow(/straight/);
+  test('of a straight cutter, then it is its tip within its radius, and beyond that none', () => {
+    expect(heightAtRadius(straight, straight.diameter / 2)).toBe(0);
+    expect(heightAtRadius(straight, straight.diameter / 2 + 1e-9)).toBe(Infinity);
+  });
+
+  test('at a radius below 0, then that throws', () => {
     expect(() => heightAtRadius(vee, -0.1)).toThrow(/-0\.1/);
   });
 });

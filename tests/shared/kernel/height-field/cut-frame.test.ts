@@ -16,7 +16,10 @@ const ROUNDED = 0.5e-6 / tan(1.5) + 1e-7;
 describe('When the worked example is cut', () => {
   test('then the walls of an opening lean by the cutter’s side angle: s = z·tan 1.5° inside the entered line, 0.019639 at the back', () => {
     // A strip across the left side of opening A, x = 1.75, far from its corners.
-    const { front } = cutFrame(workedExample(), { cell: 0.0005, region: { minX: 1.74, maxX: 1.79, minY: 14.9995, maxY: 15.0005 } });
+    const { front } = cutFrame(workedExample(), {
+      cell: 0.0005,
+      region: { minX: 1.74, maxX: 1.79, minY: 14.9995, maxY: 15.0005 },
+    });
     const worst = new Worst();
     for (const { x, depth } of samples(front)) {
       const wanted = Math.min(0.75, Math.max(0, (x - 1.75) / tan(1.5)));
@@ -39,8 +42,13 @@ describe('When the worked example is cut', () => {
     const part = cutFrame(workedExample(), { cell: 0.05 });
     expect(part.loosePieces).toBe(3);
     // With more trim than the squaring cutter is wide a strip is left as well.
-    expect(cutFrame(workedExample({ setup: { ...workedExample().setup, trim: 0.75 } }), { cell: 0.05 }).loosePieces).toBe(4);
-    const standing = (x: number, y: number) => part.standing[Math.floor((y - part.grid.minY) / 0.05) * part.grid.columns + Math.floor((x - part.grid.minX) / 0.05)];
+    expect(
+      cutFrame(workedExample({ setup: { ...workedExample().setup, trim: 0.75 } }), { cell: 0.05 }).loosePieces,
+    ).toBe(4);
+    const standing = (x: number, y: number) =>
+      part.standing[
+        Math.floor((y - part.grid.minY) / 0.05) * part.grid.columns + Math.floor((x - part.grid.minX) / 0.05)
+      ];
     // On a stile, in an opening's kerf, in its offcut.
     expect(standing(1.5, 15)).toBe(PART);
     expect(standing(1.85, 15)).toBe(GONE);
@@ -49,7 +57,9 @@ describe('When the worked example is cut', () => {
 
   test('then stopping after a step leaves out what comes later', () => {
     const worked = workFrame(workedExample());
-    const cuts = [...worked.back.lineSets, ...worked.front.lineSets].filter((s) => s.cutter !== null && s.set !== 'OPENING').length;
+    const cuts = [...worked.back.lineSets, ...worked.front.lineSets].filter(
+      (s) => s.cutter !== null && s.set !== 'OPENING',
+    ).length;
     const before = cutFrame(workedExample(), { cell: 0.1, steps: 0 });
     expect([deepest(before.front), deepest(before.back), before.loosePieces]).toEqual([0, 0, 0]);
     const dados = cutFrame(workedExample(), { cell: 0.1, steps: 1 });
@@ -66,8 +76,14 @@ function expectAlike(a: ReturnType<typeof cutFrame>, b: ReturnType<typeof cutFra
   const worst = new Worst();
   for (let at = 0; at < a.front.depth.length; at++) {
     if (a.standing[at] !== PART && b.standing[at] !== PART) continue;
-    worst.take(Math.abs(a.front.depth[at]! - b.front.depth[at]!), () => `front, sample ${at}: ${a.front.depth[at]} and ${b.front.depth[at]}`);
-    worst.take(Math.abs(a.back.depth[at]! - b.back.depth[at]!), () => `back, sample ${at}: ${a.back.depth[at]} and ${b.back.depth[at]}`);
+    worst.take(
+      Math.abs(a.front.depth[at]! - b.front.depth[at]!),
+      () => `front, sample ${at}: ${a.front.depth[at]} and ${b.front.depth[at]}`,
+    );
+    worst.take(
+      Math.abs(a.back.depth[at]! - b.back.depth[at]!),
+      () => `back, sample ${at}: ${a.back.depth[at]} and ${b.back.depth[at]}`,
+    );
   }
   expect(worst.count).toBeGreaterThan(10000);
   expect(worst.error, worst.where).toBeLessThan(tolerance);
@@ -121,16 +137,19 @@ describe('When an opening’s corner is lifted', () => {
     expect(depthAt(front, 1.75 + 0.0006, 1.25 + 0.0006)).toBeGreaterThan(0);
   });
 
-  test.each(residues[0]!.levels.map((level) => ({ ...level })))('then at $depth below the face the diagonal keeps what the corner’s numbers say', ({ depth, lifted }) => {
-    const wall = depth * tan(1.5);
-    let first = Infinity;
-    for (let d = 0.0002; d < 0.17; d += 0.0002) {
-      const got = depthAt(front, 1.75 + d, 1.25 + d);
-      if (got > 0 && got >= depth - 1e-6) first = Math.min(first, d);
-    }
-    const diagonal = (first - wall) * Math.SQRT2;
-    expect(Math.abs(diagonal - lifted.diagonal)).toBeLessThan(0.0004 * Math.SQRT2 + 0.0002);
-  });
+  test.each(residues[0]!.levels.map((level) => ({ ...level })))(
+    'then at $depth below the face the diagonal keeps what the corner’s numbers say',
+    ({ depth, lifted }) => {
+      const wall = depth * tan(1.5);
+      let first = Infinity;
+      for (let d = 0.0002; d < 0.17; d += 0.0002) {
+        const got = depthAt(front, 1.75 + d, 1.25 + d);
+        if (got > 0 && got >= depth - 1e-6) first = Math.min(first, d);
+      }
+      const diagonal = (first - wall) * Math.SQRT2;
+      expect(Math.abs(diagonal - lifted.diagonal)).toBeLessThan(0.0004 * Math.SQRT2 + 0.0002);
+    },
+  );
 });
 
 describe('When a beaded edge is cut', () => {
@@ -175,7 +194,8 @@ describe('When a dado is stopped inside the frame', () => {
     // Relief 0.144488 (spec), so that it ends at 4.855512; x 0.245 … 1.005.
     const { back } = cutFrame(p, { cell: 0.001, region: { minX: 0.2, maxX: 0.5, minY: 4.8, maxY: 5.1 } });
     let first = Infinity;
-    for (let d = 0.0005; d < 0.2; d += 0.0005) if (depthAt(back, 0.245 + d, 4.855512 + d) > 0) first = Math.min(first, d);
+    for (let d = 0.0005; d < 0.2; d += 0.0005)
+      if (depthAt(back, 0.245 + d, 4.855512 + d) > 0) first = Math.min(first, d);
     expect(Math.abs(first * Math.SQRT2 - 0.1875 * (Math.SQRT2 - 1))).toBeLessThan(0.001 * Math.SQRT2);
     // The panel's square corner passes: x 0.25, y 5.
     expect(depthAt(back, 0.2505, 5.0005)).toBe(0.25);

@@ -37,10 +37,17 @@ export const faceWith = (...layers: LayerLines[]): FaceCut => ({
   layers: layers.map((l, order) => ({ ...l, order })),
 });
 
-export const sweep = (cut: FaceCut, region: Extents, cell: number): HeightField => runThrough(sweepFace(cut, makeGrid(region, cell)));
+export const sweep = (cut: FaceCut, region: Extents, cell: number): HeightField =>
+  runThrough(sweepFace(cut, makeGrid(region, cell)));
 
-export const openLine = (...points: [number, number, number?][]): Contour => ({ closed: false, vertices: points.map(([x, y, bulge = 0]) => ({ x, y, bulge })) });
-export const closedLine = (...points: [number, number, number?][]): Contour => ({ ...openLine(...points), closed: true });
+export const openLine = (...points: [number, number, number?][]): Contour => ({
+  closed: false,
+  vertices: points.map(([x, y, bulge = 0]) => ({ x, y, bulge })),
+});
+export const closedLine = (...points: [number, number, number?][]): Contour => ({
+  ...openLine(...points),
+  closed: true,
+});
 export const path = (...points: [number, number, number][]): Point3[] => points.map(([x, y, z]) => ({ x, y, z }));
 
 /** Depth at the sample nearest to a place; throws for one that no cell holds, so that a check cannot pass on nothing. */
@@ -54,16 +61,28 @@ export function depthAt({ grid, depth }: HeightField, x: number, y: number): num
 export const deepest = ({ depth }: HeightField): number => depth.reduce((most, d) => Math.max(most, d), 0);
 
 /** Every sample of a field: place, depth, and the number of the layer that cut it. */
-export function* samples({ grid, depth, by }: HeightField): Generator<{ x: number; y: number; depth: number; by: number }> {
+export function* samples({
+  grid,
+  depth,
+  by,
+}: HeightField): Generator<{ x: number; y: number; depth: number; by: number }> {
   for (let j = 0; j < grid.rows; j++)
     for (let i = 0; i < grid.columns; i++) {
       const at = j * grid.columns + i;
-      yield { x: grid.minX + (i + 0.5) * grid.cell, y: grid.minY + (j + 0.5) * grid.cell, depth: depth[at]!, by: by[at]! };
+      yield {
+        x: grid.minX + (i + 0.5) * grid.cell,
+        y: grid.minY + (j + 0.5) * grid.cell,
+        depth: depth[at]!,
+        by: by[at]!,
+      };
     }
 }
 
 /** A frame's board after some steps (all, when left out), or a region of it. */
-export function cutFrame(particulars: Particulars, { cell, region, steps, profile = asDrawn }: { cell: number; region?: Extents; steps?: number; profile?: FileProfile }): CutPart {
+export function cutFrame(
+  particulars: Particulars,
+  { cell, region, steps, profile = asDrawn }: { cell: number; region?: Extents; steps?: number; profile?: FileProfile },
+): CutPart {
   const worked = workFrame(particulars);
   const finished = finishedStage(worked, profile);
   const stage = stageAfter(finished, steps ?? stepsOf(finished));

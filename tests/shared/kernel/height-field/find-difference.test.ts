@@ -19,22 +19,40 @@ const CELL = 0.04;
 /** The worked example with one opening less, and small: 8 × 8. */
 const small = (changes: Partial<Particulars> = {}): Particulars =>
   workedExample({
-    outline: { kind: 'members', width: 8, height: 8, stiles: { left: 1.75, right: 1.75 }, rails: { top: 1.75, bottom: 1.75 }, feet: 0, layout: { opening: { label: 'A' } } },
+    outline: {
+      kind: 'members',
+      width: 8,
+      height: 8,
+      stiles: { left: 1.75, right: 1.75 },
+      rails: { top: 1.75, bottom: 1.75 },
+      feet: 0,
+      layout: { opening: { label: 'A' } },
+    },
     dados: [dado({ from: 0, to: 8 })],
     ...changes,
   });
 
 /** Differences of a face when one set of its lines is changed before it is cut. */
-function differenceWith(p: Particulars, face: Face, set: SetName, change: (l: LayerLines) => Partial<LayerLines>, cell = CELL): LargestDifference {
+function differenceWith(
+  p: Particulars,
+  face: Face,
+  set: SetName,
+  change: (l: LayerLines) => Partial<LayerLines>,
+  cell = CELL,
+): LargestDifference {
   const worked = workFrame(p);
   const stage = finishedStage(worked, asDrawn);
-  const changed = (cut: FaceCut): FaceCut => ({ ...cut, layers: cut.layers.map((l) => (l.set === set ? { ...l, ...change(l) } : l)) });
+  const changed = (cut: FaceCut): FaceCut => ({
+    ...cut,
+    layers: cut.layers.map((l) => (l.set === set ? { ...l, ...change(l) } : l)),
+  });
   const other: Stage = { ...stage, [face]: changed(stage[face]) };
   const part = runThrough(cutBoard(other, makeGrid(boardExtents(worked, stage), cell)));
   return runThrough(findDifference(worked, part, face));
 }
 
-const moved = (contours: readonly Contour[], dx: number): Contour[] => contours.map((c) => ({ ...c, vertices: c.vertices.map((v) => ({ ...v, x: v.x + dx })) }));
+const moved = (contours: readonly Contour[], dx: number): Contour[] =>
+  contours.map((c) => ({ ...c, vertices: c.vertices.map((v) => ({ ...v, x: v.x + dx })) }));
 
 describe('When a cut frame is held against what is meant', () => {
   const measured = runThrough(measureFrame(workFrame(small()), asDrawn, CELL));
@@ -45,7 +63,9 @@ describe('When a cut frame is held against what is meant', () => {
     const left = measured.front.left!;
     expect(Math.abs(left.off - rho * (1 - Math.SQRT1_2))).toBeLessThan(2 * measured.fineCell);
     expect(left.of).toBe('opening-0');
-    expect([1.75, 6.25].some((x) => Math.abs(left.x - x) < 0.05) && [1.75, 6.25].some((y) => Math.abs(left.y - y) < 0.05)).toBe(true);
+    expect(
+      [1.75, 6.25].some((x) => Math.abs(left.x - x) < 0.05) && [1.75, 6.25].some((y) => Math.abs(left.y - y) < 0.05),
+    ).toBe(true);
     expect(measured.front.cut?.off ?? 0).toBeLessThan(2e-4);
   });
 
@@ -54,7 +74,13 @@ describe('When a cut frame is held against what is meant', () => {
   });
 
   test('then a stopped dado keeps r(1 − 1/√2) in its corners', () => {
-    const { back } = runThrough(measureFrame(workFrame(small({ dados: [dado({ from: 2, to: 6, ends: ['stopped', 'stopped'] })] })), asDrawn, CELL));
+    const { back } = runThrough(
+      measureFrame(
+        workFrame(small({ dados: [dado({ from: 2, to: 6, ends: ['stopped', 'stopped'] })] })),
+        asDrawn,
+        CELL,
+      ),
+    );
     expect(Math.abs(back.left!.off - 0.1875 * (1 - Math.SQRT1_2))).toBeLessThan(0.25 * CELL);
     expect(back.left!.of).toBe('dado-0');
     expect(back.cut).toBeNull();
@@ -74,7 +100,13 @@ describe('When a cut frame is held against what is meant', () => {
 
 describe('When the lines are not what they should be', () => {
   test('then an opening moved sideways is off by as much on both sides', () => {
-    const { left, cut } = differenceWith(small(), 'front', 'OPENING_AXIS', (l) => ({ contours: moved(l.contours, 0.03) }), 0.01);
+    const { left, cut } = differenceWith(
+      small(),
+      'front',
+      'OPENING_AXIS',
+      (l) => ({ contours: moved(l.contours, 0.03) }),
+      0.01,
+    );
     // No more than it was moved, and no less but for the cell.
     for (const found of [left!, cut!]) {
       expect(found.off).toBeLessThan(0.03 + 1e-6);
@@ -85,7 +117,10 @@ describe('When the lines are not what they should be', () => {
   });
 
   test('then a dado cut too deep is off by that depth, and one too shallow likewise', () => {
-    expect(differenceWith(small(), 'back', 'DADO', () => ({ depth: 0.27 }))).toMatchObject({ left: null, cut: { of: 'dado-0', intended: 0.25 } });
+    expect(differenceWith(small(), 'back', 'DADO', () => ({ depth: 0.27 }))).toMatchObject({
+      left: null,
+      cut: { of: 'dado-0', intended: 0.25 },
+    });
     expect(differenceWith(small(), 'back', 'DADO', () => ({ depth: 0.27 })).cut!.off).toBeCloseTo(0.02, 6);
     expect(differenceWith(small(), 'back', 'DADO', () => ({ depth: 0.24 })).left!.off).toBeCloseTo(0.01, 6);
   });

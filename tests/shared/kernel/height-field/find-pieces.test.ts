@@ -20,7 +20,8 @@ function flood(filled: Uint8Array): number[] {
       for (let dy = -1; dy <= 1; dy++)
         for (let dx = -1; dx <= 1; dx++) {
           const to = (y + dy) * columns + x + dx;
-          if (x + dx < 0 || x + dx >= columns || y + dy < 0 || y + dy >= rows || filled[to] === 0 || piece[to] !== 0) continue;
+          if (x + dx < 0 || x + dx >= columns || y + dy < 0 || y + dy >= rows || filled[to] === 0 || piece[to] !== 0)
+            continue;
           piece[to] = count;
           open.push(to);
         }
@@ -30,7 +31,8 @@ function flood(filled: Uint8Array): number[] {
 }
 
 /** Pieces under names of their own: each by the first sample it has. */
-const named = (pieces: ArrayLike<number>) => Array.from(pieces, (piece) => (piece === 0 ? -1 : Array.prototype.indexOf.call(pieces, piece)));
+const named = (pieces: ArrayLike<number>) =>
+  Array.from(pieces, (piece) => (piece === 0 ? -1 : Array.prototype.indexOf.call(pieces, piece)));
 
 describe('When the pieces of a raster are told apart', () => {
   test('then samples that touch by side or corner are one piece: random rasters against painting', () => {

@@ -37,7 +37,10 @@ describe.each(lines)('When a cutter runs along a $name line', (line) => {
     for (const sample of samples(cut(cutter, depth))) {
       const { along, length, off } = beside(line, sample.x, sample.y);
       if (along < 0 || along > length || off > 0.3) continue;
-      worst.take(Math.abs(sample.depth - wanted(off)), () => `${off} beside the line: got ${sample.depth}, wanted ${wanted(off)}`);
+      worst.take(
+        Math.abs(sample.depth - wanted(off)),
+        () => `${off} beside the line: got ${sample.depth}, wanted ${wanted(off)}`,
+      );
     }
     expect(worst.count).toBeGreaterThan(5000);
     return worst;
@@ -49,12 +52,16 @@ describe.each(lines)('When a cutter runs along a $name line', (line) => {
     for (const { x, y, depth } of samples(cut(straight, 0.2))) {
       const { along, length, off } = beside(line, x, y);
       const away = Math.hypot(off, Math.max(0, -along, along - length));
-      if (Math.abs(away - 0.125) > 1e-9) worst.take(Math.abs(depth - (away < 0.125 ? 0.2 : 0)), () => `${away} from the line: got ${depth}`);
+      if (Math.abs(away - 0.125) > 1e-9)
+        worst.take(Math.abs(depth - (away < 0.125 ? 0.2 : 0)), () => `${away} from the line: got ${depth}`);
       if (depth > 0) cleared += 0.01 ** 2;
     }
     expect(worst.error, worst.where).toBeLessThan(KEPT);
     // Area of a slot: length × width and two half discs.
-    expect(cleared).toBeCloseTo(Math.hypot(line.b[0] - line.a[0], line.b[1] - line.a[1]) * 0.25 + Math.PI * 0.125 ** 2, 2);
+    expect(cleared).toBeCloseTo(
+      Math.hypot(line.b[0] - line.a[0], line.b[1] - line.a[1]) * 0.25 + Math.PI * 0.125 ** 2,
+      2,
+    );
   });
 
   test('then a V leaves a groove whose sides lean by half its angle', () => {
@@ -66,7 +73,9 @@ describe.each(lines)('When a cutter runs along a $name line', (line) => {
     const worst = against(tapered, 0.6, (off) => {
       // The nose is a circle of the tip radius about 0.6 − r below the face; the flank is tangent to it.
       const isOnNose = off < 0.0625 * Math.cos(1.5 * degrees);
-      const height = isOnNose ? 0.0625 - Math.sqrt(0.0625 ** 2 - off ** 2) : 0.0625 + (off - 0.0625 / Math.cos(1.5 * degrees)) / Math.tan(1.5 * degrees);
+      const height = isOnNose
+        ? 0.0625 - Math.sqrt(0.0625 ** 2 - off ** 2)
+        : 0.0625 + (off - 0.0625 / Math.cos(1.5 * degrees)) / Math.tan(1.5 * degrees);
       return Math.max(0, 0.6 - height);
     });
     expect(worst.error, worst.where).toBeLessThan(KEPT);
@@ -120,7 +129,11 @@ describe('When several layers cut one face', () => {
   });
 
   test('then no cut is deeper than the board', () => {
-    const deep = sweep(faceWith(layer(straight, 0.9, { contours: [openLine([0, 1], [3, 1])] })), { minX: 1, maxX: 1.1, minY: 0.7003, maxY: 1.3 }, 0.01);
+    const deep = sweep(
+      faceWith(layer(straight, 0.9, { contours: [openLine([0, 1], [3, 1])] })),
+      { minX: 1, maxX: 1.1, minY: 0.7003, maxY: 1.3 },
+      0.01,
+    );
     expect(deepest(deep)).toBe(0.75);
   });
 });

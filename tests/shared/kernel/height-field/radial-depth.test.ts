@@ -8,8 +8,18 @@ const size = (min: number, max: number) => fc.double({ min, max, noNaN: true });
 const cutters: fc.Arbitrary<Cutter> = fc.oneof(
   fc.record({ kind: fc.constant('straight' as const), diameter: size(0.05, 1), fluteLength: fc.constant(2) }),
   fc.record({ kind: fc.constant('vee' as const), includedAngle: size(10, 150), fluteLength: fc.constant(2) }),
-  fc.record({ kind: fc.constant('tapered' as const), tipRadius: size(0.01, 0.2), sideAngle: size(0.5, 20), fluteLength: fc.constant(2) }),
-  fc.record({ kind: fc.constant('beading' as const), profileRadius: size(0.03, 0.3), tipFlat: size(0.01, 0.2), fluteLength: fc.constant(2) }),
+  fc.record({
+    kind: fc.constant('tapered' as const),
+    tipRadius: size(0.01, 0.2),
+    sideAngle: size(0.5, 20),
+    fluteLength: fc.constant(2),
+  }),
+  fc.record({
+    kind: fc.constant('beading' as const),
+    profileRadius: size(0.03, 0.3),
+    tipFlat: size(0.01, 0.2),
+    fluteLength: fc.constant(2),
+  }),
 );
 
 describe('When the depth that a cutter leaves is asked for at a distance from its axis', () => {

@@ -10,7 +10,13 @@ import { workedExample } from '../../../builders/worked-example.ts';
 const p = workedExample();
 const cut = openingCut(p);
 const VEE: Cutter = { kind: 'vee', includedAngle: 30, fluteLength: 1 };
-const situation = (method: CornerMethod, cutter = p.cutters.opening, angle = Math.PI / 2) => ({ cutter, cut: openingCut({ ...p, cutters: { ...p.cutters, opening: cutter } }), method, angle, vee: { cutter: VEE, floor: 0.75 } });
+const situation = (method: CornerMethod, cutter = p.cutters.opening, angle = Math.PI / 2) => ({
+  cutter,
+  cut: openingCut({ ...p, cutters: { ...p.cutters, opening: cutter } }),
+  method,
+  angle,
+  vee: { cutter: VEE, floor: 0.75 },
+});
 
 /** Nearest cut board on the bisector from the walls' corner, by trying every stand on a fine grid and walking outwards. */
 function bruteDiagonal(method: CornerMethod, angle: number, z: number): number {
@@ -31,13 +37,25 @@ function bruteDiagonal(method: CornerMethod, angle: number, z: number): number {
 }
 
 describe.each(['round', 'lift', 'vee'] as const)('When the corner is worked by method %s', (method) => {
-  test.each([0, 0.1875, 0.375, 0.75])('then what is left on the diagonal %d below the face agrees with brute force', (z) => {
-    for (const angle of [Math.PI / 2, Math.PI / 3, 2]) expect(Math.abs(cornerSlice(situation(method, p.cutters.opening, angle), z).diagonal - bruteDiagonal(method, angle, z))).toBeLessThan(3e-4);
-  });
+  test.each([0, 0.1875, 0.375, 0.75])(
+    'then what is left on the diagonal %d below the face agrees with brute force',
+    (z) => {
+      for (const angle of [Math.PI / 2, Math.PI / 3, 2])
+        expect(
+          Math.abs(
+            cornerSlice(situation(method, p.cutters.opening, angle), z).diagonal - bruteDiagonal(method, angle, z),
+          ),
+        ).toBeLessThan(3e-4);
+    },
+  );
 });
 
 test('When nothing is lifted, then a square corner keeps ρ(√2 − 1) on the diagonal', () => {
-  for (const slice of cornerSlices(situation('round'), 0.75)) expect(slice.diagonal).toBeCloseTo(radiusAtHeight(p.cutters.opening, cut.tipDepth - slice.depth) * (Math.SQRT2 - 1), 9);
+  for (const slice of cornerSlices(situation('round'), 0.75))
+    expect(slice.diagonal).toBeCloseTo(
+      radiusAtHeight(p.cutters.opening, cut.tipDepth - slice.depth) * (Math.SQRT2 - 1),
+      9,
+    );
 });
 
 test('When lifted, then the face is sharp and most of the thickness keeps the nose’s radius r·cos a', () => {

@@ -10,7 +10,10 @@ import { beadCutterSet, beadedExample } from '../../../builders/beaded-example.t
 import { workedExample } from '../../../builders/worked-example.ts';
 
 const edge = beadedExample().edge as BeadedEdge;
-const straightOpening = (p: Particulars): Particulars => ({ ...p, cutters: { ...p.cutters, opening: { kind: 'straight', diameter: 0.25, fluteLength: 1.25 } } });
+const straightOpening = (p: Particulars): Particulars => ({
+  ...p,
+  cutters: { ...p.cutters, opening: { kind: 'straight', diameter: 0.25, fluteLength: 1.25 } },
+});
 
 /** Depth left at y by brute force: every pass as a stack of thin discs, the widest at or below each height. */
 function stacked(p: Particulars, y: number): number {
@@ -47,11 +50,18 @@ describe('When the bead example is cut with a straight opening cutter, then the 
 test('When the envelope is held against a stack of thin discs, then both agree to the discs’ thickness', () => {
   const p = beadedExample();
   const passes = sectionPasses(p);
-  for (let y = -0.2; y < 0.5; y += 0.0037) expect(Math.abs(envelopeDepth(passes, y, p.thickness) - stacked(p, y))).toBeLessThan(2e-4);
+  for (let y = -0.2; y < 0.5; y += 0.0037)
+    expect(Math.abs(envelopeDepth(passes, y, p.thickness) - stacked(p, y))).toBeLessThan(2e-4);
 });
 
 test('When the quirk is narrower than flat and radius together, then the scar beyond it is t + R − q wide', () => {
-  const narrow = beadedExample({ edge: { style: 'beaded', bead: { ...edge.bead, quirk: 0.125 } }, cutters: { ...beadedExample().cutters, bead: { ...beadCutterSet.bead, tipFlat: 1 / 16 } as typeof beadCutterSet.bead } });
+  const narrow = beadedExample({
+    edge: { style: 'beaded', bead: { ...edge.bead, quirk: 0.125 } },
+    cutters: {
+      ...beadedExample().cutters,
+      bead: { ...beadCutterSet.bead, tipFlat: 1 / 16 } as typeof beadCutterSet.bead,
+    },
+  });
   const passes = sectionPasses(narrow);
   const end = 2 * edge.bead.radius + 0.125;
   const scar = 1 / 16 + 3 / 32 - 0.125;
@@ -61,18 +71,26 @@ test('When the quirk is narrower than flat and radius together, then the scar be
 
 describe('When the cutters differ from what the bead needs', () => {
   test('then a V-shaped opening cutter takes (R·tan(β/2))-deep flank off the bead: R(1/cos(β/2) − 1) at most, along the flank', () => {
-    const p = beadedExample({ cutters: { ...beadedExample().cutters, opening: { kind: 'vee', includedAngle: 60, fluteLength: 1.25 } } });
+    const p = beadedExample({
+      cutters: { ...beadedExample().cutters, opening: { kind: 'vee', includedAngle: 60, fluteLength: 1.25 } },
+    });
     const { below } = sectionDifference(p, edge);
     // Flank y = u·tan 30° meets the circle (y − R)² + u² = R²; the chord's greatest vertical depth below it, by fine steps.
     let wanted = 0;
     const R = edge.bead.radius;
     const slope = Math.tan(Math.PI / 6);
-    for (let y = 1e-6; y < 2 * R; y += 1e-6) wanted = Math.max(wanted, Math.sqrt(Math.max(0, R * R - (y - R) ** 2)) - y / slope);
+    for (let y = 1e-6; y < 2 * R; y += 1e-6)
+      wanted = Math.max(wanted, Math.sqrt(Math.max(0, R * R - (y - R) ** 2)) - y / slope);
     expect(below).toBeCloseTo(wanted, 4);
   });
 
   test('then a beading cutter of another radius leaves or takes what its circle differs', () => {
-    const p = beadedExample({ cutters: { ...beadedExample().cutters, bead: { ...beadCutterSet.bead, profileRadius: 1 / 16 } as typeof beadCutterSet.bead } });
+    const p = beadedExample({
+      cutters: {
+        ...beadedExample().cutters,
+        bead: { ...beadCutterSet.bead, profileRadius: 1 / 16 } as typeof beadCutterSet.bead,
+      },
+    });
     const { below, above } = sectionDifference(p, edge);
     expect(Math.max(below, above)).toBeGreaterThan(0.02);
   });
@@ -91,6 +109,15 @@ test('When a square edge is shown, then its wall leans by T·tan a over the boar
 test('When sections are drawn, then every offset and depth of the bead example is written on them', () => {
   const picture = sectionPicture(beadedExample());
   const words = picture.shapes.flatMap((s) => (s.kind === 'text' ? [s.text] : [])).join('\n');
-  for (const wanted of ['-1/64  bead axis', '13/64  bead axis', '1/4  quirk axis', '3/16  bead ends', '5/16  quirk ends', '0.01 bead top', '0.10375 bead base']) expect(words).toContain(wanted);
+  for (const wanted of [
+    '-1/64  bead axis',
+    '13/64  bead axis',
+    '1/4  quirk axis',
+    '3/16  bead ends',
+    '5/16  quirk ends',
+    '0.01 bead top',
+    '0.10375 bead base',
+  ])
+    expect(words).toContain(wanted);
   for (const shape of picture.shapes) if (shape.kind === 'path') expect(shape.d).not.toMatch(/NaN|Infinity/);
 });

@@ -7,10 +7,20 @@ import { useWorkingWorkers } from './fake-worker.ts';
 import { smallFrame } from './parts.ts';
 
 // jsdom has neither a drawing canvas nor a style sheet: the page shows its flat picture, in these colours.
-const TOKENS = { paper: '#faf7f0', ink: '#22282b', board: '#ead9be', 'board-light': '#f3e8d5', back: '#9c3a22', front: '#1d5c8f', bead: '#2e7d6b', lift: '#6b4a9e' };
+const TOKENS = {
+  paper: '#faf7f0',
+  ink: '#22282b',
+  board: '#ead9be',
+  'board-light': '#f3e8d5',
+  back: '#9c3a22',
+  front: '#1d5c8f',
+  bead: '#2e7d6b',
+  lift: '#6b4a9e',
+};
 
 beforeEach(() => {
-  for (const [name, value] of Object.entries(TOKENS)) document.documentElement.style.setProperty(`--color-${name}`, value);
+  for (const [name, value] of Object.entries(TOKENS))
+    document.documentElement.style.setProperty(`--color-${name}`, value);
   vi.spyOn(HTMLCanvasElement.prototype, 'getContext').mockReturnValue(null);
 });
 afterEach(() => {
@@ -27,8 +37,16 @@ describe('When a frame is looked at in a browser without WebGL', () => {
     show(<CutPart worked={workFrame(smallFrame())} />);
     expect(screen.getByText(/WebGL is missing/)).toBeTruthy();
     const picture = screen.getByRole('img', { name: 'Cut part, front' });
-    expect(await screen.findByText(/After step 5 of 5, front, perimeter/, { selector: '[role=status]' }, { timeout: 10_000 })).toBeTruthy();
-    expect(document.getElementById(picture.getAttribute('aria-describedby')!)?.textContent).toContain('Seen from the front.');
+    expect(
+      await screen.findByText(
+        /After step 5 of 5, front, perimeter/,
+        { selector: '[role=status]' },
+        { timeout: 10_000 },
+      ),
+    ).toBeTruthy();
+    expect(document.getElementById(picture.getAttribute('aria-describedby')!)?.textContent).toContain(
+      'Seen from the front.',
+    );
     expect(screen.queryByRole('radio', { name: 'Both' })).toBeNull();
   });
 
@@ -50,8 +68,10 @@ describe('When a frame is looked at in a browser without WebGL', () => {
   test('then the largest difference of each face is said in words', async () => {
     useWorkingWorkers(['relief']);
     show(<CutPart worked={workFrame(smallFrame())} />);
-    expect(await screen.findByText(/≈0.0183 in of board left standing at opening A/, {}, { timeout: 10_000 })).toBeTruthy();
-    expect(screen.getByText('No difference above rounding.')).toBeTruthy();
+    expect(
+      await screen.findByText(/≈0.0183 in of board left standing at opening A/, {}, { timeout: 10_000 }),
+    ).toBeTruthy();
+    expect(screen.getByText('Less than 0.00005 in off everywhere.')).toBeTruthy();
   }, 15_000);
 
   test('then work under way can be cancelled, and begun again', async () => {
@@ -65,10 +85,20 @@ describe('When a frame is looked at in a browser without WebGL', () => {
     expect(screen.getByText('Cutting')).toBeTruthy();
   });
 
+  test('then a frame with stops says that lines may be missing', () => {
+    useWorkingWorkers(['relief', 'measure']);
+    show(<CutPart worked={workFrame(smallFrame({ blank: { width: 8, height: 8 } }))} />);
+    expect(screen.getByText(/This frame has \d+ stop.*: lines may be missing/)).toBeTruthy();
+  });
+
   test('then every place to look at is in the list: the board, the opening, its four corners', () => {
     useWorkingWorkers(['relief', 'measure']);
     show(<CutPart worked={workFrame(smallFrame())} />);
-    expect(within(screen.getByLabelText('Look at')).getAllByRole('option').map((o) => o.textContent)).toEqual([
+    expect(
+      within(screen.getByLabelText('Look at'))
+        .getAllByRole('option')
+        .map((o) => o.textContent),
+    ).toEqual([
       'Whole board',
       'Opening A',
       'Opening A, lower left corner',

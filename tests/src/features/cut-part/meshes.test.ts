@@ -33,7 +33,10 @@ function edgesOf(triangles: readonly (readonly (number | string)[])[]): Map<stri
 }
 
 describe('When a raster is covered with right triangles', () => {
-  const heights = fc.array(fc.double({ min: 0, max: 1, noNaN: true }), { minLength: side * side, maxLength: side * side });
+  const heights = fc.array(fc.double({ min: 0, max: 1, noNaN: true }), {
+    minLength: side * side,
+    maxLength: side * side,
+  });
 
   test('then every inner edge is shared by two, once each way, whatever the heights: no cracks, nothing covered twice', () => {
     fc.assert(
@@ -46,7 +49,11 @@ describe('When a raster is covered with right triangles', () => {
         for (const [edge, count] of edges) {
           const [p, q] = edge.split(' ').map(Number) as [number, number];
           expect(count).toBe(1);
-          const onBorder = [0, side - 1].some((line) => (p % side === line && q % side === line) || (Math.floor(p / side) === line && Math.floor(q / side) === line));
+          const onBorder = [0, side - 1].some(
+            (line) =>
+              (p % side === line && q % side === line) ||
+              (Math.floor(p / side) === line && Math.floor(q / side) === line),
+          );
           expect(edges.has(`${q} ${p}`)).toBe(!onBorder);
         }
         const area = triangles.reduce((sum, t) => sum + areaOf(t), 0);
@@ -57,13 +64,28 @@ describe('When a raster is covered with right triangles', () => {
   });
 
   const areaOf = ([a, b, c]: [number, number, number]) => {
-    const [ax, ay, bx, by, cx, cy] = [a, b, c].flatMap((at) => [at % side, Math.floor(at / side)]) as [number, number, number, number, number, number];
+    const [ax, ay, bx, by, cx, cy] = [a, b, c].flatMap((at) => [at % side, Math.floor(at / side)]) as [
+      number,
+      number,
+      number,
+      number,
+      number,
+      number,
+    ];
     return ((bx - ax) * (cy - ay) - (cx - ax) * (by - ay)) / 2;
   };
 
   test('then a plane takes two triangles, and one raised sample few more', () => {
-    expect(trianglesOf(raster((x, y) => 0.5 * x - 0.25 * y), 1e-6)).toHaveLength(2);
-    const raised = trianglesOf(raster((x, y) => (x === 5 && y === 9 ? 1 : 0)), 0.1);
+    expect(
+      trianglesOf(
+        raster((x, y) => 0.5 * x - 0.25 * y),
+        1e-6,
+      ),
+    ).toHaveLength(2);
+    const raised = trianglesOf(
+      raster((x, y) => (x === 5 && y === 9 ? 1 : 0)),
+      0.1,
+    );
     expect(raised.some((t) => t.includes(9 * side + 5))).toBe(true);
     expect(raised.length).toBeLessThan(80);
   });
@@ -86,13 +108,18 @@ describe('When a raster is covered with right triangles', () => {
   });
 });
 
-const cornersOf = ({ positions }: FaceMesh, at: number) => [positions[3 * at]!, positions[3 * at + 1]!, positions[3 * at + 2]!] as const;
+const cornersOf = ({ positions }: FaceMesh, at: number) =>
+  [positions[3 * at]!, positions[3 * at + 1]!, positions[3 * at + 2]!] as const;
 
 /** Volume inside triangles that face outwards: a sum of tetrahedra with the origin. */
 function volumeOf(mesh: FaceMesh): number {
   let six = 0;
   for (let i = 0; i < mesh.index.length; i += 3) {
-    const [[ax, ay, az], [bx, by, bz], [cx, cy, cz]] = [0, 1, 2].map((k) => cornersOf(mesh, mesh.index[i + k]!)) as [readonly [number, number, number], readonly [number, number, number], readonly [number, number, number]];
+    const [[ax, ay, az], [bx, by, bz], [cx, cy, cz]] = [0, 1, 2].map((k) => cornersOf(mesh, mesh.index[i + k]!)) as [
+      readonly [number, number, number],
+      readonly [number, number, number],
+      readonly [number, number, number],
+    ];
     six += ax * (by * cz - bz * cy) + ay * (bz * cx - bx * cz) + az * (bx * cy - by * cx);
   }
   return six / 6;
@@ -106,10 +133,14 @@ describe.each([
 
   test('then front and back close the board between them: each edge is run once each way', () => {
     const name = (mesh: FaceMesh, at: number) => cornersOf(mesh, at).join();
-    const triangles = [front, back].flatMap((mesh) => Array.from({ length: mesh.index.length / 3 }, (_, i) => [0, 1, 2].map((k) => name(mesh, mesh.index[3 * i + k]!))));
+    const triangles = [front, back].flatMap((mesh) =>
+      Array.from({ length: mesh.index.length / 3 }, (_, i) => [0, 1, 2].map((k) => name(mesh, mesh.index[3 * i + k]!))),
+    );
     // Where nothing is left both surfaces meet, and triangles there may have no height: their edges cancel out.
     const edges = edgesOf(triangles);
-    const open = [...edges].filter(([edge, count]) => count !== (edges.get(edge.split(' ').toReversed().join(' ')) ?? 0));
+    const open = [...edges].filter(
+      ([edge, count]) => count !== (edges.get(edge.split(' ').toReversed().join(' ')) ?? 0),
+    );
     expect(edges.size).toBeGreaterThan(1000);
     expect(open).toEqual([]);
   });
@@ -120,7 +151,8 @@ describe.each([
     for (let at = 0; at < standing.length; at++) {
       if (standing[at] === GONE) continue;
       left += (thickness - above.depth[at]! - below.depth[at]!) * grid.cell ** 2;
-      for (const to of [at + 1, at - 1, at + grid.columns, at - grid.columns]) if ((standing[to] ?? GONE) === GONE) wall += thickness * grid.cell;
+      for (const to of [at + 1, at - 1, at + grid.columns, at - grid.columns])
+        if ((standing[to] ?? GONE) === GONE) wall += thickness * grid.cell;
     }
     const held = volumeOf(front) + volumeOf(back);
     expect(Math.abs(held - left)).toBeLessThan((wall * grid.cell) / 2 + 1e-6);

@@ -11,12 +11,23 @@ import type { FrameFiles } from '../../../../src/features/cut-part/work/workshop
 /** A frame of 8 × 8 with one opening and one dado, small enough to be cut in no time. */
 export const smallFrame = (changes: Partial<Particulars> = {}): Particulars =>
   workedExample({
-    outline: { kind: 'members', width: 8, height: 8, stiles: { left: 1.75, right: 1.75 }, rails: { top: 1.75, bottom: 1.75 }, feet: 0, layout: { opening: { label: 'A' } } },
+    outline: {
+      kind: 'members',
+      width: 8,
+      height: 8,
+      stiles: { left: 1.75, right: 1.75 },
+      rails: { top: 1.75, bottom: 1.75 },
+      feet: 0,
+      layout: { opening: { label: 'A' } },
+    },
     dados: [dado({ from: 0, to: 8 })],
     ...changes,
   });
 
-export const filesOf = (particulars: Particulars): FrameFiles => ({ worked: workFrame(particulars), profile: BUILTIN_PROFILES[0]!.profile });
+export const filesOf = (particulars: Particulars): FrameFiles => ({
+  worked: workFrame(particulars),
+  profile: BUILTIN_PROFILES[0]!.profile,
+});
 
 export function cutWhole(particulars: Particulars, cell: number): CutPart {
   const { worked, profile } = filesOf(particulars);

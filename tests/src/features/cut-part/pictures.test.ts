@@ -12,7 +12,8 @@ const workshopOf = (particulars: Parameters<typeof filesOf>[0]) => {
 
 describe('When the workshop is asked for a slice', () => {
   const workshop = workshopOf(smallFrame());
-  const slice = (at: number, steps = 5) => runThrough(workshop.slice({ kind: 'slice', steps, region: null, plane: { runs: 'upright', at } }));
+  const slice = (at: number, steps = 5) =>
+    runThrough(workshop.slice({ kind: 'slice', steps, region: null, plane: { runs: 'upright', at } }));
 
   /** Stretches along the slice that are board, from its outline's upright ends. */
   function stretches({ outline, outlineLooseFrom }: ReturnType<typeof slice>): [number, number][] {
@@ -40,7 +41,10 @@ describe('When the workshop is asked for a slice', () => {
 
   test('then through the dado it shows the board less its depth', () => {
     const { positions } = slice(0.6);
-    const points = Array.from({ length: positions.length / 3 }, (_, i) => ({ y: positions[3 * i + 1]!, z: positions[3 * i + 2]! }));
+    const points = Array.from({ length: positions.length / 3 }, (_, i) => ({
+      y: positions[3 * i + 1]!,
+      z: positions[3 * i + 2]!,
+    }));
     const zs = new Set(points.filter(({ y }) => y > 0 && y < 8).map(({ z }) => z.toFixed(6)));
     expect([...zs].sort()).toEqual(['-0.500000', '0.000000']);
   });
@@ -95,7 +99,15 @@ describe('When the workshop is asked for a flat picture', () => {
   ];
   const reliefOf = (flip: 'side-to-side' | 'end-over-end', face: 'front' | 'back') => {
     const setup = { ...workedExample().setup, flip };
-    return runThrough(workshopOf(smallFrame({ setup })).relief({ kind: 'relief', steps: 5, region: { minX: 0, minY: 0, maxX: 8, maxY: 8 }, face, palette }));
+    return runThrough(
+      workshopOf(smallFrame({ setup })).relief({
+        kind: 'relief',
+        steps: 5,
+        region: { minX: 0, minY: 0, maxX: 8, maxY: 8 },
+        face,
+        palette,
+      }),
+    );
   };
   /** Colour of a place given as shares from the left and the top. */
   const at = ({ width, height, pixels }: ReturnType<typeof reliefOf>, right: number, down: number) => {

@@ -1,6 +1,14 @@
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
-import { firstHold, NO_TURN, panOn, turnOn, zoomOn, type Hold, type Turn } from '../../../../src/features/cut-part/model/turning.ts';
+import {
+  firstHold,
+  NO_TURN,
+  panOn,
+  turnOn,
+  zoomOn,
+  type Hold,
+  type Turn,
+} from '../../../../src/features/cut-part/model/turning.ts';
 import { spreadOut, visibleHeight } from '../../../../src/features/cut-part/scene/lay-out.ts';
 
 /** Turns a direction: v + 2q × (q × v + w·v). */
@@ -27,8 +35,10 @@ describe('When the part is turned', () => {
   });
 
   test('then the back comes up as the board is turned: side to side keeps what is up up, end over end keeps left left', () => {
-    const facing = (flip: 'side-to-side' | 'end-over-end', v: [number, number, number]) => turned(firstHold('back', flip).turn, v);
-    for (const flip of ['side-to-side', 'end-over-end'] as const) expect(facing(flip, [0, 0, -1])[2]).toBeGreaterThan(0.7);
+    const facing = (flip: 'side-to-side' | 'end-over-end', v: [number, number, number]) =>
+      turned(firstHold('back', flip).turn, v);
+    for (const flip of ['side-to-side', 'end-over-end'] as const)
+      expect(facing(flip, [0, 0, -1])[2]).toBeGreaterThan(0.7);
     expect(facing('side-to-side', [0, 1, 0])[1]).toBeGreaterThan(0.7);
     expect(facing('side-to-side', [1, 0, 0])[0]).toBeLessThan(-0.7);
     expect(facing('end-over-end', [0, 1, 0])[1]).toBeLessThan(-0.7);
@@ -39,14 +49,21 @@ describe('When the part is turned', () => {
 describe('When the part is zoomed', () => {
   test('then what lies under the pointer stays there', () => {
     fc.assert(
-      fc.property(number(-5, 5), number(-5, 5), number(0.6, 3), number(-4, 4), number(-4, 4), (panX, panY, factor, x, y) => {
-        const before = panOn(held, panX, panY);
-        const after = zoomOn(before, factor, { x, y });
-        // The pointer's distance from the middle shrinks in lengths of the part as it is drawn larger.
-        const share = before.zoom / after.zoom;
-        expect(x * share - after.pan.x).toBeCloseTo(x - before.pan.x, 9);
-        expect(y * share - after.pan.y).toBeCloseTo(y - before.pan.y, 9);
-      }),
+      fc.property(
+        number(-5, 5),
+        number(-5, 5),
+        number(0.6, 3),
+        number(-4, 4),
+        number(-4, 4),
+        (panX, panY, factor, x, y) => {
+          const before = panOn(held, panX, panY);
+          const after = zoomOn(before, factor, { x, y });
+          // The pointer's distance from the middle shrinks in lengths of the part as it is drawn larger.
+          const share = before.zoom / after.zoom;
+          expect(x * share - after.pan.x).toBeCloseTo(x - before.pan.x, 9);
+          expect(y * share - after.pan.y).toBeCloseTo(y - before.pan.y, 9);
+        },
+      ),
     );
   });
 

@@ -4,7 +4,12 @@ import type { Measured } from '#shared/kernel/height-field/measure-frame.ts';
 import { FakeWorker } from './fake-worker.ts';
 import { filesOf, smallFrame } from './parts.ts';
 
-const measured: Measured = { cell: 1, fineCell: 0.1, front: { left: null, cut: null }, back: { left: null, cut: null } };
+const measured: Measured = {
+  cell: 1,
+  fineCell: 0.1,
+  front: { left: null, cut: null },
+  back: { left: null, cut: null },
+};
 const frame = filesOf(smallFrame());
 
 function clientWith() {
@@ -15,7 +20,11 @@ function clientWith() {
   });
   const ask = (control = new AbortController(), of = frame) => {
     const shares: number[] = [];
-    return { control, shares, answer: client.ask(of, { kind: 'measure' }, (done) => shares.push(done), control.signal) };
+    return {
+      control,
+      shares,
+      answer: client.ask(of, { kind: 'measure' }, (done) => shares.push(done), control.signal),
+    };
   };
   return { client, workers, ask };
 }
