@@ -80,4 +80,3 @@ export const box = z
         message: `takes ${wanted}`,
       });
   }) satisfies z.ZodType<Box>;
-export type BoxInput = z.input<typeof box>;

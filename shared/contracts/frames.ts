@@ -77,7 +77,6 @@ export const proofRefused = z.object({
     checks: z.array(z.object({ name: z.string(), ok: z.boolean(), got: z.string(), wanted: z.string() })),
   }),
 });
-export type ProofRefused = z.infer<typeof proofRefused>;
 
 /** PATCH /api/frames/:frameId: `removed` true to put it away and false to bring it back. Answers a frame. */
 export const frameChange = z.strictObject({ removed: z.boolean() });

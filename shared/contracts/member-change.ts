@@ -36,4 +36,3 @@ export const memberChangesRequest = z.strictObject({
     .min(1, takes('at least one frame'))
     .max(MOST_FRAMES, takes(`at most ${MOST_FRAMES} frames`)),
 });
-export type MemberChangesRequest = z.input<typeof memberChangesRequest>;

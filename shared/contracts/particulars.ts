@@ -228,6 +228,5 @@ export const particulars = z.strictObject({
 });
 
 // The kernel's type is the wider one (it knows beaded edges); what this reads must fit it.
-export type ParticularsInput = z.input<typeof particulars>;
 const _fits: (p: z.output<typeof particulars>) => Particulars = (p) => p;
 void _fits;

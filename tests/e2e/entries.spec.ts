@@ -36,19 +36,19 @@ test('When a frame has a stop, then the draft is saved but cannot be released', 
 
 test('When steps are undone and redone, then the whole frame goes back and forth', async ({ page }) => {
   const start = await entry(page, 'outline.width').inputValue();
-  await type(page, 'outline.width', '36');
+  await type(page, 'outline.width', '38');
   await entry(page, 'outline.height').focus();
   await type(page, 'outline.height', '28 1/4');
   await entry(page, 'thickness').focus();
 
   await page.getByRole('button', { name: 'Undo' }).click();
-  await expect(entry(page, 'outline.width')).toHaveValue('36');
+  await expect(entry(page, 'outline.width')).toHaveValue('38');
   await expect(entry(page, 'outline.height')).not.toHaveValue('28 1/4');
   await page.getByRole('button', { name: 'Undo' }).click();
   await expect(entry(page, 'outline.width')).toHaveValue(start);
   await page.getByRole('button', { name: 'Redo' }).click();
   await page.getByRole('button', { name: 'Redo' }).click();
-  await expect(entry(page, 'outline.width')).toHaveValue('36');
+  await expect(entry(page, 'outline.width')).toHaveValue('38');
   await expect(entry(page, 'outline.height')).toHaveValue('28 1/4');
   await saved(page);
 });

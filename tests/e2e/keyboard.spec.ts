@@ -11,7 +11,7 @@ function nameOfFocus(): string {
 
 /** Presses Tab until what has the focus is called so; throws after a whole round without it. */
 async function tabTo(page: Page, name: string): Promise<void> {
-  for (let i = 0; i < 150; i++) {
+  for (let i = 0; i < 300; i++) {
     if ((await page.evaluate(nameOfFocus)) === name) return;
     await page.keyboard.press('Tab');
   }

@@ -23,7 +23,3 @@ export function openingContour(extents: Extents, arch: number): Contour {
     ],
   };
 }
-
-/** Radius of an arch, R = (c²/4 + h²) / 2h. Infinite for no rise. */
-export const archRadius = (width: number, rise: number): number =>
-  rise === 0 ? Infinity : (width * width) / 8 / rise + rise / 2;
