@@ -1,8 +1,10 @@
 import { useMemo, useState } from 'react';
 import { useNavigate } from 'react-router';
+import { newFrame } from '#shared/kernel/particulars/new-frame.ts';
 import type { Particulars } from '#shared/kernel/particulars/particulars.ts';
+import { applyEdgePreset } from '#shared/kernel/starters/apply-edge-preset.ts';
 import { STARTERS } from '#shared/kernel/starters/starters.ts';
-import type { StarterId } from '#shared/kernel/starters/starter.ts';
+import type { Starter } from '#shared/kernel/starters/starter.ts';
 import { usualEdgePresets } from '#shared/kernel/starters/usual-edge-presets.ts';
 import type { Unit } from '#shared/kernel/units/unit.ts';
 import { Button } from '../../ui/button.tsx';
@@ -19,6 +21,22 @@ interface NewFrameProps {
   readonly unit: Unit;
   readonly wide?: boolean;
 }
+
+type Beginning = Pick<Starter, 'name' | 'line' | 'frames'> & { readonly id: string };
+
+/** The plainest frame comes first; the starters after it. */
+const BEGINNINGS: readonly Beginning[] = [
+  {
+    id: 'plain',
+    name: 'Two openings',
+    line: 'A base frame with two openings side by side and four dados.',
+    frames: (unit, edge) => {
+      const frame = newFrame(unit, 'Two openings');
+      return [edge ? applyEdgePreset(frame, edge) : frame];
+    },
+  },
+  ...STARTERS,
+];
 
 const UNITS = [
   { value: 'in', label: 'Inches' },
@@ -38,11 +56,11 @@ const named = (frames: readonly Particulars[], name: string): Particulars[] =>
 export function NewFrame({ jobId, unit: shopUnit, wide = false }: NewFrameProps) {
   const [open, setOpen] = useState(false);
   const [unit, setUnit] = useState(shopUnit);
-  const [starterId, setStarterId] = useState<StarterId>('base');
+  const [starterId, setStarterId] = useState('plain');
   const [edge, setEdge] = useState<'square' | 'beaded'>('square');
   const create = useCreateFrames();
   const navigate = useNavigate();
-  const starter = STARTERS.find((s) => s.id === starterId)!;
+  const starter = BEGINNINGS.find((s) => s.id === starterId)!;
   const frames = useMemo(
     () =>
       starter.frames(
@@ -78,7 +96,7 @@ export function NewFrame({ jobId, unit: shopUnit, wide = false }: NewFrameProps)
           <Select
             label="Begin from"
             layout="stack"
-            options={STARTERS.map(({ id, name }) => ({ value: id, label: name }))}
+            options={BEGINNINGS.map(({ id, name }) => ({ value: id, label: name }))}
             value={starterId}
             onValue={setStarterId}
             hint={starter.line}
