@@ -39,4 +39,5 @@ export function sortDifferences({ left, cut }: LargestDifference, unit: Unit): D
 }
 
 /** What is said where there is none. */
-export const noDifferenceWords = (unit: Unit): string => `Less than ${leastOff(unit)} ${unit} off everywhere.`;
+export const noDifferenceWords = (unit: Unit): string =>
+  `Less than ${leastOff(unit).toFixed(DIGITS[unit].size + 1)} ${unit} off everywhere.`;

@@ -8,34 +8,36 @@ import {
   type BufferGeometry,
   type LineBasicMaterial,
   type MeshBasicMaterial,
+  type Texture,
 } from 'three';
 import type { Plane } from '../work/picture.ts';
 
 /** Surfaces give way to lines drawn along them. */
 export const BEHIND_LINES = { polygonOffset: true, polygonOffsetFactor: 1, polygonOffsetUnits: 1 };
 
-/** One copy of the part: its own materials, since each copy is cut by a plane of its own. */
+/** What all copies of the part share: its surfaces with their colours, and what shows where it is cut open. */
+export interface SharedParts {
+  readonly surfaces: readonly { readonly geometry: BufferGeometry; readonly palette: Texture }[];
+  readonly cap: BufferGeometry;
+  readonly outline: BufferGeometry;
+  readonly inside: MeshBasicMaterial;
+  readonly ink: LineBasicMaterial;
+}
+
+/** One copy of the part: the materials of its surfaces are its own, since each copy is cut by a plane of its own. */
 export class PartCopy {
   readonly group = new Group();
-  private readonly skin = new MeshLambertMaterial({ vertexColors: true, flatShading: true, ...BEHIND_LINES });
-  private readonly meshes: readonly [Mesh, Mesh, Mesh, LineSegments];
+  private readonly skins: readonly MeshLambertMaterial[];
+  private readonly opened: readonly (Mesh | LineSegments)[];
 
-  constructor(
-    front: BufferGeometry,
-    back: BufferGeometry,
-    cap: BufferGeometry,
-    outline: BufferGeometry,
-    inside: MeshBasicMaterial,
-    ink: LineBasicMaterial,
-  ) {
-    this.meshes = [
-      new Mesh(front, this.skin),
-      new Mesh(back, this.skin),
-      new Mesh(cap, inside),
-      new LineSegments(outline, ink),
-    ];
-    for (const mesh of this.meshes) mesh.frustumCulled = false;
-    this.group.add(...this.meshes);
+  constructor({ surfaces, cap, outline, inside, ink }: SharedParts) {
+    this.skins = surfaces.map(
+      ({ palette }) => new MeshLambertMaterial({ map: palette, flatShading: true, ...BEHIND_LINES }),
+    );
+    this.opened = [new Mesh(cap, inside), new LineSegments(outline, ink)];
+    const meshes = [...surfaces.map(({ geometry }, i) => new Mesh(geometry, this.skins[i])), ...this.opened];
+    for (const mesh of meshes) mesh.frustumCulled = false;
+    this.group.add(...meshes);
   }
 
   /** Keeps what lies left of an upright plane or below a level one, or the other side; frame view. */
@@ -45,12 +47,12 @@ export class PartCopy {
     const kept =
       plane &&
       new ClippingPlane(plane.runs === 'upright' ? new Vector3(side, 0, 0) : new Vector3(0, side, 0), -side * plane.at);
-    this.skin.clippingPlanes = kept ? [kept.applyMatrix4(this.group.matrixWorld)] : null;
-    this.meshes[2].visible = plane !== null;
-    this.meshes[3].visible = plane !== null;
+    kept?.applyMatrix4(this.group.matrixWorld);
+    for (const skin of this.skins) skin.clippingPlanes = kept ? [kept] : null;
+    for (const part of this.opened) part.visible = plane !== null;
   }
 
   dispose(): void {
-    this.skin.dispose();
+    for (const skin of this.skins) skin.dispose();
   }
 }

@@ -21,7 +21,7 @@ import { NO_TURN, type Hold } from '../model/turning.ts';
 import type { Picture, Plane, Rgb } from '../work/picture.ts';
 import { spreadOut, visibleHeight } from './lay-out.ts';
 import { BEHIND_LINES, PartCopy } from './part-copy.ts';
-import { colourCorners, colourOf } from './scene-colours.ts';
+import { colourOf, makePalette, paintPalette } from './scene-colours.ts';
 
 /** Light that falls everywhere, and from the upper left of the screen. */
 const AMBIENT = 1.6;
@@ -55,6 +55,7 @@ export class PartScene {
   };
   private readonly inside = new MeshBasicMaterial({ side: DoubleSide, ...BEHIND_LINES });
   private readonly ink = new LineBasicMaterial();
+  private readonly palettes = { front: makePalette(), back: makePalette() };
   private readonly copies: readonly [PartCopy, PartCopy];
   private region: Extents = { minX: 0, minY: 0, maxX: 1, maxY: 1 };
   private thickness = 1;
@@ -71,10 +72,13 @@ export class PartScene {
     this.renderer.localClippingEnabled = true;
     this.renderer.setClearAlpha(0);
     const { front, back, cap, outline } = this.geometries;
-    this.copies = [
-      new PartCopy(front, back, cap, outline, this.inside, this.ink),
-      new PartCopy(front, back, cap, outline, this.inside, this.ink),
+    const { palettes, inside, ink } = this;
+    const surfaces = [
+      { geometry: front, palette: palettes.front },
+      { geometry: back, palette: palettes.back },
     ];
+    const shared = { surfaces, cap, outline, inside, ink };
+    this.copies = [new PartCopy(shared), new PartCopy(shared)];
     const lamp = new DirectionalLight(undefined, LAMP);
     lamp.position.set(-0.45, 0.6, 1);
     this.camera.add(lamp, lamp.target);
@@ -86,15 +90,13 @@ export class PartScene {
     for (const face of ['front', 'back'] as const) {
       const geometry = this.geometries[face];
       const { positions, index, by } = picture[face];
-      if (this.meshes?.[face] !== picture[face]) {
-        geometry.dispose();
-        geometry.setAttribute('position', new BufferAttribute(positions, 3));
-        geometry.setAttribute('color', new BufferAttribute(new Float32Array(positions.length), 3));
-        geometry.setIndex(new BufferAttribute(index, 1));
-      }
-      const colours = geometry.getAttribute('color');
-      colourCorners(colours.array as Float32Array, by, palettes[face]);
-      colours.needsUpdate = true;
+      paintPalette(this.palettes[face], palettes[face]);
+      if (this.meshes?.[face] === picture[face]) continue;
+      geometry.dispose();
+      geometry.setAttribute('position', new BufferAttribute(positions, 3));
+      // One number where the palette's picture has a place right and a place up: up is 0.
+      geometry.setAttribute('uv', new BufferAttribute(by, 1, true));
+      geometry.setIndex(new BufferAttribute(index, 1));
     }
     this.meshes = picture;
     this.region = picture.region;
@@ -212,6 +214,7 @@ export class PartScene {
     cancelAnimationFrame(this.frame);
     for (const geometry of Object.values(this.geometries)) geometry.dispose();
     for (const copy of this.copies) copy.dispose();
+    for (const palette of Object.values(this.palettes)) palette.dispose();
     this.inside.dispose();
     this.ink.dispose();
     this.renderer.dispose();

@@ -1,16 +1,24 @@
-import { Color, SRGBColorSpace } from 'three';
+import { Color, DataTexture, NearestFilter, SRGBColorSpace } from 'three';
 import type { Rgb } from '../work/picture.ts';
+
+/** A layer's number is a byte: 0 for none, then layers from 1. */
+const LAYERS = 256;
 
 /** A colour of the style sheet, as light. */
 export const colourOf = ([r, g, b]: Rgb): Color => new Color().setRGB(r / 255, g / 255, b / 255, SRGBColorSpace);
 
-/** Writes the colour of each corner, by the layer that cut there. */
-export function colourCorners(out: Float32Array, by: Uint8Array, palette: readonly Rgb[]): void {
-  const colours = palette.flatMap((rgb) => colourOf(rgb).toArray());
-  for (let i = 0; i < by.length; i++) {
-    const from = 3 * by[i]!;
-    out[3 * i] = colours[from]!;
-    out[3 * i + 1] = colours[from + 1]!;
-    out[3 * i + 2] = colours[from + 2]!;
-  }
+/** Colours by the number of a layer, as a picture one row high: corners carry the number, so that other colours cost nothing. */
+export function makePalette(): DataTexture {
+  const texture = new DataTexture(new Uint8Array(4 * LAYERS), LAYERS, 1);
+  texture.colorSpace = SRGBColorSpace;
+  texture.magFilter = NearestFilter;
+  texture.minFilter = NearestFilter;
+  return texture;
+}
+
+/** Writes colours into a palette: of no layer first. Numbers without a colour get that one. */
+export function paintPalette(texture: DataTexture, colours: readonly Rgb[]): void {
+  const data = texture.image.data as Uint8Array;
+  for (let i = 0; i < LAYERS; i++) data.set([...(colours[i] ?? colours[0]!), 255], 4 * i);
+  texture.needsUpdate = true;
 }
