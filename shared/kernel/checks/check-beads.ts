@@ -12,6 +12,7 @@ import { beadCutters, type BeadCutters, type BeadProblem } from '../line-sets/be
 import type { FrontLineSets } from '../line-sets/front-line-sets.ts';
 import { beadBase } from '../line-sets/held-depth.ts';
 import type { BeadedEdge, Particulars } from '../particulars/particulars.ts';
+import { cornerVeePass, sectionPasses } from '../section/section-passes.ts';
 import { sectionDifference } from '../section/section-difference.ts';
 import { beadShave, DEEPEST_DADO, leastUnderBead, SAME } from '../tolerances.ts';
 import { formatWithUnit } from '../units/format-length.ts';
@@ -222,23 +223,34 @@ function checkUnderBead(
   });
 }
 
-/** The opening cutter's flank, or another pass, cutting into the entered bead. */
+/** The opening cutter's flank, or another pass, cutting into the entered bead; and the V-cutter of the corners, there. */
 function checkShave(p: Particulars, edge: BeadedEdge, beaded: readonly Opening[]): Finding[] {
-  const { below, belowAt, above } = sectionDifference(p, edge);
-  const worst = Math.max(below, above);
-  if (worst <= beadShave(p.unit)) return [];
-  return [
-    {
-      code: 'bead-shaved',
-      level: 'caution',
+  const passes = sectionPasses(p, edge);
+  const vee = cornerVeePass(p, edge);
+  const all = sectionDifference(p, edge, passes);
+  const worst = Math.max(all.below, all.above);
+  const places = beaded.map((o) => atOpening(o));
+  const common = { code: 'bead-shaved', level: 'caution', places } as const;
+  const findings: Finding[] = [];
+  if (worst > beadShave(p.unit))
+    findings.push({
+      ...common,
       text:
-        below >= above
-          ? `A cutter’s flank takes ${formatWithUnit(below, p.unit)} off the bead, ${formatWithUnit(belowAt, p.unit)} from the opening’s edge.`
-          : `The cutters leave ${formatWithUnit(above, p.unit)} standing on the bead.`,
+        all.below >= all.above
+          ? `A cutter’s flank takes ${formatWithUnit(all.below, p.unit)} off the bead, ${formatWithUnit(all.belowAt, p.unit)} from the opening’s edge.`
+          : `The cutters leave ${formatWithUnit(all.above, p.unit)} standing on the bead.`,
       remedy: 'Take an opening cutter with a smaller side angle, or a straight one; look at the section.',
-      numbers: { below, above, belowAt },
-      places: beaded.map((o) => atOpening(o)),
+      numbers: { below: all.below, above: all.above, belowAt: all.belowAt },
       field: 'cutters.opening',
-    },
-  ];
+    });
+  const inCorners = vee ? sectionDifference(p, edge, [...passes, vee]).below : 0;
+  if (inCorners > Math.max(all.below, beadShave(p.unit)))
+    findings.push({
+      ...common,
+      text: `In the corners the V-cutter’s flank takes ${formatWithUnit(inCorners, p.unit)} off the bead.`,
+      remedy: 'Take a V-cutter with a smaller angle, or let the opening cutter alone climb into the corners.',
+      numbers: { below: inCorners },
+      field: 'edge.corners',
+    });
+  return findings;
 }

@@ -54,9 +54,12 @@ function heldNote(p: Particulars, contours: FrameContours, cut: OpeningCut): Fin
 
 /** One note for each way a corner comes out. */
 function residueNotes(p: Particulars, contours: FrameContours, residues: readonly CornerResidue[]): Finding[] {
-  const byAngle = new Map<string, CornerResidue[]>();
-  for (const r of residues) byAngle.set(r.angle.toFixed(6), [...(byAngle.get(r.angle.toFixed(6)) ?? []), r]);
-  return [...byAngle.values()].map((group) => {
+  const alike = new Map<string, CornerResidue[]>();
+  for (const r of residues) {
+    const key = `${r.angle.toFixed(6)} ${r.levels[0]!.depth}`;
+    alike.set(key, [...(alike.get(key) ?? []), r]);
+  }
+  return [...alike.values()].map((group) => {
     const { angle, levels } = group[0]!;
     const degrees = formatDecimal((angle * 180) / Math.PI, 2);
     const face = levels[0]!;
@@ -67,7 +70,7 @@ function residueNotes(p: Particulars, contours: FrameContours, residues: readonl
     return {
       code: 'corner-residue',
       level: 'note',
-      text: `Inside corners of ${degrees}°: ${leaves(face)} is left on the diagonal at the face, ${leaves(middle)} at half the thickness.`,
+      text: `Inside corners of ${degrees}°: ${leaves(face)} is left on the diagonal at ${face.depth === 0 ? 'the face' : 'the bead’s base'}, ${leaves(middle)} at half the thickness.`,
       remedy: '',
       numbers: { angle, face: face.lifted.diagonal, half: middle.lifted.diagonal, back: levels[3]!.lifted.diagonal },
       places: contours.openings.filter((o) => ids.has(o.id)).map((o) => atOpening(o)),

@@ -8,7 +8,7 @@ export interface CornerResidue {
   readonly place: { readonly x: number; readonly y: number };
   /** How often this residue occurs in the opening (corners of the same angle are listed once). */
   readonly count: number;
-  /** At the face and at three depths below it: radius left by lifting into the corner, and without. */
+  /** At the face, or a bead's base, and at three depths below it: radius left by lifting into the corner, and without. */
   readonly levels: readonly {
     readonly depth: number;
     readonly lifted: { readonly radius: number; readonly diagonal: number };

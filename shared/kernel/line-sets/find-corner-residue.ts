@@ -1,5 +1,4 @@
 import type { Cutter } from '../cutters/cutter.ts';
-import { canLift } from '../cutters/height-at-radius.ts';
 import { radiusAtHeight } from '../cutters/radius-at-height.ts';
 import type { Opening } from '../frame/members.ts';
 import type { CornerResidue } from './corner-residue.ts';
@@ -13,24 +12,25 @@ const diagonalShare = (angle: number) => 1 / Math.sin(angle / 2) - 1;
  * What is left on the diagonal at depth z by lifting into the corner: the nearest that any stand of the cutter, tip at depth d,
  * comes to the corner of the walls at that depth. Walls stand inside the corner's sides by ρ(D − zc) − ρ(D − z).
  */
-function liftedDiagonal(cutter: Cutter, cut: OpeningCut, angle: number, z: number): number {
+function liftedDiagonal(cutter: Cutter, cut: OpeningCut, climbEnd: number, angle: number, z: number): number {
   const { tipDepth, planeDepth } = cut;
+  const highest = Math.max(z, climbEnd);
   const reach = 1 / Math.sin(angle / 2);
   const wall = radiusAtHeight(cutter, tipDepth - planeDepth) - radiusAtHeight(cutter, tipDepth - z);
   const left = (d: number) => reach * radiusAtHeight(cutter, d - planeDepth) - radiusAtHeight(cutter, d - z);
-  // One valley between the plane and full depth; golden-section search.
+  // One valley between the end of the climb and full depth; golden-section search.
   const golden = (Math.sqrt(5) - 1) / 2;
-  let [low, high] = [Math.max(z, planeDepth), tipDepth];
+  let [low, high] = [highest, tipDepth];
   for (let i = 0; i < 50; i++) {
     const a = high - golden * (high - low);
     const b = low + golden * (high - low);
     if (left(a) <= left(b)) high = b;
     else low = a;
   }
-  return Math.max(0, Math.min(left(low), left(Math.max(z, planeDepth)), left(tipDepth)) - reach * wall);
+  return Math.max(0, Math.min(left(low), left(highest), left(tipDepth)) - reach * wall);
 }
 
-/** Residue at the face and at a quarter, half and all of the thickness, for each angle among an opening's corners. */
+/** Residue in the corners' plane (the face, or a bead's base) and at a quarter, half and all of the thickness, for each angle among an opening's corners. */
 export function findCornerResidue(
   cutter: Cutter,
   cut: OpeningCut,
@@ -43,11 +43,11 @@ export function findCornerResidue(
     const known = byAngle.get(key);
     if (known) return known;
     const share = diagonalShare(angle);
-    const levels = [0, thickness / 4, thickness / 2, thickness].map((depth) => {
+    const levels = [cut.planeDepth, thickness / 4, thickness / 2, thickness].map((depth) => {
       const radius = radiusAtHeight(cutter, cut.tipDepth - depth);
       const unlifted = { radius, diagonal: radius * share };
-      if (!canLift(cutter)) return { depth, lifted: unlifted, unlifted };
-      const diagonal = liftedDiagonal(cutter, cut, angle, depth);
+      if (cut.climbEnd === undefined) return { depth, lifted: unlifted, unlifted };
+      const diagonal = liftedDiagonal(cutter, cut, cut.climbEnd, angle, depth);
       return { depth, lifted: { radius: diagonal / share, diagonal }, unlifted };
     });
     byAngle.set(key, levels);

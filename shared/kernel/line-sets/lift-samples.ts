@@ -22,10 +22,10 @@ function overreach(cutter: Cutter, a: LiftSample, b: LiftSample): number {
 }
 
 /**
- * Stands from tip height `height` below the corner's plane up to 0, on h(ρ), dense enough that between two of them the cutter reaches at most `chord`
- * beyond the sides. A pointed cutter, and a tapered one's flank, need their ends only: there h(ρ) is straight.
+ * Stands from tip height `height` below the corner's plane up to `end`, on h(ρ), dense enough that between two of them the
+ * cutter reaches at most `chord` beyond the sides. A pointed cutter, and a tapered one's flank, need their ends only: there h(ρ) is straight.
  */
-export function liftSamples(cutter: Cutter, height: number, chord: number): LiftSample[] {
+export function liftSamples(cutter: Cutter, height: number, chord: number, end = 0): LiftSample[] {
   const at = (radius: number): LiftSample => ({ radius, height: heightAtRadius(cutter, radius) });
   const from = radiusAtHeight(cutter, height);
   const samples: LiftSample[] = [{ radius: from, height }];
@@ -37,11 +37,11 @@ export function liftSamples(cutter: Cutter, height: number, chord: number): Lift
     } else samples.push(b);
   };
   const flankEnd = cutter.kind === 'tapered' ? cutter.tipRadius * Math.cos((cutter.sideAngle * Math.PI) / 180) : 0;
-  const tip: LiftSample = { radius: 0, height: 0 };
-  if (flankEnd > 0 && flankEnd < from) {
+  const last: LiftSample = { radius: radiusAtHeight(cutter, end), height: end };
+  if (flankEnd - last.radius > CLOSEST_STANDS && flankEnd < from) {
     const tangent = at(flankEnd);
     samples.push(tangent);
-    divide(tangent, tip);
-  } else divide(samples[0]!, tip);
+    divide(tangent, last);
+  } else divide(samples[0]!, last);
   return samples;
 }

@@ -1,3 +1,5 @@
+import type { Cutter } from '../cutters/cutter.ts';
+import { canLift } from '../cutters/height-at-radius.ts';
 import { radiusAtHeight } from '../cutters/radius-at-height.ts';
 import { throughDepth } from '../cutters/tip-depth.ts';
 import type { Edge, Particulars } from '../particulars/particulars.ts';
@@ -18,6 +20,19 @@ export interface OpeningCut {
   readonly atBack: number;
   /** The same in the corners' plane. */
   readonly atPlane: number;
+  /** Depth of the tip where its climb into a corner ends; undefined when it does not climb. */
+  readonly climbEnd: number | undefined;
+}
+
+/**
+ * Where a climb into a corner ends. In a square edge it is the corner's plane itself. Above a bead's base the bead stands
+ * beside the corner: there a round nose, wider above its tip, would cut into it, so that a tapered cutter climbs only as
+ * long as its flank passes the base, to h = r(1 − sin a); a V is no wider above, whatever its height.
+ */
+function climbEnd(cutter: Cutter, edge: Edge, plane: number): number | undefined {
+  if (!canLift(cutter) || edge.corners === 'round') return undefined;
+  if (edge.style === 'square' || cutter.kind !== 'tapered') return plane;
+  return plane + cutter.tipRadius * (1 - Math.sin((cutter.sideAngle * Math.PI) / 180));
 }
 
 /** Depths and offsets that follow from an edge (the frame's, unless another is given), the board and the opening cutter. */
@@ -39,5 +54,6 @@ export function openingCut(
     atFace: widerAt(0),
     atBack: widerAt(thickness),
     atPlane: widerAt(plane),
+    climbEnd: climbEnd(cutter, edge, plane),
   };
 }

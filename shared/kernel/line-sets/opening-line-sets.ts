@@ -1,6 +1,5 @@
 import type { Contour, Point } from '../contour/contour.ts';
 import { offsetContour } from '../contour/offset-contour.ts';
-import { canLift } from '../cutters/height-at-radius.ts';
 import { passDepths } from '../cutters/pass-depths.ts';
 import type { Opening } from '../frame/members.ts';
 import type { Particulars } from '../particulars/particulars.ts';
@@ -29,14 +28,11 @@ function axisOf(opening: Opening, cut: OpeningCut): Contour | OpeningProblem {
 }
 
 /** How the cutter climbs into the corners of openings with this cut; undefined for a cutter that cannot. */
-function liftSettings(
-  { edge, cutters: { opening: cutter }, unit }: Particulars,
-  cut: OpeningCut,
-): LiftSettings | undefined {
-  if (!canLift(cutter) || edge.corners === 'round') return undefined;
+function liftSettings({ cutters: { opening: cutter }, unit }: Particulars, cut: OpeningCut): LiftSettings | undefined {
+  if (cut.climbEnd === undefined) return undefined;
   const chord = liftChord(unit);
   return {
-    samples: liftSamples(cutter, cut.tipDepth - cut.planeDepth, chord),
+    samples: liftSamples(cutter, cut.tipDepth - cut.planeDepth, chord, cut.climbEnd - cut.planeDepth),
     widening: cut.atPlane,
     planeDepth: cut.planeDepth,
     chord,

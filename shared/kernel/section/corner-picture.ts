@@ -1,6 +1,6 @@
 import type { Point } from '../contour/contour.ts';
 import { veeFloor } from '../line-sets/corner-vee-line-set.ts';
-import { edgeOfOpening } from '../line-sets/held-depth.ts';
+import { beadBase, edgeOfOpening } from '../line-sets/held-depth.ts';
 import { openingCut } from '../line-sets/opening-cut.ts';
 import type { CornerMethod, Edge, Particulars } from '../particulars/particulars.ts';
 import type { PaperPicture, PaperShape } from '../sheet/paper-picture.ts';
@@ -30,7 +30,7 @@ export function cornerSituation(
   const vee = p.cutters.corner;
   return {
     cutter: p.cutters.opening,
-    cut: openingCut(p, edge),
+    cut: openingCut(p, { ...edge, corners: method }),
     method,
     angle,
     ...(vee ? { vee: { cutter: vee, floor: veeFloor(vee, p.thickness) } } : {}),
@@ -67,9 +67,15 @@ export function cornerPicture(p: Particulars, method: CornerMethod, angle: numbe
 }
 
 const depthWords = (depth: number, p: Particulars) =>
-  depth === 0 ? 'at the face' : depth === p.thickness ? 'at the back' : `${formatWithUnit(depth, p.unit)} below`;
+  depth === 0
+    ? 'at the face'
+    : p.edge.style === 'beaded' && depth === beadBase(p.edge)
+      ? 'at the bead’s base'
+      : depth === p.thickness
+        ? 'at the back'
+        : `${formatWithUnit(depth, p.unit)} below`;
 const leftWords = ({ diagonal }: CornerSlice, p: Particulars) =>
-  diagonal < 10 * NOTHING_LEFT ? 'nothing left' : `${formatLength(Number(diagonal.toFixed(5)), p.unit)} left`;
+  diagonal < 10 * NOTHING_LEFT ? 'nothing left' : `${formatLength(diagonal, p.unit)} left`;
 
 /** One depth: the corner at the lower left of its panel, one wall along the bottom. */
 function panel(slice: CornerSlice, left: number, angle: number, scale: number, p: Particulars): PaperShape[] {

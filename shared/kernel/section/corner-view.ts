@@ -1,6 +1,5 @@
 import type { Point } from '../contour/contour.ts';
 import type { Cutter } from '../cutters/cutter.ts';
-import { canLift } from '../cutters/height-at-radius.ts';
 import { radiusAtHeight } from '../cutters/radius-at-height.ts';
 import type { OpeningCut } from '../line-sets/opening-cut.ts';
 import type { CornerMethod } from '../particulars/particulars.ts';
@@ -40,13 +39,20 @@ interface Stand {
 const STANDS = 240;
 const RAYS = 64;
 
-function standsOf(cutter: Cutter, plane: number, from: number, z: number, reach: number, climbs: boolean): Stand[] {
+/** All stands of a cutter with its tip from depth `from` up to `end`, or the one at `from` when it does not climb. */
+function standsOf(
+  cutter: Cutter,
+  plane: number,
+  from: number,
+  z: number,
+  reach: number,
+  end: number | undefined,
+): Stand[] {
   const out: Stand[] = [];
-  const top = Math.max(z, plane);
-  for (let i = 0; i <= (climbs ? STANDS : 0); i++) {
+  const top = Math.max(z, end ?? from);
+  for (let i = 0; i <= (end === undefined ? 0 : STANDS); i++) {
     // Denser towards the top, where a round nose changes fastest.
-    const share = (1 - i / STANDS) ** 4;
-    const d = climbs ? top + (from - top) * share : from;
+    const d = top + (from - top) * (1 - i / STANDS) ** 4;
     const radius = radiusAtHeight(cutter, d - z);
     if (radius > 0) out.push({ along: reach * radiusAtHeight(cutter, d - plane), radius });
   }
@@ -78,10 +84,10 @@ function firstCut(stands: readonly Stand[], from: number, phi: number): number {
 export function cornerSlice(situation: CornerSituation, z: number): CornerSlice {
   const { cutter, cut, vee, method, angle } = situation;
   const reach = 1 / Math.sin(angle / 2);
-  const climbs = method !== 'round' && canLift(cutter);
-  const stands = standsOf(cutter, cut.planeDepth, cut.tipDepth, z, reach, climbs);
+  const end = method === 'round' ? undefined : cut.climbEnd;
+  const stands = standsOf(cutter, cut.planeDepth, cut.tipDepth, z, reach, end);
   if (method === 'vee' && vee && vee.floor > z)
-    stands.push(...standsOf(vee.cutter, cut.planeDepth, vee.floor, z, reach, true));
+    stands.push(...standsOf(vee.cutter, cut.planeDepth, vee.floor, z, reach, cut.planeDepth));
   const wallInside = radiusAtHeight(cutter, cut.tipDepth - cut.planeDepth) - radiusAtHeight(cutter, cut.tipDepth - z);
   const corner = wallInside * reach;
   // Just off the walls themselves: there every stand only touches.
@@ -95,6 +101,6 @@ export function cornerSlice(situation: CornerSituation, z: number): CornerSlice 
   return { depth: z, left, diagonal: firstCut(stands, corner, 0), wallInside };
 }
 
-/** Slices at the face and at a quarter, half and all of the thickness. */
+/** Slices in the corners' plane (the face, or a bead's base) and at a quarter, half and all of the thickness. */
 export const cornerSlices = (situation: CornerSituation, thickness: number): CornerSlice[] =>
-  [0, thickness / 4, thickness / 2, thickness].map((z) => cornerSlice(situation, z));
+  [situation.cut.planeDepth, thickness / 4, thickness / 2, thickness].map((z) => cornerSlice(situation, z));

@@ -1,7 +1,7 @@
 import type { BeadedEdge, Particulars } from '../particulars/particulars.ts';
 import { envelopeDepth } from './envelope-depth.ts';
 import { intendedDepth } from './intended-depth.ts';
-import { sectionPasses } from './section-passes.ts';
+import { sectionPasses, type SectionPass } from './section-passes.ts';
 
 export interface SectionDifference {
   /** Greatest depth cut below the entered bead, and where; 0 when nothing is. */
@@ -15,8 +15,11 @@ export interface SectionDifference {
 const STEPS = 400;
 
 /** The entered bead held against the true section, over the bead's width: how far the cutters cut into it, and what they leave on it. */
-export function sectionDifference(p: Particulars, edge: BeadedEdge): SectionDifference {
-  const passes = sectionPasses(p, edge);
+export function sectionDifference(
+  p: Particulars,
+  edge: BeadedEdge,
+  passes: readonly SectionPass[] = sectionPasses(p, edge),
+): SectionDifference {
   let [below, belowAt, above, aboveAt] = [0, 0, 0, 0];
   for (let i = 0; i <= STEPS; i++) {
     const y = (2 * edge.bead.radius * i) / STEPS;

@@ -1,6 +1,7 @@
 import type { Cutter, CutterRole } from '../cutters/cutter.ts';
 import { radiusAtHeight } from '../cutters/radius-at-height.ts';
 import { beadCutters, quirkOffsets } from '../line-sets/bead-line-sets.ts';
+import { veeFloor } from '../line-sets/corner-vee-line-set.ts';
 import { beadBase } from '../line-sets/held-depth.ts';
 import type { SetName } from '../line-sets/line-set.ts';
 import { openingCut } from '../line-sets/opening-cut.ts';
@@ -15,6 +16,22 @@ export interface SectionPass {
   readonly offset: number;
   /** Of its tip below the face. */
   readonly tipDepth: number;
+}
+
+/** A V-cutter as it stands beside an edge on its way into a corner: its flank touches the edge in the corners' plane. */
+export function cornerVeePass(p: Particulars, edge: Edge): SectionPass | undefined {
+  const { corner } = p.cutters;
+  const cut = openingCut(p, edge);
+  if (edge.corners !== 'vee' || corner?.kind !== 'vee') return undefined;
+  const tipDepth = veeFloor(corner, p.thickness);
+  if (tipDepth <= cut.planeDepth) return undefined;
+  return {
+    set: 'CORNER_VEE',
+    role: 'corner',
+    cutter: corner,
+    offset: -radiusAtHeight(corner, tipDepth - cut.planeDepth),
+    tipDepth,
+  };
 }
 
 /** All cutters that pass an opening's edge, in cutting order, at their full depth. */
