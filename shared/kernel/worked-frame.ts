@@ -18,14 +18,18 @@ export interface FaceWork {
   readonly lineSets: readonly LineSet[];
 }
 
-/** All that follows from a frame's particulars. With a stop among the findings, lines may be missing. */
-export interface WorkedFrame {
+/** All lines that follow from a frame's particulars. Where the checks find a stop, lines may be missing. */
+export interface DrawnFrame {
   readonly particulars: Particulars;
   readonly contours: FrameContours;
   readonly dados: readonly DadoOutline[];
   readonly blank: BlankPlan;
   readonly back: FaceWork;
   readonly front: FaceWork;
+}
+
+/** The lines and what is to be said of them. */
+export interface WorkedFrame extends DrawnFrame {
   readonly residues: readonly CornerResidue[];
   /** Stops first, then cautions, then notes. */
   readonly findings: readonly Finding[];

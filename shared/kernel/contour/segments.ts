@@ -59,8 +59,11 @@ export function segmentsOf(contour: Contour): Segment[] {
 /** Direction of travel where a segment begins (or ends), as a unit vector. */
 export function directionAt(segment: Segment, end: 'start' | 'end'): Point {
   if (segment.kind === 'line') {
-    const length = Math.hypot(segment.b.x - segment.a.x, segment.b.y - segment.a.y);
-    return { x: (segment.b.x - segment.a.x) / length, y: (segment.b.y - segment.a.y) / length };
+    // Not Math.hypot, which takes several times as long: this runs for each corner of each offset.
+    const dx = segment.b.x - segment.a.x;
+    const dy = segment.b.y - segment.a.y;
+    const length = Math.sqrt(dx * dx + dy * dy);
+    return { x: dx / length, y: dy / length };
   }
   const at = end === 'start' ? segment.a : segment.b;
   const side = segment.sweep > 0 ? 1 : -1;

@@ -7,7 +7,7 @@ import type { FileProfile } from '../profiles/file-profile.ts';
 import { fileUnit } from '../profiles/file-unit.ts';
 import { labelsKey, nameLayers } from '../profiles/name-layers.ts';
 import { convertLength } from '../units/convert-length.ts';
-import type { WorkedFrame } from '../worked-frame.ts';
+import type { DrawnFrame } from '../worked-frame.ts';
 import type { Drawing, DrawingEntity, DrawingLayer } from './drawing.ts';
 import { DrawingRefused } from './drawing-refused.ts';
 import { placeLabels } from './place-labels.ts';
@@ -18,7 +18,7 @@ import { tidyContour, tidyPath } from './tidy-line.ts';
  * the lower left corner of the finished frame as it lies in that setup: in the back setup, where the board is seen
  * from behind, that corner is frame view's lower right one (side to side) or upper left one (end over end).
  */
-function originOf(worked: WorkedFrame, face: Face, origin: FileProfile['origin']): Point {
+function originOf(worked: DrawnFrame, face: Face, origin: FileProfile['origin']): Point {
   if (origin === 'pins') return { x: 0, y: 0 };
   const { width, height } = worked.contours;
   const lies = placeExtents(worked[face].placement, { minX: 0, minY: 0, maxX: width, maxY: height });
@@ -37,7 +37,7 @@ function entityExtents(entity: DrawingEntity): Extents | undefined {
  * text is not counted. Throws DrawingRefused when two line sets would share a layer, for a line that shrinks to
  * nothing at the profile's decimals, and for a face without any line.
  */
-export function buildDrawing(worked: WorkedFrame, face: Face, profile: FileProfile): Drawing {
+export function buildDrawing(worked: DrawnFrame, face: Face, profile: FileProfile): Drawing {
   const drawn = worked.particulars.unit;
   const unit = fileUnit(profile, drawn);
   const { decimals } = profile;

@@ -2,7 +2,7 @@ import type { Extents, Point } from '../contour/contour.ts';
 import type { Face } from '../line-sets/line-set.ts';
 import { placeExtents } from '../placing/place.ts';
 import type { Unit } from '../units/unit.ts';
-import type { WorkedFrame } from '../worked-frame.ts';
+import type { DrawnFrame } from '../worked-frame.ts';
 
 /** A word on a face: `at` is the left end of its base line in the setup, `height` that of a capital. Unit of the frame. */
 export interface PlacedLabel {
@@ -16,7 +16,7 @@ const TEXT_HEIGHT: Record<Unit, number> = { in: 0.5, mm: 12 };
 const LETTER = 0.8;
 
 /** Opening labels (front) or part names (back), each about the middle of its opening or dado. */
-export function placeLabels(worked: WorkedFrame, face: Face): PlacedLabel[] {
+export function placeLabels(worked: DrawnFrame, face: Face): PlacedLabel[] {
   const named: { text: string; extents: Extents }[] =
     face === 'front'
       ? worked.contours.openings.map(({ label, extents }) => ({ text: label, extents }))

@@ -2,14 +2,14 @@ import type { Extents } from '../contour/contour.ts';
 import { joinExtents } from '../contour/contour-extents.ts';
 import { placeExtents, unplace } from '../placing/place.ts';
 import type { FileProfile } from '../profiles/file-profile.ts';
-import type { WorkedFrame } from '../worked-frame.ts';
+import type { DrawnFrame } from '../worked-frame.ts';
 import { combineFaces, type CutPart, type Stage } from './cut-part.ts';
 import { faceLines } from './face-lines.ts';
 import type { Grid } from './grid.ts';
 import { sweepFace } from './sweep-face.ts';
 
 /** The lines of both faces' drawings with everything cut. Throws DrawingRefused for a frame that cannot be drawn. */
-export function finishedStage(worked: WorkedFrame, profile: FileProfile): Stage {
+export function finishedStage(worked: DrawnFrame, profile: FileProfile): Stage {
   const front = faceLines(worked, 'front', profile);
   const back = faceLines(worked, 'back', profile);
   return { front, back, frontLayers: front.layers.length, backLayers: back.layers.length };
@@ -25,7 +25,7 @@ export function stageAfter({ front, back }: Stage, steps: number): Stage {
 export const stepsOf = ({ front, back }: Stage): number => back.layers.length + front.layers.length;
 
 /** The board as loaded, in frame view. */
-export const boardExtents = (worked: WorkedFrame, { back, front }: Stage): Extents => {
+export const boardExtents = (worked: DrawnFrame, { back, front }: Stage): Extents => {
   const boards = [back.board, front.board].filter((b) => b !== null);
   const [first, ...rest] = boards;
   return first ? joinExtents(first, ...rest) : placeExtents(unplace(worked.blank.back), worked.blank.rough);

@@ -7,7 +7,7 @@ import { placeContour, placeExtents, placePoint, unplace } from '../placing/plac
 import type { FileProfile } from '../profiles/file-profile.ts';
 import { nameLayers } from '../profiles/name-layers.ts';
 import { convertLength } from '../units/convert-length.ts';
-import type { WorkedFrame } from '../worked-frame.ts';
+import type { DrawnFrame } from '../worked-frame.ts';
 import type { FaceCut, LayerLines } from './face-cut.ts';
 import { layerCuts } from './layer-cuts.ts';
 
@@ -15,7 +15,7 @@ import { layerCuts } from './layer-cuts.ts';
 type ToSetup = <P extends Point>(p: P) => P;
 
 /** Numbers as they stand in the file: rounded to its decimals. The origin is the frame's lower left corner or the pins. */
-function toSetup(worked: WorkedFrame, face: Face, profile: FileProfile, drawing: Drawing): ToSetup {
+function toSetup(worked: DrawnFrame, face: Face, profile: FileProfile, drawing: Drawing): ToSetup {
   const { unit } = worked.particulars;
   const { width, height } = worked.contours;
   const frame = placeExtents(worked[face].placement, { minX: 0, minY: 0, maxX: width, maxY: height });
@@ -30,7 +30,7 @@ function toSetup(worked: WorkedFrame, face: Face, profile: FileProfile, drawing:
 
 /** The rectangle of the face's blank layer. */
 function boardOf(
-  worked: WorkedFrame,
+  worked: DrawnFrame,
   face: Face,
   profile: FileProfile,
   contoursOn: (layer: string) => Contour[],
@@ -45,7 +45,7 @@ function boardOf(
  * frame view: the back through its placement turned round. Which cutter runs where and how deep comes with the layers'
  * table; no other particular is looked at. Throws DrawingRefused for a frame that cannot be drawn.
  */
-export function faceLines(worked: WorkedFrame, face: Face, profile: FileProfile): FaceCut {
+export function faceLines(worked: DrawnFrame, face: Face, profile: FileProfile): FaceCut {
   const drawing = buildDrawing(worked, face, profile);
   const setup = toSetup(worked, face, profile, drawing);
   const home = unplace(worked[face].placement);

@@ -1,7 +1,7 @@
 import type { FeatureId } from '../frame/members.ts';
 import type { Face } from '../line-sets/line-set.ts';
 import { PROOF } from '../tolerances.ts';
-import type { WorkedFrame } from '../worked-frame.ts';
+import type { DrawnFrame } from '../worked-frame.ts';
 import { PART, type CutPart } from './cut-part.ts';
 import { sampleX, sampleY } from './grid.ts';
 import { intendedFeatures, type IntendedFeature } from './intended-features.ts';
@@ -62,7 +62,7 @@ function offBy(features: readonly IntendedFeature[], x: number, y: number, depth
  * Yields the share done after each row of tiles; it tells the largest of what is left and of what is cut too much.
  */
 export function* findDifference(
-  worked: WorkedFrame,
+  worked: DrawnFrame,
   part: CutPart,
   face: Face,
 ): Generator<number, LargestDifference, void> {

@@ -4,7 +4,7 @@ import { rectangle } from '../contour/make-contour.ts';
 import type { FeatureId } from '../frame/members.ts';
 import { edgeOfOpening } from '../line-sets/held-depth.ts';
 import type { Face } from '../line-sets/line-set.ts';
-import type { WorkedFrame } from '../worked-frame.ts';
+import type { DrawnFrame } from '../worked-frame.ts';
 import { dadoSection, openingSection, perimeterSection, type EdgeSection } from './edge-section.ts';
 import { InsideRows } from './inside-rows.ts';
 import { MitredDistance } from './mitred-distance.ts';
@@ -27,7 +27,7 @@ function makeFeature(id: FeatureId, contour: Contour, section: EdgeSection): Int
 }
 
 /** What is meant to be on a face: openings with their edges and the perimeter on the front, dados with sharp corners on the back. */
-export function intendedFeatures({ particulars: p, contours, dados }: WorkedFrame, face: Face): IntendedFeature[] {
+export function intendedFeatures({ particulars: p, contours, dados }: DrawnFrame, face: Face): IntendedFeature[] {
   if (face === 'back') return dados.map((d) => makeFeature(d.id, rectangle(d.extents), dadoSection(d.depth)));
   return [
     ...contours.openings.map((o) => makeFeature(o.id, o.contour, openingSection(p, edgeOfOpening(p.edge, o)))),

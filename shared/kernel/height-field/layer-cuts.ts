@@ -5,7 +5,7 @@ import { openingCut } from '../line-sets/opening-cut.ts';
 import type { Particulars } from '../particulars/particulars.ts';
 import type { FileProfile } from '../profiles/file-profile.ts';
 import { nameLayers } from '../profiles/name-layers.ts';
-import type { WorkedFrame } from '../worked-frame.ts';
+import type { DrawnFrame } from '../worked-frame.ts';
 import type { LayerCut } from './face-cut.ts';
 
 /** How far beside the lines a cutter runs: its radius, and for the entered size of openings its radius where that size is true. */
@@ -20,7 +20,7 @@ function besideOf(p: Particulars, { set, variant, side, cutter: role, depth }: L
  * Layers that are not cut are left out, and an OPENING whose OPENING_AXIS is there too: cut one, not both.
  * Throws DrawingRefused as nameLayers does.
  */
-export function layerCuts(worked: WorkedFrame, face: Face, profile: FileProfile): LayerCut[] {
+export function layerCuts(worked: DrawnFrame, face: Face, profile: FileProfile): LayerCut[] {
   const layers = nameLayers(worked, profile);
   const carried = worked[face].lineSets.filter((s) => layers.has(lineSetKey(s)));
   const hasAxis = (entered: LineSet) => carried.some((s) => s.set === 'OPENING_AXIS' && s.variant === entered.variant);

@@ -1,6 +1,6 @@
 import type { FileProfile } from '../profiles/file-profile.ts';
 import type { Face } from '../line-sets/line-set.ts';
-import type { WorkedFrame } from '../worked-frame.ts';
+import type { DrawnFrame } from '../worked-frame.ts';
 import { boardExtents, cutBoard, finishedStage, shareOf } from './cut-board.ts';
 import type { CutPart, Stage } from './cut-part.ts';
 import { findDifference, type Difference, type LargestDifference } from './find-difference.ts';
@@ -20,7 +20,7 @@ const AGAIN_CELLS = 3;
 const FINER = 16;
 
 function* again(
-  worked: WorkedFrame,
+  worked: DrawnFrame,
   stage: Stage,
   whole: CutPart,
   found: Difference | null,
@@ -38,7 +38,7 @@ function* again(
 }
 
 function* measureFace(
-  worked: WorkedFrame,
+  worked: DrawnFrame,
   stage: Stage,
   whole: CutPart,
   face: Face,
@@ -56,7 +56,7 @@ function* measureFace(
  * frame that cannot be drawn.
  */
 export function* measureFrame(
-  worked: WorkedFrame,
+  worked: DrawnFrame,
   profile: FileProfile,
   cell: number,
 ): Generator<number, Measured, void> {

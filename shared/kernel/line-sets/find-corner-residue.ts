@@ -3,7 +3,9 @@ import { radiusAtHeight } from '../cutters/radius-at-height.ts';
 import type { Opening } from '../frame/members.ts';
 import type { CornerResidue } from './corner-residue.ts';
 import { insideCorners } from './inside-corners.ts';
+import type { Particulars } from '../particulars/particulars.ts';
 import type { OpeningCut } from './opening-cut.ts';
+import { openingGroups } from './opening-groups.ts';
 
 /** On the diagonal, a radius ρ tangent to both sides of a corner of inside angle θ leaves ρ(1/sin(θ/2) − 1); ρ(√2 − 1) when square. */
 const diagonalShare = (angle: number) => 1 / Math.sin(angle / 2) - 1;
@@ -31,7 +33,7 @@ function liftedDiagonal(cutter: Cutter, cut: OpeningCut, climbEnd: number, angle
 }
 
 /** Residue in the corners' plane (the face, or a bead's base) and at a quarter, half and all of the thickness, for each angle among an opening's corners. */
-export function findCornerResidue(
+function findCornerResidue(
   cutter: Cutter,
   cut: OpeningCut,
   thickness: number,
@@ -71,3 +73,9 @@ export function findCornerResidue(
   }
   return out;
 }
+
+/** What is left in the corners of all openings of a frame. */
+export const frameResidues = (p: Particulars, openings: readonly Opening[]): CornerResidue[] =>
+  openingGroups(p, openings).groups.flatMap((group) =>
+    findCornerResidue(p.cutters.opening, group.cut, p.thickness, group.openings),
+  );

@@ -2,7 +2,7 @@ import type { Cutter } from '../cutters/cutter.ts';
 import type { DrawingLayer } from '../drawing/drawing.ts';
 import { lineSetKey, type Face, type LineSet } from '../line-sets/line-set.ts';
 import { convertLength } from '../units/convert-length.ts';
-import type { WorkedFrame } from '../worked-frame.ts';
+import type { DrawnFrame } from '../worked-frame.ts';
 import { carriedLineSets } from './carried-line-sets.ts';
 import { LABELS, layerColour } from './default-line-sets.ts';
 import type { FileProfile } from './file-profile.ts';
@@ -14,7 +14,7 @@ import { depthDigits, layerName } from './layer-name.ts';
 export const labelsKey = (face: Face): string => `${face}/${LABELS}`;
 
 /** What {cutter} stands for: the cutter's name, else T and its number, else its task on the frame. */
-function cutterWord(worked: WorkedFrame, { cutter: role }: LineSet): string {
+function cutterWord(worked: DrawnFrame, { cutter: role }: LineSet): string {
   if (role === null) return 'none';
   const cutter: Cutter | undefined = worked.particulars.cutters[role];
   return cutter?.name ?? (cutter?.number === undefined ? role : `T${cutter.number}`);
@@ -25,7 +25,7 @@ function cutterWord(worked: WorkedFrame, { cutter: role }: LineSet): string {
  * labels also 'back/LABELS' and 'front/LABELS'. A line set that is not in the map is not in the files.
  * Throws DrawingRefused (LayerClash) when two sets of this frame would get one name, and for a template that is not one.
  */
-export function nameLayers(worked: WorkedFrame, profile: FileProfile): Map<string, DrawingLayer> {
+export function nameLayers(worked: DrawnFrame, profile: FileProfile): Map<string, DrawingLayer> {
   const drawn = worked.particulars.unit;
   const unit = fileUnit(profile, drawn);
   const layers: { key: string; name: string; colour: number }[] = [];

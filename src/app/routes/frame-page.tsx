@@ -41,9 +41,9 @@ export function FramePageRoute() {
         shopName={shop.name}
         mayEdit={mayDo('edit-frames') && !frame.data.removed}
         mayRelease={mayDo('release') && !frame.data.removed}
-        renderCutPart={(worked) => (
+        renderCutPart={(worked, stops) => (
           <Suspense fallback={<ProgressText>The view is fetched.</ProgressText>}>
-            <CutPart worked={worked} />
+            <CutPart worked={worked} stops={stops} />
           </Suspense>
         )}
       />

@@ -1,17 +1,17 @@
 import type { Point } from '#shared/kernel/contour/contour.ts';
 import type { Measured } from '#shared/kernel/height-field/measure-frame.ts';
 import { formatWithUnit } from '#shared/kernel/units/format-length.ts';
-import type { WorkedFrame } from '#shared/kernel/worked-frame.ts';
+import type { DrawnFrame } from '#shared/kernel/worked-frame.ts';
 import { Button } from '../../ui/button.tsx';
 import { classNames } from '../../ui/class-names.ts';
 import { Notice } from '../../ui/notice.tsx';
 import { ProgressText } from '../../ui/progress-text.tsx';
 import { differenceWords, noDifferenceWords, sortDifferences } from './model/difference-words.ts';
-import type { useAnswer } from './work/use-answer.ts';
-import type { MeasureWish } from './work/picture.ts';
+import type { useAnswer } from './sweeping/use-answer.ts';
+import type { MeasureWish } from './sweeping/picture.ts';
 
 interface DifferenceReportProps {
-  readonly worked: WorkedFrame;
+  readonly worked: DrawnFrame;
   readonly asked: ReturnType<typeof useAnswer<MeasureWish>>;
   readonly onShow: (place: Point, face: 'front' | 'back') => void;
 }
@@ -21,7 +21,7 @@ function Found({
   measured,
   onShow,
 }: {
-  readonly worked: WorkedFrame;
+  readonly worked: DrawnFrame;
   readonly measured: Measured;
   readonly onShow: DifferenceReportProps['onShow'];
 }) {

@@ -8,9 +8,9 @@ import { facePalette, type Tokens } from './model/palette.ts';
 import type { PartView } from './model/use-part-view.ts';
 import { PartStage } from './scene/part-stage.tsx';
 import { ReliefStage } from './scene/relief-stage.tsx';
-import type { Rgb } from './work/picture.ts';
-import { useAnswer, type Asked } from './work/use-answer.ts';
-import type { FrameFiles, WorkshopClient } from './work/workshop-client.ts';
+import type { Rgb } from './sweeping/picture.ts';
+import { useAnswer, type Asked } from './sweeping/use-answer.ts';
+import type { FrameFiles, WorkshopClient } from './sweeping/workshop-client.ts';
 
 interface PartPictureProps {
   readonly client: WorkshopClient;

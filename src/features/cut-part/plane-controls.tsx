@@ -3,7 +3,7 @@ import type { Extents } from '#shared/kernel/contour/contour.ts';
 import { formatWithUnit } from '#shared/kernel/units/format-length.ts';
 import type { Unit } from '#shared/kernel/units/unit.ts';
 import { Choice } from '../../ui/choice.tsx';
-import type { Plane } from './work/picture.ts';
+import type { Plane } from './sweeping/picture.ts';
 
 interface PlaneControlsProps {
   readonly region: Extents;

@@ -3,7 +3,7 @@ import { Button } from '../../ui/button.tsx';
 import { classNames } from '../../ui/class-names.ts';
 import { hexOf } from './model/palette.ts';
 import type { Step } from './model/steps.ts';
-import type { Rgb } from './work/picture.ts';
+import type { Rgb } from './sweeping/picture.ts';
 
 /** How long each step stays while they play. */
 const PLAY_MS = 1600;

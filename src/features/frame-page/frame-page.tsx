@@ -4,8 +4,9 @@ import type { Frame } from '#shared/contracts/frames.ts';
 import type { StoredEdgePreset } from '#shared/contracts/edge-presets.ts';
 import type { StoredProfile } from '#shared/contracts/profiles.ts';
 import type { DrawerCutter } from '#shared/kernel/cutter-drawer/drawer-cutter.ts';
+import type { Finding } from '#shared/kernel/checks/finding.ts';
 import type { Particulars } from '#shared/kernel/particulars/particulars.ts';
-import type { WorkedFrame } from '#shared/kernel/worked-frame.ts';
+import type { DrawnFrame } from '#shared/kernel/worked-frame.ts';
 import { nextLetter } from '#shared/kernel/revisions/next-letter.ts';
 import { Button } from '../../ui/button.tsx';
 import { Sheet } from '../../ui/sheet.tsx';
@@ -17,7 +18,8 @@ import { ParticularsForm } from './form/particulars-form.tsx';
 import { SavedEdgesProvider } from './form/saved-edges.ts';
 import { useUndoKeys } from './form/use-undo-keys.ts';
 import { FrameTitleBlock } from './frame-title-block.tsx';
-import { createDesk, DeskProvider, useEditor } from './model/desk.ts';
+import { createDesk, DeskProvider, useDesk, useEditor } from './model/desk.ts';
+import { useStore } from './model/store.ts';
 import { FilesDialog } from './release/files-dialog.tsx';
 import { ReleaseDialog } from './release/release-dialog.tsx';
 import { EarlierCopyNotice } from './saving/earlier-copy-notice.tsx';
@@ -43,8 +45,10 @@ interface FramePageProps {
   readonly mayEdit: boolean;
   readonly mayRelease: boolean;
   /** The look at the cut part, which is a feature of its own. */
-  readonly renderCutPart: (worked: WorkedFrame) => ReactNode;
+  readonly renderCutPart: (worked: DrawnFrame, stops: number) => ReactNode;
 }
+
+const countStops = (findings: readonly Finding[]): number => findings.filter((f) => f.level === 'stop').length;
 
 /** What the middle shows beside the findings. */
 function Shown({
@@ -52,15 +56,16 @@ function Shown({
   renderCutPart,
 }: {
   readonly view: FrameView;
-  readonly renderCutPart: (worked: WorkedFrame) => ReactNode;
+  readonly renderCutPart: (worked: DrawnFrame, stops: number) => ReactNode;
 }) {
   const worked = useEditor((s) => s.drawn);
+  const stops = useStore(useDesk().findings, countStops);
   if (view === 'faces') return <Spread />;
   return (
     <div className="flex min-h-0 min-w-0 flex-1 flex-col overflow-y-auto p-4">
       {view === 'section' && <SectionView />}
       {view === 'corners' && <CornerView />}
-      {view === 'part' && renderCutPart(worked)}
+      {view === 'part' && renderCutPart(worked, stops)}
     </div>
   );
 }

@@ -1,15 +1,13 @@
 import type { ReactNode } from 'react';
 import type { Frame } from '#shared/contracts/frames.ts';
-import type { FindingLevel } from '#shared/kernel/checks/finding.ts';
+import type { Finding, FindingLevel } from '#shared/kernel/checks/finding.ts';
 import { UNIT_WORDS, MM_PER_INCH, type Unit } from '#shared/kernel/units/unit.ts';
 import { Button } from '../../ui/button.tsx';
 import { plural } from '../../ui/plural.ts';
 import { TitleBlock, TitleCell } from '../../ui/title-block.tsx';
 import { useDesk, useEditor } from './model/desk.ts';
-import type { EditorState } from './model/frame-editor.ts';
 import type { View } from './model/view.ts';
 import { useStore } from './model/store.ts';
-import { useSettled } from './model/use-settled.ts';
 
 /** A CSS pixel is 1/96 in by definition (CSS Values and Units, absolute lengths); screens come near to it. */
 const PX_PER_INCH = 96;
@@ -20,13 +18,13 @@ function scaleWords(pxPerUnit: number, unit: Unit): string {
   return ratio >= 1 ? `≈ 1 : ${rounded(ratio)}` : `≈ ${rounded(1 / ratio)} : 1`;
 }
 
-function countWords({ worked }: EditorState): string {
-  const count = (level: FindingLevel) => worked.findings.filter((f) => f.level === level).length;
+function countWords(findings: readonly Finding[]): string {
+  const count = (level: FindingLevel) => findings.filter((f) => f.level === level).length;
   return `${plural(count('stop'), 'stop')}, ${plural(count('caution'), 'caution')}|${plural(count('note'), 'note')}`;
 }
 
 function FindingsCell() {
-  const words = useSettled(countWords);
+  const words = useStore(useDesk().findings, countWords);
   const [first = '', second] = words.split('|');
   return (
     <TitleCell label="Findings" detail={second}>

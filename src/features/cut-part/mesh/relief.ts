@@ -1,7 +1,7 @@
 import { PART, type CutPart } from '#shared/kernel/height-field/cut-part.ts';
 import type { Face } from '#shared/kernel/line-sets/line-set.ts';
 import type { Flip } from '#shared/kernel/particulars/particulars.ts';
-import type { Rgb } from '../work/picture.ts';
+import type { Rgb } from '../sweeping/picture.ts';
 
 /** Direction of the light, from the upper left above the face that lies up; unit length. */
 const LIGHT = [-0.4, 0.5, 0.768] as const;

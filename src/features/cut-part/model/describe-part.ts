@@ -1,6 +1,6 @@
 import { formatWithUnit } from '#shared/kernel/units/format-length.ts';
 import type { Unit } from '#shared/kernel/units/unit.ts';
-import type { PictureFacts, Plane } from '../work/picture.ts';
+import type { PictureFacts, Plane } from '../sweeping/picture.ts';
 import type { Place } from './places.ts';
 import type { Step } from './steps.ts';
 
@@ -16,8 +16,14 @@ interface Looked {
 
 const SQUARE_MM_TO_CM = 100;
 
-const areaWords = (area: number, unit: Unit): string =>
-  unit === 'in' ? `≈${area.toFixed(2)} square inches` : `≈${(area / SQUARE_MM_TO_CM).toFixed(1)} square centimetres`;
+/** Two digits at least: what a V-cutter leaves in a corner is a fraction of a square millimetre. */
+function areaWords(area: number, unit: Unit): string {
+  if (unit === 'in') return `≈${area.toFixed(area < 0.1 ? 5 : 2)} square inches`;
+  const cm = area / SQUARE_MM_TO_CM;
+  return cm < 1 ? `≈${area.toFixed(2)} square millimetres` : `≈${cm.toFixed(1)} square centimetres`;
+}
+
+const startSmall = (words: string): string => words.charAt(0).toLowerCase() + words.slice(1);
 
 const piecesWords = (count: number) =>
   count === 0 ? 'Nothing has come free.' : count === 1 ? 'One piece has come free.' : `${count} pieces have come free.`;
@@ -37,9 +43,9 @@ export function stepSentence({ steps, done, facts, unit }: Pick<Looked, 'steps' 
     area === undefined
       ? ''
       : area === 0
-        ? ' It leaves upright walls only here, or nothing.'
+        ? ' Nothing of it shows at this size: upright walls, or too small. Look closer.'
         : ` Its surfaces here: ${areaWords(area, unit)}.`;
-  return `After step ${done} of ${steps.length}, ${step.face}, ${step.words.toLowerCase()}: ${step.detail}.${marked}`;
+  return `After step ${done} of ${steps.length}, ${step.face}, ${startSmall(step.words)}: ${step.detail}.${marked}`;
 }
 
 function planeWords({ runs, at }: Plane, unit: Unit): string {

@@ -1,8 +1,8 @@
 import type { Difference, LargestDifference } from '#shared/kernel/height-field/find-difference.ts';
 import type { Unit } from '#shared/kernel/units/unit.ts';
-import type { WorkedFrame } from '#shared/kernel/worked-frame.ts';
+import type { DrawnFrame } from '#shared/kernel/worked-frame.ts';
 
-function featureWords({ contours, dados }: WorkedFrame, { of }: Difference): string {
+function featureWords({ contours, dados }: DrawnFrame, { of }: Difference): string {
   if (of === 'perimeter') return ' at the perimeter';
   const opening = contours.openings.find((o) => o.id === of);
   if (opening) return ` at opening ${opening.label}`;
@@ -17,7 +17,7 @@ const DIGITS: Record<Unit, { readonly size: number; readonly place: number }> = 
 };
 
 /** One difference in words: how much, what, where. */
-export function differenceWords(worked: WorkedFrame, difference: Difference): string {
+export function differenceWords(worked: DrawnFrame, difference: Difference): string {
   const { unit, thickness } = worked.particulars;
   const { kind, off, x, y, depth, intended } = difference;
   const digits = DIGITS[unit];

@@ -1,5 +1,5 @@
 import type { Face, SetName } from '#shared/kernel/line-sets/line-set.ts';
-import type { Rgb } from '../work/picture.ts';
+import type { Rgb } from '../sweeping/picture.ts';
 import type { Step } from './steps.ts';
 
 const TOKENS = ['paper', 'ink', 'board', 'board-light', 'back', 'front', 'bead', 'lift'] as const;

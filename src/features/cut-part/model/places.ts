@@ -3,7 +3,7 @@ import type { Opening } from '#shared/kernel/frame/members.ts';
 import { insideCorners } from '#shared/kernel/line-sets/inside-corners.ts';
 import { convertLength } from '#shared/kernel/units/convert-length.ts';
 import type { Unit } from '#shared/kernel/units/unit.ts';
-import type { WorkedFrame } from '#shared/kernel/worked-frame.ts';
+import type { DrawnFrame } from '#shared/kernel/worked-frame.ts';
 
 /** A place to look at: the whole board, or a region of it closer. */
 export interface Place {
@@ -53,6 +53,6 @@ function placesOf(opening: Opening, unit: Unit): Place[] {
 }
 
 /** The whole board, each opening and each of its inside corners. */
-export function listPlaces({ contours, particulars }: WorkedFrame): Place[] {
+export function listPlaces({ contours, particulars }: DrawnFrame): Place[] {
   return [WHOLE, ...contours.openings.flatMap((opening) => placesOf(opening, particulars.unit))];
 }

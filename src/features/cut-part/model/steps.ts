@@ -6,7 +6,7 @@ import type { Face, SetName } from '#shared/kernel/line-sets/line-set.ts';
 import type { FileProfile } from '#shared/kernel/profiles/file-profile.ts';
 import { formatWithUnit } from '#shared/kernel/units/format-length.ts';
 import type { Unit } from '#shared/kernel/units/unit.ts';
-import type { WorkedFrame } from '#shared/kernel/worked-frame.ts';
+import type { DrawnFrame } from '#shared/kernel/worked-frame.ts';
 
 /** One line set's cut, as a step on the way from the board to the part. */
 export interface Step {
@@ -50,7 +50,7 @@ function stepOf(face: Face, cut: LayerCut, several: boolean, unit: Unit): Step {
 }
 
 /** Steps in cutting order, those of the back first; none for a frame that cannot be drawn, which the worker says in words. */
-export function listSteps(worked: WorkedFrame, profile: FileProfile): Step[] {
+export function listSteps(worked: DrawnFrame, profile: FileProfile): Step[] {
   const { unit } = worked.particulars;
   try {
     return (['back', 'front'] as const).flatMap((face) => {

@@ -1,8 +1,8 @@
 import { useMemo, useState } from 'react';
 import type { Point } from '#shared/kernel/contour/contour.ts';
 import { formatLength } from '#shared/kernel/units/format-length.ts';
-import type { Plane } from '../work/picture.ts';
-import type { FrameFiles } from '../work/workshop-client.ts';
+import type { Plane } from '../sweeping/picture.ts';
+import type { FrameFiles } from '../sweeping/workshop-client.ts';
 import { listPlaces, regionAbout, WHOLE, type Place } from './places.ts';
 import { listSteps } from './steps.ts';
 import { firstHold, type Hold } from './turning.ts';

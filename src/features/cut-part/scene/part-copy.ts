@@ -10,7 +10,7 @@ import {
   type MeshBasicMaterial,
   type Texture,
 } from 'three';
-import type { Plane } from '../work/picture.ts';
+import type { Plane } from '../sweeping/picture.ts';
 
 /** Surfaces give way to lines drawn along them. */
 export const BEHIND_LINES = { polygonOffset: true, polygonOffsetFactor: 1, polygonOffsetUnits: 1 };

@@ -18,7 +18,7 @@ import type { Flip } from '#shared/kernel/particulars/particulars.ts';
 import type { FaceMesh } from '../mesh/face-mesh.ts';
 import type { Slice } from '../mesh/slice.ts';
 import { NO_TURN, type Hold } from '../model/turning.ts';
-import type { Picture, Plane, Rgb } from '../work/picture.ts';
+import type { Picture, Plane, Rgb } from '../sweeping/picture.ts';
 import { spreadOut, visibleHeight } from './lay-out.ts';
 import { BEHIND_LINES, PartCopy } from './part-copy.ts';
 import { colourOf, makePalette, paintPalette } from './scene-colours.ts';

@@ -2,7 +2,7 @@ import { useEffect, useEffectEvent, useRef, useState, type RefObject } from 'rea
 import type { Point } from '#shared/kernel/contour/contour.ts';
 import type { Slice } from '../mesh/slice.ts';
 import type { Hold } from '../model/turning.ts';
-import type { Picture, Plane } from '../work/picture.ts';
+import type { Picture, Plane } from '../sweeping/picture.ts';
 import { PartScene, type SceneColours, type Showing } from './part-scene.ts';
 import { useTurning } from './use-turning.ts';
 

@@ -1,5 +1,5 @@
 import { useEffect, useRef } from 'react';
-import type { Relief } from '../work/picture.ts';
+import type { Relief } from '../sweeping/picture.ts';
 
 interface ReliefStageProps {
   readonly relief: Relief | null;

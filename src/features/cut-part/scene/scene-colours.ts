@@ -1,5 +1,5 @@
 import { Color, DataTexture, NearestFilter, SRGBColorSpace } from 'three';
-import type { Rgb } from '../work/picture.ts';
+import type { Rgb } from '../sweeping/picture.ts';
 
 /** A layer's number is a byte: 0 for none, then layers from 1. */
 const LAYERS = 256;

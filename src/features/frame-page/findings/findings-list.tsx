@@ -3,8 +3,7 @@ import type { Finding, FindingLevel } from '#shared/kernel/checks/finding.ts';
 import { Button } from '../../../ui/button.tsx';
 import { light, useDesk } from '../model/desk.ts';
 import { entryOf, goToEntry } from '../model/find-entry.ts';
-import type { EditorState } from '../model/frame-editor.ts';
-import { useSettled } from '../model/use-settled.ts';
+import { useStore } from '../model/store.ts';
 import { viewOfPlaces } from '../model/view-of-places.ts';
 
 const WORDS: Record<FindingLevel, string> = { stop: 'Stop', caution: 'Caution', note: 'Note' };
@@ -21,8 +20,8 @@ interface RowProps {
 
 /** Drawn again only when its words change: where it points is asked when it is pointed at. */
 const FindingRow = memo(function FindingRow({ index, level, text, remedy, hasEntry, hasPlace }: RowProps) {
-  const { editor, lit, view, page } = useDesk();
-  const finding = (): Finding | undefined => editor.store.get().worked.findings[index];
+  const { editor, findings, lit, view, page } = useDesk();
+  const finding = (): Finding | undefined => findings.get()[index];
   const on = () => {
     const places = finding()?.places ?? [];
     light(
@@ -74,11 +73,9 @@ const FindingRow = memo(function FindingRow({ index, level, text, remedy, hasEnt
   );
 });
 
-const findingsOf = (s: EditorState): readonly Finding[] => s.worked.findings;
-
 /** What the checks say, stops first. Each lights up its place on both faces; it leads to the place and to the entry to change. */
 export function FindingsList({ className }: { readonly className: string }) {
-  const findings = useSettled(findingsOf);
+  const findings = useStore(useDesk().findings, (value) => value);
   return (
     <section aria-labelledby="findings-heading" className={`@container relative overflow-y-auto ${className}`}>
       <h2 id="findings-heading" className="sr-only">

@@ -1,11 +1,11 @@
 import type { ReactNode } from 'react';
 import type { FeatureId } from '#shared/kernel/frame/members.ts';
-import type { WorkedFrame } from '#shared/kernel/worked-frame.ts';
+import type { DrawnFrame } from '#shared/kernel/worked-frame.ts';
 import { light, useDesk } from '../model/desk.ts';
 
 interface LightsUpProps {
   /** Asked only when it is pointed at or typed in. */
-  readonly of: (worked: WorkedFrame) => readonly FeatureId[];
+  readonly of: (worked: DrawnFrame) => readonly FeatureId[];
   readonly className?: string;
   readonly children: ReactNode;
 }

@@ -8,7 +8,7 @@ import { tracedPlace } from './square-edge.ts';
 
 /** Openings of a traced outline, to read. */
 function TracedOpenings() {
-  const openings = useEditor((s) => s.worked.contours.openings);
+  const openings = useEditor((s) => s.lines.contours.openings);
   const unit = useEditor((s) => s.history.present.unit);
   return (
     <ol>
@@ -32,7 +32,7 @@ function TracedOpenings() {
 /** The layout tree; by keyboard alone, each part can be labelled, sized, arched, split, joined by another and removed. */
 export function OpeningsSection() {
   const traced = useEditor((s) => s.history.present.outline.kind === 'traced');
-  const count = useEditor((s) => s.worked.contours.openings.length);
+  const count = useEditor((s) => s.lines.contours.openings.length);
   return (
     <Section heading="Openings" aside={String(count)}>
       {traced ? <TracedOpenings /> : <PartRow field="outline.layout" />}

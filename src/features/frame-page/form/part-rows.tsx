@@ -30,8 +30,8 @@ function SizeEntry({ field }: PartProps) {
   const along = /columns\.\d+$/.test(field) ? 'width' : 'height';
   const words = useCallback(
     (s: EditorState) => {
-      const size = solvedSize(s.worked, layoutPathOf(field), along);
-      return size === null ? '' : formatLength(size, s.worked.particulars.unit);
+      const size = solvedSize(s.lines, layoutPathOf(field), along);
+      return size === null ? '' : formatLength(size, s.lines.particulars.unit);
     },
     [field, along],
   );

@@ -5,8 +5,8 @@ import { useEditor } from '../model/desk.ts';
 import { Entry } from './entry.tsx';
 
 function TracedSize() {
-  const width = useEditor((s) => s.worked.contours.width);
-  const height = useEditor((s) => s.worked.contours.height);
+  const width = useEditor((s) => s.lines.contours.width);
+  const height = useEditor((s) => s.lines.contours.height);
   const unit = useEditor((s) => s.history.present.unit);
   return (
     <p className="mb-1">

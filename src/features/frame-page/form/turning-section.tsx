@@ -20,8 +20,8 @@ function GivenBoard() {
   const { editor, readOnly } = useDesk();
   const given = useEditor((s) => s.history.present.blank !== undefined);
   function toggle(wanted: boolean) {
-    const { history, worked } = editor.store.get();
-    const { rough } = worked.blank;
+    const { history, lines } = editor.store.get();
+    const { rough } = lines.blank;
     const blank = wanted ? { width: rough.maxX - rough.minX, height: rough.maxY - rough.minY } : undefined;
     editor.apply(setField(history.present, 'blank', blank), wanted ? 'Board given' : 'Board follows from the frame');
   }

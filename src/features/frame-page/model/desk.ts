@@ -1,7 +1,10 @@
 import { createContext, useContext } from 'react';
 import type { Extents, Point } from '#shared/kernel/contour/contour.ts';
+import type { Finding } from '#shared/kernel/checks/finding.ts';
 import type { FeatureId } from '#shared/kernel/frame/members.ts';
 import type { Face } from '#shared/kernel/line-sets/line-set.ts';
+import { followFindings } from './follow-findings.ts';
+import { followView } from './follow-view.ts';
 import type { EditorState, FrameEditor } from './frame-editor.ts';
 import type { Selection } from './selection.ts';
 import { settle } from './settle.ts';
@@ -31,6 +34,8 @@ export interface Desk {
   readonly editor: FrameEditor;
   /** The editor's state a moment late, see use-settled.ts. */
   readonly settled: Store<EditorState>;
+  /** What the checks say, a moment late. */
+  readonly findings: Store<readonly Finding[]>;
   readonly readOnly: boolean;
   readonly lit: Store<Lit>;
   /** Null: the board is fitted to the pages, whatever its size. */
@@ -50,15 +55,20 @@ export interface Desk {
 
 export function createDesk(editor: FrameEditor, readOnly: boolean): Desk {
   const shown = createStore<View>({ scale: 1, centre: { x: 0, y: 0 } });
+  const view = createStore<View | null>(null);
+  const page = createStore<PageSize>({ width: 400, height: 400 });
+  followView({ editor: editor.store, view, page, shown });
+  const settled = settle(editor.store);
   return {
     editor,
-    settled: settle(editor.store),
+    settled,
+    findings: followFindings(settled),
     readOnly,
     lit: createStore(NOTHING_LIT),
-    view: createStore<View | null>(null),
+    view,
     shown,
     settledView: settle(shown),
-    page: createStore<PageSize>({ width: 400, height: 400 }),
+    page,
     hidden: createStore<ReadonlySet<string>>(new Set()),
     measuring: createStore<Measuring | null>(null),
     selection: createStore<Selection | null>(null),

@@ -1,7 +1,7 @@
 import type { FeatureId } from '#shared/kernel/frame/members.ts';
 import { childrenOf, partField } from '#shared/kernel/particulars/layout-parts.ts';
 import type { LayoutPart, Particulars } from '#shared/kernel/particulars/particulars.ts';
-import type { WorkedFrame } from '#shared/kernel/worked-frame.ts';
+import type { DrawnFrame } from '#shared/kernel/worked-frame.ts';
 
 /**
  * The path of an entry that a finding names. Findings count steps down the layout by number alone
@@ -27,7 +27,7 @@ const MEMBER_ENTRIES: Readonly<Record<FeatureId, string>> = {
 };
 
 /** The entry that a feature of the drawing comes from; '' when it has none, as with a traced outline. */
-export function entryOfFeature(worked: WorkedFrame, id: FeatureId): string {
+export function entryOfFeature(worked: DrawnFrame, id: FeatureId): string {
   const { outline } = worked.particulars;
   const dado = worked.dados.find((d) => d.id === id);
   if (dado) return `dados.${dado.index}.at`;

@@ -4,18 +4,18 @@ import { particulars as contract } from '#shared/contracts/particulars.ts';
 import { openingParts } from '#shared/kernel/particulars/layout-parts.ts';
 import type { Particulars } from '#shared/kernel/particulars/particulars.ts';
 import { setField } from '#shared/kernel/particulars/set-field.ts';
-import { workFrame } from '#shared/kernel/work-frame.ts';
-import type { WorkedFrame } from '#shared/kernel/worked-frame.ts';
+import { drawFrame, type FrameLines } from '#shared/kernel/draw-frame.ts';
+import type { DrawnFrame } from '#shared/kernel/worked-frame.ts';
 import { describeField } from './describe-field.ts';
 import { closeEntry, record, redo, startHistory, undo, type History } from './history.ts';
 import { createStore, type Store } from './store.ts';
 
 export interface EditorState {
   readonly history: History;
-  /** What follows from the particulars: findings, sizes. */
-  readonly worked: WorkedFrame;
-  /** What the spread shows: the newest frame whose lines could be drawn. */
-  readonly drawn: WorkedFrame;
+  /** The lines that follow from the particulars. */
+  readonly lines: FrameLines;
+  /** What the spread shows: the newest lines of which none is missing. */
+  readonly drawn: DrawnFrame;
   /** Goes up whenever the particulars change other than by typing into an entry: texts being typed are then dropped. */
   readonly epoch: number;
   /** Entries whose text could not be taken, by path, with what they take. */
@@ -37,7 +37,7 @@ export interface FrameEditor {
 }
 
 /** Whether every opening could be laid out: where members do not add up some are missing, and the last good drawing stays. */
-const isDrawable = ({ particulars: { outline }, contours }: WorkedFrame): boolean =>
+const isDrawable = ({ particulars: { outline }, contours }: DrawnFrame): boolean =>
   contours.openings.length ===
   (outline.kind === 'members' ? openingParts(outline.layout).length : outline.openings.length);
 
@@ -58,10 +58,10 @@ function errorsNear(candidate: Particulars, path: string): FieldError[] {
 const NOTHING_WRONG: ReadonlyMap<string, string> = new Map();
 
 export function createFrameEditor(initial: Particulars): FrameEditor {
-  const first = workFrame(initial);
+  const first = drawFrame(initial);
   const store = createStore<EditorState>({
     history: startHistory(initial),
-    worked: first,
+    lines: first,
     drawn: first,
     epoch: 0,
     wrong: NOTHING_WRONG,
@@ -80,11 +80,11 @@ export function createFrameEditor(initial: Particulars): FrameEditor {
     const now = store.get();
     if (history === now.history) return;
     const same = history.present === now.history.present;
-    const worked = same ? now.worked : workFrame(history.present);
+    const lines = same ? now.lines : drawFrame(history.present);
     store.set({
       history,
-      worked,
-      drawn: isDrawable(worked) ? worked : now.drawn,
+      lines,
+      drawn: isDrawable(lines) ? lines : now.drawn,
       epoch: typed ? now.epoch : now.epoch + 1,
       wrong: typed ? now.wrong : NOTHING_WRONG,
     });

@@ -2,10 +2,10 @@ import type { Point } from '#shared/kernel/contour/contour.ts';
 import { rectangle } from '#shared/kernel/contour/make-contour.ts';
 import { placeExtents, unplace } from '#shared/kernel/placing/place.ts';
 import { SAME } from '#shared/kernel/tolerances.ts';
-import type { WorkedFrame } from '#shared/kernel/worked-frame.ts';
+import type { DrawnFrame } from '#shared/kernel/worked-frame.ts';
 
 /** The places that measuring catches, frame view: corners of perimeter, openings, dados and both boards. */
-export function snapPoints({ contours, dados, back, front }: WorkedFrame): Point[] {
+export function snapPoints({ contours, dados, back, front }: DrawnFrame): Point[] {
   const boards = [back, front].map((face) => rectangle(placeExtents(unplace(face.placement), face.board)));
   const all = [
     contours.perimeter,

@@ -1,5 +1,5 @@
 import type { Extents } from '#shared/kernel/contour/contour.ts';
-import type { WorkedFrame } from '#shared/kernel/worked-frame.ts';
+import type { DrawnFrame } from '#shared/kernel/worked-frame.ts';
 import { boardInFrameView, fitTo, type PageSize, type View } from './view.ts';
 
 /** Share of the page left free on each side of the place, so that one sees where on the board it is. */
@@ -26,7 +26,7 @@ function overlap(all: readonly Extents[]): Extents | null {
 }
 
 /** The view that shows what a finding means: where its places meet, else all of them. Never further away than the whole board. */
-export function viewOfPlaces(worked: WorkedFrame, places: readonly Extents[], page: PageSize): View {
+export function viewOfPlaces(worked: DrawnFrame, places: readonly Extents[], page: PageSize): View {
   const whole = fitTo(boardInFrameView(worked), page);
   const near = fitTo(overlap(places) ?? union(places), page, Math.min(page.width, page.height) * FREE_SHARE);
   const nearest =

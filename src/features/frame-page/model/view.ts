@@ -1,7 +1,7 @@
 import type { Extents, Point } from '#shared/kernel/contour/contour.ts';
 import { placeExtents, unplace } from '#shared/kernel/placing/place.ts';
 import type { Placement } from '#shared/kernel/placing/placement.ts';
-import type { WorkedFrame } from '#shared/kernel/worked-frame.ts';
+import type { DrawnFrame } from '#shared/kernel/worked-frame.ts';
 
 /**
  * How the two pages look at the board. Both look at the same place of the frame at the same scale: what is in the
@@ -37,7 +37,7 @@ const around = (a: Extents, b: Extents): Extents => ({
 });
 
 /** The board as loaded and as squared, both in frame view. */
-export const boardInFrameView = ({ back, front }: WorkedFrame): Extents =>
+export const boardInFrameView = ({ back, front }: DrawnFrame): Extents =>
   around(placeExtents(unplace(back.placement), back.board), placeExtents(unplace(front.placement), front.board));
 
 /** The view that shows a rectangle of frame view whole and as large as the page allows. */
@@ -77,15 +77,24 @@ export const panView = (view: View, pl: Placement, dx: number, dy: number): View
   centre: { x: view.centre.x - (pl.sx * dx) / view.scale, y: view.centre.y + (pl.sy * dy) / view.scale },
 });
 
-/** SVG transform from a setup's coordinates to the page. */
-export function setupTransform(view: View, pl: Placement, page: PageSize): string {
-  const cx = pl.sx * view.centre.x + pl.dx;
-  const cy = pl.sy * view.centre.y + pl.dy;
-  return `matrix(${view.scale} 0 0 ${-view.scale} ${page.width / 2 - view.scale * cx} ${page.height / 2 + view.scale * cy})`;
+/** From lengths on the board to pixels of a page, which runs down: x' = sx·x + dx, y' = sy·y + dy. */
+export interface PageMap {
+  readonly sx: number;
+  readonly sy: number;
+  readonly dx: number;
+  readonly dy: number;
 }
 
-/** SVG transform from frame view to the page. */
-export function frameTransform(view: View, pl: Placement, page: PageSize): string {
+/** From a setup's coordinates to the page. */
+export const setupMap = (view: View, pl: Placement, page: PageSize): PageMap => ({
+  sx: view.scale,
+  sy: -view.scale,
+  dx: page.width / 2 - view.scale * (pl.sx * view.centre.x + pl.dx),
+  dy: page.height / 2 + view.scale * (pl.sy * view.centre.y + pl.dy),
+});
+
+/** From frame view to the page. */
+export function frameMap(view: View, pl: Placement, page: PageSize): PageMap {
   const { x, y } = toPage(view, pl, page, { x: 0, y: 0 });
-  return `matrix(${pl.sx * view.scale} 0 0 ${-pl.sy * view.scale} ${x} ${y})`;
+  return { sx: pl.sx * view.scale, sy: -pl.sy * view.scale, dx: x, dy: y };
 }

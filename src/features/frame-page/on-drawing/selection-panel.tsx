@@ -1,13 +1,12 @@
 import { memo, useRef, type KeyboardEvent } from 'react';
 import { formatLength } from '#shared/kernel/units/format-length.ts';
-import type { WorkedFrame } from '#shared/kernel/worked-frame.ts';
+import type { DrawnFrame } from '#shared/kernel/worked-frame.ts';
 import { Button } from '../../../ui/button.tsx';
 import { FrameFacts } from '../form/frame-facts.tsx';
 import { betweensOf } from '../form/layout-words.ts';
 import { useDesk, useEditor } from '../model/desk.ts';
 import { findSelected, type Selected, type Selection } from '../model/selection.ts';
 import { useStore } from '../model/store.ts';
-import type { PageSize, View } from '../model/view.ts';
 import { focusSpread } from './focus-panel.ts';
 import { PanelButtons } from './panel-buttons.tsx';
 import { MemberEntries, OpeningEntries, TracedEntries } from './panel-entries.tsx';
@@ -15,14 +14,7 @@ import { selectedName, selectedSize } from './selected-words.ts';
 import { sizeFields } from './size-fields.ts';
 import { usePanelPlace } from './use-panel-place.ts';
 
-interface SelectionPanelProps {
-  /** As it is drawn. */
-  readonly worked: WorkedFrame;
-  readonly view: View;
-  readonly page: PageSize;
-}
-
-function Entries({ worked, selected }: { readonly worked: WorkedFrame; readonly selected: Selected }) {
+function Entries({ worked, selected }: { readonly worked: DrawnFrame; readonly selected: Selected }) {
   const { readOnly } = useDesk();
   const outline = useEditor((s) => s.history.present.outline);
   const { unit } = worked.particulars;
@@ -51,14 +43,17 @@ function Entries({ worked, selected }: { readonly worked: WorkedFrame; readonly 
   );
 }
 
-function OpenPanel({
-  worked,
-  view,
-  page,
-  selection,
-  selected,
-}: SelectionPanelProps & { readonly selection: Selection; readonly selected: Selected }) {
+interface OpenPanelProps {
+  /** As it is drawn. */
+  readonly worked: DrawnFrame;
+  readonly selection: Selection;
+  readonly selected: Selected;
+}
+
+function OpenPanel({ worked, selection, selected }: OpenPanelProps) {
   const desk = useDesk();
+  const view = useStore(desk.shown, (value) => value);
+  const page = useStore(desk.page, (value) => value);
   const panel = useRef<HTMLDivElement>(null);
   usePanelPlace({ panel, worked, view, page, face: selection.face, extents: selected.feature.extents });
   const name = selectedName(selected);
@@ -103,13 +98,15 @@ function OpenPanel({
   );
 }
 
-/** A ruled box beside what is selected, to edit it where it lies. */
-export const SelectionPanel = memo(function SelectionPanel(props: SelectionPanelProps) {
-  const { selection: store } = useDesk();
-  const selection = useStore(store, (value) => value);
-  // Follows what is entered only while something is selected.
-  const present = useEditor((s) => (selection?.open ? s.history.present : null));
-  const selected = selection?.open && present ? findSelected(props.worked.contours, present, selection) : null;
-  if (!selection || !selected) return null;
-  return <OpenPanel {...props} selection={selection} selected={selected} />;
+function Selecting({ selection }: { readonly selection: Selection }) {
+  const present = useEditor((s) => s.history.present);
+  const worked = useEditor((s) => s.drawn);
+  const selected = findSelected(worked.contours, present, selection);
+  return selected && <OpenPanel worked={worked} selection={selection} selected={selected} />;
+}
+
+/** A ruled box beside what is selected, to edit it where it lies. Follows the frame only while something is. */
+export const SelectionPanel = memo(function SelectionPanel() {
+  const selection = useStore(useDesk().selection, (value) => value);
+  return selection?.open ? <Selecting selection={selection} /> : null;
 });

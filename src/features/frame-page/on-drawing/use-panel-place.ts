@@ -1,14 +1,14 @@
 import { useLayoutEffect, useRef, type RefObject } from 'react';
 import type { Extents, Point } from '#shared/kernel/contour/contour.ts';
 import type { Face } from '#shared/kernel/line-sets/line-set.ts';
-import type { WorkedFrame } from '#shared/kernel/worked-frame.ts';
+import type { DrawnFrame } from '#shared/kernel/worked-frame.ts';
 import { toPage, type PageSize, type View } from '../model/view.ts';
 import { usePageSize } from '../spread/use-page-size.ts';
 import { placePanel, type Box } from './place-panel.ts';
 
 interface PanelPlace {
   readonly panel: RefObject<HTMLElement | null>;
-  readonly worked: WorkedFrame;
+  readonly worked: DrawnFrame;
   readonly view: View;
   readonly page: PageSize;
   /** Page on which the extents were picked. */
@@ -68,6 +68,6 @@ export function usePanelPlace(place: PanelPlace): void {
     const next = placePanel({ spread: { width, height }, panel: size, own, other, now: now.current });
     if (next === now.current) return;
     now.current = next;
-    panel.current.style.transform = `translate(${next.x}px, ${next.y}px)`;
+    panel.current.style.setProperty('transform', `translate(${next.x}px, ${next.y}px)`);
   });
 }

@@ -1,6 +1,7 @@
-import { useState } from 'react';
+import { useMemo, useState } from 'react';
 import { LIMITS } from '#shared/contracts/limits.ts';
 import type { Frame } from '#shared/contracts/frames.ts';
+import { checkFrame } from '#shared/kernel/check-frame.ts';
 import { isCode } from '../../../lib/api-error.ts';
 import { sayError } from '../../../lib/say-error.ts';
 import { Button } from '../../../ui/button.tsx';
@@ -25,7 +26,8 @@ interface ReleaseDialogProps {
 
 /** Freezes the draft under the next letter, once nothing stops it and each caution has been looked at. */
 export function ReleaseDialog({ frameId, letter, autosave, onReleased, onClose }: ReleaseDialogProps) {
-  const findings = useEditor((s) => s.worked.findings);
+  const lines = useEditor((s) => s.lines);
+  const { findings } = useMemo(() => checkFrame(lines), [lines]);
   const wrong = useEditor((s) => s.wrong.size);
   const [note, setNote] = useState('');
   const [looked, setLooked] = useState<ReadonlySet<string>>(new Set());

@@ -1,12 +1,12 @@
 import type { Face } from '#shared/kernel/line-sets/line-set.ts';
 import { placeExtents } from '#shared/kernel/placing/place.ts';
 import { formatLength, formatWithUnit } from '#shared/kernel/units/format-length.ts';
-import type { WorkedFrame } from '#shared/kernel/worked-frame.ts';
+import type { DrawnFrame } from '#shared/kernel/worked-frame.ts';
 
 const list = (words: readonly string[]): string => (words.length === 0 ? 'none' : words.join('; '));
 
 /** A face in words, for people who do not see the drawing. Places are measured from the pins, in the setup of the face. */
-export function describeFace(worked: WorkedFrame, face: Face): string {
+export function describeFace(worked: DrawnFrame, face: Face): string {
   const { particulars, contours, dados, blank } = worked;
   const { unit } = particulars;
   const { board, placement } = worked[face];

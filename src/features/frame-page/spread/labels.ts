@@ -2,7 +2,7 @@ import type { Point } from '#shared/kernel/contour/contour.ts';
 import type { Face } from '#shared/kernel/line-sets/line-set.ts';
 import { placeExtents, placePoint, unplace } from '#shared/kernel/placing/place.ts';
 import { formatLength } from '#shared/kernel/units/format-length.ts';
-import type { WorkedFrame } from '#shared/kernel/worked-frame.ts';
+import type { DrawnFrame } from '#shared/kernel/worked-frame.ts';
 
 /** Words on a page, at a place of frame view. */
 export interface Label {
@@ -26,7 +26,7 @@ export interface Label {
 
 const free = { dx: 0, dy: 0, turned: false, room: Infinity, turnedRoom: 0, hiddenWith: '', onBoard: false } as const;
 
-function backLabels(worked: WorkedFrame): Label[] {
+function backLabels(worked: DrawnFrame): Label[] {
   const { particulars, back, contours } = worked;
   const { unit } = particulars;
   return worked.dados.map((dado): Label => {
@@ -60,7 +60,7 @@ function backLabels(worked: WorkedFrame): Label[] {
   });
 }
 
-function frontLabels({ contours, particulars, front }: WorkedFrame): Label[] {
+function frontLabels({ contours, particulars, front }: DrawnFrame): Label[] {
   const { unit } = particulars;
   const board = placeExtents(unplace(front.placement), front.board);
   const openings = contours.openings.flatMap((o): Label[] => {
@@ -101,7 +101,7 @@ function frontLabels({ contours, particulars, front }: WorkedFrame): Label[] {
 }
 
 /** Words for what is fixed to the board itself: pins and the squaring edge. */
-function boardLabels(worked: WorkedFrame, face: Face): Label[] {
+function boardLabels(worked: DrawnFrame, face: Face): Label[] {
   const { placement, board } = worked[face];
   const toFrame = (p: Point): Point => placePoint(unplace(placement), p);
   const pins: Label = {
@@ -128,7 +128,7 @@ function boardLabels(worked: WorkedFrame, face: Face): Label[] {
 }
 
 /** All words of a face. */
-export const labelsOf = (worked: WorkedFrame, face: Face): Label[] => [
+export const labelsOf = (worked: DrawnFrame, face: Face): Label[] => [
   ...(face === 'back' ? backLabels(worked) : frontLabels(worked)),
   ...boardLabels(worked, face),
 ];

@@ -1,19 +1,20 @@
 import type { Extents } from '#shared/kernel/contour/contour.ts';
-import { svgPath } from '#shared/kernel/contour/svg-path.ts';
 import type { FeatureId } from '#shared/kernel/frame/members.ts';
-import type { WorkedFrame } from '#shared/kernel/worked-frame.ts';
-import { useDesk } from '../model/desk.ts';
+import type { DrawnFrame } from '#shared/kernel/worked-frame.ts';
+import type { Face } from '#shared/kernel/line-sets/line-set.ts';
+import { useDesk, useEditor, type Lit } from '../model/desk.ts';
 import { useStore } from '../model/store.ts';
-import { extentsPath } from './shape-path.ts';
+import { frameMap, type PageMap } from '../model/view.ts';
+import { contourPath, extentsPath } from './shape-path.ts';
 
-/** Where a feature lies, as SVG path data in frame view; '' for one that is not there. */
-function pathOf({ contours, dados }: WorkedFrame, id: FeatureId): string {
-  if (id === 'perimeter') return svgPath(contours.perimeter);
+/** Where a feature lies, as SVG path data in the page's pixels; '' for one that is not there. */
+function pathOf({ contours, dados }: DrawnFrame, id: FeatureId, map: PageMap): string {
+  if (id === 'perimeter') return contourPath(contours.perimeter, map);
   const opening = contours.openings.find((o) => o.id === id);
-  if (opening) return svgPath(opening.contour);
+  if (opening) return contourPath(opening.contour, map);
   const at: Extents | undefined =
     dados.find((d) => d.id === id)?.extents ?? contours.members.find((m) => m.id === id)?.extents;
-  return at ? extentsPath(at) : '';
+  return at ? extentsPath(at, map) : '';
 }
 
 /** Grows a place by half the reach each way, so that the frame drawn about it does not hide it. */
@@ -24,27 +25,19 @@ const grown = (e: Extents, by: number): Extents => ({
   maxY: e.maxY + by,
 });
 
-/** What is lit up, in frame view: drawn alike on both faces. `scale` in pixels a unit, `transform` from frame view to the page. */
-export function LitPlaces({
-  worked,
-  scale,
-  transform,
-}: {
-  readonly worked: WorkedFrame;
-  readonly scale: number;
-  readonly transform: string;
-}) {
-  const { lit } = useDesk();
-  const { features, places } = useStore(lit, (value) => value);
-  if (features.length === 0 && places.length === 0) return null;
+function Places({ face, features, places }: Lit & { readonly face: Face }) {
+  const desk = useDesk();
+  const worked = useEditor((s) => s.drawn);
+  const view = useStore(desk.shown, (value) => value);
+  const page = useStore(desk.page, (value) => value);
+  const map = frameMap(view, worked[face].placement, page);
   return (
-    <g transform={transform}>
+    <g>
       {features.map((id) => (
         <path
           key={id}
           data-lit={id}
-          d={pathOf(worked, id)}
-          vectorEffect="non-scaling-stroke"
+          d={pathOf(worked, id, map)}
           className={
             id.startsWith('dado-')
               ? 'fill-back/55 stroke-ink [stroke-width:2]'
@@ -56,11 +49,16 @@ export function LitPlaces({
         <path
           key={i}
           data-lit="place"
-          d={extentsPath(grown(place, 8 / scale))}
-          vectorEffect="non-scaling-stroke"
+          d={extentsPath(grown(place, 8 / view.scale), map)}
           className="fill-none stroke-stop [stroke-dasharray:6_3] [stroke-width:2.5]"
         />
       ))}
     </g>
   );
+}
+
+/** What is lit up: drawn alike on both faces. Follows the frame only while something is. */
+export function LitPlaces({ face }: { readonly face: Face }) {
+  const lit = useStore(useDesk().lit, (value) => value);
+  return lit.features.length === 0 && lit.places.length === 0 ? null : <Places face={face} {...lit} />;
 }

@@ -1,21 +1,18 @@
-import type { Placement } from '#shared/kernel/placing/placement.ts';
-import type { Measuring } from '../model/desk.ts';
-import { toPage, type PageSize, type View } from '../model/view.ts';
+import type { Face } from '#shared/kernel/line-sets/line-set.ts';
+import { useDesk, useEditor } from '../model/desk.ts';
+import { useStore } from '../model/store.ts';
+import { toPage } from '../model/view.ts';
 
 const ARM_PX = 7;
 
-/** The picked places, the line between them, and where the next pick would be. */
-export function MeasureMarks({
-  measuring,
-  view,
-  placement,
-  page,
-}: {
-  measuring: Measuring;
-  view: View;
-  placement: Placement;
-  page: PageSize;
-}) {
+/** The picked places, the line between them, and where the next pick would be; only while measuring. */
+export function MeasureMarks({ face }: { readonly face: Face }) {
+  const desk = useDesk();
+  const measuring = useStore(desk.measuring, (value) => value);
+  const view = useStore(desk.shown, (value) => value);
+  const page = useStore(desk.page, (value) => value);
+  const placement = useEditor((s) => s.drawn[face].placement);
+  if (measuring === null) return null;
   const { picked, at } = measuring;
   const places = picked.length < 2 && at ? [...picked, at] : picked;
   const onPage = places.map((p) => toPage(view, placement, page, p));

@@ -1,7 +1,7 @@
 import { memo } from 'react';
 import type { FeatureId } from '#shared/kernel/frame/members.ts';
 import { formatLength, formatWithUnit } from '#shared/kernel/units/format-length.ts';
-import type { WorkedFrame } from '#shared/kernel/worked-frame.ts';
+import type { DrawnFrame } from '#shared/kernel/worked-frame.ts';
 import { Button } from '../../../ui/button.tsx';
 import { useDesk, useEditor } from '../model/desk.ts';
 import { toggleMeasuring } from '../model/measure.ts';
@@ -13,7 +13,7 @@ import { SELECTED_KEYS } from '../on-drawing/selected-words.ts';
 import { measureWords } from './measure-words.ts';
 
 /** What a lit feature is, with its numbers. */
-function featureWords({ contours, dados, particulars }: WorkedFrame, id: FeatureId): string {
+function featureWords({ contours, dados, particulars }: DrawnFrame, id: FeatureId): string {
   const { unit } = particulars;
   const dado = dados.find((d) => d.id === id);
   if (dado) {

@@ -1,10 +1,9 @@
-import { memo, useLayoutEffect, useMemo, useRef } from 'react';
-import type { LineSet } from '#shared/kernel/line-sets/line-set.ts';
-import type { Unit } from '#shared/kernel/units/unit.ts';
+import { memo, useLayoutEffect, useRef, useState } from 'react';
+import type { Face } from '#shared/kernel/line-sets/line-set.ts';
 import { formatLength } from '#shared/kernel/units/format-length.ts';
 import { useDesk, useEditor } from '../model/desk.ts';
-import { useStore } from '../model/store.ts';
-import { boardInFrameView, fitTo } from '../model/view.ts';
+import type { EditorState } from '../model/frame-editor.ts';
+import { useSettled } from '../model/use-settled.ts';
 import { SelectionPanel } from '../on-drawing/selection-panel.tsx';
 import { SelectionStatus } from '../on-drawing/selection-status.tsx';
 import { FacePage } from './face-page.tsx';
@@ -13,10 +12,20 @@ import { SpreadBar } from './spread-bar.tsx';
 import { usePageSize } from './use-page-size.ts';
 import { useSpreadKeys } from './use-spread-keys.ts';
 
-/** The legend as the same object for as long as it says the same, so that typing does not draw it again. */
-function useLegend(lineSets: readonly LineSet[], unit: Unit): readonly LegendEntry[] {
-  const said = JSON.stringify(legendOf(lineSets, unit));
-  return useMemo(() => JSON.parse(said) as LegendEntry[], [said]);
+const legend = (face: Face) => {
+  let said: readonly LegendEntry[] = [];
+  // The same object for as long as it says the same, so that typing does not draw it again.
+  return ({ drawn }: EditorState): readonly LegendEntry[] => {
+    const now = legendOf(drawn[face].lineSets, drawn.particulars.unit);
+    if (JSON.stringify(now) !== JSON.stringify(said)) said = now;
+    return said;
+  };
+};
+
+function boardWords({ drawn: { blank, particulars } }: EditorState): string {
+  const { rough } = blank;
+  const say = (length: number): string => formatLength(length, particulars.unit);
+  return `${say(rough.maxX)} × ${say(rough.maxY)} ${blank.given ? 'board given' : 'blank'}`;
 }
 
 function Fold({ isUpright }: { readonly isUpright: boolean }) {
@@ -37,15 +46,14 @@ function Fold({ isUpright }: { readonly isUpright: boolean }) {
 /** Both faces as two pages about the fold, side by side or one above the other as the board is turned. */
 export const Spread = memo(function Spread() {
   const desk = useDesk();
-  const worked = useEditor((s) => s.drawn);
-  const chosen = useStore(desk.view, (value) => value);
   const pages = useRef<HTMLDivElement>(null);
   const size = usePageSize(pages);
-  const page = useStore(desk.page, (value) => value);
-  const { unit } = worked.particulars;
-  const isUpright = worked.blank.flip === 'side-to-side';
-  const backLegend = useLegend(worked.back.lineSets, unit);
-  const frontLegend = useLegend(worked.front.lineSets, unit);
+  const isUpright = useEditor((s) => s.drawn.blank.flip === 'side-to-side');
+  const [legendOfBack] = useState(() => legend('back'));
+  const [legendOfFront] = useState(() => legend('front'));
+  const backLegend = useSettled(legendOfBack);
+  const frontLegend = useSettled(legendOfFront);
+  const board = useSettled(boardWords);
   const pageLook = isUpright ? 'row-span-3 grid grid-rows-subgrid' : 'flex flex-1 flex-col';
 
   // One scale serves both pages, so that the smaller one counts.
@@ -59,12 +67,7 @@ export const Spread = memo(function Spread() {
     if (width > 0 && height > 0 && (width !== now.width || height !== now.height)) desk.page.set({ width, height });
   }, [desk, size, isUpright, backLegend, frontLegend]);
 
-  const view = useMemo(() => chosen ?? fitTo(boardInFrameView(worked), page), [chosen, worked, page]);
-  useLayoutEffect(() => desk.shown.set(view), [desk, view]);
-
   const pressKey = useSpreadKeys();
-  const { rough } = worked.blank;
-  const blank = `${formatLength(rough.maxX, unit)} × ${formatLength(rough.maxY, unit)} ${worked.blank.given ? 'board given' : 'blank'}`;
   return (
     <div className="flex min-h-0 min-w-0 flex-1 flex-col">
       <div
@@ -77,28 +80,16 @@ export const Spread = memo(function Spread() {
         onKeyDown={pressKey}
         className={`relative min-h-0 flex-1 focus-visible:-outline-offset-2 ${isUpright ? 'grid grid-cols-[minmax(0,1fr)_auto_minmax(0,1fr)] grid-rows-[auto_minmax(0,1fr)_auto]' : 'flex flex-col'}`}
       >
-        <FacePage
-          face="back"
-          worked={worked}
-          view={view}
-          page={page}
-          legend={backLegend}
-          heading="Back, cut first"
-          aside={blank}
-          className={pageLook}
-        />
+        <FacePage face="back" legend={backLegend} heading="Back, cut first" aside={board} className={pageLook} />
         <Fold isUpright={isUpright} />
         <FacePage
           face="front"
-          worked={worked}
-          view={view}
-          page={page}
           legend={frontLegend}
           heading="Front, cut second"
           aside={isUpright ? 'turned side to side' : 'turned end over end'}
           className={pageLook}
         />
-        <SelectionPanel worked={worked} view={view} page={page} />
+        <SelectionPanel />
       </div>
       <SelectionStatus />
       <SpreadBar />

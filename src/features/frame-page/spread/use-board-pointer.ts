@@ -1,13 +1,14 @@
 import { useEffect, useEffectEvent, useRef, type PointerEvent, type RefObject } from 'react';
 import type { Point } from '#shared/kernel/contour/contour.ts';
 import type { Face } from '#shared/kernel/line-sets/line-set.ts';
-import type { WorkedFrame } from '#shared/kernel/worked-frame.ts';
+import type { Placement } from '#shared/kernel/placing/placement.ts';
+import type { DrawnFrame } from '#shared/kernel/worked-frame.ts';
 import { light, useDesk } from '../model/desk.ts';
 import { entryOfFeature, goToEntry } from '../model/find-entry.ts';
 import { hitTest } from '../model/hit-test.ts';
 import { pickPlace } from '../model/measure.ts';
 import { nearestPoint, snapPoints } from '../model/snap-points.ts';
-import { fromPage, panView, zoomView, type PageSize, type View } from '../model/view.ts';
+import { fromPage, panView, zoomView, type View } from '../model/view.ts';
 import { selectionOf } from '../on-drawing/select-feature.ts';
 
 /** Less than this is a click, more is a drag. */
@@ -18,18 +19,12 @@ const POINT_PX = 3;
 /** Zoom for one notch (100 px) of a wheel. */
 const WHEEL_ZOOM = 1.2;
 
-interface BoardPointer {
-  readonly face: Face;
-  readonly worked: WorkedFrame;
-  readonly view: View;
-  readonly page: PageSize;
-  readonly svg: RefObject<SVGSVGElement | null>;
-}
-
-/** Pointing, clicking, dragging, pinching and wheeling on one page. */
-export function useBoardPointer({ face, worked, view, page, svg }: BoardPointer) {
+/** Pointing, clicking, dragging, pinching and wheeling on one page. What is drawn is asked when something happens. */
+export function useBoardPointer(face: Face, svg: RefObject<SVGSVGElement | null>) {
   const desk = useDesk();
-  const { placement } = worked[face];
+  const drawn = (): DrawnFrame => desk.editor.store.get().drawn;
+  const placement = (): Placement => drawn()[face].placement;
+  const shown = (): View => desk.shown.get();
   /** Pointers that are down, where they last were; more than one pinches. */
   const down = useRef(new Map<number, Point>());
   const dragged = useRef(false);
@@ -38,13 +33,13 @@ export function useBoardPointer({ face, worked, view, page, svg }: BoardPointer)
     const box = svg.current!.getBoundingClientRect();
     return { x: event.clientX - box.left, y: event.clientY - box.top };
   };
-  const inFrame = (px: Point): Point => fromPage(view, placement, page, px);
-  const caught = (p: Point): Point => nearestPoint(snapPoints(worked), p, SNAP_PX / view.scale) ?? p;
+  const inFrame = (px: Point): Point => fromPage(shown(), placement(), desk.page.get(), px);
+  const caught = (p: Point): Point => nearestPoint(snapPoints(drawn()), p, SNAP_PX / shown().scale) ?? p;
 
   const wheel = useEffectEvent((event: WheelEvent) => {
     event.preventDefault();
     const lines = event.deltaMode === WheelEvent.DOM_DELTA_LINE ? 33 : 1;
-    desk.view.set(zoomView(view, WHEEL_ZOOM ** ((-event.deltaY * lines) / 100), inFrame(onPage(event))));
+    desk.view.set(zoomView(shown(), WHEEL_ZOOM ** ((-event.deltaY * lines) / 100), inFrame(onPage(event))));
   });
   useEffect(() => {
     const element = svg.current;
@@ -62,9 +57,9 @@ export function useBoardPointer({ face, worked, view, page, svg }: BoardPointer)
     if (other) {
       const ratio =
         Math.hypot(now.x - other.x, now.y - other.y) / Math.max(1, Math.hypot(before.x - other.x, before.y - other.y));
-      desk.view.set(zoomView(view, ratio, inFrame({ x: (now.x + other.x) / 2, y: (now.y + other.y) / 2 })));
+      desk.view.set(zoomView(shown(), ratio, inFrame({ x: (now.x + other.x) / 2, y: (now.y + other.y) / 2 })));
     } else {
-      desk.view.set(panView(view, placement, now.x - before.x, now.y - before.y));
+      desk.view.set(panView(shown(), placement(), now.x - before.x, now.y - before.y));
     }
     down.current.set(event.pointerId, now);
   }
@@ -73,14 +68,15 @@ export function useBoardPointer({ face, worked, view, page, svg }: BoardPointer)
     const p = inFrame(onPage(event));
     const measuring = desk.measuring.get();
     if (measuring) desk.measuring.set({ ...measuring, face, at: caught(p) });
-    light(desk.lit, hitTest(worked, p, POINT_PX / view.scale));
+    light(desk.lit, hitTest(drawn(), p, POINT_PX / shown().scale));
   }
 
   function click(event: PointerEvent<SVGSVGElement>): void {
     const p = inFrame(onPage(event));
     const measuring = desk.measuring.get();
     if (measuring) return desk.measuring.set(pickPlace({ ...measuring, face }, caught(p)));
-    const hit = hitTest(worked, p, POINT_PX / view.scale);
+    const worked = drawn();
+    const hit = hitTest(worked, p, POINT_PX / shown().scale);
     const dado = hit.find((id) => worked.dados.some((d) => d.id === id));
     // Dados are seen on the back alone.
     if (face === 'back' && dado !== undefined) return void goToEntry(entryOfFeature(worked, dado));

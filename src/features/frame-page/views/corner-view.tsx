@@ -1,4 +1,5 @@
 import { useDeferredValue, useMemo, useState } from 'react';
+import { frameResidues } from '#shared/kernel/line-sets/find-corner-residue.ts';
 import type { CornerMethod } from '#shared/kernel/particulars/particulars.ts';
 import { cornerPicture } from '#shared/kernel/section/corner-picture.ts';
 import { pictureSvg } from '#shared/kernel/sheet/picture-svg.ts';
@@ -19,7 +20,8 @@ const degrees = (angle: number) => String(Number(((angle * 180) / Math.PI).toFix
 /** What is left in the inside corners, at the face and three depths, by each method. */
 export function CornerView() {
   const { editor, readOnly } = useDesk();
-  const { particulars, residues } = useDeferredValue(useEditor((s) => s.drawn));
+  const { particulars, contours } = useDeferredValue(useEditor((s) => s.drawn));
+  const residues = useMemo(() => frameResidues(particulars, contours.openings), [particulars, contours]);
   const angles = useMemo(() => [...new Map(residues.map((r) => [degrees(r.angle), r.angle])).entries()], [residues]);
   const [wanted, setWanted] = useState('');
   const [name, angle] = angles.find(([key]) => key === wanted) ?? angles[0] ?? ['', 0];

@@ -27,7 +27,10 @@ function EdgePicture({ heading, particulars, edge }: EdgeSectionPictureProps) {
         </Button>
       }
     >
-      <SvgPicture svg={svg} className="mx-auto max-w-5xl" />
+      {/* Its words are as large as its width lets them: in a narrow window it scrolls by itself. */}
+      <div role="group" aria-label={`${heading}, drawn`} tabIndex={0} className="overflow-x-auto">
+        <SvgPicture svg={svg} className="mx-auto max-w-5xl min-w-140" />
+      </div>
     </Section>
   );
 }

@@ -1,7 +1,7 @@
 import { vi } from 'vitest';
-import type { Answer, FromWorker, ToWorker } from '../../../../src/features/cut-part/work/messages.ts';
-import type { Wish } from '../../../../src/features/cut-part/work/picture.ts';
-import { Workshop } from '../../../../src/features/cut-part/work/workshop.ts';
+import type { Answer, FromWorker, ToWorker } from '../../../../src/features/cut-part/sweeping/messages.ts';
+import type { Wish } from '../../../../src/features/cut-part/sweeping/picture.ts';
+import { Workshop } from '../../../../src/features/cut-part/sweeping/workshop.ts';
 import { runThrough } from '#shared/kernel/height-field/sweep-face.ts';
 
 /** A worker that keeps what it is sent, for a test to answer by hand. */

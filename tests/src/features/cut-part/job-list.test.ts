@@ -1,5 +1,5 @@
 import { describe, expect, test } from 'vitest';
-import { JobList, type JobNews } from '../../../../src/features/cut-part/work/job-list.ts';
+import { JobList, type JobNews } from '../../../../src/features/cut-part/sweeping/job-list.ts';
 
 /** A list whose clock goes on by one with each piece of work. */
 function listWithClock() {

@@ -6,7 +6,7 @@ import type { Particulars } from '#shared/kernel/particulars/particulars.ts';
 import { BUILTIN_PROFILES } from '#shared/kernel/profiles/builtin-profiles.ts';
 import { workFrame } from '#shared/kernel/work-frame.ts';
 import { dado, workedExample } from '../../../builders/worked-example.ts';
-import type { FrameFiles } from '../../../../src/features/cut-part/work/workshop-client.ts';
+import type { FrameFiles } from '../../../../src/features/cut-part/sweeping/workshop-client.ts';
 
 /** A frame of 8 × 8 with one opening and one dado, small enough to be cut in no time. */
 export const smallFrame = (changes: Partial<Particulars> = {}): Particulars =>

@@ -1,7 +1,7 @@
 import { describe, expect, test } from 'vitest';
 import { runThrough } from '#shared/kernel/height-field/sweep-face.ts';
-import type { Rgb } from '../../../../src/features/cut-part/work/picture.ts';
-import { Workshop } from '../../../../src/features/cut-part/work/workshop.ts';
+import type { Rgb } from '../../../../src/features/cut-part/sweeping/picture.ts';
+import { Workshop } from '../../../../src/features/cut-part/sweeping/workshop.ts';
 import { workedExample } from '../../../builders/worked-example.ts';
 import { filesOf, smallFrame } from './parts.ts';
 

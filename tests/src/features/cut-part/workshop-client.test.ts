@@ -1,5 +1,5 @@
 import { describe, expect, test } from 'vitest';
-import { CannotCut, GivenUp, WorkshopClient } from '../../../../src/features/cut-part/work/workshop-client.ts';
+import { CannotCut, GivenUp, WorkshopClient } from '../../../../src/features/cut-part/sweeping/workshop-client.ts';
 import type { Measured } from '#shared/kernel/height-field/measure-frame.ts';
 import { FakeWorker } from './fake-worker.ts';
 import { filesOf, smallFrame } from './parts.ts';

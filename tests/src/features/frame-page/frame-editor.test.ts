@@ -1,4 +1,5 @@
 import { describe, expect, test, vi } from 'vitest';
+import { checkFrame } from '#shared/kernel/check-frame.ts';
 import { newFrame } from '#shared/kernel/particulars/new-frame.ts';
 import { readField } from '#shared/kernel/particulars/read-field.ts';
 import { setField } from '#shared/kernel/particulars/set-field.ts';
@@ -11,8 +12,8 @@ describe('frame editor', () => {
   test('When an entry is typed, then the frame is worked out anew and drawn', () => {
     const editor = createFrameEditor(start);
     expect(editor.edit('outline.width', 40)).toBe('');
-    expect(editor.store.get().worked.contours.width).toBe(40);
-    expect(editor.store.get().drawn).toBe(editor.store.get().worked);
+    expect(editor.store.get().lines.contours.width).toBe(40);
+    expect(editor.store.get().drawn).toBe(editor.store.get().lines);
   });
 
   test('When a value breaks the contract, then nothing changes and it says what the entry takes', () => {
@@ -37,7 +38,7 @@ describe('frame editor', () => {
     const good = editor.store.get().drawn;
     editor.edit('outline.stiles.left', 50);
     expect(readField(present(editor), 'outline.stiles.left')).toBe(50);
-    expect(editor.store.get().worked.findings.some((f) => f.level === 'stop')).toBe(true);
+    expect(checkFrame(editor.store.get().lines).findings.some((f) => f.level === 'stop')).toBe(true);
     expect(editor.store.get().drawn).toBe(good);
     editor.edit('outline.stiles.left', 5);
     expect(editor.store.get().drawn.contours.members.find((m) => m.id === 'stile-left')?.width).toBe(5);

@@ -78,14 +78,14 @@ const savesTo = (answer: (body: { version: number; particulars: Particulars }) =
   );
 
 describe('frame page: entries', () => {
-  test('When a size is typed, then both faces are drawn anew at once, as the kernel works the frame out', () => {
+  test('When a size is typed, then both faces are drawn anew at once, and the words about the board follow', async () => {
     showFrame();
     const before = [pathsOf('back').join(), pathsOf('front').join()];
     fireEvent.change(entry('outline.width'), { target: { value: '36 1/2' } });
     expect(pathsOf('back').join()).not.toBe(before[0]);
     expect(pathsOf('front').join()).not.toBe(before[1]);
     expect(drawing('front').textContent).toContain('36 1/2 frame');
-    expect(screen.getByText('39 × 33 blank')).toBeTruthy();
+    expect(await screen.findByText('39 × 33 blank')).toBeTruthy();
   });
 
   test('When a text cannot be read, then it stays, says what the entry takes after leaving, and the drawing is as it was', () => {

@@ -10,7 +10,7 @@ import {
   fitTo,
   fromPage,
   panView,
-  setupTransform,
+  setupMap,
   toPage,
   zoomView,
 } from '../../../../src/features/frame-page/model/view.ts';
@@ -41,13 +41,10 @@ describe('view of the spread', () => {
 
   test.each(faces)('When the board is fitted ($name), then the whole of it is on the page', ({ worked, work }) => {
     const view = fitTo(boardInFrameView(worked), page);
-    const [scale, , , , e, f] = /matrix\((.*)\)/
-      .exec(setupTransform(view, work.placement, page))![1]!
-      .split(' ')
-      .map(Number) as [number, number, number, number, number, number];
+    const { sx, sy, dx, dy } = setupMap(view, work.placement, page);
     const corners = [work.board.minX, work.board.maxX]
-      .map((x) => scale * x + e)
-      .concat([work.board.minY, work.board.maxY].map((y) => f - scale * y));
+      .map((x) => sx * x + dx)
+      .concat([work.board.minY, work.board.maxY].map((y) => sy * y + dy));
     for (const x of corners.slice(0, 2)) expect(x > 0 && x < page.width).toBe(true);
     for (const y of corners.slice(2)) expect(y > 0 && y < page.height).toBe(true);
   });

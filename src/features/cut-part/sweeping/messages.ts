@@ -1,10 +1,10 @@
 import type { FileProfile } from '#shared/kernel/profiles/file-profile.ts';
-import type { WorkedFrame } from '#shared/kernel/worked-frame.ts';
+import type { DrawnFrame } from '#shared/kernel/worked-frame.ts';
 import type { Answers, Wish } from './picture.ts';
 
 /** From the page to the worker. A new frame drops all that is still asked about the one before. */
 export type ToWorker =
-  | { readonly kind: 'frame'; readonly worked: WorkedFrame; readonly profile: FileProfile }
+  | { readonly kind: 'frame'; readonly worked: DrawnFrame; readonly profile: FileProfile }
   | { readonly kind: 'ask'; readonly id: number; readonly wish: Wish }
   | { readonly kind: 'cancel'; readonly id: number };
 

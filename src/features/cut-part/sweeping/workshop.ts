@@ -6,7 +6,7 @@ import { measureFrame, type Measured } from '#shared/kernel/height-field/measure
 import type { Face } from '#shared/kernel/line-sets/line-set.ts';
 import type { FileProfile } from '#shared/kernel/profiles/file-profile.ts';
 import { convertLength } from '#shared/kernel/units/convert-length.ts';
-import type { WorkedFrame } from '#shared/kernel/worked-frame.ts';
+import type { DrawnFrame } from '#shared/kernel/worked-frame.ts';
 import { faceMesh } from '../mesh/face-mesh.ts';
 import { shadeRelief } from '../mesh/relief.ts';
 import { makeSlice, type Slice } from '../mesh/slice.ts';
@@ -28,14 +28,14 @@ const longest = ({ minX, minY, maxX, maxY }: Extents) => Math.max(maxX - minX, m
 
 /** All that is worked out about one frame for the page that shows it: pictures, slices, differences, each as work in pieces. */
 export class Workshop {
-  private readonly worked: WorkedFrame;
+  private readonly worked: DrawnFrame;
   private readonly profile: FileProfile;
   private readonly stage: Stage;
   private readonly board: Extents;
   private whole: { readonly steps: number; readonly part: CutPart } | null = null;
 
   /** Throws DrawingRefused for a frame that cannot be drawn. */
-  constructor(worked: WorkedFrame, profile: FileProfile) {
+  constructor(worked: DrawnFrame, profile: FileProfile) {
     this.worked = worked;
     this.profile = profile;
     this.stage = finishedStage(worked, profile);

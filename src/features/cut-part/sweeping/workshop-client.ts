@@ -1,11 +1,11 @@
 import type { FileProfile } from '#shared/kernel/profiles/file-profile.ts';
-import type { WorkedFrame } from '#shared/kernel/worked-frame.ts';
+import type { DrawnFrame } from '#shared/kernel/worked-frame.ts';
 import type { FromWorker, ToWorker } from './messages.ts';
 import type { Answers, Wish } from './picture.ts';
 
 /** A frame to be looked at, in the files that a profile makes of it. */
 export interface FrameFiles {
-  readonly worked: WorkedFrame;
+  readonly worked: DrawnFrame;
   readonly profile: FileProfile;
 }
 
