@@ -237,7 +237,7 @@ function checkShave(p: Particulars, edge: BeadedEdge, beaded: readonly Opening[]
       ...common,
       text:
         all.below >= all.above
-          ? `A cutter’s flank takes ${formatWithUnit(all.below, p.unit)} off the bead, ${formatWithUnit(all.belowAt, p.unit)} from the opening’s edge.`
+          ? `A cutter’s flank takes ${formatWithUnit(all.below, p.unit)} off the bead, measured straight down, ${formatWithUnit(all.belowAt, p.unit)} from the opening’s edge.`
           : `The cutters leave ${formatWithUnit(all.above, p.unit)} standing on the bead.`,
       remedy: 'Take an opening cutter with a smaller side angle, or a straight one; look at the section.',
       numbers: { below: all.below, above: all.above, belowAt: all.belowAt },
@@ -247,7 +247,7 @@ function checkShave(p: Particulars, edge: BeadedEdge, beaded: readonly Opening[]
   if (inCorners > Math.max(all.below, beadShave(p.unit)))
     findings.push({
       ...common,
-      text: `In the corners the V-cutter’s flank takes ${formatWithUnit(inCorners, p.unit)} off the bead.`,
+      text: `In the corners the V-cutter’s flank takes ${formatWithUnit(inCorners, p.unit)} off the bead, measured straight down.`,
       remedy: 'Take a V-cutter with a smaller angle, or let the opening cutter alone climb into the corners.',
       numbers: { below: inCorners },
       field: 'edge.corners',

@@ -39,6 +39,7 @@ export type FindingCode =
   | 'tight-clearance'
   | 'notch-corner'
   | 'corner-residue'
+  | 'bead-nub'
   | 'offcut-free'
   | 'size-held';
 

@@ -6,6 +6,7 @@ import type { Particulars } from '../particulars/particulars.ts';
 import { NOTHING_LEFT, SAME } from '../tolerances.ts';
 import { formatDecimal, formatWithUnit } from '../units/format-length.ts';
 import type { Finding } from './finding.ts';
+import { noteBeadNubs } from './note-bead-nubs.ts';
 import { atOpening, wholeFrame } from './place-finding.ts';
 
 /** What a person should know before cutting, without having to change it. */
@@ -19,6 +20,7 @@ export function makeNotes(
   return [
     ...heldNote(p, contours, cut),
     ...residueNotes(p, contours, residues),
+    ...noteBeadNubs(p, contours, residues),
     ...offcutNotes(p, contours, cut),
     ...notchNote(p, contours),
   ];
@@ -64,15 +66,15 @@ function residueNotes(p: Particulars, contours: FrameContours, residues: readonl
     const degrees = formatDecimal((angle * 180) / Math.PI, 2);
     const face = levels[0]!;
     const middle = levels[2]!;
-    const leaves = (l: typeof face) =>
-      l.lifted.diagonal < NOTHING_LEFT ? 'nothing' : formatWithUnit(l.lifted.diagonal, p.unit);
+    const left = (l: typeof face) => l.followed ?? l.lifted.diagonal;
+    const leaves = (l: typeof face) => (left(l) < NOTHING_LEFT ? 'nothing' : formatWithUnit(left(l), p.unit));
     const ids = new Set(group.map((r) => r.opening));
     return {
       code: 'corner-residue',
       level: 'note',
       text: `Inside corners of ${degrees}°: ${leaves(face)} is left on the diagonal at ${face.depth === 0 ? 'the face' : 'the bead’s base'}, ${leaves(middle)} at half the thickness.`,
       remedy: '',
-      numbers: { angle, face: face.lifted.diagonal, half: middle.lifted.diagonal, back: levels[3]!.lifted.diagonal },
+      numbers: { angle, face: left(face), half: left(middle), back: left(levels[3]!) },
       places: contours.openings.filter((o) => ids.has(o.id)).map((o) => atOpening(o)),
     } satisfies Finding;
   });

@@ -13,5 +13,7 @@ export interface CornerResidue {
     readonly depth: number;
     readonly lifted: { readonly radius: number; readonly diagonal: number };
     readonly unlifted: { readonly radius: number; readonly diagonal: number };
+    /** On the diagonal once a V-cutter has followed; undefined where none does. */
+    readonly followed: number | undefined;
   }[];
 }

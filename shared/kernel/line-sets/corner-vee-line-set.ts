@@ -1,5 +1,5 @@
 import { offsetContour } from '../contour/offset-contour.ts';
-import type { Cutter } from '../cutters/cutter.ts';
+import type { Cutter, VeeCutter } from '../cutters/cutter.ts';
 import { radiusAtHeight } from '../cutters/radius-at-height.ts';
 import type { Opening } from '../frame/members.ts';
 import type { Particulars } from '../particulars/particulars.ts';
@@ -12,10 +12,18 @@ import { veeCorners } from './vee-corners.ts';
 /** How deep the tip of a V-cutter begins in an opening's corners: as deep as its flute reaches, no deeper than the board. */
 export const veeFloor = (cutter: Cutter, thickness: number): number => Math.min(cutter.fluteLength, thickness);
 
+/** The V-cutter that follows into the corners of this cut; undefined when the edge does not ask for it, the cutter is no V, or its flute does not reach below the corners' plane. */
+export function followingVee(
+  { edge, cutters: { corner }, thickness }: Particulars,
+  cut: OpeningCut,
+): VeeCutter | undefined {
+  if (edge.corners !== 'vee' || corner?.kind !== 'vee') return undefined;
+  return veeFloor(corner, thickness) > cut.planeDepth ? corner : undefined;
+}
+
 /**
  * A V-cutter after the opening cutter, in every inside corner: sharp in the corners' plane, and leaving tan(β/2)·z a side at
- * z below it. Nothing when the edge does not ask for it, the cutter is no V, or its flute
- * does not reach below that plane.
+ * z below it. Nothing where none follows.
  */
 export function cornerVeeLineSet(
   p: Particulars,
@@ -23,9 +31,8 @@ export function cornerVeeLineSet(
   cut: OpeningCut,
   variant: string,
 ): { lineSets: LineSet[]; problems: OpeningProblem[] } {
-  const cutter = p.cutters.corner;
-  if (p.edge.corners !== 'vee' || cutter?.kind !== 'vee' || veeFloor(cutter, p.thickness) <= cut.planeDepth)
-    return { lineSets: [], problems: [] };
+  const cutter = followingVee(p, cut);
+  if (!cutter) return { lineSets: [], problems: [] };
   const floor = veeFloor(cutter, p.thickness);
   const shapes: Shape[] = [];
   const problems: OpeningProblem[] = [];

@@ -2,6 +2,7 @@ import type { Cutter } from '../cutters/cutter.ts';
 import { radiusAtHeight } from '../cutters/radius-at-height.ts';
 import type { Opening } from '../frame/members.ts';
 import type { CornerResidue } from './corner-residue.ts';
+import { followingVee, veeFloor } from './corner-vee-line-set.ts';
 import { insideCorners } from './inside-corners.ts';
 import type { Particulars } from '../particulars/particulars.ts';
 import type { OpeningCut } from './opening-cut.ts';
@@ -32,13 +33,29 @@ function liftedDiagonal(cutter: Cutter, cut: OpeningCut, climbEnd: number, angle
   return Math.max(0, Math.min(left(low), left(highest), left(tipDepth)) - reach * wall);
 }
 
-/** Residue in the corners' plane (the face, or a bead's base) and at a quarter, half and all of the thickness, for each angle among an opening's corners. */
-function findCornerResidue(
+/**
+ * What a V-cutter leaves on the diagonal at depth z: of its stands on the way up the one with its tip there comes nearest, at
+ * (z − zc)·tan(β/2)/sin(θ/2) from the corner in its plane. Nothing is reached below where its tip begins.
+ */
+function followedDiagonal(
+  vee: Cutter,
   cutter: Cutter,
   cut: OpeningCut,
-  thickness: number,
-  openings: readonly Opening[],
-): CornerResidue[] {
+  p: Particulars,
+  angle: number,
+  z: number,
+): number {
+  if (z >= veeFloor(vee, p.thickness)) return Infinity;
+  const reach = 1 / Math.sin(angle / 2);
+  const wall = radiusAtHeight(cutter, cut.tipDepth - cut.planeDepth) - radiusAtHeight(cutter, cut.tipDepth - z);
+  return Math.max(0, reach * (radiusAtHeight(vee, z - cut.planeDepth) - wall));
+}
+
+/** Residue in the corners' plane (the face, or a bead's base) and at a quarter, half and all of the thickness, for each angle among an opening's corners. */
+function findCornerResidue(p: Particulars, cut: OpeningCut, openings: readonly Opening[]): CornerResidue[] {
+  const { thickness, cutters } = p;
+  const cutter = cutters.opening;
+  const vee = followingVee(p, cut);
   const byAngle = new Map<string, CornerResidue['levels']>();
   const levelsAt = (angle: number) => {
     const key = angle.toFixed(6);
@@ -48,9 +65,11 @@ function findCornerResidue(
     const levels = [cut.planeDepth, thickness / 4, thickness / 2, thickness].map((depth) => {
       const radius = radiusAtHeight(cutter, cut.tipDepth - depth);
       const unlifted = { radius, diagonal: radius * share };
-      if (cut.climbEnd === undefined) return { depth, lifted: unlifted, unlifted };
-      const diagonal = liftedDiagonal(cutter, cut, cut.climbEnd, angle, depth);
-      return { depth, lifted: { radius: diagonal / share, diagonal }, unlifted };
+      const before =
+        cut.climbEnd === undefined ? unlifted.diagonal : liftedDiagonal(cutter, cut, cut.climbEnd, angle, depth);
+      const lifted = cut.climbEnd === undefined ? unlifted : { radius: before / share, diagonal: before };
+      const followed = vee && Math.min(before, followedDiagonal(vee, cutter, cut, p, angle, depth));
+      return { depth, lifted, unlifted, followed };
     });
     byAngle.set(key, levels);
     return levels;
@@ -76,6 +95,4 @@ function findCornerResidue(
 
 /** What is left in the corners of all openings of a frame. */
 export const frameResidues = (p: Particulars, openings: readonly Opening[]): CornerResidue[] =>
-  openingGroups(p, openings).groups.flatMap((group) =>
-    findCornerResidue(p.cutters.opening, group.cut, p.thickness, group.openings),
-  );
+  openingGroups(p, openings).groups.flatMap((group) => findCornerResidue(p, group.cut, group.openings));

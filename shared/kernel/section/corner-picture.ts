@@ -49,7 +49,7 @@ export function cornerPicture(p: Particulars, method: CornerMethod, angle: numbe
   return {
     width: 4 * PANEL + 3 * GAP,
     height: PANEL + 16,
-    description: `What is left in an inside corner, ${METHOD_WORDS[method]}. ${say.join('; ')}.`,
+    description: `What is left in an inside corner, ${METHOD_WORDS[method]}: ${say.join('; ')}.`,
     shapes: [
       ...slices.flatMap((slice, i) => panel(slice, i * (PANEL + GAP), angle, scale, p)),
       {
@@ -73,7 +73,7 @@ const depthWords = (depth: number, p: Particulars) =>
       ? 'at the bead’s base'
       : depth === p.thickness
         ? 'at the back'
-        : `${formatWithUnit(depth, p.unit)} below`;
+        : `${formatWithUnit(depth, p.unit)} below the face`;
 const leftWords = ({ diagonal }: CornerSlice, p: Particulars) =>
   diagonal < 10 * NOTHING_LEFT ? 'nothing left' : `${formatLength(diagonal, p.unit)} left`;
 

@@ -67,7 +67,7 @@ export function sectionPicture(p: Particulars, edge: Edge = p.edge): PaperPictur
       ...(edge.style === 'beaded' ? entered(intendedLine(edge), frame) : []),
       ...scar(p, edge, passes, frame),
       ...rows.flatMap((row, i) => offsetRow(row, 6 + i * ROW, p, frame)),
-      ...depthsOf(p, edge, passes).flatMap((d, i) => depthMark(d, i, p, frame)),
+      ...depthMarks(depthsOf(p, edge, passes), p, frame),
       {
         kind: 'text',
         text: `Scale ${text}`,
@@ -255,13 +255,26 @@ function depthsOf(p: Particulars, edge: Edge, passes: readonly SectionPass[]): D
   ];
 }
 
-/** A depth below the face, at the right of the section. */
-function depthMark({ text, depth }: Depth, index: number, p: Particulars, frame: Frame): PaperShape[] {
+/** Depths below the face, at the right of the section; the words of two that are near one another keep apart. */
+function depthMarks(depths: readonly Depth[], p: Particulars, frame: Frame): PaperShape[] {
+  return depths.flatMap((d, i) => {
+    const next = depths[i + 1];
+    const crowded = next !== undefined && frame.y(next.depth) - frame.y(d.depth) < TEXT + 1;
+    return depthMark(d, i, crowded, p, frame);
+  });
+}
+
+function depthMark(
+  { text, depth }: Depth,
+  index: number,
+  crowded: boolean,
+  p: Particulars,
+  frame: Frame,
+): PaperShape[] {
   const edge = frame.x(frame.window.maxY);
   const x = edge + 4 + index * 4;
   const [face, y] = [frame.y(0), frame.y(depth)];
-  // The texts of two depths that are near one another keep apart.
-  const textY = index === 0 && y - face < 8 ? Math.min(y, face) - 1.6 : y + 3.2;
+  const textY = index === 0 && y - face < 8 ? Math.min(y, face) - 1.6 : crowded ? y - 1.2 : y + 3.2;
   return [
     stroke(
       [
@@ -287,7 +300,8 @@ function depthMark({ text, depth }: Depth, index: number, p: Particulars, frame:
     {
       kind: 'text',
       text: `${formatLength(depth, p.unit)} ${text}`,
-      x: x + 2.2,
+      // Clear of the next one's line.
+      x: x + (crowded ? 6.2 : 2.2),
       y: textY,
       size: TEXT,
       anchor: 'start',

@@ -30,10 +30,12 @@ function alikeCorners(residues: readonly CornerResidue[]): Alike[] {
 export function residueTable(worked: WorkedFrame): SheetTable {
   const { unit } = worked.particulars;
   const length = (value: number): SheetCell => ({ text: formatLength(value, unit), value });
+  const follows = worked.residues.some(({ levels }) => levels.some(({ followed }) => followed !== undefined));
   const rows = alikeCorners(worked.residues).flatMap(({ residue, count }) =>
     residue.levels.map((level, i): SheetCell[] => [
       { text: i === 0 ? `${count} of ${formatDegrees(residue.angle)}` : '' },
       level.depth === 0 ? { text: 'at the face', value: 0 } : length(level.depth),
+      ...(follows ? [level.followed === undefined ? { text: '' } : length(level.followed)] : []),
       length(level.lifted.radius),
       length(level.lifted.diagonal),
       length(level.unlifted.radius),
@@ -44,6 +46,7 @@ export function residueTable(worked: WorkedFrame): SheetTable {
   const columns = [
     { key: 'corners', heading: 'Corners', align: 'left' } as const,
     right('depth', 'Below the face'),
+    ...(follows ? [right('followed', 'After the V: diagonal')] : []),
     right('lifted', 'Lifted: radius'),
     right('liftedDiagonal', 'diagonal'),
     right('unlifted', 'Not lifted: radius'),

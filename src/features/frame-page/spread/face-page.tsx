@@ -73,7 +73,7 @@ export const FacePage = memo(function FacePage({ face, legend, heading, aside, c
     <section aria-label={heading} className={`min-h-0 min-w-0 px-4 pt-2 pb-1 ${className}`}>
       {/* Of a size that its words do not change, so that new words are laid out here and nowhere else. */}
       <div
-        className={`flex h-5 justify-between gap-x-3 overflow-hidden font-bold whitespace-nowrap contain-strict ${colour}`}
+        className={`flex h-5 justify-between gap-x-3 overflow-hidden font-bold whitespace-nowrap contain-strict max-lg:h-10 max-lg:flex-col ${colour}`}
       >
         <h2>{heading}</h2>
         <p className="min-w-0 truncate">{aside}</p>

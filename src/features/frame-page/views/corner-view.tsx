@@ -2,12 +2,11 @@ import { useDeferredValue, useMemo, useState } from 'react';
 import { frameResidues } from '#shared/kernel/line-sets/find-corner-residue.ts';
 import type { CornerMethod } from '#shared/kernel/particulars/particulars.ts';
 import { cornerPicture } from '#shared/kernel/section/corner-picture.ts';
-import { pictureSvg } from '#shared/kernel/sheet/picture-svg.ts';
 import { Button } from '../../../ui/button.tsx';
 import { Section } from '../../../ui/section.tsx';
 import { Select } from '../../../ui/select.tsx';
-import { SvgPicture } from '../../../ui/svg-picture.tsx';
 import { useDesk, useEditor } from '../model/desk.ts';
+import { WordedPicture } from './worded-picture.tsx';
 
 const METHODS: readonly { readonly method: CornerMethod; readonly heading: string }[] = [
   { method: 'lift', heading: 'The opening cutter climbs into the corner' },
@@ -27,8 +26,7 @@ export function CornerView() {
   const [name, angle] = angles.find(([key]) => key === wanted) ?? angles[0] ?? ['', 0];
   const chosen = particulars.edge.corners ?? 'lift';
   const pictures = useMemo(
-    () =>
-      name === '' ? [] : METHODS.map((m) => ({ ...m, svg: pictureSvg(cornerPicture(particulars, m.method, angle)) })),
+    () => (name === '' ? [] : METHODS.map((m) => ({ ...m, picture: cornerPicture(particulars, m.method, angle) }))),
     [particulars, name, angle],
   );
   if (name === '') return <p>No opening has an inside corner.</p>;
@@ -50,7 +48,7 @@ export function CornerView() {
           />
         </div>
       )}
-      {pictures.map(({ method, heading, svg }) => (
+      {pictures.map(({ method, heading, picture }) => (
         <Section
           key={method}
           heading={heading}
@@ -66,7 +64,7 @@ export function CornerView() {
             )
           }
         >
-          <SvgPicture svg={svg} className="mx-auto max-w-4xl" />
+          <WordedPicture picture={picture} className="max-w-4xl" />
         </Section>
       ))}
     </>

@@ -6,8 +6,8 @@ import { pictureSvg } from '#shared/kernel/sheet/picture-svg.ts';
 import { safeFileName, saveFile } from '../../../lib/save-file.ts';
 import { Button } from '../../../ui/button.tsx';
 import { Section } from '../../../ui/section.tsx';
-import { SvgPicture } from '../../../ui/svg-picture.tsx';
 import { useEditor } from '../model/desk.ts';
+import { WordedPicture } from './worded-picture.tsx';
 
 interface EdgeSectionPictureProps {
   readonly heading: string;
@@ -16,8 +16,9 @@ interface EdgeSectionPictureProps {
 }
 
 function EdgePicture({ heading, particulars, edge }: EdgeSectionPictureProps) {
-  const svg = useMemo(() => pictureSvg(sectionPicture(particulars, edge)), [particulars, edge]);
-  const save = () => saveFile(safeFileName(`${particulars.name} section`, '.svg'), svg, 'image/svg+xml');
+  const picture = useMemo(() => sectionPicture(particulars, edge), [particulars, edge]);
+  const save = () =>
+    saveFile(safeFileName(`${particulars.name} section`, '.svg'), pictureSvg(picture), 'image/svg+xml');
   return (
     <Section
       heading={heading}
@@ -27,10 +28,7 @@ function EdgePicture({ heading, particulars, edge }: EdgeSectionPictureProps) {
         </Button>
       }
     >
-      {/* Its words are as large as its width lets them: in a narrow window it scrolls by itself. */}
-      <div role="group" aria-label={`${heading}, drawn`} tabIndex={0} className="overflow-x-auto">
-        <SvgPicture svg={svg} className="mx-auto max-w-5xl min-w-140" />
-      </div>
+      <WordedPicture picture={picture} className="max-w-5xl" />
     </Section>
   );
 }
@@ -58,7 +56,7 @@ export function SectionView() {
       {contours.openings.length === 0 && <p>There is no opening to cut across.</p>}
       {isBeaded && (
         <p className="text-12 text-pencil">
-          Thick: what is left. Thin: each cutter at its axis. Dotted red: the bead as entered.
+          Thick: what is left. Thin: each cutter at its axis. Red dots over it: the bead as entered.
         </p>
       )}
     </>
