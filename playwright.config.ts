@@ -17,6 +17,7 @@ export default defineConfig({
     viewport: { width: 1280, height: 800 },
     acceptDownloads: true,
     screenshot: 'only-on-failure',
-    launchOptions: { executablePath: CHROMIUM, args: CHROMIUM_FLAGS },
+    // WebGL without a graphics card, for the cut part.
+    launchOptions: { executablePath: CHROMIUM, args: [...CHROMIUM_FLAGS, '--enable-unsafe-swiftshader'] },
   },
 });

@@ -77,18 +77,30 @@ export const csvProblem = z.object({
   message: z.string(),
 });
 
-/** POST /api/cutters/csv?keepGood=true */
+/** POST /api/cutters/csv?take=true */
 export const csvQuery = z.strictObject({
-  keepGood: z.enum(['true', 'false'], { error: 'takes "true" or "false"' }).default('false'),
+  take: z.enum(['true', 'false'], { error: 'takes "true" or "false"' }).default('false'),
 });
 
-/**
- * POST /api/cutters/csv (multipart, field `file`). With a problem anywhere nothing is taken, unless `keepGood=true` takes
- * the good rows. `good`: how many rows have no problem. GET /api/cutters/csv answers the drawer as such a file.
- */
-export const cuttersTaken = z.object({
-  taken: z.array(storedCutter),
-  good: z.number().int(),
-  problems: z.array(csvProblem),
+/** What a good row is to the drawer: a cutter that is not in it, one that is there with other numbers, or one as it is there. */
+export const csvRow = z.object({
+  line: z.number().int(),
+  name: z.string(),
+  is: z.enum(['new', 'changed', 'same']),
+  /** Cells that differ from the drawer, as they would stand in a file; '' for nothing. */
+  changes: z.array(z.object({ column: z.string(), was: z.string(), is: z.string() })),
 });
-export type CuttersTaken = z.output<typeof cuttersTaken>;
+export type CsvRow = z.output<typeof csvRow>;
+
+/**
+ * POST /api/cutters/csv (multipart, field `file`) says what each row is to the drawer and takes nothing; with `take=true`
+ * the good rows are put in and changed, all or none. `added` and `changed` are what was done. GET /api/cutters/csv answers
+ * the drawer as such a file.
+ */
+export const cuttersRead = z.object({
+  rows: z.array(csvRow),
+  problems: z.array(csvProblem),
+  added: z.array(storedCutter),
+  changed: z.array(z.object({ before: storedCutter, answer: cutterChanged })),
+});
+export type CuttersRead = z.output<typeof cuttersRead>;

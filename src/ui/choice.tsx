@@ -44,7 +44,7 @@ export function Choice<T extends string>({
             key={option.value}
             title={option.unavailable}
             className={classNames(
-              'flex min-h-6.5 flex-1 items-center justify-center px-2 py-0.5 text-center',
+              'flex min-h-6.5 flex-1 items-center justify-center px-1.5 py-0.5 text-center',
               'has-checked:bg-ink has-checked:text-paper has-disabled:text-pencil has-checked:has-disabled:bg-pencil has-checked:has-disabled:text-paper',
               'has-focus-visible:outline-2 has-focus-visible:outline-offset-2 has-focus-visible:outline-front',
               i > 0 && 'border-l border-ink',

@@ -1,4 +1,4 @@
-import { useEffect, useId, useRef, type ReactNode } from 'react';
+import { useEffect, useId, useRef, type KeyboardEvent, type ReactNode } from 'react';
 import { Button } from './button.tsx';
 
 interface DialogProps {
@@ -24,15 +24,23 @@ export function Dialog({ title, onClose, children, actions, wide = false }: Dial
       if (opener instanceof HTMLElement && opener.isConnected) opener.focus();
     };
   }, []);
+  // Browsers let a page refuse to close once only: the second Escape would close a dialog that asks first. So the key is taken here.
+  function press(event: KeyboardEvent) {
+    if (event.key !== 'Escape' || event.defaultPrevented || event.nativeEvent.isComposing) return;
+    event.preventDefault();
+    event.stopPropagation();
+    onClose();
+  }
   return (
     <dialog
       ref={dialog}
       aria-labelledby={id}
+      onKeyDown={press}
       onCancel={(event) => {
         event.preventDefault();
         onClose();
       }}
-      className={`m-auto max-h-[92dvh] w-full border border-ink bg-paper p-1 text-ink backdrop:bg-ink/40 ${wide ? 'max-w-5xl' : 'max-w-xl'}`}
+      className={`m-auto max-h-[92dvh] w-full border border-ink bg-paper p-1 text-ink backdrop:bg-ink/40 ${wide ? 'max-w-[min(64rem,100%-2rem)]' : 'max-w-[min(36rem,100%-1rem)]'}`}
     >
       <div className="border border-ink">
         <div className="flex items-baseline justify-between gap-4 border-b border-rule px-4 py-2">

@@ -29,7 +29,7 @@ export function Field(props: FieldProps & { readonly children: (wiring: FieldWir
     .join(' ');
   const row = layout === 'row' && !hideLabel;
   return (
-    <div className={classNames(layout === 'stack' && !hideLabel && 'mb-3')}>
+    <div className={classNames(layout === 'stack' && !hideLabel && 'mb-3', row && says !== '' && 'mb-1.5')}>
       <div className={classNames(row && 'flex min-h-7 items-center justify-between gap-3')}>
         <label htmlFor={id} className={hideLabel ? 'sr-only' : classNames('block', !row && 'mb-0.5')}>
           {label}

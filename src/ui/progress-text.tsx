@@ -9,12 +9,16 @@ interface ProgressTextProps {
   readonly cancel?: ReactNode;
 }
 
+/** A plain ink bar in a hairline box: browsers draw their own in colours that mean something else on a sheet. */
+const BAR =
+  'h-2 w-40 appearance-none border border-ink bg-paper [&::-webkit-progress-bar]:bg-paper [&::-webkit-progress-value]:bg-ink [&::-moz-progress-bar]:bg-ink';
+
 /** Says in words that work is under way. */
 export function ProgressText({ children, done, cancel }: ProgressTextProps) {
   return (
     <div role="status" className="flex flex-wrap items-center gap-x-4 gap-y-1 text-pencil">
       <span>{children}</span>
-      {done !== undefined && <progress aria-label="Done so far" max={1} value={done} className="h-2 w-40 accent-ink" />}
+      {done !== undefined && <progress aria-label="Done so far" max={1} value={done} className={BAR} />}
       {cancel}
     </div>
   );

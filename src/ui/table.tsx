@@ -68,15 +68,15 @@ export function Table<Row>({ caption, columns, rows, rowKey }: TableProps<Row>) 
                   )}
                 >
                   {column.sortBy === undefined ? (
-                    <span className={column.hideHead ? 'sr-only' : undefined}>{column.head}</span>
+                    <span className={column.hideHead ? 'sr-only' : 'inline-block py-1'}>{column.head}</span>
                   ) : (
                     <button
                       type="button"
                       onClick={() => press(column.key)}
-                      className="min-h-6 whitespace-nowrap hover:underline"
+                      className="relative min-h-6 whitespace-nowrap hover:underline"
                     >
                       {column.head}
-                      <span aria-hidden="true" className="inline-block w-[1ch] pl-1">
+                      <span aria-hidden="true" className="absolute top-1 left-full">
                         {direction === 'ascending' ? '↑' : direction === 'descending' ? '↓' : ''}
                       </span>
                     </button>

@@ -57,7 +57,7 @@ export function TextField(props: TextFieldProps) {
             value={value}
             onChange={(event) => onValue(event.target.value)}
             onKeyDown={enterMoves ? enterMovesOn : undefined}
-            className={entryLook(layout === 'row' ? 'w-36 min-w-0 shrink-0' : 'block w-full')}
+            className={entryLook(layout === 'row' ? 'w-36 min-w-0 shrink-0 text-right' : 'block w-full')}
           />
         )
       }

@@ -64,7 +64,7 @@ export function TitleBlock({ children, action, actionNote }: TitleBlockProps) {
         {children}
       </dl>
       {(action !== undefined || actionNote !== undefined) && (
-        <div className="flex w-full flex-col gap-1 border-ink p-2.5 max-lg:roomy:border-t lg:w-auto lg:min-w-56 lg:border-l print:hidden">
+        <div className="flex w-full flex-col gap-1 border-ink p-2.5 max-lg:roomy:border-t lg:w-auto lg:max-w-72 lg:min-w-56 lg:border-l print:hidden">
           {action}
           {actionNote !== undefined && <p className="text-center text-11 text-pencil">{actionNote}</p>}
         </div>

@@ -1,6 +1,7 @@
 import AxeBuilder from '@axe-core/playwright';
 import type { Page } from '@playwright/test';
 import { demoIds, OPEN_PAGES, SHOP_PAGES, visit } from './pages.ts';
+import { DEMO_VIEWS, EMPTY_VIEWS, openEmptyShop } from './shop-views.ts';
 import { expect, test } from './watched-test.ts';
 
 const RULES = ['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa', 'best-practice'];
@@ -45,6 +46,30 @@ test('When the dialogs of a frame are held against WCAG, then nothing serious is
   await page.getByRole('button', { name: 'Files' }).click();
   await expect(page.getByRole('dialog')).toBeVisible();
   await expectAccessible(page);
+});
+
+test('When the dialogs and views of a shop are held against WCAG, then nothing serious is found', async ({ page }) => {
+  test.setTimeout(240_000);
+  const ids = await demoIds(page);
+  for (const { name, open } of DEMO_VIEWS) {
+    await test.step(name, async () => {
+      await open(page, ids);
+      await expectAccessible(page);
+    });
+  }
+});
+
+test('When the pages of a shop with nothing in it are held against WCAG, then nothing serious is found', async ({
+  page,
+}) => {
+  test.setTimeout(120_000);
+  const ids = await openEmptyShop(page);
+  for (const { name, open } of EMPTY_VIEWS) {
+    await test.step(name, async () => {
+      await open(page, ids);
+      await expectAccessible(page);
+    });
+  }
 });
 
 test('When a page has a picture without words, then axe says so', async ({ page, complaints }) => {

@@ -8,6 +8,7 @@ export const SHOP_PAGES = [
   'jobs',
   'jobs/:jobId',
   'jobs/:jobId/box',
+  'jobs/:jobId/table',
   'frames/:frameId',
   'frames/:frameId/sheet',
   'cutters',
@@ -41,4 +42,4 @@ export async function visit(page: Page, path: string, ids: DemoIds = { jobId: ''
 }
 
 /** A file name for a page. */
-export const pageName = (path: string): string => path.replace('*', 'not-found').replace(/[/:]+/g, '-');
+export const pageName = (path: string): string => path.replace('*', 'not-found').replace(/[/: ]+/g, '-');

@@ -5,7 +5,7 @@ import { sendFile } from '../../http/send-file.ts';
 import { allow, signedIn, whoAsks } from '../../http/signed-in.ts';
 import { takeFiles, takenFiles } from '../../http/take-files.ts';
 import type { CuttersService } from './cutters.service.ts';
-import { takeCuttersCsv } from './take-cutters-csv.ts';
+import { readCuttersFile } from './read-cutters-file.ts';
 
 /** The shop's cutter drawer. */
 export function cuttersRoutes(service: CuttersService): Router {
@@ -26,8 +26,8 @@ export function cuttersRoutes(service: CuttersService): Router {
   });
 
   router.post('/cutters/csv', allow('edit-cutters'), takeFiles('file'), async (req, res) => {
-    const { keepGood } = readQuery(req, csvQuery);
-    res.json(await takeCuttersCsv(service, whoAsks(req).shopId, takenFiles(req), keepGood === 'true'));
+    const { take } = readQuery(req, csvQuery);
+    res.json(await readCuttersFile(service, whoAsks(req).shopId, takenFiles(req), take === 'true'));
   });
 
   router.put('/cutters/:cutterId', allow('edit-cutters'), async (req, res) => {

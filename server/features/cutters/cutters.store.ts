@@ -15,6 +15,17 @@ const valuesOf = ({ unit, cutter, remarks }: DrawerEntry, changedAt: Date) => ({
   changedAt,
 });
 
+const rowOf = (shopId: string, entry: DrawerCutter, changedAt: Date) => ({
+  id: entry.id,
+  shopId,
+  ...valuesOf(entry, changedAt),
+});
+
+/** Undoes the transaction. */
+class GoneMeanwhile extends Error {
+  override readonly name = 'GoneMeanwhile';
+}
+
 /** A shop's cutter drawer. A name that is taken in the shop, whatever its case, is a unique violation. */
 export const cuttersStore = (database: Database) => ({
   list: (shopId: string): Promise<DrawerCutter[]> =>
@@ -33,10 +44,33 @@ export const cuttersStore = (database: Database) => ({
   /** All of them or none. */
   async add(shopId: string, entries: readonly DrawerCutter[], changedAt: Date): Promise<void> {
     if (entries.length === 0) return;
-    await database.queries
-      .insert(cutters)
-      .values(entries.map((entry) => ({ id: entry.id, shopId, ...valuesOf(entry, changedAt) })));
+    await database.queries.insert(cutters).values(entries.map((entry) => rowOf(shopId, entry, changedAt)));
   },
+
+  /** Puts in and changes, all or none. False, and nothing done, when one to change is no longer there. */
+  take: (
+    shopId: string,
+    added: readonly DrawerCutter[],
+    changed: readonly DrawerCutter[],
+    changedAt: Date,
+  ): Promise<boolean> =>
+    database
+      .transaction(async (tx) => {
+        for (const { id, ...entry } of changed) {
+          const rows = await tx
+            .update(cutters)
+            .set(valuesOf(entry, changedAt))
+            .where(own(shopId, id))
+            .returning({ id: cutters.id });
+          if (rows.length === 0) throw new GoneMeanwhile(id);
+        }
+        if (added.length > 0) await tx.insert(cutters).values(added.map((entry) => rowOf(shopId, entry, changedAt)));
+        return true;
+      })
+      .catch((error: unknown) => {
+        if (error instanceof GoneMeanwhile) return false;
+        throw error;
+      }),
 
   /** False when the shop has no such cutter. */
   async change(shopId: string, id: string, entry: DrawerEntry, changedAt: Date): Promise<boolean> {

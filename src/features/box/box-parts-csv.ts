@@ -1,5 +1,5 @@
 import type { BoxPart } from '#shared/kernel/box/box-part.ts';
-import { writeCsvLine } from '#shared/kernel/cutter-drawer/write-csv-line.ts';
+import { writeCsvLine } from '#shared/kernel/csv/write-csv-line.ts';
 import type { Unit } from '#shared/kernel/units/unit.ts';
 
 const HEADINGS = [

@@ -61,12 +61,10 @@ export function CutterForm({ texts, onTexts, wrong }: CutterFormProps) {
         ))}
       </div>
       <figure className="border border-rule p-2">
-        {shape ? (
-          <CutterShape cutter={shape} unit={unit} large />
-        ) : (
-          <p className="text-12 text-pencil">The shape is drawn once its numbers are there.</p>
-        )}
-        <figcaption className="text-11 text-pencil">Tip down, as far as the flute goes</figcaption>
+        {shape && <CutterShape cutter={shape} unit={unit} large />}
+        <figcaption className="text-11 text-pencil">
+          {shape ? 'Tip down, as far as the flute goes' : 'The shape is drawn once its numbers are there.'}
+        </figcaption>
       </figure>
       <div className="roomy:col-span-2">
         <TextField

@@ -25,7 +25,7 @@ interface CuttersPageProps {
   readonly mayEditFrames: boolean;
 }
 
-/** What was done last, to the cutter as it was before. */
+/** What was done to a cutter, as it was before. */
 interface Done {
   readonly before: StoredCutter;
   readonly answer: CutterChanged;
@@ -35,16 +35,17 @@ interface Done {
 export function CuttersPage({ cutters, shopName, unit, mayEdit, mayEditFrames }: CuttersPageProps) {
   /** Null: no dialog is open. */
   const [editing, setEditing] = useState<{ readonly stored: StoredCutter | null } | null>(null);
-  const [done, setDone] = useState<Done | null>(null);
+  /** What was done last: one by hand, or all that a file changed. */
+  const [done, setDone] = useState<readonly Done[]>([]);
   const remove = useDeleteCutter();
   const putBack = useCreateCutter();
   const failed = remove.error ?? putBack.error;
-  const isRemoved = done?.answer.cutter === null;
+  const removed = done.find(({ answer }) => answer.cutter === null);
 
   const take = (before: StoredCutter) =>
-    remove.mutate(before.id, { onSuccess: (answer) => setDone({ before, answer }) });
+    remove.mutate(before.id, { onSuccess: (answer) => setDone([{ before, answer }]) });
   const undo = ({ before: { unit: its, cutter, remarks } }: Done) =>
-    putBack.mutate({ unit: its, cutter, remarks }, { onSuccess: () => setDone(null) });
+    putBack.mutate({ unit: its, cutter, remarks }, { onSuccess: () => setDone([]) });
   const openNew = () => setEditing({ stored: null });
 
   return (
@@ -70,7 +71,7 @@ export function CuttersPage({ cutters, shopName, unit, mayEdit, mayEditFrames }:
       }
     >
       <div className="mb-3 flex flex-wrap items-center gap-3 print:hidden">
-        {mayEdit && <ImportCutters />}
+        {mayEdit && <ImportCutters onChanged={setDone} />}
         {cutters.length > 0 && <ExportCutters />}
       </div>
       {failed && (
@@ -78,12 +79,14 @@ export function CuttersPage({ cutters, shopName, unit, mayEdit, mayEditFrames }:
           {sayError(failed)}
         </Notice>
       )}
-      {done && isRemoved && (
-        <UndoNotice busy={putBack.isPending} onUndo={() => undo(done)}>
-          {`${done.before.cutter.name} is out of the drawer.`}
+      {removed && (
+        <UndoNotice busy={putBack.isPending} onUndo={() => undo(removed)}>
+          {`${removed.before.cutter.name} is out of the drawer.`}
         </UndoNotice>
       )}
-      {done && <TouchedDrafts key={JSON.stringify(done)} {...done} mayEditFrames={mayEditFrames} />}
+      {done.map((one) => (
+        <TouchedDrafts key={JSON.stringify(one)} {...one} mayEditFrames={mayEditFrames} />
+      ))}
       {cutters.length > 0 ? (
         <CuttersTable
           cutters={cutters}
@@ -98,7 +101,7 @@ export function CuttersPage({ cutters, shopName, unit, mayEdit, mayEditFrames }:
         <CutterDialog
           stored={editing.stored}
           unit={unit}
-          onChanged={(before, answer) => setDone({ before, answer })}
+          onChanged={(before, answer) => setDone([{ before, answer }])}
           onClose={() => setEditing(null)}
         />
       )}

@@ -22,6 +22,17 @@ export interface EntryTexts {
 
 export const newTexts = (unit: Unit): EntryTexts => ({ unit, kind: 'straight', name: '', remarks: '', numbers: {} });
 
+/** Whether two say the same, letter by letter; an entry never touched is an empty one. */
+export function sameTexts(a: EntryTexts, b: EntryTexts): boolean {
+  return (
+    a.unit === b.unit &&
+    a.kind === b.kind &&
+    a.name === b.name &&
+    a.remarks === b.remarks &&
+    NUMBER_COLUMNS.every(({ entry }) => (a.numbers[entry] ?? '') === (b.numbers[entry] ?? ''))
+  );
+}
+
 /** Every digit of a length that would be rounded: typed again, the rounded one would be another length. */
 function show(entry: NumberEntry, value: number, unit: Unit): string {
   const text = formatLength(value, unit);

@@ -1,50 +1,56 @@
 import { useRef, useState } from 'react';
-import type { CuttersTaken } from '#shared/contracts/cutters.ts';
+import type { CuttersRead } from '#shared/contracts/cutters.ts';
 import { fieldMessagesOf } from '../../lib/field-messages.ts';
 import { sayError } from '../../lib/say-error.ts';
 import { Button } from '../../ui/button.tsx';
 import { Dialog } from '../../ui/dialog.tsx';
 import { Notice } from '../../ui/notice.tsx';
 import { plural } from '../../ui/plural.ts';
-import { Table } from '../../ui/table.tsx';
 import { useImportCutters } from './api/import-cutters.ts';
+import { ImportPreview } from './import-preview.tsx';
 
-type Problem = CuttersTaken['problems'][number];
+interface ImportCuttersProps {
+  /** The cutters that the file has changed, each with the drafts that carry it as it was. */
+  readonly onChanged: (changed: CuttersRead['changed']) => void;
+}
 
-const Problems = ({ problems }: { readonly problems: readonly Problem[] }) => (
-  <Table
-    caption="What is wrong in the file"
-    rows={problems}
-    rowKey={({ line, column }) => `${line} ${column}`}
-    columns={[
-      { key: 'line', head: 'Line', align: 'right', cell: ({ line }) => line, names: true },
-      { key: 'column', head: 'Column', cell: ({ column }) => column },
-      { key: 'got', head: 'Got', cell: ({ got }) => <span className="wrap-anywhere">{got}</span> },
-      { key: 'takes', head: 'Takes', cell: ({ takes }) => takes },
-    ]}
-  />
-);
+const countOf = ({ rows }: CuttersRead, what: string) => rows.filter(({ is }) => is === what).length;
 
-/** Takes cutters from a CSV file. With bad rows in it nothing is taken until the person says to take the good ones. */
-export function ImportCutters() {
+/** "2 new, 1 changed", and what is left alone, in the order in which it matters. */
+function countWords(read: CuttersRead): string {
+  const same = countOf(read, 'same');
+  return [
+    `${countOf(read, 'new')} new, ${countOf(read, 'changed')} changed`,
+    ...(same > 0 ? [`${same} in the drawer as ${same === 1 ? 'it is' : 'they are'}`] : []),
+    ...(read.problems.length > 0 ? [plural(read.problems.length, 'problem')] : []),
+  ].join(', ');
+}
+
+/** Takes cutters from a CSV file, once the person has seen which rows are new and which change what is there. */
+export function ImportCutters({ onChanged }: ImportCuttersProps) {
   const input = useRef<HTMLInputElement>(null);
   const [file, setFile] = useState<File | null>(null);
-  const [refused, setRefused] = useState<CuttersTaken | null>(null);
+  const [read, setRead] = useState<CuttersRead | null>(null);
   const [said, setSaid] = useState('');
   const take = useImportCutters();
+  const todo = read ? countOf(read, 'new') + countOf(read, 'changed') : 0;
 
-  function send(chosen: File, keepGood: boolean) {
+  function look(chosen: File) {
     setFile(chosen);
     setSaid('');
+    take.mutate({ file: chosen, take: false }, { onSuccess: setRead, onError: () => setRead(null) });
+  }
+
+  function confirm(chosen: File) {
     take.mutate(
-      { file: chosen, keepGood },
+      { file: chosen, take: true },
       {
-        onSuccess: (answer) => {
-          const isRefused = answer.problems.length > 0 && !keepGood;
-          setRefused(isRefused ? answer : null);
-          if (!isRefused) setSaid(`${plural(answer.taken.length, 'cutter')} taken from ${chosen.name}.`);
+        onSuccess: ({ added, changed }) => {
+          setRead(null);
+          setSaid(`${plural(added.length, 'cutter')} put in and ${changed.length} changed from ${chosen.name}.`);
+          onChanged(changed);
         },
-        onError: () => setRefused(null),
+        onError: () => setRead(null),
       },
     );
   }
@@ -65,7 +71,7 @@ export function ImportCutters() {
           const [chosen] = event.target.files ?? [];
           // The same file again must be a change again.
           event.target.value = '';
-          if (chosen) send(chosen, false);
+          if (chosen) look(chosen);
         }}
       />
       {said !== '' && (
@@ -78,27 +84,27 @@ export function ImportCutters() {
           {Object.values(wrongFile)[0] ?? sayError(take.error)}
         </Notice>
       )}
-      {refused && file && (
+      {read && file && (
         <Dialog
           wide
-          title={`${file.name} has ${plural(refused.problems.length, 'problem')}`}
-          onClose={() => setRefused(null)}
+          title={`Cutters of ${file.name}`}
+          onClose={() => setRead(null)}
           actions={
             <>
-              {refused.good > 0 && (
-                <Button kind="main" busy={take.isPending ? 'Taking' : ''} onClick={() => send(file, true)}>
-                  Take {plural(refused.good, 'good row')}
+              {todo > 0 && (
+                <Button kind="main" busy={take.isPending ? 'Taking' : ''} onClick={() => confirm(file)}>
+                  {read.problems.length > 0 ? `Take ${plural(todo, 'good row')}` : `Take ${plural(todo, 'row')}`}
                 </Button>
               )}
-              <Button onClick={() => setRefused(null)}>Take nothing</Button>
+              <Button onClick={() => setRead(null)}>Take nothing</Button>
             </>
           }
         >
           <p className="mb-2">
-            Nothing has been taken. Mend the file and import it again
-            {refused.good > 0 ? ', or take the good rows and leave these out.' : '.'}
+            {countWords(read)}. {todo > 0 ? 'Nothing has been taken yet.' : 'There is nothing to take.'}
+            {read.problems.length > 0 && ' Mend the file and import it again, or leave the rows with problems out.'}
           </p>
-          <Problems problems={refused.problems} />
+          <ImportPreview {...read} />
         </Dialog>
       )}
     </>

@@ -31,7 +31,7 @@ export function NoCutters({ unit, mayEdit, onNew }: NoCuttersProps) {
           <>
             <Button
               busy={take.isPending ? 'Putting them in' : ''}
-              onClick={() => take.mutate({ file: file(), keepGood: false })}
+              onClick={() => take.mutate({ file: file(), take: true })}
             >
               Begin with common sizes in {UNIT_WORDS[unit]}
             </Button>

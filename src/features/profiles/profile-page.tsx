@@ -11,7 +11,7 @@ import { TitleBlock, TitleCell } from '../../ui/title-block.tsx';
 import { useCreateProfile } from './api/create-profile.ts';
 import { DeleteProfileDialog } from './delete-profile-dialog.tsx';
 import { LayerExample } from './layer-example.tsx';
-import { LeaveUnsavedDialog } from './leave-unsaved-dialog.tsx';
+import { LeaveUnsavedDialog } from '../../ui/leave-unsaved-dialog.tsx';
 import { ProfileForm } from './profile-form.tsx';
 import { ProfileReading } from './profile-reading.tsx';
 import { useProfileEditor } from './use-profile-editor.ts';
@@ -108,7 +108,7 @@ export function ProfilePage({ stored, mayEdit, shopName, list }: ProfilePageProp
           )}
         </div>
         <div className="md:col-start-2 xl:col-start-auto">
-          <Section heading="Layers it gives" aside="square edges">
+          <Section heading="Layers it gives" aside="of all lines that a frame can have">
             <LayerExample profile={editor.entered} />
           </Section>
         </div>

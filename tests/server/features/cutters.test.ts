@@ -2,12 +2,13 @@ import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import {
   cutterChanged,
   cutterList,
-  cuttersTaken,
+  cuttersRead,
   storedCutter,
   DRAWER_LIMITS,
-  type CuttersTaken,
+  type CuttersRead,
   type StoredCutter,
 } from '../../../shared/contracts/cutters.ts';
+import { cuttersStore } from '../../../server/features/cutters/cutters.store.ts';
 import { newFrame } from '../../../shared/kernel/particulars/new-frame.ts';
 import { setField } from '../../../shared/kernel/particulars/set-field.ts';
 import { addFrame, addJob, addPerson, expectStatus, openShop, releaseFrame } from '../../builders/shops.ts';
@@ -35,13 +36,13 @@ const add = async (name: string, change: object = {}, who = visitor): Promise<St
 const named = async (name: string, who = visitor) => (await list(who)).find((c) => c.cutter.name === name)!;
 
 const HEADER = 'name,unit,kind,diameter,flute length,max pass,remarks';
-const send = (lines: readonly string[], keepGood = '', who = visitor) => {
+const send = (lines: readonly string[], take = '', who = visitor) => {
   const form = new FormData();
   form.append('file', new Blob([lines.join('\r\n')]), 'cutters.csv');
-  return who.post(`/api/cutters/csv${keepGood}`, form);
+  return who.post(`/api/cutters/csv${take}`, form);
 };
-const taken = async (...given: Parameters<typeof send>): Promise<CuttersTaken> =>
-  cuttersTaken.parse(expectStatus(await send(...given), 200).json());
+const read = async (...given: Parameters<typeof send>): Promise<CuttersRead> =>
+  cuttersRead.parse(expectStatus(await send(...given), 200).json());
 
 describe('The cutter drawer', () => {
   it.each([
@@ -200,7 +201,7 @@ describe('Cutters as CSV', () => {
     const file = expectStatus(await visitor.get('/api/cutters/csv'), 200);
     expect(file.headers.get('content-type')).toBe('text/csv; charset=utf-8');
     expect(file.headers.get('content-disposition')).toContain('cutters.csv');
-    const answer = await taken([new TextDecoder().decode(file.bytes)], '', other);
+    const answer = await read([new TextDecoder().decode(file.bytes)], '?take=true', other);
     expect(answer.problems).toEqual([]);
     const bare = (cutters: readonly StoredCutter[]) =>
       cutters.map(({ unit, cutter, remarks }) => ({ unit, cutter, remarks }));
@@ -213,28 +214,134 @@ describe('Cutters as CSV', () => {
       'Good one,in,straight,0.25,1,,',
       'Bad one,in,straight,wide,1,,',
       'Good one,in,straight,0.5,1,,',
-      'Straight 3/8,in,straight,0.375,1,,',
     ];
-    const refused = await taken(lines);
-    expect(refused).toMatchObject({ taken: [], good: 1 });
+    const refused = await read(lines);
+    expect(refused).toMatchObject({
+      rows: [{ line: 2, name: 'Good one', is: 'new', changes: [] }],
+      added: [],
+      changed: [],
+    });
     expect(refused.problems.map(({ line, column }) => [line, column])).toEqual([
       [3, 'diameter'],
       [4, 'name'],
-      [5, 'name'],
     ]);
     expect(refused.problems[0]).toMatchObject({ got: '"wide"', takes: 'a number with a decimal point, such as 9.525' });
     expect(await named('Good one')).toBeUndefined();
 
-    const kept = await taken(lines, '?keepGood=true');
+    const kept = await read(lines, '?take=true');
     expect(kept.problems).toEqual(refused.problems);
-    expect(kept.taken.map((c) => c.cutter.name)).toEqual(['Good one']);
+    expect(kept.added.map((c) => c.cutter.name)).toEqual(['Good one']);
     expect((await named('Good one')).cutter).toMatchObject({ diameter: 0.25 });
     expect(await named('Bad one')).toBeUndefined();
   });
 
+  it('When a row has the name of a cutter in the drawer, then it is told as changed or the same, and changed only when taken', async () => {
+    const { visitor: owner } = await openShop(server);
+    const was = await add('Spiral', { maxPass: 0.5, number: 4 }, owner);
+    const asItIs = await add('Compression', {}, owner);
+    await addFrame(
+      owner,
+      (await addJob(owner)).id,
+      setField(newFrame('in', 'Carries it'), 'cutters.dado', { ...was.cutter, name: 'Spiral' }),
+    );
+    const lines = [
+      HEADER,
+      'SPIRAL,in,straight,0.247,1,0.5,reground',
+      'Compression,in,straight,0.25,1,,',
+      'Another,in,straight,0.125,0.5,,',
+    ];
+    const looked = await read(lines, '', owner);
+    expect(looked.rows).toEqual([
+      {
+        line: 2,
+        name: 'SPIRAL',
+        is: 'changed',
+        changes: [
+          { column: 'name', was: 'Spiral', is: 'SPIRAL' },
+          { column: 'diameter', was: '0.25', is: '0.247' },
+          { column: 'remarks', was: '', is: 'reground' },
+        ],
+      },
+      { line: 3, name: 'Compression', is: 'same', changes: [] },
+      { line: 4, name: 'Another', is: 'new', changes: [] },
+    ]);
+    expect(looked).toMatchObject({ problems: [], added: [], changed: [] });
+    expect(await named('Spiral', owner)).toEqual(was);
+    expect(await named('Another', owner)).toBeUndefined();
+
+    const held = (await list(owner)).length;
+    const taken = await read(lines, '?take=true', owner);
+    expect(taken.added.map((c) => c.cutter.name)).toEqual(['Another']);
+    expect(taken.changed).toMatchObject([
+      {
+        before: was,
+        answer: {
+          cutter: { id: was.id },
+          changes: ['diameter', 'name'],
+          drafts: [{ frameName: 'Carries it', roles: ['dado'] }],
+        },
+      },
+    ]);
+    // The file has no column for the number in the machine, which therefore stays.
+    expect(await named('SPIRAL', owner)).toEqual({
+      id: was.id,
+      unit: 'in',
+      cutter: { ...was.cutter, name: 'SPIRAL', diameter: 0.247 },
+      remarks: 'reground',
+    });
+    expect(await named('Compression', owner)).toEqual(asItIs);
+    expect(await list(owner)).toHaveLength(held + 1);
+    expect((await read(lines, '', owner)).rows.map(({ is }) => is)).toEqual(['same', 'same', 'same']);
+  });
+
+  const NUMBERED = 'name,unit,kind,number,diameter,flute length';
+  it.each([
+    ['a row has its number and its kind', ['Renamed,in,straight,7,0.25,1'], ['changed']],
+    ['a row has its number and another kind', ['Renamed,in,vee,7,,1'], []],
+    ['two rows have its number', ['Renamed,in,straight,7,0.25,1', 'Other,in,straight,7,0.25,1'], ['new', 'new']],
+    [
+      'another row has its name',
+      ['Renamed,in,straight,7,0.25,1', 'In slot seven,in,straight,,0.25,1'],
+      ['new', 'changed'],
+    ],
+  ])('When no cutter has the name and %s, then the row is told so', async (_what, rows, expected) => {
+    const { visitor: owner } = await openShop(server);
+    await add('In slot seven', { number: 7 }, owner);
+    const answer = await read([NUMBERED, ...rows], '', owner);
+    expect(answer.rows.map(({ is }) => is)).toEqual(expected);
+  });
+
+  it('When a cutter to change is taken out meanwhile, then nothing of the file is taken', async () => {
+    const { visitor: owner, session } = await openShop(server);
+    const { unit, cutter, remarks, id } = await add('Gone soon', {}, owner);
+    await owner.delete(`/api/cutters/${id}`);
+    const held = await list(owner);
+    const fresh = { id: 'fresh', unit, cutter: { ...cutter, name: 'Fresh' }, remarks };
+    const store = cuttersStore(server.database);
+    expect(await store.take(session.shop.id, [fresh], [{ id, unit, cutter, remarks }], new Date(0))).toBe(false);
+    expect(await store.take(session.shop.id, [], [{ ...fresh, id: held[0]!.id }], new Date(0))).toBe(true);
+    expect((await list(owner)).length).toBe(held.length);
+  });
+
+  it('When what the drawer keeps does not go with a row, then the column is named and the cutter stays', async () => {
+    const { visitor: owner } = await openShop(server);
+    const was = await add('Long', { maxPass: 0.75 }, owner);
+    const answer = await read(
+      ['name,unit,kind,diameter,flute length', 'Long,in,straight,0.25,0.5'],
+      '?take=true',
+      owner,
+    );
+    expect(answer).toMatchObject({
+      rows: [],
+      changed: [],
+      problems: [{ line: 2, column: 'max pass', takes: 'at most the flute length, 0.5' }],
+    });
+    expect(await named('Long', owner)).toEqual(was);
+  });
+
   it('When a column is missing, then it is named', async () => {
-    const { taken: none, problems } = await taken(['name,unit,kind', 'A,in,straight'], '?keepGood=true');
-    expect(none).toEqual([]);
+    const { added, problems } = await read(['name,unit,kind', 'A,in,straight'], '?take=true');
+    expect(added).toEqual([]);
     expect(problems[0]).toMatchObject({ line: 1 });
     expect(problems[0]!.message).toContain('flute length');
   });
@@ -255,8 +362,8 @@ describe('Cutters as CSV', () => {
     expect(
       (await bad((f) => f.append('file', new Blob(['x'.repeat(DRAWER_LIMITS.csvBytes + 1)]), 'a.csv'))).takes,
     ).toContain('bytes');
-    expect((await send([HEADER], '?keepGood=perhaps')).json<{ fields: unknown[] }>().fields).toMatchObject([
-      { path: 'keepGood' },
+    expect((await send([HEADER], '?take=perhaps')).json<{ fields: unknown[] }>().fields).toMatchObject([
+      { path: 'take' },
     ]);
   });
 
@@ -264,12 +371,12 @@ describe('Cutters as CSV', () => {
     const { visitor: other } = await openShop(server);
     const held = (await list(other)).length;
     const rows = Array.from({ length: DRAWER_LIMITS.cutters - held + 1 }, (_, i) => `Cutter ${i},in,straight,0.25,1,,`);
-    const answer = await send([HEADER, ...rows], '', other);
+    const answer = await send([HEADER, ...rows], '?take=true', other);
     expect(answer.status).toBe(400);
     expect(answer.json<{ fields: unknown[] }>().fields).toMatchObject([
       { path: 'cutters', got: '501 in the drawer', takes: 'at most 500' },
     ]);
     expect(await list(other)).toHaveLength(held);
-    expect((await taken([HEADER, ...rows.slice(1)], '', other)).taken).toHaveLength(rows.length - 1);
+    expect((await read([HEADER, ...rows.slice(1)], '?take=true', other)).added).toHaveLength(rows.length - 1);
   });
 });

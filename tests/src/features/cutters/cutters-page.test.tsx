@@ -126,6 +126,7 @@ describe('CuttersPage', () => {
         removed: false,
         revisions: [],
         draftChanged: true,
+        tracing: null,
       });
     const seen = answerCalls(({ method, path }) => {
       if (method === 'PUT' && path === '/api/cutters/s')
@@ -190,31 +191,94 @@ describe('CuttersPage', () => {
     expect(seen[1]!.body).toEqual(entry);
   });
 
-  it('When a CSV file has bad rows, then they are named and the good ones are taken only when asked', async () => {
+  it('When a CSV file is chosen, then each row is shown against the drawer and nothing is taken before that is asked for', async () => {
     const problems = [{ line: 3, column: 'diameter', got: '"wide"', takes: 'a number', message: 'line 3' }];
+    const rows = [
+      { line: 2, name: 'Straight 3/8', is: 'changed', changes: [{ column: 'max pass', was: '0.5', is: '' }] },
+      { line: 4, name: 'V 30', is: 'same', changes: [] },
+      { line: 5, name: 'Straight 1/4', is: 'new', changes: [] },
+    ];
+    const { maxPass: _pass, ...cutter } = STRAIGHT.cutter;
+    const changed = {
+      before: STRAIGHT,
+      answer: {
+        cutter: { ...STRAIGHT, cutter },
+        changes: ['maxPass'],
+        drafts: [{ frameId: 'f1', frameName: 'B33 base', jobName: 'Kitchen', roles: ['dado'] }],
+      },
+    };
     const seen = answerCalls(({ path }) =>
-      path.endsWith('keepGood=true')
-        ? json({ taken: [STRAIGHT], good: 1, problems })
-        : json({ taken: [], good: 1, problems }),
+      path.endsWith('take=true')
+        ? json({ rows, problems, added: [{ ...STRAIGHT, id: 'n' }], changed: [changed] })
+        : json({ rows, problems, added: [], changed: [] }),
     );
     const { user } = show(page());
     const file = new File(['name'], 'ours.csv', { type: 'text/csv' });
     await user.upload(screen.getByLabelText('CSV file of cutters'), file);
-    const dialog = within(await screen.findByRole('dialog', { name: 'ours.csv has 1 problem' }));
-    expect(dialog.getAllByRole('cell').map((cell) => cell.textContent)).toEqual(['diameter', '"wide"', 'a number']);
-    expect(dialog.getByRole('rowheader').textContent).toBe('3');
+    const dialog = within(await screen.findByRole('dialog', { name: 'Cutters of ours.csv' }));
+    expect(dialog.getByText(/^1 new, 1 changed, 1 in the drawer as it is, 1 problem\./)).toBeTruthy();
+    const cells = (caption: string) =>
+      within(dialog.getByRole('table', { name: caption }))
+        .getAllByRole('row')
+        .slice(1)
+        .map((row) => [...row.children].map((cell) => cell.textContent));
+    expect(cells('What is wrong in the file')).toEqual([['3', 'diameter', '"wide"', 'a number']]);
+    expect(cells('Rows against the drawer')).toEqual([
+      ['2', 'Straight 3/8', 'changed', 'max pass: nothing, was 0.5'],
+      ['4', 'V 30', 'as it is', ''],
+      ['5', 'Straight 1/4', 'new', ''],
+    ]);
     expect(seen.map(({ path }) => path)).toEqual(['/api/cutters/csv']);
-    await user.click(dialog.getByRole('button', { name: 'Take 1 good row' }));
-    expect(await screen.findByText('1 cutter taken from ours.csv.')).toBeTruthy();
-    expect(seen.map(({ path }) => path)).toEqual(['/api/cutters/csv', '/api/cutters/csv?keepGood=true']);
+
+    await user.click(dialog.getByRole('button', { name: 'Take 2 good rows' }));
+    expect(await screen.findByText('1 cutter put in and 1 changed from ours.csv.')).toBeTruthy();
+    expect(seen.map(({ path }) => path)).toEqual(['/api/cutters/csv', '/api/cutters/csv?take=true']);
     expect((seen[1]!.body as FormData).get('file')).toMatchObject({ name: 'ours.csv' });
+    expect(screen.getByRole('link', { name: 'B33 base' }).getAttribute('href')).toBe('/frames/f1');
+  });
+
+  it('When a CSV file has nothing that is not in the drawer, then there is nothing to take', async () => {
+    answerCalls(() =>
+      json({ rows: [{ line: 2, name: 'V 30', is: 'same', changes: [] }], problems: [], added: [], changed: [] }),
+    );
+    const { user } = show(page());
+    await user.upload(screen.getByLabelText('CSV file of cutters'), new File(['name'], 'ours.csv'));
+    const dialog = within(await screen.findByRole('dialog'));
+    expect(dialog.getByText(/There is nothing to take/)).toBeTruthy();
+    expect(dialog.queryByRole('button', { name: /^Take \d/ })).toBeNull();
+  });
+
+  it('When a cutter is typed and Escape is pressed, then it is asked first, and staying keeps what was typed', async () => {
+    const seen = answerCalls(() => undefined);
+    const { user } = show(page());
+    await user.click(screen.getByRole('button', { name: 'Put in a cutter' }));
+    enter('Name', 'Half typed');
+    const cutter = () => screen.queryByRole('dialog', { name: 'New cutter' });
+    const asks = () => screen.queryByRole('dialog', { name: 'The new cutter is not saved' });
+    fireEvent.keyDown(field('Name'), { key: 'Escape' });
+    expect(asks()).toBeTruthy();
+    // A second Escape stays too.
+    fireEvent.keyDown(screen.getByRole('button', { name: 'Stay' }), { key: 'Escape' });
+    expect(asks()).toBeNull();
+    expect(field('Name').value).toBe('Half typed');
+    await user.click(within(cutter()!).getByRole('button', { name: 'Cancel' }));
+    await user.click(screen.getByRole('button', { name: 'Leave without saving' }));
+    expect([cutter(), asks()]).toEqual([null, null]);
+    expect(seen).toEqual([]);
+  });
+
+  it('When nothing was typed, then Escape closes the cutter at once', async () => {
+    const { user } = show(page());
+    await user.click(screen.getByRole('button', { name: 'Change V 30' }));
+    fireEvent.keyDown(field('Name'), { key: 'Escape' });
+    expect(screen.queryByRole('dialog')).toBeNull();
   });
 
   it('When the drawer is empty, then common sizes are offered in the unit of the shop', async () => {
-    const seen = answerCalls(() => json({ taken: [STRAIGHT], good: 1, problems: [] }));
+    const seen = answerCalls(() => json({ rows: [], problems: [], added: [STRAIGHT], changed: [] }));
     const { user } = show(page({ cutters: [], unit: 'mm' }));
     await user.click(screen.getByRole('button', { name: 'Begin with common sizes in millimetres' }));
-    await waitFor(() => expect(seen).toHaveLength(1));
+    await waitFor(() => expect(seen.map(({ path }) => path)).toEqual(['/api/cutters/csv?take=true']));
     expect(await ((seen[0]!.body as FormData).get('file') as File).text()).toContain('Straight 10,mm,straight');
   });
 });

@@ -1,7 +1,6 @@
 import { useEffect } from 'react';
 import { useBlocker } from 'react-router';
-import { Button } from '../../ui/button.tsx';
-import { Dialog } from '../../ui/dialog.tsx';
+import { AskUnsaved } from './ask-unsaved.tsx';
 
 interface LeaveUnsavedDialogProps {
   readonly name: string;
@@ -21,20 +20,5 @@ export function LeaveUnsavedDialog({ name, unsaved }: LeaveUnsavedDialogProps) {
     return () => window.removeEventListener('beforeunload', ask);
   }, [unsaved]);
   if (blocker.state !== 'blocked') return null;
-  return (
-    <Dialog
-      title={`${name} is not saved`}
-      onClose={() => blocker.reset()}
-      actions={
-        <>
-          <Button kind="main" onClick={() => blocker.reset()}>
-            Stay
-          </Button>
-          <Button onClick={() => blocker.proceed()}>Leave without saving</Button>
-        </>
-      }
-    >
-      <p>Stay and save it, or leave and lose what was changed since it was saved.</p>
-    </Dialog>
-  );
+  return <AskUnsaved name={name} onStay={() => blocker.reset()} onLeave={() => blocker.proceed()} />;
 }
