@@ -23,6 +23,10 @@ import { SignInBrake } from './features/session/sign-in-brake.ts';
 import { shopRoutes } from './features/shop/shop.routes.ts';
 import { shopService } from './features/shop/shop.service.ts';
 import { shopStore } from './features/shop/shop.store.ts';
+import { tracingsRoutes } from './features/tracings/tracings.routes.ts';
+import { tracingsService } from './features/tracings/tracings.service.ts';
+import { tracingsStore } from './features/tracings/tracings.store.ts';
+import type { FileStore } from './files/file-store.ts';
 import { answerError, noSuchRoute } from './http/answer-error.ts';
 import { limitRequests } from './http/limit-requests.ts';
 import { logRequests } from './http/log-requests.ts';
@@ -42,6 +46,9 @@ export interface AppGiven {
   readonly sessions: DatabaseSessions;
   readonly services: Services;
   readonly makers: Makers;
+  /** Makers that read somebody else's drawings, so that those hold up nothing else. */
+  readonly tracers: Makers;
+  readonly files: FileStore;
   readonly now: () => Date;
   readonly log: Logger;
   /** The client comes from its sources, through Vite. */
@@ -69,6 +76,14 @@ function apiRoutes(given: AppGiven): Router {
   api.use(jobsRoutes(services.jobs));
   api.use(framesRoutes(services.frames, services.releases));
   api.use(downloadsRoutes(downloadsService(downloadsStore(database), makers)));
+  const tracings = {
+    store: tracingsStore(database),
+    files: given.files,
+    tracers: given.tracers,
+    frames: services.frames,
+    now,
+  };
+  api.use(tracingsRoutes(tracingsService(tracings), given.files));
   api.use(noSuchRoute);
   return api;
 }

@@ -25,6 +25,7 @@ const environment = z.object({
   SIGN_UPS_PER_HOUR: wholeNumber(1, 100_000).default(60),
   REQUESTS_PER_MINUTE: wholeNumber(1, 1_000_000).default(1200),
   MAKERS: wholeNumber(1, 16).default(2),
+  TRACERS: wholeNumber(1, 16).default(1),
 });
 
 export interface Config {
@@ -43,6 +44,8 @@ export interface Config {
   readonly requestsPerMinute: number;
   /** Worker threads that make files. */
   readonly makers: number;
+  /** Worker threads that read uploaded drawings. */
+  readonly tracers: number;
 }
 
 /** The configuration cannot be used; each line of the message names a variable, what it got and what it takes. */
@@ -75,5 +78,6 @@ export function readConfig(env: Readonly<Record<string, string | undefined>>): C
     signUpsPerHour: e.SIGN_UPS_PER_HOUR,
     requestsPerMinute: e.REQUESTS_PER_MINUTE,
     makers: e.MAKERS,
+    tracers: e.TRACERS,
   };
 }

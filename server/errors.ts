@@ -14,6 +14,7 @@ const TABLE: Record<ErrorCode, { status: number; message: string }> = {
   'cautions-not-acknowledged': { status: 422, message: 'Each caution must be acknowledged before release.' },
   'nothing-changed': { status: 422, message: 'Nothing was changed since the newest revision.' },
   'proof-failed': { status: 422, message: 'The files did not pass their proof, so there is nothing to download.' },
+  'drawing-refused': { status: 422, message: 'This file cannot be read as a drawing.' },
   'too-large': { status: 413, message: 'That is too large.' },
   'too-many-requests': { status: 429, message: 'Too many requests. Wait a little and try again.' },
   'cross-site': { status: 403, message: 'This request came from another site and was refused.' },

@@ -1,12 +1,14 @@
 import { createServer, type Server } from 'node:http';
 import type { AddressInfo } from 'node:net';
+import { join } from 'node:path';
 import { pino } from 'pino';
 import { createApp, finishApp } from './app.ts';
 import type { Config } from './config.ts';
 import { openDatabase } from './db/open-database.ts';
 import type { ServeClient } from './http/serve-client.ts';
 import { DatabaseSessions } from './http/sessions.store.ts';
-import { startMakers } from './making/start-makers.ts';
+import { openDiskStore } from './files/open-disk-store.ts';
+import { DRAWING_CAPS, startMakers } from './making/start-makers.ts';
 import { wireServices } from './services.ts';
 import { sessionSecret } from './session-secret.ts';
 import { startDemo } from './start-demo.ts';
@@ -38,8 +40,9 @@ export async function startServer(
   const now = () => new Date();
   const database = await openDatabase(config, places.migrations, say);
   const makers = startMakers(places.worker, config.makers);
+  const tracers = startMakers(places.worker, config.tracers, DRAWING_CAPS);
   const shutDown = async () => {
-    await makers.close();
+    await Promise.all([makers.close(), tracers.close()]);
     await database.close();
   };
   try {
@@ -59,6 +62,8 @@ export async function startServer(
       sessions,
       services,
       makers,
+      tracers,
+      files: openDiskStore(join(config.dataDir, 'files')),
       now,
       log,
       fromSources: client.fromSources,

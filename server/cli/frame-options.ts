@@ -1,5 +1,6 @@
 import { parseArgs } from 'node:util';
 import { BUILTIN_PROFILES } from '#shared/kernel/profiles/builtin-profiles.ts';
+import { UsageError } from './usage-error.ts';
 
 /** What the `frame` command was asked for. */
 export interface FrameOptions {
@@ -20,9 +21,6 @@ export interface FrameOptions {
   /** undefined: by the frame's unit. */
   readonly paper: 'A4' | 'Letter' | undefined;
 }
-
-/** The command line cannot be understood. */
-export class UsageError extends Error {}
 
 export const USAGE = `Writes the layer set of a frame: both DXF files, setup sheet, frame file, layers.csv, SHA256SUMS.
 

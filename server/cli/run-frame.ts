@@ -2,11 +2,12 @@ import type { Finding } from '#shared/kernel/checks/finding.ts';
 import { workFrame } from '#shared/kernel/work-frame.ts';
 import { buildLayerSet } from '../layer-set/build-layer-set.ts';
 import { ProofFailed } from '../layer-set/layer-set.ts';
-import { readFrameOptions, USAGE, UsageError, type FrameOptions } from './frame-options.ts';
+import { readFrameOptions, USAGE, type FrameOptions } from './frame-options.ts';
 import { InputError } from './input-error.ts';
 import { loadFrame } from './load-frame.ts';
 import { loadProfile } from './load-profile.ts';
 import { saveFiles } from './save-files.ts';
+import { UsageError } from './usage-error.ts';
 
 /** Where the command writes its lines. */
 export interface Output {

@@ -126,6 +126,27 @@ export const jobs = pgTable(
   (t) => [index('jobs_shop').on(t.shopId)],
 );
 
+/** A drawing that somebody uploaded to trace frames from. The file itself lies in the file store under its hash. */
+export const tracings = pgTable(
+  'tracings',
+  {
+    id: text().primaryKey(),
+    shopId: text('shop_id')
+      .notNull()
+      .references(() => shops.id),
+    jobId: text('job_id')
+      .notNull()
+      .references(() => jobs.id),
+    fileName: text('file_name').notNull(),
+    bytes: integer().notNull(),
+    sha256: text().notNull(),
+    uploadedBy: text('uploaded_by').notNull(),
+    uploadedAt: moment('uploaded_at').notNull(),
+    removed: boolean().notNull().default(false),
+  },
+  (t) => [index('tracings_job').on(t.jobId), index('tracings_shop').on(t.shopId)],
+);
+
 /** A frame and its draft. The figures of the draft are kept beside it for tables. */
 export const frames = pgTable(
   'frames',
@@ -137,6 +158,8 @@ export const frames = pgTable(
     jobId: text('job_id')
       .notNull()
       .references(() => jobs.id),
+    /** The drawing that it was traced from. */
+    tracingId: text('tracing_id').references(() => tracings.id),
     // json, not jsonb: it keeps the order of keys and every digit as written.
     particulars: json().$type<Particulars>().notNull(),
     version: integer().notNull(),

@@ -13,6 +13,11 @@ export function toMakingError(kind: TaskKind, answer: Extract<TaskAnswer, { ok: 
   // Two line sets of this frame would land on one layer: the profile's template does not tell them apart.
   if (answer.name === 'LayerClash')
     return wrongField('profile', answer.message, 'a profile that gives each line set of this frame a layer of its own');
+  if (answer.name === 'NotTraceable' && answer.code !== undefined)
+    return new AppError('drawing-refused', `${kind}: ${answer.code}`, {
+      message: answer.message,
+      details: { reason: answer.code },
+    });
   const error = new Error(`${kind}: ${answer.message}`);
   error.stack = answer.stack;
   return error;

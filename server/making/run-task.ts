@@ -1,3 +1,5 @@
+import { traceDrawing } from '#shared/kernel/tracing/trace-drawing.ts';
+import { traceFrames } from '#shared/kernel/tracing/trace-frames.ts';
 import { safeName } from '../layer-set/safe-name.ts';
 import { summarizeFrame } from './summarize-frame.ts';
 import type { TaskKind, Tasks } from './tasks.ts';
@@ -38,6 +40,10 @@ const RUN: { [K in TaskKind]: (input: Tasks[K]['input']) => Promise<Tasks[K]['re
     const { proveFrame } = await import('./prove-frame.ts');
     return proveFrame(particulars, profiles);
   },
+
+  'read-drawing': async ({ bytes, options }) => JSON.stringify(traceDrawing(bytes, options)),
+
+  'trace-frames': async (input) => traceFrames(input),
 
   summary: async (particulars) => summarizeFrame(particulars),
 };

@@ -5,9 +5,22 @@ import type { Makers, TaskAnswer, TaskKind } from './tasks.ts';
 
 /** More waiting tasks than this are turned away. */
 const LONGEST_QUEUE = 64;
-/** A task that takes longer is given up and its worker replaced. */
-const TIME_CAP_MS = 60_000;
-const MEMORY_CAP_MB = 1024;
+/** What a task may take of the machine; one that wants more is given up and its worker replaced. */
+export interface Caps {
+  readonly timeMs: number;
+  /** Of the JavaScript heap. */
+  readonly memoryMb: number;
+  /** What a person can do about a task that is given up. */
+  readonly remedy: string;
+}
+
+const FRAME_CAPS: Caps = { timeMs: 60_000, memoryMb: 1024, remedy: 'A tracing with fewer vertices will do.' };
+/** Somebody else's drawing: within these, the largest that is read takes a few seconds. */
+export const DRAWING_CAPS: Caps = {
+  timeMs: 30_000,
+  memoryMb: 1024,
+  remedy: 'Export only the lines that belong to the frames.',
+};
 
 interface Waiting {
   readonly kind: TaskKind;
@@ -21,27 +34,27 @@ interface Waiting {
 const SOURCES = './load-sources.mjs';
 
 /** Starts a worker thread on built files as they are, and on sources through tsx. */
-function startWorker(entry: URL): Worker {
+function startWorker(entry: URL, memoryMb: number): Worker {
   const fromSources = entry.pathname.endsWith('.ts');
   const first = fromSources ? new URL(SOURCES, import.meta.url) : entry;
   return new Worker(first, {
     workerData: entry.href,
     execArgv: [],
-    resourceLimits: { maxOldGenerationSizeMb: MEMORY_CAP_MB },
+    resourceLimits: { maxOldGenerationSizeMb: memoryMb },
   });
 }
 
 /**
  * A pool of at most `size` worker threads running `entry`; each is started when it is first needed and does one task at a time.
  */
-export function startMakers(entry: URL, size: number, timeCapMs = TIME_CAP_MS): Makers {
+export function startMakers(entry: URL, size: number, caps: Caps = FRAME_CAPS): Makers {
   const queue: Waiting[] = [];
   const idle: Worker[] = [];
   const all = new Set<Worker>();
   let closed = false;
 
   const start = (): Worker => {
-    const worker = startWorker(entry);
+    const worker = startWorker(entry, caps.memoryMb);
     all.add(worker);
     worker.once('exit', () => {
       all.delete(worker);
@@ -65,14 +78,21 @@ export function startMakers(entry: URL, size: number, timeCapMs = TIME_CAP_MS): 
     const answered = (answer: TaskAnswer): void => {
       settle(() => (answer.ok ? task.resolve(answer.result) : task.reject(toMakingError(task.kind, answer))), true);
     };
-    const broke = (error: Error): void =>
-      settle(() => task.reject(new Error(`a worker broke down making ${task.kind}`, { cause: error })), false);
+    const giveUp = (why: string, log: string): AppError =>
+      new AppError('too-large', `${task.kind} ${log}`, { message: `${why} and was given up. ${caps.remedy}` });
+    const broke = (error: Error & { code?: string }): void => {
+      const reason =
+        error.code === 'ERR_WORKER_OUT_OF_MEMORY'
+          ? giveUp(`This takes more than ${caps.memoryMb} MB of memory to work out`, 'hit the memory cap')
+          : new Error(`a worker broke down making ${task.kind}`, { cause: error });
+      settle(() => task.reject(reason), false);
+    };
     const left = (code: number): void =>
       settle(() => task.reject(new Error(`a worker ended with ${code} making ${task.kind}`)), false);
     const cap = setTimeout(() => {
-      const message = `This takes longer than ${timeCapMs / 1000} seconds to work out and was given up. A tracing with fewer vertices will do.`;
-      settle(() => task.reject(new AppError('too-large', `${task.kind} hit the time cap`, { message })), false);
-    }, timeCapMs);
+      const reason = giveUp(`This takes longer than ${caps.timeMs / 1000} seconds to work out`, 'hit the time cap');
+      settle(() => task.reject(reason), false);
+    }, caps.timeMs);
     worker.on('message', answered).on('error', broke).on('exit', left);
     worker.postMessage({ kind: task.kind, input: task.input });
   };

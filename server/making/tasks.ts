@@ -1,6 +1,8 @@
 import type { Particulars } from '#shared/kernel/particulars/particulars.ts';
 import type { Finding } from '#shared/kernel/checks/finding.ts';
 import type { FileProfile } from '#shared/kernel/profiles/file-profile.ts';
+import type { TraceOptions } from '#shared/kernel/tracing/traced-drawing.ts';
+import type { TraceFramesInput } from '#shared/kernel/tracing/trace-frames.ts';
 import type { Proof } from '#shared/kernel/sheet/proof.ts';
 import type { Paper } from '#shared/contracts/session.ts';
 import type { JobSetInput } from '../layer-set/build-job-set.ts';
@@ -43,6 +45,10 @@ export interface Tasks {
   /** Writes and reads back both DXF files in each of the profiles. */
   proof: { input: { particulars: Particulars; profiles: readonly FileProfile[] }; result: Proof };
   summary: { input: Particulars; result: WorkedSummary };
+  /** Somebody's drawing as found and healed, as JSON ready to be sent. Fails with 'drawing-refused'. */
+  'read-drawing': { input: { bytes: Uint8Array; options: TraceOptions }; result: string };
+  /** The frames that such a drawing holds, with the roles that a person gave its loops. Fails with 'drawing-refused'. */
+  'trace-frames': { input: TraceFramesInput; result: Particulars[] };
 }
 
 export type TaskKind = keyof Tasks;
@@ -67,5 +73,7 @@ export type TaskAnswer =
       readonly name: string;
       readonly message: string;
       readonly stack: string;
+      /** Why a drawing was refused. */
+      readonly code?: string;
       readonly proof?: Proof;
     };

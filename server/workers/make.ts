@@ -11,8 +11,9 @@ async function answer({ kind, input }: TaskMessage): Promise<TaskAnswer> {
     return { ok: true, result: await runTask(kind, input as Tasks[typeof kind]['input']) };
   } catch (thrown) {
     const error = thrown instanceof Error ? thrown : new Error(String(thrown));
+    const code = 'code' in error && typeof error.code === 'string' ? { code: error.code } : {};
     const proof = 'proof' in error ? { proof: error.proof as Tasks['proof']['result'] } : {};
-    return { ok: false, name: error.name, message: error.message, stack: error.stack ?? error.message, ...proof };
+    return { ok: false, name: error.name, message: error.message, stack: error.stack ?? error.message, ...code, ...proof };
   }
 }
 

@@ -14,6 +14,7 @@ export const ERROR_CODES = [
   'cautions-not-acknowledged',
   'nothing-changed',
   'proof-failed',
+  'drawing-refused',
   'too-large',
   'too-many-requests',
   'cross-site',

@@ -32,6 +32,8 @@ export const frame = z.object({
   revisions: z.array(revision),
   /** True when the draft differs from the newest revision. */
   draftChanged: z.boolean(),
+  /** The drawing that it was traced from. */
+  tracing: z.object({ id: z.string(), fileName: z.string() }).nullable(),
 });
 export type Frame = z.infer<typeof frame>;
 

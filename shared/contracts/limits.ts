@@ -9,6 +9,13 @@ export const LIMITS = {
   openings: 100,
   dados: 100,
   tracedVertices: 20_000,
+  /** Of a drawing from elsewhere (DXF Reference: names up to 255 characters). */
+  layerName: 255,
+  layersLeftOut: 1_000,
+  tracedLoops: 20_000,
+  tracedFrames: 100,
+  /** Bytes of one uploaded drawing. */
+  drawingBytes: 32 * 1024 * 1024,
   /** Bytes of one uploaded frame file. */
   frameFileBytes: 2 * 1024 * 1024,
   frameFilesAtOnce: 50,

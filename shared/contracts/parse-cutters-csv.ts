@@ -1,6 +1,7 @@
+import type { CellProblem } from '../kernel/csv/cell-problem.ts';
 import { NUMBER_COLUMNS } from '../kernel/cutter-drawer/cutter-columns.ts';
 import type { DrawerEntry } from '../kernel/cutter-drawer/drawer-cutter.ts';
-import { readCutterRows, type CellProblem, type CutterRow } from '../kernel/cutter-drawer/read-cutter-rows.ts';
+import { readCutterRows, type CutterRow } from '../kernel/cutter-drawer/read-cutter-rows.ts';
 import { DRAWER_LIMITS, drawerEntry } from './cutters.ts';
 import { fieldErrors } from './field-errors.ts';
 

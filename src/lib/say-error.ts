@@ -14,6 +14,7 @@ const SENTENCES: Record<ClientErrorCode, string | null> = {
   'cautions-not-acknowledged': 'Look at each caution and tick it, then release.',
   'nothing-changed': 'Nothing has changed since the newest revision.',
   'proof-failed': 'The files read back did not agree with the frame, so they are withheld. Please report this.',
+  'drawing-refused': null,
   'too-large': null,
   'too-many-requests': null,
   'cross-site': 'The call came from another site and was refused. Reload the page.',

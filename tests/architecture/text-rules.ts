@@ -68,9 +68,9 @@ export const TEXT_RULES: readonly TextRule[] = [
     breaker: { path: 'src/ui/field.tsx', text: join("const ink = '#22", "282b';") },
   },
   {
-    name: 'tolerances are named, in one file',
+    name: 'tolerances are named, in one file, or in one of their own folder',
     applies: (path) =>
-      (path.startsWith('shared/kernel/') || path.startsWith('server/')) && path !== 'shared/kernel/tolerances.ts',
+      /^(shared\/kernel|server)\//.test(path) && !/^shared\/kernel\/(.+\/[a-z]+-)?tolerances\.ts$/.test(path),
     find: inCode(/(?<![\w.])\d(\.\d+)?e-\d+/i),
     breaker: { path: 'shared/kernel/contour/a.ts', text: join('const near = distance < 1e', '-6;') },
   },

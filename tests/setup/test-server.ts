@@ -1,6 +1,8 @@
+import { mkdtempSync, rmSync } from 'node:fs';
 import { readFile } from 'node:fs/promises';
 import { createServer } from 'node:http';
 import type { AddressInfo } from 'node:net';
+import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import type { Express } from 'express';
 import { pino } from 'pino';
@@ -8,8 +10,9 @@ import { inject } from 'vitest';
 import { createApp, finishApp } from '../../server/app.ts';
 import type { Database } from '../../server/db/database.ts';
 import { openInMemory } from '../../server/db/open-embedded.ts';
+import { openDiskStore } from '../../server/files/open-disk-store.ts';
 import { DatabaseSessions } from '../../server/http/sessions.store.ts';
-import { startMakers } from '../../server/making/start-makers.ts';
+import { DRAWING_CAPS, startMakers, type Caps } from '../../server/making/start-makers.ts';
 import type { Makers } from '../../server/making/tasks.ts';
 import { wireServices, type Services } from '../../server/services.ts';
 import { HttpClient } from './http-client.ts';
@@ -30,6 +33,7 @@ interface Options {
   readonly signUpsPerHour?: number;
   readonly requestsPerMinute?: number;
   readonly trustProxy?: number;
+  readonly drawingCaps?: Caps;
 }
 
 /** The whole server on a port of its own, on a database that is a copy of the migrated one. Its clock starts on 31 March 2026, 9:00 UTC, and stands. `beside`: on the database of that server. */
@@ -38,12 +42,16 @@ export async function startTestServer(options: Options = {}, beside?: TestServer
   const database =
     beside?.database ??
     (await openInMemory(join(root, 'drizzle'), new Blob([await readFile(inject('migratedDatabase'))])));
-  const makers = startMakers(new URL('../../server/workers/make.ts', import.meta.url), 1);
+  const worker = new URL('../../server/workers/make.ts', import.meta.url);
+  const makers = startMakers(worker, 1);
+  const tracers = startMakers(worker, 1, options.drawingCaps ?? DRAWING_CAPS);
+  const fileFolder = mkdtempSync(join(tmpdir(), 'stilepost-files-'));
   let clock = Date.UTC(2026, 2, 31, 9);
   const now = () => new Date(clock);
   const services = wireServices(database, makers, now);
   const log = pino({ level: 'error' });
-  const config = { trustProxy: 0, signUpsPerHour: 1000, requestsPerMinute: 100_000, ...options };
+  const { drawingCaps: _, ...limits } = options;
+  const config = { trustProxy: 0, signUpsPerHour: 1000, requestsPerMinute: 100_000, ...limits };
   const sessions = new DatabaseSessions(database, now);
   const app = createApp({
     config,
@@ -52,6 +60,8 @@ export async function startTestServer(options: Options = {}, beside?: TestServer
     sessions,
     services,
     makers,
+    tracers,
+    files: openDiskStore(fileFolder),
     now,
     log,
     fromSources: false,
@@ -72,7 +82,8 @@ export async function startTestServer(options: Options = {}, beside?: TestServer
         server.close(() => resolve());
         server.closeAllConnections();
       });
-      await makers.close();
+      await Promise.all([makers.close(), tracers.close()]);
+      rmSync(fileFolder, { recursive: true, force: true });
       if (!beside) await database.close();
     },
   };

@@ -1,11 +1,14 @@
 import { Router } from 'express';
+import { frameTableRequest, type FrameTableAdded } from '#shared/contracts/frame-table.ts';
 import { draftRequest, frameChange, frameRequest, releaseRequest } from '#shared/contracts/frames.ts';
 import { pathParameter, readBody } from '../../http/read-input.ts';
+import { sendFile } from '../../http/send-file.ts';
 import { allow, signedIn, whoAsks } from '../../http/signed-in.ts';
 import { takeFiles, takenFiles } from '../../http/take-files.ts';
 import type { FramesService } from './frames.service.ts';
 import type { ReleaseService } from './release.service.ts';
 import { takeFrameFiles } from './take-frame-files.ts';
+import { writeJobTable } from './write-job-table.ts';
 
 /** Frames, drafts and revisions. */
 export function framesRoutes(frames: FramesService, releases: ReleaseService): Router {
@@ -18,6 +21,17 @@ export function framesRoutes(frames: FramesService, releases: ReleaseService): R
 
   router.post('/jobs/:jobId/frame-files', allow('edit-frames'), takeFiles('files'), async (req, res) => {
     res.json(await takeFrameFiles(frames, whoAsks(req), pathParameter(req, 'jobId'), takenFiles(req)));
+  });
+
+  router.post('/jobs/:jobId/frame-table', allow('edit-frames'), async (req, res) => {
+    const { frames: all } = readBody(req, frameTableRequest);
+    const added: FrameTableAdded = { frames: await frames.addAll(whoAsks(req), pathParameter(req, 'jobId'), all) };
+    res.status(201).json(added);
+  });
+
+  router.get('/jobs/:jobId/frames.csv', allow('download'), async (req, res) => {
+    const file = await writeJobTable(frames, whoAsks(req).shopId, pathParameter(req, 'jobId'));
+    sendFile(res, file, 'text/csv; charset=utf-8');
   });
 
   router.get('/frames/:frameId', signedIn, async (req, res) => {

@@ -69,12 +69,35 @@ export function framesService({ store, makers, now }: FramesGiven) {
     },
 
     async add(who: SignedIn, jobId: string, particulars: Particulars): Promise<Frame> {
-      if (!(await store.jobExists(who.shopId, jobId))) throw notFound('job');
-      const figures = figuresOf(await workOut(makers, particulars));
-      const id = randomUUID();
-      const draft = { particulars, figures, draftChanged: true, changedAt: now(), changedBy: who.name };
-      await store.add({ id, shopId: who.shopId, jobId }, draft);
-      return this.read(who.shopId, id);
+      const [added] = await this.addAll(who, jobId, [particulars]);
+      return this.read(who.shopId, added!.id);
+    },
+
+    /** Adds all of these frames to a job, or none; `tracingId`: the drawing that they were traced from. */
+    async addAll(
+      who: SignedIn,
+      jobId: string,
+      all: readonly Particulars[],
+      tracingId?: string,
+    ): Promise<{ id: string; name: string }[]> {
+      const { shopId } = who;
+      if (!(await store.jobExists(shopId, jobId))) throw notFound('job');
+      const added = [];
+      for (const particulars of all) {
+        const figures = figuresOf(await workOut(makers, particulars));
+        const draft = { particulars, figures, draftChanged: true, changedAt: now(), changedBy: who.name };
+        const traced = tracingId === undefined ? {} : { tracingId };
+        added.push({ frame: { id: randomUUID(), shopId, jobId, ...traced }, draft });
+      }
+      await store.addAll(added);
+      return added.map(({ frame, draft }) => ({ id: frame.id, name: draft.particulars.name }));
+    },
+
+    /** The drafts of a job in its order, and its name. Throws 'not-found'. */
+    async draftsOfJob(shopId: string, jobId: string): Promise<{ jobName: string; drafts: Particulars[] }> {
+      const found = await store.draftsOfJob(shopId, jobId);
+      if (!found) throw notFound('job');
+      return found;
     },
 
     /** Saves over version `from`. Throws 'stale-draft' when it is no longer the newest; what stands then is not touched. */

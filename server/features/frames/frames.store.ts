@@ -1,10 +1,11 @@
 import { and, desc, eq, lte } from 'drizzle-orm';
 import type { Particulars } from '#shared/kernel/particulars/particulars.ts';
 import type { Database } from '../../db/database.ts';
-import { draftVersions, frames, jobs, revisions, shops } from '../../db/schema.ts';
+import { draftVersions, frames, jobs, revisions, shops, tracings } from '../../db/schema.ts';
 
 export type FramesStore = ReturnType<typeof framesStore>;
-export type FrameRow = typeof frames.$inferSelect & { jobName: string; shopName: string };
+/** `tracedFrom`: name of the drawing that it was traced from. */
+export type FrameRow = typeof frames.$inferSelect & { jobName: string; shopName: string; tracedFrom: string | null };
 export type RevisionRow = typeof revisions.$inferSelect;
 /** A revision without its frozen bytes. */
 export type RevisionLine = Pick<RevisionRow, 'letter' | 'note' | 'author' | 'releasedAt' | 'sha256'>;
@@ -18,6 +19,14 @@ export interface Draft {
   readonly draftChanged: boolean;
   readonly changedAt: Date;
   readonly changedBy: string;
+}
+
+export interface NewFrame {
+  readonly id: string;
+  readonly shopId: string;
+  readonly jobId: string;
+  /** The drawing that it was traced from. */
+  readonly tracingId?: string;
 }
 
 /** Versions of a draft that are kept to compare with. */
@@ -37,20 +46,41 @@ export const framesStore = (database: Database) => ({
 
   async find(shopId: string, frameId: string): Promise<FrameRow | null> {
     const [row] = await database.queries
-      .select({ frame: frames, jobName: jobs.name, shopName: shops.name })
+      .select({ frame: frames, jobName: jobs.name, shopName: shops.name, tracedFrom: tracings.fileName })
       .from(frames)
       .innerJoin(jobs, eq(jobs.id, frames.jobId))
       .innerJoin(shops, eq(shops.id, frames.shopId))
+      .leftJoin(tracings, eq(tracings.id, frames.tracingId))
       .where(own(shopId, frameId));
-    return row ? { ...row.frame, jobName: row.jobName, shopName: row.shopName } : null;
+    if (!row) return null;
+    const { frame, ...named } = row;
+    return { ...frame, ...named };
   },
 
-  add: (frame: { id: string; shopId: string; jobId: string }, draft: Draft): Promise<void> =>
+  /** All of them or none, in this order. */
+  addAll: (added: readonly { frame: NewFrame; draft: Draft }[]): Promise<void> =>
     database.transaction(async (tx) => {
-      const { figures, ...rest } = draft;
-      await tx.insert(frames).values({ ...frame, ...rest, ...figures, version: 1, createdAt: draft.changedAt });
-      await tx.insert(draftVersions).values({ frameId: frame.id, version: 1, particulars: draft.particulars });
+      for (const { frame, draft } of added) {
+        const { figures, ...rest } = draft;
+        await tx.insert(frames).values({ ...frame, ...rest, ...figures, version: 1, createdAt: draft.changedAt });
+        await tx.insert(draftVersions).values({ frameId: frame.id, version: 1, particulars: draft.particulars });
+      }
     }),
+
+  /** The drafts of a job in its order, without those put away, and its name; null when the shop has no such job. */
+  async draftsOfJob(shopId: string, jobId: string): Promise<{ jobName: string; drafts: Particulars[] } | null> {
+    const [job] = await database.queries
+      .select({ name: jobs.name })
+      .from(jobs)
+      .where(and(eq(jobs.shopId, shopId), eq(jobs.id, jobId)));
+    if (!job) return null;
+    const rows = await database.queries
+      .select({ particulars: frames.particulars })
+      .from(frames)
+      .where(and(eq(frames.shopId, shopId), eq(frames.jobId, jobId), eq(frames.removed, false)))
+      .orderBy(frames.ordinal);
+    return { jobName: job.name, drafts: rows.map(({ particulars }) => particulars) };
+  },
 
   /** Saves over version `from` as it stands after revision `letter`. Null when either is no longer so; nothing is saved then. */
   saveDraft: (shopId: string, frameId: string, from: number, letter: string, draft: Draft): Promise<number | null> =>

@@ -13,7 +13,6 @@ export const presentFrame = (row: FrameRow, revisions: readonly RevisionLine[]):
   id: row.id,
   jobId: row.jobId,
   jobName: row.jobName,
-  // The contract's type knows square edges only, and so does everything that is ever saved.
   particulars: row.particulars as Frame['particulars'],
   version: row.version,
   changedAt: row.changedAt.toISOString(),
@@ -21,4 +20,5 @@ export const presentFrame = (row: FrameRow, revisions: readonly RevisionLine[]):
   removed: row.removed,
   revisions: revisions.map(presentRevision),
   draftChanged: row.draftChanged,
+  tracing: row.tracingId === null || row.tracedFrom === null ? null : { id: row.tracingId, fileName: row.tracedFrom },
 });

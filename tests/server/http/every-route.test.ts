@@ -2,6 +2,8 @@ import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { role as roles, type Role } from '../../../shared/contracts/roles.ts';
 import { BUILTIN_PROFILES } from '../../../shared/kernel/profiles/builtin-profiles.ts';
 import { writeFrameFile } from '../../../shared/contracts/write-frame-file.ts';
+import { PLAIN_TRACE } from '../../../shared/kernel/tracing/traced-drawing.ts';
+import { frameDrawing } from '../../builders/drawings.ts';
 import { aFrame } from '../../builders/particulars.ts';
 import {
   addFrame,
@@ -26,6 +28,7 @@ interface Things {
   readonly profileId: string;
   readonly cutterId: string;
   readonly presetId: string;
+  readonly tracingId: string;
 }
 
 interface Row {
@@ -69,6 +72,17 @@ const aFileForm = () => {
   form.append('files', new Blob([writeFrameFile(aFrame())]), 'a.frame.json');
   return form;
 };
+const aDrawing = () => {
+  const form = new FormData();
+  form.append('file', new Blob([frameDrawing()]), 'a.dxf');
+  return form;
+};
+const tracedFrames = () => ({
+  options: PLAIN_TRACE,
+  confirmed: false,
+  roles: ['perimeter', 'opening'],
+  frames: [{ name: 'Traced', asMembers: true }],
+});
 const ofProfile = ({ profileId }: Things) => `?profile=${profileId}`;
 
 // A route that is missing here fails the first test. The spec's table of who may do what stands in shared/contracts/roles.ts;
@@ -101,7 +115,16 @@ const TABLE: Record<string, Row> = {
   'PATCH /api/jobs/:jobId': { who: EDITORS, answers: 200, body: () => ({ name: 'Renamed' }) },
   'POST /api/jobs/:jobId/frames': { who: EDITORS, answers: 201, body: () => ({ particulars: aFrame() }) },
   'POST /api/jobs/:jobId/frame-files': { who: EDITORS, answers: 200, body: aFileForm },
+  'POST /api/jobs/:jobId/frame-table': { who: EDITORS, answers: 201, body: () => ({ frames: [aFrame()] }) },
+  'GET /api/jobs/:jobId/frames.csv': { who: 'signed in', answers: 200 },
   'GET /api/jobs/:jobId/layer-sets.zip': { who: 'signed in', answers: 200, query: ofProfile },
+  'GET /api/jobs/:jobId/tracings': { who: 'signed in', answers: 200 },
+  'POST /api/jobs/:jobId/tracings': { who: EDITORS, answers: 201, body: aDrawing },
+  'GET /api/tracings/:tracingId': { who: 'signed in', answers: 200 },
+  'PATCH /api/tracings/:tracingId': { who: EDITORS, answers: 200, body: () => ({ removed: true }) },
+  'GET /api/tracings/:tracingId/file': { who: 'signed in', answers: 200 },
+  'POST /api/tracings/:tracingId/reading': { who: 'signed in', answers: 200, body: () => ({ options: PLAIN_TRACE }) },
+  'POST /api/tracings/:tracingId/frames': { who: EDITORS, answers: 201, body: tracedFrames },
   'GET /api/frames/:frameId': { who: 'signed in', answers: 200 },
   'PATCH /api/frames/:frameId': { who: EDITORS, answers: 200, body: () => ({ removed: true }) },
   'PUT /api/frames/:frameId/draft': {
@@ -134,7 +157,16 @@ async function things(visitor: HttpClient, released: boolean): Promise<Things> {
   const profile = expectStatus(await visitor.post('/api/profiles', aProfile()), 201).json<{ id: string }>();
   const cutter = expectStatus(await visitor.post('/api/cutters', aCutter()), 201).json<{ id: string }>();
   const preset = expectStatus(await visitor.post('/api/edge-presets', anEdge()), 201).json<{ id: string }>();
-  return { jobId: job.id, frameId: frame.id, profileId: profile.id, cutterId: cutter.id, presetId: preset.id };
+  const drawing = await visitor.send('POST', `/api/jobs/${job.id}/tracings`, { body: aDrawing() });
+  const tracing = expectStatus(drawing, 201).json<{ id: string }>();
+  return {
+    jobId: job.id,
+    frameId: frame.id,
+    profileId: profile.id,
+    cutterId: cutter.id,
+    presetId: preset.id,
+    tracingId: tracing.id,
+  };
 }
 
 const thingsFor = async (route: string): Promise<Things> =>
@@ -148,6 +180,7 @@ const ask = (visitor: HttpClient, route: string, row: Row, named: Things, querie
     .replace(':profileId', named.profileId)
     .replace(':cutterId', named.cutterId)
     .replace(':presetId', named.presetId)
+    .replace(':tracingId', named.tracingId)
     .replace(':letter', 'A');
   return visitor.send(method, `${path}${row.query?.(queried) ?? ''}`, { body: row.body?.(named) });
 };

@@ -1,13 +1,13 @@
 import { afterEach, describe, expect, it } from 'vitest';
-import { startMakers } from '../../../server/making/start-makers.ts';
+import { startMakers, type Caps } from '../../../server/making/start-makers.ts';
 import type { Makers, Tasks } from '../../../server/making/tasks.ts';
 import { allowSlowMachine } from '../../setup/slow-machine.ts';
 
 allowSlowMachine();
 
 let makers: Makers;
-const start = (size: number, timeCapMs?: number) =>
-  (makers = startMakers(new URL('./faulty-worker.mjs', import.meta.url), size, timeCapMs));
+const start = (size: number, caps?: Caps) =>
+  (makers = startMakers(new URL('./faulty-worker.mjs', import.meta.url), size, caps));
 const act = (what: string, signal?: AbortSignal) =>
   makers.make('summary', { act: what } as unknown as Tasks['summary']['input'], signal) as Promise<unknown>;
 afterEach(() => makers.close());
@@ -23,7 +23,7 @@ describe('The pool of workers', () => {
     expect(new Set(await Promise.all(Array.from({ length: 20 }, () => act('answer')))).size).toBe(2);
   });
 
-  it.each(['break', 'end', 'hoard'])(
+  it.each(['break', 'end'])(
     'When a worker comes to grief (%s), then its task fails and the next ones are done by another',
     async (what) => {
       start(1);
@@ -36,10 +36,24 @@ describe('The pool of workers', () => {
   );
 
   it('When a task never ends, then it is given up after its time, and the next is done', async () => {
-    start(1, 5000);
+    start(1, { timeMs: 5000, memoryMb: 200, remedy: 'Send less.' });
     const hanging = act('hang');
     const next = act('answer');
-    await expect(hanging).rejects.toMatchObject({ code: 'too-large' });
+    await expect(hanging).rejects.toMatchObject({
+      code: 'too-large',
+      userMessage: 'This takes longer than 5 seconds to work out and was given up. Send less.',
+    });
+    expect(await next).toEqual(expect.any(Number));
+  });
+
+  it('When a task wants more memory than it may have, then it is given up by that name, and the next is done', async () => {
+    start(1, { timeMs: 60_000, memoryMb: 100, remedy: 'Send less.' });
+    const hoarding = act('hoard');
+    const next = act('answer');
+    await expect(hoarding).rejects.toMatchObject({
+      code: 'too-large',
+      userMessage: 'This takes more than 100 MB of memory to work out and was given up. Send less.',
+    });
     expect(await next).toEqual(expect.any(Number));
   });
 

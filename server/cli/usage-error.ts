@@ -1,0 +1,2 @@
+/** The command line cannot be understood. */
+export class UsageError extends Error {}
