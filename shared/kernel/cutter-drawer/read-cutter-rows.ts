@@ -1,15 +1,9 @@
 import { CUTTER_HEADINGS, NEEDED_HEADINGS, NUMBER_COLUMNS, type NumberColumn } from './cutter-columns.ts';
-import { readPlainNumber } from './plain-number.ts';
-import { readCsv, type CsvRow } from './read-csv.ts';
-import { unguardFormula } from './write-csv-line.ts';
-
-/** A cell that is wrong: its line in the file, from 1, and the heading of its column. */
-export interface CellProblem {
-  readonly line: number;
-  readonly column: string;
-  readonly got: string;
-  readonly takes: string;
-}
+import { sayCell, type CellProblem } from '../csv/cell-problem.ts';
+import { checkHeadings } from '../csv/check-headings.ts';
+import { readPlainNumber } from '../csv/plain-number.ts';
+import { readCsv, type CsvRow } from '../csv/read-csv.ts';
+import { unguardFormula } from '../csv/write-csv-line.ts';
 
 /** A row as its cells say, not yet held against what a cutter takes. */
 export interface CutterRow {
@@ -28,25 +22,10 @@ export interface CutterRows {
   readonly problems: readonly CellProblem[];
 }
 
-const said = (text: string): string =>
-  text === '' ? 'nothing' : JSON.stringify(text.length > 60 ? `${text.slice(0, 57)}…` : text);
-
 function checkHeader({ line, cells }: CsvRow, headings: readonly string[]): CellProblem[] {
   if (headings.length === 1 && cells[0]!.includes(';'))
-    return [{ line, column: 'the header row', got: said(cells[0]!), takes: 'cells parted by commas' }];
-  const strange = headings.filter((heading) => !CUTTER_HEADINGS.includes(heading));
-  const twice = headings.filter((heading, i) => CUTTER_HEADINGS.includes(heading) && headings.indexOf(heading) < i);
-  const missing = NEEDED_HEADINGS.filter((heading) => !headings.includes(heading));
-  return [
-    ...strange.map((heading) => ({
-      line,
-      column: heading === '' ? 'without a heading' : heading,
-      got: 'a column that is not known',
-      takes: CUTTER_HEADINGS.join(', '),
-    })),
-    ...twice.map((heading) => ({ line, column: heading, got: 'this column twice', takes: 'each column once' })),
-    ...missing.map((heading) => ({ line, column: heading, got: 'no such column', takes: 'this column' })),
-  ];
+    return [{ line, column: 'the header row', got: sayCell(cells[0]!), takes: 'cells parted by commas' }];
+  return checkHeadings(line, headings, CUTTER_HEADINGS, NEEDED_HEADINGS);
 }
 
 function readNumber(
@@ -61,14 +40,14 @@ function readNumber(
     problems.push({
       line,
       column: heading,
-      got: said(text),
+      got: sayCell(text),
       takes: `nothing: only a ${kinds.join(' or ')} cutter has it`,
     });
     return {};
   }
   const value = readPlainNumber(text);
   if (value === undefined)
-    problems.push({ line, column: heading, got: said(text), takes: 'a number with a decimal point, such as 9.525' });
+    problems.push({ line, column: heading, got: sayCell(text), takes: 'a number with a decimal point, such as 9.525' });
   return value === undefined ? {} : { [entry]: value };
 }
 
@@ -83,7 +62,7 @@ function readRow({ line, cells }: CsvRow, headings: readonly string[]): CutterRo
       problems.push({
         line,
         column: `number ${headings.length + i + 1}`,
-        got: said(cell),
+        got: sayCell(cell),
         takes: 'no cell beyond the last column',
       });
   });

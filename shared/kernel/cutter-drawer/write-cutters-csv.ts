@@ -1,7 +1,7 @@
 import { CUTTER_HEADINGS, NUMBER_COLUMNS } from './cutter-columns.ts';
 import type { DrawerEntry } from './drawer-cutter.ts';
-import { plainNumber } from './plain-number.ts';
-import { writeCsvLine } from './write-csv-line.ts';
+import { plainNumber } from '../csv/plain-number.ts';
+import { writeCsvLine } from '../csv/write-csv-line.ts';
 
 function cellsOf({ unit, cutter, remarks }: DrawerEntry): string[] {
   const numbers: Readonly<Record<string, unknown>> = { ...cutter };

@@ -40,7 +40,7 @@ function Change({ result, particulars }: { readonly result: ChangedFrame | undef
     );
   }
   if (result.particulars === particulars)
-    return <Lines lines={result.skipped.map((line) => `Stays as it is. ${line}`)} />;
+    return <Lines lines={result.skipped.map((line) => `Stays as it is, ${line}`)} />;
   return <Lines lines={[...result.changed, ...result.skipped]} />;
 }
 

@@ -68,12 +68,9 @@ const COLUMNS: readonly Column<FrameRow>[] = [
     align: 'right',
     sortBy: (row) => row.width * row.height * (row.unit === 'in' ? 25.4 ** 2 : 1),
     cell: (row) => (
-      <>
-        <Length value={row.width} unit={row.unit} /> ×{' '}
-        <span className="whitespace-nowrap">
-          <Length value={row.height} unit={row.unit} /> {row.unit}
-        </span>
-      </>
+      <span className="whitespace-nowrap">
+        <Length value={row.width} unit={row.unit} /> × <Length value={row.height} unit={row.unit} /> {row.unit}
+      </span>
     ),
   },
   {

@@ -3,9 +3,9 @@ import { describe, expect, test } from 'vitest';
 import { drawerEntry } from '#shared/contracts/cutters.ts';
 import { parseCuttersCsv } from '#shared/contracts/parse-cutters-csv.ts';
 import type { DrawerEntry } from '#shared/kernel/cutter-drawer/drawer-cutter.ts';
-import { plainNumber, readPlainNumber } from '#shared/kernel/cutter-drawer/plain-number.ts';
+import { plainNumber, readPlainNumber } from '#shared/kernel/csv/plain-number.ts';
 import { startingCutters } from '#shared/kernel/cutter-drawer/starting-cutters.ts';
-import { guardFormula, unguardFormula } from '#shared/kernel/cutter-drawer/write-csv-line.ts';
+import { guardFormula, unguardFormula } from '#shared/kernel/csv/write-csv-line.ts';
 import { writeCuttersCsv } from '#shared/kernel/cutter-drawer/write-cutters-csv.ts';
 import { arbitraryEntry } from './arbitrary-cutter.ts';
 

@@ -19,6 +19,7 @@ const stored = (id: string, unit: Unit = 'in') => ({
   removed: false,
   revisions: [],
   draftChanged: false,
+  tracing: null,
 });
 
 const savedAnswer = () => json({ version: 99, changedAt: '2026-05-01T09:00:00.000Z', draftChanged: true });
@@ -53,7 +54,7 @@ describe('ChangeMemberDialog', () => {
     serve(['Base']);
     await open(['Base']);
     expect(screen.getByLabelText<HTMLInputElement>('New length').value).toBe('1 3/4');
-    expect(row('Base').textContent).toContain('Stays as it is. left stile: 1 3/4 in already');
+    expect(row('Base').textContent).toContain('Stays as it is, left stile: 1 3/4 in already');
     expect(screen.getByRole<HTMLButtonElement>('button', { name: 'Nothing to save' }).disabled).toBe(true);
   });
 

@@ -19,14 +19,20 @@ export interface ReadCsv {
 
 const excerpt = (text: string): string => JSON.stringify(text.length > 40 ? `${text.slice(0, 39)}…` : text);
 
+/** What parts the cells of a row. Spreadsheets write semicolons where a comma is the decimal point, and tabs when asked to. */
+export type CsvSeparator = ',' | ';' | '\t';
+
+const SEPARATOR_WORDS: Record<CsvSeparator, string> = { ',': 'a comma', ';': 'a semicolon', '\t': 'a tab' };
+
 /**
- * Reads CSV after RFC 4180: cells parted by commas, in double quotes where they hold commas, quotes or line ends. Takes
+ * Reads CSV after RFC 4180: cells parted by `separator`, in double quotes where they hold it, quotes or line ends. Takes
  * any line end, a byte order mark, and a last line without an end; passes over rows without any text. A row with a
  * fault is left out and the fault told. Does not undo the guard against formulas. Never throws.
  */
-export function readCsv(text: string): ReadCsv {
+export function readCsv(text: string, separator: CsvSeparator = ','): ReadCsv {
   const rows: CsvRow[] = [];
   const faults: CsvFault[] = [];
+  const ends = `${separator}\r\n`;
   const input = text.replace(/^\uFEFF/, '');
   let at = 0;
   let line = 1;
@@ -70,14 +76,14 @@ export function readCsv(text: string): ReadCsv {
         line: rowLine,
         column,
         got: `${excerpt(after)} after a closing quote`,
-        takes: 'a comma or the end of the line there; a quote inside a cell is written twice',
+        takes: `${SEPARATOR_WORDS[separator]} or the end of the line there; a quote inside a cell is written twice`,
       });
     return cell;
   }
 
   function bareText(): string {
     const from = at;
-    while (at < input.length && !',\r\n'.includes(input[at]!)) at += 1;
+    while (at < input.length && !ends.includes(input[at]!)) at += 1;
     return input.slice(from, at);
   }
 
@@ -94,7 +100,7 @@ export function readCsv(text: string): ReadCsv {
     const cells: string[] = [];
     for (;;) {
       cells.push(input[at] === '"' ? quotedCell(cells.length + 1, rowLine) : bareCell(cells.length + 1));
-      if (input[at] !== ',') break;
+      if (input[at] !== separator) break;
       at += 1;
     }
     endLine();
