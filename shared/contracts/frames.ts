@@ -72,14 +72,6 @@ export const releaseRefused = z.object({
 });
 export type ReleaseRefused = z.infer<typeof releaseRefused>;
 
-/** `details` of 'proof-failed': the checks of each file, as far as they were made. */
-export const proofRefused = z.object({
-  proof: z.object({
-    ok: z.boolean(),
-    checks: z.array(z.object({ name: z.string(), ok: z.boolean(), got: z.string(), wanted: z.string() })),
-  }),
-});
-
 /** PATCH /api/frames/:frameId: `removed` true to put it away and false to bring it back. Answers a frame. */
 export const frameChange = z.strictObject({ removed: z.boolean() });
 export type FrameChange = z.input<typeof frameChange>;

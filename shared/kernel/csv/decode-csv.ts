@@ -1,11 +1,8 @@
+import { decodeCp1252 } from './decode-cp1252.ts';
+
 export type DecodedCsv =
   | { readonly ok: true; readonly text: string; readonly letters: 'utf-8' | 'windows-1252' }
   | { readonly ok: false; readonly got: string; readonly takes: string };
-
-/** Letters of Windows-1252 at 0x80 to 0x9F (WHATWG Encoding Standard, index windows-1252); the rest are those of Latin-1. */
-const CP1252 =
-  '\u20ac\u0081\u201a\u0192\u201e\u2026\u2020\u2021\u02c6\u2030\u0160\u2039\u0152\u008d\u017d\u008f' +
-  '\u0090\u2018\u2019\u201c\u201d\u2022\u2013\u2014\u02dc\u2122\u0161\u203a\u0153\u009d\u017e\u0178';
 
 /** First bytes of files that are taken for a table by mistake, and what each is. */
 const OTHERS: readonly (readonly [start: readonly number[], what: string])[] = [
@@ -20,12 +17,6 @@ const TAKES = 'a CSV file: save the table as “CSV UTF-8”';
 
 /** Control characters that no text has, line ends and tabs aside. */
 const isControl = (byte: number): boolean => byte < 9 || (byte > 13 && byte < 32);
-
-// Not by TextDecoder: some releases of Node read the letters from 0x80 to 0x9F as Latin-1.
-const decodeCp1252 = (bytes: Uint8Array): string =>
-  Array.from(bytes, (byte) => (byte >= 0x80 && byte <= 0x9f ? CP1252[byte - 0x80]! : String.fromCharCode(byte))).join(
-    '',
-  );
 
 /**
  * The text of a CSV file. Bytes that are no UTF-8 are taken for Windows-1252, as spreadsheets write it, and `letters` says

@@ -1,10 +1,7 @@
+import { decodeCp1252 } from '../../csv/decode-cp1252.ts';
+
 /** How a file's letters are kept: UTF-8, or one of the code pages of older files by their WHATWG name. */
 export type TextEncoding = 'utf-8' | 'windows-1252' | (string & {});
-
-/** Letters of Windows-1252 at 0x80 to 0x9F (WHATWG Encoding Standard, index windows-1252); the rest are those of Latin-1. */
-const CP1252 =
-  '\u20ac\u0081\u201a\u0192\u201e\u2026\u2020\u2021\u02c6\u2030\u0160\u2039\u0152\u008d\u017d\u008f' +
-  '\u0090\u2018\u2019\u201c\u201d\u2022\u2013\u2014\u02dc\u2122\u0161\u203a\u0153\u009d\u017e\u0178';
 
 /** A name may be this long; more is cut off, so that one endless name does not fill the census. */
 const LONGEST_NAME = 255;
@@ -44,8 +41,3 @@ function decodeLetters(bytes: Uint8Array, encoding: TextEncoding): string {
     throw error;
   }
 }
-
-const decodeCp1252 = (bytes: Uint8Array): string =>
-  Array.from(bytes, (byte) => (byte >= 0x80 && byte <= 0x9f ? CP1252[byte - 0x80]! : String.fromCharCode(byte))).join(
-    '',
-  );
