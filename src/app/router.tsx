@@ -32,6 +32,18 @@ export const routes: RouteObject[] = [
                 lazy: async () => ({ Component: (await import('./routes/box.tsx')).BoxRoute }),
               },
               {
+                path: 'jobs/:jobId/table',
+                lazy: async () => ({ Component: (await import('./routes/frame-table.tsx')).FrameTableRoute }),
+              },
+              {
+                path: 'jobs/:jobId/drawings',
+                lazy: async () => ({ Component: (await import('./routes/tracing.tsx')).DrawingsRoute }),
+              },
+              {
+                path: 'drawings/:tracingId',
+                lazy: async () => ({ Component: (await import('./routes/tracing.tsx')).DrawingRoute }),
+              },
+              {
                 path: 'frames/:frameId',
                 lazy: async () => ({ Component: (await import('./routes/frame-page.tsx')).FramePageRoute }),
               },

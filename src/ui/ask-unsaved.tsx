@@ -4,12 +4,14 @@ import { Dialog } from './dialog.tsx';
 interface AskUnsavedProps {
   /** What is not saved. */
   readonly name: string;
+  /** What can be done and what would be lost; left out where staying is for saving. */
+  readonly children?: string;
   readonly onStay: () => void;
   readonly onLeave: () => void;
 }
 
 /** Asks whether what was typed may be lost. Escape and the close button stay. */
-export const AskUnsaved = ({ name, onStay, onLeave }: AskUnsavedProps) => (
+export const AskUnsaved = ({ name, children, onStay, onLeave }: AskUnsavedProps) => (
   <Dialog
     title={`${name} is not saved`}
     onClose={onStay}
@@ -22,6 +24,6 @@ export const AskUnsaved = ({ name, onStay, onLeave }: AskUnsavedProps) => (
       </>
     }
   >
-    <p>Stay and save it, or leave and lose what was typed since.</p>
+    <p>{children ?? 'Stay and save it, or leave and lose what was typed since.'}</p>
   </Dialog>
 );

@@ -18,11 +18,15 @@ export interface FieldProps {
   readonly layout?: 'row' | 'stack';
   /** The label is for screen readers only, where a table's heads say it already. */
   readonly hideLabel?: boolean;
+  /** A row of a size of its own, whatever is in it: what is typed is laid out within and nowhere else. */
+  readonly steady?: boolean;
 }
+
+const ROW = 'flex items-center justify-between gap-3';
 
 /** Label, control, hint and error of one entry. */
 export function Field(props: FieldProps & { readonly children: (wiring: FieldWiring) => ReactNode }) {
-  const { label, error = '', hint, layout = 'stack', hideLabel = false, children } = props;
+  const { label, error = '', hint, layout = 'stack', hideLabel = false, steady = false, children } = props;
   const id = useId();
   const says = [error !== '' && `${id}-error`, hint !== undefined && `${id}-hint`]
     .filter((part) => part !== false)
@@ -30,7 +34,12 @@ export function Field(props: FieldProps & { readonly children: (wiring: FieldWir
   const row = layout === 'row' && !hideLabel;
   return (
     <div className={classNames(layout === 'stack' && !hideLabel && 'mb-3', row && says !== '' && 'mb-1.5')}>
-      <div className={classNames(row && 'flex min-h-7 items-center justify-between gap-3')}>
+      <div
+        className={classNames(
+          row && ROW,
+          row && (steady ? 'h-7 [contain:layout_size_style] pointer-coarse:h-11' : 'min-h-7'),
+        )}
+      >
         <label htmlFor={id} className={hideLabel ? 'sr-only' : classNames('block', !row && 'mb-0.5')}>
           {label}
         </label>

@@ -14,7 +14,7 @@ interface TraceEvent {
 }
 
 /** What Chromium must be asked to trace for paintTimes. */
-export const PAINT_CATEGORIES = ['devtools.timeline', 'disabled-by-default-devtools.timeline', 'benchmark'];
+export const PAINT_CATEGORIES = ['devtools.timeline', 'disabled-by-default-devtools.timeline'];
 
 const isDispatch = (event: TraceEvent, type: string): boolean =>
   event.name === 'EventDispatch' && event.args?.data?.type === type;

@@ -1,4 +1,5 @@
 import type { Page } from '@playwright/test';
+import { frameDrawing } from '../builders/drawings.ts';
 import { expect } from './watched-test.ts';
 import { openDemo } from './steps.ts';
 
@@ -9,6 +10,8 @@ export const SHOP_PAGES = [
   'jobs/:jobId',
   'jobs/:jobId/box',
   'jobs/:jobId/table',
+  'jobs/:jobId/drawings',
+  'drawings/:tracingId',
   'frames/:frameId',
   'frames/:frameId/sheet',
   'cutters',
@@ -33,9 +36,26 @@ export async function demoIds(page: Page): Promise<DemoIds> {
   return { jobId, frameId };
 }
 
+/** Id of a drawing of the job, uploaded when there is none yet: the demo has none. */
+async function drawingOf(page: Page, jobId: string): Promise<string> {
+  const address = new URL(`/api/jobs/${jobId}/tracings`, page.url()).href;
+  const list = (await (await page.request.get(address)).json()) as { tracings: { id: string }[] };
+  const [newest] = list.tracings;
+  if (newest) return newest.id;
+  const file = { name: 'base.dxf', mimeType: 'application/dxf', buffer: Buffer.from(frameDrawing()) };
+  const added = await page.request.post(address, { multipart: { file } });
+  expect(added.status()).toBe(201);
+  return ((await added.json()) as { id: string }).id;
+}
+
 /** Goes to a page and waits until it has what it shows. */
 export async function visit(page: Page, path: string, ids: DemoIds = { jobId: '', frameId: '' }): Promise<void> {
-  const address = path.replace('*', 'no-such-page').replace(':jobId', ids.jobId).replace(':frameId', ids.frameId);
+  const tracingId = path.includes(':tracingId') ? await drawingOf(page, ids.jobId) : '';
+  const address = path
+    .replace('*', 'no-such-page')
+    .replace(':jobId', ids.jobId)
+    .replace(':frameId', ids.frameId)
+    .replace(':tracingId', tracingId);
   await page.goto(`/${address}`);
   await expect(page.getByRole('heading').first()).toBeVisible();
   await page.waitForLoadState('networkidle');

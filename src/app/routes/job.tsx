@@ -12,6 +12,8 @@ import { NewFrame } from '../../features/jobs/new-frame.tsx';
 import { RenameJob } from '../../features/jobs/rename-job.tsx';
 import { useProfiles } from '../../features/profiles/api/list-profiles.ts';
 import { useSignedIn } from '../../features/session/signed-in.tsx';
+import { useTracings } from '../../features/tracing/api/list-tracings.ts';
+import { TracingsList } from '../../features/tracing/tracings-list.tsx';
 import { Button } from '../../ui/button.tsx';
 import { ButtonLink } from '../../ui/button-link.tsx';
 import { Dialog } from '../../ui/dialog.tsx';
@@ -63,6 +65,44 @@ const FromABox = ({ jobId }: { readonly jobId: string }) => (
     From a box
   </ButtonLink>
 );
+
+const FromATable = ({ jobId }: { readonly jobId: string }) => (
+  <ButtonLink kind="quiet" to={`/jobs/${jobId}/table`}>
+    From a table
+  </ButtonLink>
+);
+
+const FromADrawing = ({ jobId }: { readonly jobId: string }) => (
+  <ButtonLink kind="quiet" to={`/jobs/${jobId}/drawings`}>
+    From a drawing
+  </ButtonLink>
+);
+
+/** How many drawings the job's page names; their own page has all. */
+const DRAWINGS_SHOWN = 4;
+
+function Drawings({ jobId, mayEdit }: { readonly jobId: string; readonly mayEdit: boolean }) {
+  const tracings = useTracings(jobId);
+  return (
+    <Section heading="Drawings">
+      {mayEdit && (
+        <>
+          <p className="mb-2 text-12">Frames traced from somebody’s DXF.</p>
+          <ButtonLink to={`/jobs/${jobId}/drawings`}>Add from a drawing</ButtonLink>
+        </>
+      )}
+      <Fetched query={tracings} what="the drawings">
+        {(list) => (
+          <TracingsList
+            tracings={list}
+            mayEdit={mayEdit}
+            most={{ count: DRAWINGS_SHOWN, to: `/jobs/${jobId}/drawings` }}
+          />
+        )}
+      </Fetched>
+    </Section>
+  );
+}
 
 function findingsText(frames: readonly FrameRow[]): string {
   const total = (of: (row: FrameRow) => number) => frames.reduce((sum, row) => sum + of(row), 0);
@@ -139,6 +179,8 @@ export function JobRoute() {
                   <>
                     <NewFrame jobId={jobId} unit={shop.unit} />
                     <FromABox jobId={jobId} />
+                    <FromATable jobId={jobId} />
+                    <FromADrawing jobId={jobId} />
                   </>
                 }
               />
@@ -149,6 +191,13 @@ export function JobRoute() {
                   <ImportFrameFiles jobId={jobId} />
                 </Section>
               )}
+              <Section heading="Table of frames">
+                <p className="mb-2 text-12">
+                  {mayEdit ? 'A whole kitchen from one CSV file, or this job as one.' : 'This job as a CSV file.'}
+                </p>
+                <ButtonLink to={`/jobs/${jobId}/table`}>{mayEdit ? 'Frames from a table' : 'To the table'}</ButtonLink>
+              </Section>
+              <Drawings jobId={jobId} mayEdit={mayEdit} />
               <Section heading="Layer sets of the job">
                 <Fetched query={profiles} what="the file profiles">
                   {(list) => (

@@ -29,6 +29,7 @@ import { SavingCell } from './saving/saving-cell.tsx';
 import { StaleDialog, type TwoDrafts } from './saving/stale-dialog.tsx';
 import { useDraft } from './saving/use-draft.ts';
 import { Spread } from './spread/spread.tsx';
+import { TracedFrom } from './traced-from.tsx';
 import { CornerView } from './views/corner-view.tsx';
 import { SectionView } from './views/section-view.tsx';
 import { ViewBar, type FrameView } from './views/view-bar.tsx';
@@ -194,6 +195,7 @@ export function FramePage({
               <FrameFileButtons />
             </FormBar>
             <div className="relative min-h-0 flex-1 overflow-y-auto px-4 pt-4 contain-content">
+              {frame.tracing && <TracedFrom tracing={frame.tracing} />}
               {mayEdit && <EarlierCopyNotice frame={frame} editor={editor} onConflict={setEarlier} />}
               <DrawerProvider value={drawer}>
                 <SavedEdgesProvider value={savedEdges}>

@@ -1,4 +1,4 @@
-import { screen } from '@testing-library/react';
+import { fireEvent, screen } from '@testing-library/react';
 import { useState } from 'react';
 import { describe, expect, it } from 'vitest';
 import { Button } from '../../../src/ui/button.tsx';
@@ -33,5 +33,24 @@ describe('Dialog', () => {
     await user.click(screen.getByText('Close'));
     expect(screen.queryByRole('dialog')).toBeNull();
     expect(document.activeElement).toBe(screen.getByText('Rename'));
+  });
+
+  it('When Escape is pressed in a dialog that stays, then it asks each time and lies open, whatever the browser would do', () => {
+    const asked: string[] = [];
+    show(
+      <Dialog title="Outer" onClose={() => asked.push('outer')}>
+        <input aria-label="Name" />
+        <Dialog title="Inner" onClose={() => asked.push('inner')}>
+          Words
+        </Dialog>
+      </Dialog>,
+    );
+    // False: the browser is told to leave the key alone, which it would answer by closing.
+    expect(fireEvent.keyDown(screen.getByLabelText('Name'), { key: 'Escape' })).toBe(false);
+    expect(fireEvent.keyDown(screen.getByLabelText('Name'), { key: 'Escape' })).toBe(false);
+    fireEvent.keyDown(screen.getByText('Words'), { key: 'Escape' });
+    expect(fireEvent.keyDown(screen.getByLabelText('Name'), { key: 'Escape', isComposing: true })).toBe(true);
+    expect(asked).toEqual(['outer', 'outer', 'inner']);
+    expect(screen.getByRole<HTMLDialogElement>('dialog', { name: 'Outer' }).open).toBe(true);
   });
 });

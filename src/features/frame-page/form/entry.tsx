@@ -53,7 +53,7 @@ export const Entry = memo(function Entry(props: EntryProps) {
   );
   const isCell = layout === 'cell';
   return (
-    <Field label={label} error={entry.error} layout="row" hideLabel={isCell}>
+    <Field label={label} error={entry.error} layout="row" hideLabel={isCell} steady>
       {(wiring) => (
         <span className={isCell ? 'block' : 'flex min-w-0 shrink-0 items-baseline gap-1'}>
           {isCell && (

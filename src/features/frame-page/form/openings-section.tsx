@@ -5,6 +5,7 @@ import { LightsUp } from './lights-up.tsx';
 import { PartRow } from './part-rows.tsx';
 import { SquareEdgeEntry } from './square-edge-entry.tsx';
 import { tracedPlace } from './square-edge.ts';
+import { TurnIntoMembers } from './turn-into-members.tsx';
 
 /** Openings of a traced outline, to read. */
 function TracedOpenings() {
@@ -35,7 +36,14 @@ export function OpeningsSection() {
   const count = useEditor((s) => s.lines.contours.openings.length);
   return (
     <Section heading="Openings" aside={String(count)}>
-      {traced ? <TracedOpenings /> : <PartRow field="outline.layout" />}
+      {traced ? (
+        <>
+          <TracedOpenings />
+          <TurnIntoMembers />
+        </>
+      ) : (
+        <PartRow field="outline.layout" />
+      )}
     </Section>
   );
 }

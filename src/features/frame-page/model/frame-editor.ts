@@ -3,10 +3,12 @@ import { fieldErrors } from '#shared/contracts/field-errors.ts';
 import { particulars as contract } from '#shared/contracts/particulars.ts';
 import { openingParts } from '#shared/kernel/particulars/layout-parts.ts';
 import type { Particulars } from '#shared/kernel/particulars/particulars.ts';
+import { readField } from '#shared/kernel/particulars/read-field.ts';
 import { setField } from '#shared/kernel/particulars/set-field.ts';
 import { drawFrame, type FrameLines } from '#shared/kernel/draw-frame.ts';
 import type { DrawnFrame } from '#shared/kernel/worked-frame.ts';
 import { describeField } from './describe-field.ts';
+import { entrySchema } from './entry-schema.ts';
 import { closeEntry, record, redo, startHistory, undo, type History } from './history.ts';
 import { createStore, type Store } from './store.ts';
 
@@ -41,18 +43,18 @@ const isDrawable = ({ particulars: { outline }, contours }: DrawnFrame): boolean
   contours.openings.length ===
   (outline.kind === 'members' ? openingParts(outline.layout).length : outline.openings.length);
 
-/**
- * What the contract finds wrong in the first level of the particulars that `path` leads into ('dados' for
- * 'dados.0.depth'): what lies beside it was held against the contract before. '' reads all.
- */
+/** What the contract finds wrong with the entry at `path` and what belongs together with it. '' reads all. */
 function errorsNear(candidate: Particulars, path: string): FieldError[] {
-  const key = path.split('.')[0] as keyof typeof contract.shape | '';
-  const read = key === '' ? contract.safeParse(candidate) : contract.shape[key].safeParse(candidate[key]);
+  const keys = path === '' ? [] : path.split('.');
+  const near = entrySchema(contract, keys, candidate);
+  const prefix = keys.slice(0, near.keys).join('.');
+  const value: unknown = prefix === '' ? candidate : readField(candidate, prefix);
+  const read = near.schema.safeParse(value);
   if (read.success) return [];
-  const errors = fieldErrors(read.error, key === '' ? candidate : candidate[key]);
-  return key === ''
-    ? errors
-    : errors.map((error) => ({ ...error, path: error.path === '' ? key : `${key}.${error.path}` }));
+  return fieldErrors(read.error, value).map((error) => ({
+    ...error,
+    path: [prefix, error.path].filter((part) => part !== '').join('.'),
+  }));
 }
 
 const NOTHING_WRONG: ReadonlyMap<string, string> = new Map();

@@ -3,7 +3,7 @@ import type { Extents, Point } from '#shared/kernel/contour/contour.ts';
 import type { Face } from '#shared/kernel/line-sets/line-set.ts';
 import type { DrawnFrame } from '#shared/kernel/worked-frame.ts';
 import { toPage, type PageSize, type View } from '../model/view.ts';
-import { usePageSize } from '../spread/use-page-size.ts';
+import { usePageSize } from '../../../ui/use-page-size.ts';
 import { placePanel, type Box } from './place-panel.ts';
 
 interface PanelPlace {

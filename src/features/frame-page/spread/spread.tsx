@@ -9,7 +9,7 @@ import { SelectionStatus } from '../on-drawing/selection-status.tsx';
 import { FacePage } from './face-page.tsx';
 import { legendOf, type LegendEntry } from './set-words.ts';
 import { SpreadBar } from './spread-bar.tsx';
-import { usePageSize } from './use-page-size.ts';
+import { usePageSize } from '../../../ui/use-page-size.ts';
 import { useSpreadKeys } from './use-spread-keys.ts';
 
 const legend = (face: Face) => {

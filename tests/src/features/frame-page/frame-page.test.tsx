@@ -25,6 +25,7 @@ const aStoredFrame = (changes: Partial<Frame> = {}): Frame => ({
   removed: false,
   revisions: [],
   draftChanged: true,
+  tracing: null,
   ...changes,
 });
 

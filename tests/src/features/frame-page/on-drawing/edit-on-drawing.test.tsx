@@ -26,6 +26,7 @@ function showFrame(particulars: Particulars = workedExample(), mayEdit = true) {
     removed: false,
     revisions: [],
     draftChanged: true,
+    tracing: null,
   };
   const profiles = BUILTIN_PROFILES.map((stored) => ({ ...stored, builtIn: true }));
   const shown = show(
