@@ -53,6 +53,11 @@ export function toAppError(error: unknown): AppError {
 export const answerError =
   (log: Logger): ErrorRequestHandler =>
   (error, req, res, next) => {
+    // Nobody is there to be answered, and what was given up for that is no fault.
+    if (res.destroyed && !res.writableFinished) {
+      log.info({ method: req.method, url: req.originalUrl }, 'the asker went away');
+      return;
+    }
     const known = toAppError(error);
     const status = statusOf(known.code);
     if (status >= 500) log.error({ err: error, method: req.method, url: req.originalUrl }, known.message);

@@ -30,6 +30,14 @@ const intoStore = (files: FileStore): multer.StorageEngine => ({
   },
 });
 
+/** An error of taking a form, told by the field. What the disk says is no fault of the form. */
+function asFormError(error: Error & { readonly code?: string }, field: string): Error {
+  if (error instanceof AppError) return error;
+  const takes = `one file in the field "${field}", as whole multipart form data`;
+  if (error instanceof multer.MulterError) return wrongField(error.field ?? field, error.message, takes);
+  return error.code === undefined ? wrongField(field, error.message, takes) : error;
+}
+
 /** Takes one drawing from the form field `field` into the store. A form that cannot be read is 'invalid-input'. */
 export function takeDrawing(files: FileStore, field: string): RequestHandler {
   const upload = multer({
@@ -40,10 +48,7 @@ export function takeDrawing(files: FileStore, field: string): RequestHandler {
   const take = upload.single(field);
   return (req, res, next) => {
     take(req, res, (error: unknown) => {
-      // The reader of forms throws plain errors; whatever they say, the form is at fault.
-      const unreadable =
-        error instanceof Error && !(error instanceof multer.MulterError) && !(error instanceof AppError);
-      next(unreadable ? wrongField(field, error.message, 'one file, as whole multipart form data') : error);
+      next(error instanceof Error ? asFormError(error, field) : error);
     });
   };
 }
