@@ -17,7 +17,10 @@ function carries(copy: Cutter, kept: Cutter): boolean {
  * Which cutter of the drawer each cutter of a frame is, told by its numbers: the first that it carries all numbers of,
  * name and place in the changer too unless the frame leaves them out. Roles whose cutter is in no drawer are left out.
  */
-export function refsByNumbers({ cutters, unit }: Particulars, drawer: readonly DrawerCutter[]): CutterRefs {
+export function refsByNumbers(
+  { cutters, unit }: Pick<Particulars, 'cutters' | 'unit'>,
+  drawer: readonly DrawerCutter[],
+): CutterRefs {
   const inUnit = drawer.map((entry) => ({ id: entry.id, cutter: pickCutter(entry, unit) }));
   const refs: Partial<Record<CutterRole, string>> = {};
   for (const [role, copy] of Object.entries(cutters) as [CutterRole, Cutter | undefined][]) {

@@ -20,7 +20,8 @@ export function TakeFromDrawer({ role, heading }: { readonly role: CutterRole; r
   const drawer = useDrawer();
   const unit = useEditor((s) => s.history.present.unit);
   const fitting = useMemo(() => drawer.filter(({ cutter }) => rolesOf(cutter).includes(role)), [drawer, role]);
-  const current = useEditor((s) => refsByNumbers(s.history.present, fitting)[role] ?? '');
+  const cutters = useEditor((s) => s.history.present.cutters);
+  const current = useMemo(() => refsByNumbers({ cutters, unit }, fitting)[role] ?? '', [cutters, unit, fitting, role]);
   if (fitting.length === 0) return null;
   function take(id: string) {
     const kept = fitting.find((entry) => entry.id === id);

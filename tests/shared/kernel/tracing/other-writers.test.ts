@@ -52,7 +52,7 @@ const corners = (x: number, y: number, width: number, height: number): [number, 
   [x, y + height],
   [x, y],
 ];
-const OUTLINES = [corners(0, 0, 600, 700), ...OPENINGS.map((o) => corners(...o))];
+const OUTLINES = [corners(0, 0, 600, 700), ...OPENINGS.map(([x, y, width, height]) => corners(x, y, width, height))];
 
 describe('Drawings that other programs wrote', () => {
   test('When ogr2ogr (GDAL) wrote lines, then the frame is that which was drawn', () => {
