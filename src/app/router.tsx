@@ -52,6 +52,10 @@ export const routes: RouteObject[] = [
                 lazy: async () => ({ Component: (await import('./routes/setup-sheet.tsx')).SetupSheetRoute }),
               },
               {
+                path: 'frames/:frameId/compare',
+                lazy: async () => ({ Component: (await import('./routes/compare.tsx')).CompareRoute }),
+              },
+              {
                 path: 'cutters',
                 lazy: async () => ({ Component: (await import('./routes/cutters.tsx')).CuttersRoute }),
               },

@@ -14,6 +14,7 @@ export const SHOP_PAGES = [
   'drawings/:tracingId',
   'frames/:frameId',
   'frames/:frameId/sheet',
+  'frames/:frameId/compare',
   'cutters',
   'profiles',
   'shop',

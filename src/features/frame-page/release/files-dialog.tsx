@@ -63,6 +63,30 @@ function RevisionFiles({
   );
 }
 
+/** To what differs between the newest revision and the draft, or the revision before it when the draft is the same. */
+function CompareLink({ frame: { id, revisions, draftChanged } }: { readonly frame: Frame }) {
+  const [newest, earlier] = revisions;
+  const pair =
+    newest === undefined
+      ? undefined
+      : draftChanged
+        ? { from: newest.letter, to: 'draft', words: `Compare ${newest.letter} with the draft` }
+        : earlier && {
+            from: earlier.letter,
+            to: newest.letter,
+            words: `Compare ${earlier.letter} with ${newest.letter}`,
+          };
+  if (pair === undefined) return null;
+  const { from, to, words } = pair;
+  return (
+    <p className="mb-5">
+      <ButtonLink to={`/frames/${encodeURIComponent(id)}/compare?${new URLSearchParams({ from, to }).toString()}`}>
+        {words}
+      </ButtonLink>
+    </p>
+  );
+}
+
 /** Files of each revision in a file profile, with the cautions that go with them, and the draft's setup sheet to look at. */
 export function FilesDialog({ frame, profiles, defaultProfileId, released, onClose }: FilesDialogProps) {
   const [chosen, setChosen] = useState(defaultProfileId);
@@ -93,6 +117,7 @@ export function FilesDialog({ frame, profiles, defaultProfileId, released, onClo
               </ul>
             </Section>
           )}
+          <CompareLink frame={frame} />
           <Section heading="Draft" aside="not for cutting" level={3}>
             <div className="flex flex-wrap gap-2">
               <ButtonLink to={`/frames/${encodeURIComponent(frame.id)}/sheet`}>Setup sheet of the draft</ButtonLink>

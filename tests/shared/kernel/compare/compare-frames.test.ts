@@ -169,6 +169,15 @@ describe('compareFrames', () => {
     expect(compare(inMillimetres(base), base).features).toEqual([]);
   });
 
+  it('When a random frame is put into millimetres, then nothing differs but the unit', () => {
+    fc.assert(
+      fc.property(arbitraryFrame, (a) => {
+        const { features: f, settings: s, unitWas } = compare(a, inMillimetres(a));
+        expect([f, s, unitWas]).toEqual([[], [], 'in']);
+      }),
+    );
+  });
+
   it('When the unit and a size change at once, then the difference is told in the newer unit', () => {
     const c = compare(base, inMillimetres(withOutline({ rails: { top: 2.25, bottom: 1.25 } })));
     expect(features(c)).toContain('Top rail: width 44.45 → 57.15 (+12.7), from bottom 730.25 → 717.55 (−12.7)');
@@ -258,6 +267,13 @@ describe('compareFrames of traced outlines', () => {
     expect(features(c)).toEqual([
       'Opening A: width 6 → 5 (−1), area 36 in² → 30 in² (−6 in²), line moved by up to 1 at 8, 2 (2 vertices gone, 2 new)',
     ]);
+  });
+
+  it('When an opening moves clear of its place, then it is the same one by label and size, moved', () => {
+    const from = traced(box(0, 0, 40, 10), [box(2, 2, 6, 6)]);
+    const [said, ...rest] = features(compare(from, traced(box(0, 0, 40, 10), [box(30, 2, 6, 6)])));
+    expect(rest).toEqual([]);
+    expect(said).toMatch(/^Opening A: from left 2 → 30 \(\+28\), line moved by up to 28 at /);
   });
 
   it('When a frame of members is traced, then that is told once and not member by member', () => {
