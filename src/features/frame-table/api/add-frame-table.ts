@@ -15,6 +15,7 @@ export function useAddFrameTable() {
   const client = useQueryClient();
   return useMutation({
     mutationFn: addFrameTable,
-    onSuccess: () => client.invalidateQueries({ queryKey: ['jobs'] }),
+    // Not waited for: the list that is fetched may put away the very button whose page goes on after this.
+    onSuccess: () => void client.invalidateQueries({ queryKey: ['jobs'] }),
   });
 }

@@ -11,6 +11,7 @@ export function useCreateFrames() {
       for (const request of frames) made.push(await createFrame({ jobId, ...request }));
       return made;
     },
-    onSuccess: () => client.invalidateQueries({ queryKey: ['jobs'] }),
+    // Not waited for: the list that is fetched may put away the very button whose page goes on after this.
+    onSuccess: () => void client.invalidateQueries({ queryKey: ['jobs'] }),
   });
 }

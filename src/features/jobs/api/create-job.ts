@@ -6,5 +6,9 @@ export const createJob = (body: JobRequest) => callApi({ method: 'POST', path: '
 
 export function useCreateJob() {
   const client = useQueryClient();
-  return useMutation({ mutationFn: createJob, onSuccess: () => client.invalidateQueries({ queryKey: ['jobs'] }) });
+  return useMutation({
+    mutationFn: createJob,
+    // Not waited for: the list that is fetched may put away the very button whose page goes on after this.
+    onSuccess: () => void client.invalidateQueries({ queryKey: ['jobs'] }),
+  });
 }

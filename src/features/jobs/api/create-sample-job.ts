@@ -16,6 +16,7 @@ export function useCreateSampleJob() {
   const client = useQueryClient();
   return useMutation({
     mutationFn: createSampleJob,
-    onSettled: () => client.invalidateQueries({ queryKey: ['jobs'] }),
+    // Not waited for: the list that is fetched may put away the very button whose page goes on after this.
+    onSettled: () => void client.invalidateQueries({ queryKey: ['jobs'] }),
   });
 }

@@ -18,9 +18,10 @@ export function useUploadDrawing() {
   const client = useQueryClient();
   return useMutation({
     mutationFn: uploadDrawing,
-    onSuccess: async (added) => {
+    onSuccess: (added) => {
       client.setQueryData(tracingQuery(added.id).queryKey, added);
-      await client.invalidateQueries({ queryKey: ['jobs'] });
+      // Not waited for: the page goes on to the drawing.
+      void client.invalidateQueries({ queryKey: ['jobs'] });
     },
   });
 }
