@@ -13,7 +13,14 @@ async function answer({ kind, input }: TaskMessage): Promise<TaskAnswer> {
     const error = thrown instanceof Error ? thrown : new Error(String(thrown));
     const code = 'code' in error && typeof error.code === 'string' ? { code: error.code } : {};
     const proof = 'proof' in error ? { proof: error.proof as Tasks['proof']['result'] } : {};
-    return { ok: false, name: error.name, message: error.message, stack: error.stack ?? error.message, ...code, ...proof };
+    return {
+      ok: false,
+      name: error.name,
+      message: error.message,
+      stack: error.stack ?? error.message,
+      ...code,
+      ...proof,
+    };
   }
 }
 

@@ -8,8 +8,6 @@ const CHARACTER_PX = 6.6;
 const SPARE_PX = 6;
 const LINE_PX = 16;
 
-/** A halo of the board's colour keeps words readable across lines. */
-const HALO = 'stroke-board [paint-order:stroke] [stroke-width:4]';
 const COLOURS: Record<Label['colour'], string> = {
   back: 'fill-back',
   front: 'fill-front',
@@ -44,7 +42,8 @@ export function paintWords(
         x: Math.round(x + label.dx),
         y: Math.round(y + down),
         turned: label.turned || fitsTurned,
-        look: label.onBoard ? `${COLOURS[label.colour]} ${HALO}` : COLOURS[label.colour],
+        look: COLOURS[label.colour],
+        ground: label.onBoard ? length : 0,
       },
     ];
   });

@@ -18,6 +18,8 @@ export interface PaintedWords {
   /** Read from below to above. */
   readonly turned: boolean;
   readonly look: string;
+  /** Pixels of board put beneath the words, as wide as they are, so that lines do not run through them; 0: none. */
+  readonly ground: number;
 }
 
 export interface PaintedPin {

@@ -4,6 +4,8 @@ import { PIN_RADIUS_PX } from './paint-pins.ts';
 const SVG = 'http://www.w3.org/2000/svg';
 /** From the middle of the type down to its baseline. */
 const BASELINE_PX = 4;
+/** Height of the 11 px type with a little above and below. */
+const GROUND_PX = 14;
 
 interface Shown {
   readonly element: SVGElement;
@@ -32,6 +34,7 @@ const place = ({ x, y, turned }: PaintedWords): string =>
 class Piece {
   private readonly outer: Shown;
   private readonly inner: Shown;
+  private ground: Shown | null = null;
 
   constructor(readonly kind: Painted['kind']) {
     this.outer = create(kind === 'path' ? 'path' : kind === 'pin' ? 'circle' : 'g');
@@ -48,6 +51,18 @@ class Piece {
     return this.outer.element;
   }
 
+  private showGround(width: number): void {
+    if (this.ground === null) {
+      this.ground = create('rect');
+      set(this.ground, 'class', 'fill-board');
+      set(this.ground, 'y', String(-GROUND_PX / 2));
+      set(this.ground, 'height', String(GROUND_PX));
+      this.outer.element.prepend(this.ground.element);
+    }
+    set(this.ground, 'x', String(-width / 2));
+    set(this.ground, 'width', String(width));
+  }
+
   show(painted: Painted): void {
     if (painted.kind === 'path') {
       set(this.outer, 'class', painted.look);
@@ -60,6 +75,7 @@ class Piece {
     } else {
       set(this.outer, 'transform', place(painted));
       set(this.inner, 'class', painted.look);
+      if (painted.ground > 0) this.showGround(painted.ground);
       if (this.inner.text !== painted.text) this.inner.element.textContent = this.inner.text = painted.text;
     }
   }
