@@ -68,7 +68,7 @@ const DadoRows = memo(function DadoRows({ index }: { readonly index: number }) {
           <Entry path={`${path}.clearance`} label="Clearance" layout="cell" />
           <Entry path={`${path}.depth`} label="Depth" layout="cell" />
         </div>
-        <div className="grid grid-cols-[1fr_1.25fr_1fr_1.25fr] gap-x-1.5 gap-y-0.5">
+        <div className="grid grid-cols-[1fr_1.5fr_1fr_1.5fr] gap-x-1 gap-y-0.5">
           <Entry path={`${path}.from`} label="From" layout="cell" />
           <Labelled text="ends">
             <SwitchEntry path={`${path}.ends.0`} label="End at from" options={ENDS} asList hideLabel />
