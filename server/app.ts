@@ -15,9 +15,21 @@ import { edgePresetsService } from './features/edge-presets/edge-presets.service
 import { edgePresetsStore } from './features/edge-presets/edge-presets.store.ts';
 import { framesRoutes } from './features/frames/frames.routes.ts';
 import { jobsRoutes } from './features/jobs/jobs.routes.ts';
+import { invitationsService } from './features/people/invitations.service.ts';
+import { invitationsStore } from './features/people/invitations.store.ts';
+import { peopleRoutes } from './features/people/people.routes.ts';
+import { peopleService } from './features/people/people.service.ts';
+import { peopleStore } from './features/people/people.store.ts';
+import { outboxRoutes } from './features/outbox/outbox.routes.ts';
+import { outboxService } from './features/outbox/outbox.service.ts';
+import { outboxStore } from './features/outbox/outbox.store.ts';
 import { profilesRoutes } from './features/profiles/profiles.routes.ts';
 import { profilesService } from './features/profiles/profiles.service.ts';
 import { profilesStore } from './features/profiles/profiles.store.ts';
+import { hashPassword } from './features/session/hash-password.ts';
+import { resetsRoutes } from './features/session/resets.routes.ts';
+import { resetsService } from './features/session/resets.service.ts';
+import { resetsStore } from './features/session/resets.store.ts';
 import { sessionRoutes } from './features/session/session.routes.ts';
 import { SignInBrake } from './features/session/sign-in-brake.ts';
 import { shopRoutes } from './features/shop/shop.routes.ts';
@@ -40,7 +52,10 @@ import type { Services } from './services.ts';
 const MINUTE = 60_000;
 
 export interface AppGiven {
-  readonly config: Pick<Config, 'trustProxy' | 'signUpsPerHour' | 'requestsPerMinute'>;
+  readonly config: Pick<
+    Config,
+    'trustProxy' | 'publicUrl' | 'mail' | 'signUpsPerHour' | 'invitationsPerHour' | 'requestsPerMinute'
+  >;
   readonly sessionSecret: string;
   readonly database: Database;
   readonly sessions: DatabaseSessions;
@@ -69,6 +84,26 @@ function apiRoutes(given: AppGiven): Router {
   api.use(express.json({ limit: LIMITS.jsonBodyBytes }));
   const limitSignUps = limitRequests(config.signUpsPerHour, 60 * MINUTE);
   api.use(sessionRoutes({ people, service: services.session, brake: new SignInBrake(now), limitSignUps }));
+  const resets = {
+    service: resetsService(resetsStore(database), now),
+    askBrake: new SignInBrake(now, 'requests for a link'),
+    linkBrake: new SignInBrake(now),
+    publicUrl: config.publicUrl,
+    log: given.log,
+  };
+  api.use(resetsRoutes(resets));
+  const invitations = { store: invitationsStore(database), hashPassword, now };
+  api.use(
+    peopleRoutes({
+      people: peopleService(peopleStore(database)),
+      invitations: invitationsService(invitations),
+      session: services.session,
+      publicUrl: config.publicUrl,
+      limitInvitations: limitRequests(config.invitationsPerHour, 60 * MINUTE),
+      limitJoins: limitRequests(config.signUpsPerHour, 60 * MINUTE),
+    }),
+  );
+  api.use(outboxRoutes(outboxService(outboxStore(database), config.mail !== undefined)));
   api.use(shopRoutes(shopService(shopStore(database))));
   api.use(profilesRoutes(profilesService(profilesStore(database), now)));
   api.use(cuttersRoutes(cuttersService(cuttersStore(database), now)));

@@ -8,6 +8,8 @@ import { openDatabase } from './db/open-database.ts';
 import type { ServeClient } from './http/serve-client.ts';
 import { DatabaseSessions } from './http/sessions.store.ts';
 import { openDiskStore } from './files/open-disk-store.ts';
+import { openSmtp } from './mail/open-smtp.ts';
+import { startMailer } from './mail/start-mailer.ts';
 import { DRAWING_CAPS, startMakers } from './making/start-makers.ts';
 import { wireServices } from './services.ts';
 import { sessionSecret } from './session-secret.ts';
@@ -72,11 +74,13 @@ export async function startServer(
     await client.serve(app, server);
     finishApp(app, log);
     const url = await listen(server, config);
+    const mailer = startMailer(database, config.mail && openSmtp(config.mail), now, log);
     return {
       url,
       async close() {
         clearInterval(sweep);
         await stopListening(server);
+        await mailer.close();
         await shutDown();
       },
     };

@@ -47,8 +47,55 @@ export const users = pgTable(
     passwordHash: text('password_hash'),
     role: text({ enum: ['owner', 'designer', 'programmer', 'operator'] }).notNull(),
     createdAt: moment('created_at').notNull(),
+    /** Access was taken away: signing in is refused and there are no sessions. */
+    disabled: boolean().notNull().default(false),
+    /** Null until the first time. */
+    lastSignInAt: moment('last_sign_in_at'),
   },
   (t) => [uniqueIndex('users_email').on(t.email), index('users_shop').on(t.shopId)],
+);
+
+/** An open door into a shop, until it is used, revoked or past its time. */
+export const invitations = pgTable(
+  'invitations',
+  {
+    id: text().primaryKey(),
+    shopId: text('shop_id')
+      .notNull()
+      .references(() => shops.id),
+    /** Lower case. */
+    email: text().notNull(),
+    role: text({ enum: ['owner', 'designer', 'programmer', 'operator'] }).notNull(),
+    /** SHA-256 of the mailed token, so that a copy of the table opens no shop. */
+    tokenHash: text('token_hash').notNull(),
+    invitedBy: text('invited_by').notNull(),
+    invitedAt: moment('invited_at').notNull(),
+    expiresAt: moment('expires_at').notNull(),
+    usedAt: moment('used_at'),
+    revokedAt: moment('revoked_at'),
+  },
+  (t) => [
+    uniqueIndex('invitations_token').on(t.tokenHash),
+    // One open invitation an address and shop.
+    uniqueIndex('invitations_open')
+      .on(t.shopId, t.email)
+      .where(sql`${t.usedAt} is null and ${t.revokedAt} is null`),
+  ],
+);
+
+/** Mailed leave to set a new password, once. */
+export const passwordResets = pgTable(
+  'password_resets',
+  {
+    /** SHA-256 of the mailed token. */
+    tokenHash: text('token_hash').primaryKey(),
+    userId: text('user_id')
+      .notNull()
+      .references(() => users.id),
+    expiresAt: moment('expires_at').notNull(),
+    usedAt: moment('used_at'),
+  },
+  (t) => [index('password_resets_user').on(t.userId)],
 );
 
 export const sessions = pgTable(
@@ -224,5 +271,46 @@ export const revisions = pgTable(
   (t) => [
     uniqueIndex('revisions_frame_letter').on(t.frameId, t.letter),
     uniqueIndex('revisions_frame_ordinal').on(t.frameId, t.ordinal),
+  ],
+);
+
+/** Mails that were queued, and what became of each. Their moments are the mailer's, but for `queuedAt`. */
+export const mails = pgTable(
+  'mails',
+  {
+    id: text().primaryKey(),
+    /** What the mail tells of: one mail for one event. */
+    event: text().notNull(),
+    /** Null for a mail of no shop. */
+    shopId: text('shop_id').references(() => shops.id),
+    to: text('to_address').notNull(),
+    subject: text().notNull(),
+    /** Emptied once sent, as `html` is: links in it open doors. */
+    text: text().notNull(),
+    html: text().notNull(),
+    /** 'outbox': there was no mail server, so it waits to be read in the product and is never sent. */
+    state: text({ enum: ['waiting', 'sent', 'failed', 'outbox'] })
+      .notNull()
+      .default('waiting'),
+    /** Not before this moment; null: at once. */
+    dueAt: moment('due_at'),
+    /** The mailer that is sending it, and until when nobody else may. */
+    claim: text(),
+    claimedUntil: moment('claimed_until'),
+    tries: integer().notNull().default(0),
+    firstTriedAt: moment('first_tried_at'),
+    lastError: text('last_error'),
+    /** By the database's clock: the moment of the event's transaction. */
+    queuedAt: moment('queued_at').notNull().defaultNow(),
+    sentAt: moment('sent_at'),
+    /** Order of entry. */
+    ordinal: integer().generatedAlwaysAsIdentity().notNull(),
+  },
+  (t) => [
+    uniqueIndex('mails_event').on(t.event),
+    index('mails_shop').on(t.shopId, t.ordinal),
+    index('mails_waiting')
+      .on(t.ordinal)
+      .where(sql`${t.state} = 'waiting'`),
   ],
 );

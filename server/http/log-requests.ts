@@ -1,6 +1,9 @@
 import type { RequestHandler } from 'express';
 import type { Logger } from 'pino';
 
+/** Mailed links open doors: what follows these stays out of the log. */
+const SECRET = /(\/(?:join|reset-password)\/)[^/?]+/;
+
 /** A line for each answered request, at level info. Headers are left out: they hold cookies. */
 export const logRequests =
   (log: Logger): RequestHandler =>
@@ -9,7 +12,13 @@ export const logRequests =
     res.once('close', () => {
       const ms = Math.round(performance.now() - began);
       log.info(
-        { method: req.method, url: req.originalUrl, status: res.statusCode, complete: res.writableFinished, ms },
+        {
+          method: req.method,
+          url: req.originalUrl.replace(SECRET, '$1…'),
+          status: res.statusCode,
+          complete: res.writableFinished,
+          ms,
+        },
         'request',
       );
     });

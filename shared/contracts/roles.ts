@@ -4,10 +4,12 @@ export const role = z.enum(['owner', 'designer', 'programmer', 'operator']);
 export type Role = z.infer<typeof role>;
 
 /** What a person may do. */
-export type Act = 'manage-shop' | 'edit-frames' | 'release' | 'edit-profiles' | 'edit-cutters' | 'download';
+export type Act =
+  'manage-shop' | 'manage-people' | 'edit-frames' | 'release' | 'edit-profiles' | 'edit-cutters' | 'download';
 
 const MAY: Record<Act, readonly Role[]> = {
   'manage-shop': ['owner'],
+  'manage-people': ['owner'],
   'edit-frames': ['owner', 'designer'],
   release: ['owner', 'designer'],
   'edit-profiles': ['owner', 'programmer'],

@@ -10,8 +10,8 @@ export const email = z
   .max(LIMITS.emailLength)
   .pipe(z.email({ error: 'takes an e-mail address, such as name@example.com' }));
 
-const password = z.string().min(LIMITS.passwordShortest).max(LIMITS.passwordLongest);
-const name = words(LIMITS.nameLength);
+export const password = z.string().min(LIMITS.passwordShortest).max(LIMITS.passwordLongest);
+export const name = words(LIMITS.nameLength);
 
 /** POST /api/sign-up: opens a shop, with the person as its owner, and signs in. Answers a session. */
 export const signUpRequest = z.strictObject({
@@ -30,6 +30,14 @@ export type SignInRequest = z.input<typeof signInRequest>;
 /** POST /api/demo-sign-in: into the demo shop, where there is one. Answers a session. */
 export const demoSignInRequest = z.strictObject({ role: role.default('owner') });
 export type DemoSignInRequest = z.input<typeof demoSignInRequest>;
+
+/** POST /api/forgot-password: mails a link to whoever has this address. Answers 204 whether anybody has it or not. */
+export const forgotPasswordRequest = z.strictObject({ email });
+export type ForgotPasswordRequest = z.input<typeof forgotPasswordRequest>;
+
+/** POST /api/reset-password: by the mailed link, once. Ends every session of the person. Answers 204, or 404 for a link that is unknown, used or past its time. */
+export const resetPasswordRequest = z.strictObject({ token: z.string().max(200), password });
+export type ResetPasswordRequest = z.input<typeof resetPasswordRequest>;
 
 /** POST /api/sign-out ends this session, POST /api/sign-out-everywhere every session of the person. Both take nothing and answer 204. */
 

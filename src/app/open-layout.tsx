@@ -1,7 +1,7 @@
 import { Link, Outlet, useLocation } from 'react-router';
 import { useSession } from '../features/session/api/get-session.ts';
 import { SheetChromeProvider } from '../ui/sheet-chrome.tsx';
-import { NAV } from './nav.ts';
+import { navOf } from './nav.ts';
 
 /** Pages that are open to everybody. Whoever is signed in keeps the way to the others. */
 export function OpenLayout() {
@@ -17,7 +17,9 @@ export function OpenLayout() {
     </Link>
   );
   return (
-    <SheetChromeProvider value={{ nav: data?.user ? NAV : [], account, shopName: data?.shop?.name ?? '' }}>
+    <SheetChromeProvider
+      value={{ nav: data?.user ? navOf(data.user.role) : [], account, shopName: data?.shop?.name ?? '' }}
+    >
       <Outlet />
     </SheetChromeProvider>
   );

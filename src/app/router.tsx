@@ -16,6 +16,15 @@ export const routes: RouteObject[] = [
         children: [
           { path: 'sign-in', lazy: async () => ({ Component: (await import('./routes/sign-in.tsx')).SignInRoute }) },
           { path: 'sign-up', lazy: async () => ({ Component: (await import('./routes/sign-up.tsx')).SignUpRoute }) },
+          { path: 'join/:token', lazy: async () => ({ Component: (await import('./routes/join.tsx')).JoinRoute }) },
+          {
+            path: 'forgot-password',
+            lazy: async () => ({ Component: (await import('./routes/forgot-password.tsx')).ForgotPasswordRoute }),
+          },
+          {
+            path: 'reset-password/:token',
+            lazy: async () => ({ Component: (await import('./routes/reset-password.tsx')).ResetPasswordRoute }),
+          },
           { path: '*', lazy: async () => ({ Component: (await import('./routes/not-found.tsx')).NotFoundRoute }) },
         ],
       },
@@ -63,6 +72,11 @@ export const routes: RouteObject[] = [
                 path: 'profiles',
                 lazy: async () => ({ Component: (await import('./routes/profiles.tsx')).ProfilesRoute }),
               },
+              {
+                path: 'outbox',
+                lazy: async () => ({ Component: (await import('./routes/outbox.tsx')).OutboxRoute }),
+              },
+              { path: 'people', lazy: async () => ({ Component: (await import('./routes/people.tsx')).PeopleRoute }) },
               { path: 'shop', lazy: async () => ({ Component: (await import('./routes/shop.tsx')).ShopRoute }) },
             ],
           },

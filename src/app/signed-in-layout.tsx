@@ -7,7 +7,7 @@ import { SignedInProvider, type SignedIn } from '../features/session/signed-in.t
 import { Fetched } from '../ui/fetched.tsx';
 import { Sheet } from '../ui/sheet.tsx';
 import { SheetChromeProvider } from '../ui/sheet-chrome.tsx';
-import { NAV } from './nav.ts';
+import { navOf } from './nav.ts';
 
 /** Pages of a shop. Without a session it leads to the sign-in page; when a session ends under an open page, the page stays. */
 export function SignedInLayout() {
@@ -36,7 +36,11 @@ export function SignedInLayout() {
   return (
     <SignedInProvider value={signedIn}>
       <SheetChromeProvider
-        value={{ nav: NAV, account: <Account user={signedIn.user} />, shopName: signedIn.shop.name }}
+        value={{
+          nav: navOf(signedIn.user.role),
+          account: <Account user={signedIn.user} />,
+          shopName: signedIn.shop.name,
+        }}
       >
         {/* Another person's page must not keep the state of the one before. */}
         <Outlet key={signedIn.user.id} />

@@ -44,7 +44,7 @@ export async function openShop(
   return { visitor, session: expectStatus(answer, 201).json<SignedInVisitor['session']>() };
 }
 
-/** One more person of a shop, signed in. There is no route for invitations yet, so the row is written directly. */
+/** One more person of a shop, signed in. The row is written directly: joining by an invitation is a test of its own. */
 export async function addPerson(
   server: TestServer,
   shopId: string,

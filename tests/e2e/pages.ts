@@ -4,7 +4,7 @@ import { expect } from './watched-test.ts';
 import { openDemo } from './steps.ts';
 
 /** Every page by its path in src/app/router.tsx; tests/architecture/pages.test.ts sees to it that none is left out. */
-export const OPEN_PAGES = ['sign-in', 'sign-up', '*'];
+export const OPEN_PAGES = ['sign-in', 'sign-up', 'join/:token', 'forgot-password', 'reset-password/:token', '*'];
 export const SHOP_PAGES = [
   'jobs',
   'jobs/:jobId',
@@ -17,7 +17,9 @@ export const SHOP_PAGES = [
   'frames/:frameId/compare',
   'cutters',
   'profiles',
+  'outbox',
   'shop',
+  'people',
 ];
 
 /** Ids of the demo's job and of its first frame. */
@@ -49,6 +51,20 @@ async function drawingOf(page: Page, jobId: string): Promise<string> {
   return ((await added.json()) as { id: string }).id;
 }
 
+/** Token of an invitation into the demo shop, out of its outbox; the page's own visitor stays who they are. */
+async function invitationToken(page: Page): Promise<string> {
+  const owner = await page.context().browser()!.newContext({ baseURL: process.env['PRODUCT_URL'] });
+  const { request } = owner;
+  await request.post('/api/demo-sign-in', { data: { role: 'owner' } });
+  // The same address each time: a new invitation takes the place of the last.
+  const invited = await request.post('/api/invitations', { data: { email: 'visitor@example.com', role: 'designer' } });
+  expect(invited.status()).toBe(201);
+  const { mails } = (await (await request.get('/api/outbox')).json()) as { mails: { id: string }[] };
+  const { text } = (await (await request.get(`/api/outbox/${mails[0]!.id}`)).json()) as { text: string };
+  await owner.close();
+  return /\/join\/(\S+)/.exec(text)![1]!;
+}
+
 /** Goes to a page and waits until it has what it shows. */
 export async function visit(page: Page, path: string, ids: DemoIds = { jobId: '', frameId: '' }): Promise<void> {
   const tracingId = path.includes(':tracingId') ? await drawingOf(page, ids.jobId) : '';
@@ -56,7 +72,8 @@ export async function visit(page: Page, path: string, ids: DemoIds = { jobId: ''
     .replace('*', 'no-such-page')
     .replace(':jobId', ids.jobId)
     .replace(':frameId', ids.frameId)
-    .replace(':tracingId', tracingId);
+    .replace(':tracingId', tracingId)
+    .replace(':token', path.startsWith('join/') ? await invitationToken(page) : 'a-token');
   await page.goto(`/${address}`);
   await expect(page.getByRole('heading').first()).toBeVisible();
   await page.waitForLoadState('networkidle');

@@ -132,6 +132,16 @@ export const DEMO_VIEWS: readonly ShopView[] = [
       await expect(page.getByRole('application')).toHaveAccessibleDescription(/Seen from the front/);
     },
   },
+  {
+    name: 'somebody about to be invited',
+    open: async (page) => {
+      await visit(page, 'people');
+      await page.getByRole('button', { name: 'Invite somebody', exact: true }).click();
+      await page.getByRole('dialog').getByLabel('E-mail').fill('nobody');
+      await page.getByRole('button', { name: 'Send the invitation' }).click();
+      await expect(page.getByText(/takes an e-mail address/)).toBeVisible();
+    },
+  },
 ];
 
 /** Opens a shop of one's own with nothing in its drawer and one job without frames. */
@@ -153,6 +163,13 @@ export async function openEmptyShop(page: Page): Promise<DemoIds> {
 
 /** For the owner of such a shop. */
 export const EMPTY_VIEWS: readonly ShopView[] = [
+  {
+    name: 'a shop with nobody invited',
+    open: async (page) => {
+      await visit(page, 'people');
+      await expect(page.getByText('Nobody is invited')).toBeVisible();
+    },
+  },
   {
     name: 'an empty drawer',
     open: async (page) => {

@@ -33,6 +33,9 @@ interface Options {
   readonly signUpsPerHour?: number;
   readonly requestsPerMinute?: number;
   readonly trustProxy?: number;
+  readonly publicUrl?: string;
+  readonly invitationsPerHour?: number;
+  readonly mail?: { url: string; from: string };
   readonly drawingCaps?: Caps;
 }
 
@@ -51,7 +54,15 @@ export async function startTestServer(options: Options = {}, beside?: TestServer
   const services = wireServices(database, makers, now);
   const log = pino({ level: 'error' });
   const { drawingCaps: _, ...limits } = options;
-  const config = { trustProxy: 0, signUpsPerHour: 1000, requestsPerMinute: 100_000, ...limits };
+  const config = {
+    trustProxy: 0,
+    publicUrl: undefined,
+    mail: undefined,
+    signUpsPerHour: 1000,
+    invitationsPerHour: 1000,
+    requestsPerMinute: 100_000,
+    ...limits,
+  };
   const sessions = new DatabaseSessions(database, now);
   const app = createApp({
     config,

@@ -2,6 +2,7 @@ import { Router, type Request, type RequestHandler, type Response } from 'expres
 import { Strategy } from 'passport-local';
 import { demoSignInRequest, signInRequest, signUpRequest } from '#shared/contracts/session.ts';
 import { AppError } from '../../errors.ts';
+import { beginSession } from '../../http/begin-session.ts';
 import { readBody } from '../../http/read-input.ts';
 import { signedIn, whoAsks, type SignedIn } from '../../http/signed-in.ts';
 import { SESSION_COOKIE, type People } from '../../http/use-sessions.ts';
@@ -14,10 +15,6 @@ interface Given {
   readonly brake: SignInBrake;
   readonly limitSignUps: RequestHandler;
 }
-
-/** A new session for this person; the old id is of no use afterwards. */
-const begin = (req: Request, who: SignedIn): Promise<void> =>
-  new Promise((resolve, reject) => req.login(who, (error: unknown) => (error ? reject(error as Error) : resolve())));
 
 const end = (req: Request, res: Response): Promise<void> =>
   new Promise((resolve, reject) =>
@@ -44,6 +41,11 @@ export function sessionRoutes({ people, service, brake, limitSignUps }: Given): 
         error ? reject(error as Error) : resolve(who || false);
       (people.authenticate('local', decide) as RequestHandler)(req, res, reject);
     });
+
+  const begin = async (req: Request, who: SignedIn): Promise<void> => {
+    await beginSession(req, who);
+    await service.noteSignIn(who);
+  };
 
   const router = Router();
 

@@ -84,5 +84,7 @@ export const sessionService = (store: SessionStore, now: () => Date) => ({
     };
   },
 
+  noteSignIn: (who: SignedIn): Promise<void> => store.noteSignIn(who.id, now()),
+
   endAllSessions: (who: SignedIn): Promise<void> => store.endSessionsOf(who.id),
 });

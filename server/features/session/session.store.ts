@@ -1,4 +1,4 @@
-import { and, eq } from 'drizzle-orm';
+import { and, eq, isNull } from 'drizzle-orm';
 import type { Shop } from '#shared/contracts/session.ts';
 import type { Role } from '#shared/contracts/roles.ts';
 import type { DrawerCutter } from '#shared/kernel/cutter-drawer/drawer-cutter.ts';
@@ -22,16 +22,21 @@ export type SessionStore = ReturnType<typeof sessionStore>;
 
 /** People, their shops and their sessions. */
 export const sessionStore = (database: Database) => ({
+  /** Null too for people whose access was taken away. */
   async findPerson(id: string): Promise<SignedIn | null> {
-    const [row] = await database.queries.select(person).from(users).where(eq(users.id, id));
+    const [row] = await database.queries
+      .select(person)
+      .from(users)
+      .where(and(eq(users.id, id), eq(users.disabled, false)));
     return row ?? null;
   },
 
+  /** Null too for people whose access was taken away. */
   async findByEmail(email: string): Promise<{ person: SignedIn; passwordHash: string | null } | null> {
     const [row] = await database.queries
       .select({ person, passwordHash: users.passwordHash })
       .from(users)
-      .where(eq(users.email, email));
+      .where(and(eq(users.email, email), eq(users.disabled, false)));
     return row ?? null;
   },
 
@@ -41,7 +46,8 @@ export const sessionStore = (database: Database) => ({
       .select(person)
       .from(users)
       .innerJoin(shops, eq(shops.id, users.shopId))
-      .where(and(eq(shops.demo, true), eq(users.role, role)));
+      // Whoever was invited into the demo shop has a password, and nobody else enters as them.
+      .where(and(eq(shops.demo, true), eq(users.role, role), isNull(users.passwordHash)));
     return row ?? null;
   },
 
@@ -73,6 +79,10 @@ export const sessionStore = (database: Database) => ({
       const { id: shopId, createdAt: changedAt } = shop;
       await tx.insert(cutters).values(drawer.map((c) => ({ ...c, name: c.cutter.name, shopId, changedAt })));
     });
+  },
+
+  async noteSignIn(userId: string, at: Date): Promise<void> {
+    await database.queries.update(users).set({ lastSignInAt: at }).where(eq(users.id, userId));
   },
 
   async endSessionsOf(userId: string): Promise<void> {

@@ -18,10 +18,13 @@ interface Tries {
  */
 export class SignInBrake {
   readonly #now: () => Date;
+  readonly #what: string;
   readonly #tries = new Map<string, Tries>();
 
-  constructor(now: () => Date) {
+  /** `what`: what is counted, as the person reads it. */
+  constructor(now: () => Date, what = 'wrong tries') {
     this.#now = now;
+    this.#what = what;
   }
 
   /** Counts a try. Throws 'too-many-requests' with the seconds to wait; the same whether or not the account exists. */
@@ -39,7 +42,7 @@ export class SignInBrake {
       if (wait > 0) {
         const seconds = Math.ceil(wait / 1000);
         throw new AppError('too-many-requests', `sign-in held back: ${key}`, {
-          message: `Too many wrong tries. Wait ${seconds} ${seconds === 1 ? 'second' : 'seconds'} and try again.`,
+          message: `Too many ${this.#what}. Wait ${seconds} ${seconds === 1 ? 'second' : 'seconds'} and try again.`,
           retryAfter: seconds,
         });
       }

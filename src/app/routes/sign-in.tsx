@@ -34,6 +34,11 @@ export function SignInRoute() {
             <Section heading="Your account">
               <SignInForm />
               <p className="mt-4">
+                <Link to="/forgot-password" className="underline underline-offset-4">
+                  Forgot the password
+                </Link>
+              </p>
+              <p className="mt-2">
                 No account yet?{' '}
                 <Link to="/sign-up" className="underline underline-offset-4">
                   Open a shop

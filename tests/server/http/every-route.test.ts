@@ -4,11 +4,13 @@ import { BUILTIN_PROFILES } from '../../../shared/kernel/profiles/builtin-profil
 import { writeFrameFile } from '../../../shared/contracts/write-frame-file.ts';
 import { PLAIN_TRACE } from '../../../shared/kernel/tracing/traced-drawing.ts';
 import { frameDrawing } from '../../builders/drawings.ts';
+import { addMail } from '../../builders/mails.ts';
 import { aFrame } from '../../builders/particulars.ts';
 import {
   addFrame,
   addJob,
   addPerson,
+  anAddress,
   expectStatus,
   openShop,
   releaseFrame,
@@ -29,6 +31,9 @@ interface Things {
   readonly cutterId: string;
   readonly presetId: string;
   readonly tracingId: string;
+  readonly personId: string;
+  readonly invitationId: string;
+  readonly mailId: string;
 }
 
 interface Row {
@@ -58,6 +63,7 @@ const anEdge = () => ({
   edge: { style: 'square', sizeHeldAt: 'face' },
   cutters: {},
 });
+const anInvitation = () => ({ email: anAddress(), role: 'designer' });
 const aCutterFile = () => {
   const form = new FormData();
   form.append(
@@ -95,7 +101,18 @@ const TABLE: Record<string, Row> = {
   'POST /api/demo-sign-in': { who: 'anybody', answers: 404, nobodys: true, body: () => ({}) },
   'POST /api/sign-out': { who: 'anybody', answers: 204, nobodys: true },
   'POST /api/sign-out-everywhere': { who: 'signed in', answers: 204, nobodys: true },
+  'POST /api/forgot-password': { who: 'anybody', answers: 400, nobodys: true, body: () => ({}) },
+  'POST /api/reset-password': { who: 'anybody', answers: 400, nobodys: true, body: () => ({}) },
+  'GET /api/people': { who: ['owner'], answers: 200, nobodys: true },
+  'PATCH /api/people/:personId': { who: ['owner'], answers: 204, body: () => ({ role: 'programmer' }) },
+  'POST /api/invitations': { who: ['owner'], answers: 201, nobodys: true, body: anInvitation },
+  'POST /api/invitations/:invitationId/resend': { who: ['owner'], answers: 200 },
+  'DELETE /api/invitations/:invitationId': { who: ['owner'], answers: 204 },
+  'GET /api/join/:token': { who: 'anybody', answers: 404, nobodys: true },
+  'POST /api/join': { who: 'anybody', answers: 400, nobodys: true, body: () => ({}) },
   'PATCH /api/shop': { who: ['owner'], answers: 200, body: ({ profileId }) => ({ defaultProfileId: profileId }) },
+  'GET /api/outbox': { who: ['owner'], answers: 200, nobodys: true },
+  'GET /api/outbox/:mailId': { who: ['owner'], answers: 200 },
   'GET /api/profiles': { who: 'signed in', answers: 200, nobodys: true },
   'POST /api/profiles': { who: PROFILE_EDITORS, answers: 201, nobodys: true, body: aProfile },
   'PUT /api/profiles/:profileId': { who: PROFILE_EDITORS, answers: 200, body: aProfile },
@@ -150,7 +167,7 @@ let theirThings: Things;
 let myThings: Things;
 const people = new Map<Role, HttpClient>();
 
-async function things(visitor: HttpClient, released: boolean): Promise<Things> {
+async function things({ visitor, session }: SignedInVisitor, released: boolean): Promise<Things> {
   const job = await addJob(visitor);
   const frame = await addFrame(visitor, job.id);
   if (released) await releaseFrame(visitor, frame);
@@ -159,6 +176,7 @@ async function things(visitor: HttpClient, released: boolean): Promise<Things> {
   const preset = expectStatus(await visitor.post('/api/edge-presets', anEdge()), 201).json<{ id: string }>();
   const drawing = await visitor.send('POST', `/api/jobs/${job.id}/tracings`, { body: aDrawing() });
   const tracing = expectStatus(drawing, 201).json<{ id: string }>();
+  const invitation = expectStatus(await visitor.post('/api/invitations', anInvitation()), 201).json<{ id: string }>();
   return {
     jobId: job.id,
     frameId: frame.id,
@@ -166,11 +184,13 @@ async function things(visitor: HttpClient, released: boolean): Promise<Things> {
     cutterId: cutter.id,
     presetId: preset.id,
     tracingId: tracing.id,
+    personId: (await addPerson(server, session.shop.id, 'operator')).session.user.id,
+    invitationId: invitation.id,
+    mailId: await addMail(server, session.shop.id),
   };
 }
 
-const thingsFor = async (route: string): Promise<Things> =>
-  route.startsWith('GET') ? myThings : things(mine.visitor, false);
+const thingsFor = async (route: string): Promise<Things> => (route.startsWith('GET') ? myThings : things(mine, false));
 
 const ask = (visitor: HttpClient, route: string, row: Row, named: Things, queried = named) => {
   const [method = '', pattern = ''] = route.split(' ');
@@ -181,6 +201,10 @@ const ask = (visitor: HttpClient, route: string, row: Row, named: Things, querie
     .replace(':cutterId', named.cutterId)
     .replace(':presetId', named.presetId)
     .replace(':tracingId', named.tracingId)
+    .replace(':mailId', named.mailId)
+    .replace(':personId', named.personId)
+    .replace(':invitationId', named.invitationId)
+    .replace(':token', 'no-such-link')
     .replace(':letter', 'A');
   return visitor.send(method, `${path}${row.query?.(queried) ?? ''}`, { body: row.body?.(named) });
 };
@@ -189,8 +213,8 @@ beforeAll(async () => {
   server = await startTestServer();
   mine = await openShop(server, { shopName: 'Mine' });
   theirs = await openShop(server, { shopName: 'Theirs' });
-  theirThings = await things(theirs.visitor, true);
-  myThings = await things(mine.visitor, true);
+  theirThings = await things(theirs, true);
+  myThings = await things(mine, true);
   people.set('owner', mine.visitor);
   for (const role of roles.options)
     if (role !== 'owner') people.set(role, (await addPerson(server, mine.session.shop.id, role)).visitor);
