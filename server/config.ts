@@ -79,10 +79,15 @@ export class WrongConfig extends Error {
   override name = 'WrongConfig';
 }
 
-function mailOf({ SMTP_URL: url, MAIL_FROM: from }: z.output<typeof environment>): Config['mail'] {
+function mailOf({ SMTP_URL: url, MAIL_FROM: from, PUBLIC_URL: home }: z.output<typeof environment>): Config['mail'] {
   if (url === undefined) return undefined;
   if (from === undefined)
     throw new WrongConfig('MAIL_FROM: got nothing, takes an address, or Name <address>, for SMTP_URL is set');
+  // A link in a mail must not lead where a forged Host header says.
+  if (home === undefined)
+    throw new WrongConfig(
+      'PUBLIC_URL: got nothing, takes an address such as https://frames.example.com, for SMTP_URL is set',
+    );
   return { url, from };
 }
 
