@@ -1,14 +1,12 @@
-import { useState, type FormEvent } from 'react';
+import { useState } from 'react';
 import { LIMITS } from '#shared/contracts/limits.ts';
 import { joinRequest } from '#shared/contracts/people.ts';
 import type { Session } from '#shared/contracts/session.ts';
-import { checkForm } from '../../lib/check-form.ts';
-import { fieldMessagesOf, type FieldMessages } from '../../lib/field-messages.ts';
 import { sayError } from '../../lib/say-error.ts';
 import { Button } from '../../ui/button.tsx';
 import { Notice } from '../../ui/notice.tsx';
 import { TextField } from '../../ui/text-field.tsx';
-import { useFocusOnWrong } from '../../ui/use-focus-on-wrong.ts';
+import { useCheckedForm } from '../../ui/use-checked-form.ts';
 import { useJoinShop } from './api/join-shop.ts';
 
 interface JoinFormProps {
@@ -22,17 +20,9 @@ interface JoinFormProps {
 export function JoinForm({ token, email, onJoined }: JoinFormProps) {
   const [name, setName] = useState('');
   const [password, setPassword] = useState('');
-  const [wrong, setWrong] = useState<FieldMessages>({});
-  const form = useFocusOnWrong(wrong);
   const join = useJoinShop(onJoined);
 
-  function submit(event: FormEvent) {
-    event.preventDefault();
-    const checked = checkForm(joinRequest, { token, name, password });
-    setWrong(checked.ok ? {} : checked.fields);
-    if (!checked.ok) return;
-    join.mutate(checked.value, { onError: (error) => setWrong(fieldMessagesOf(error)) });
-  }
+  const { form, wrong, submit } = useCheckedForm(joinRequest, { token, name, password }, join.mutate);
 
   return (
     <form ref={form} onSubmit={submit} noValidate>

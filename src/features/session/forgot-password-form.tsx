@@ -1,28 +1,18 @@
-import { useState, type FormEvent } from 'react';
+import { useState } from 'react';
 import { forgotPasswordRequest } from '#shared/contracts/session.ts';
-import { checkForm } from '../../lib/check-form.ts';
-import { fieldMessagesOf, type FieldMessages } from '../../lib/field-messages.ts';
 import { sayError } from '../../lib/say-error.ts';
 import { Button } from '../../ui/button.tsx';
 import { Notice } from '../../ui/notice.tsx';
 import { TextField } from '../../ui/text-field.tsx';
-import { useFocusOnWrong } from '../../ui/use-focus-on-wrong.ts';
+import { useCheckedForm } from '../../ui/use-checked-form.ts';
 import { useForgotPassword } from './api/forgot-password.ts';
 
 /** Asks for a link to a new password. What it answers does not tell whether the address has an account. */
 export function ForgotPasswordForm() {
   const [email, setEmail] = useState('');
-  const [wrong, setWrong] = useState<FieldMessages>({});
-  const form = useFocusOnWrong(wrong);
   const forgot = useForgotPassword();
 
-  function submit(event: FormEvent) {
-    event.preventDefault();
-    const checked = checkForm(forgotPasswordRequest, { email });
-    setWrong(checked.ok ? {} : checked.fields);
-    if (!checked.ok) return;
-    forgot.mutate(checked.value, { onError: (error) => setWrong(fieldMessagesOf(error)) });
-  }
+  const { form, wrong, submit } = useCheckedForm(forgotPasswordRequest, { email }, forgot.mutate);
 
   return (
     <form ref={form} onSubmit={submit} noValidate>

@@ -1,32 +1,22 @@
-import { useState, type FormEvent } from 'react';
+import { useState } from 'react';
 import { Link } from 'react-router';
 import { LIMITS } from '#shared/contracts/limits.ts';
 import { resetPasswordRequest } from '#shared/contracts/session.ts';
 import { isCode } from '../../lib/api-error.ts';
-import { checkForm } from '../../lib/check-form.ts';
-import { fieldMessagesOf, type FieldMessages } from '../../lib/field-messages.ts';
 import { sayError } from '../../lib/say-error.ts';
 import { Button } from '../../ui/button.tsx';
 import { ButtonLink } from '../../ui/button-link.tsx';
 import { Notice } from '../../ui/notice.tsx';
 import { TextField } from '../../ui/text-field.tsx';
-import { useFocusOnWrong } from '../../ui/use-focus-on-wrong.ts';
+import { useCheckedForm } from '../../ui/use-checked-form.ts';
 import { useResetPassword } from './api/reset-password.ts';
 
 /** A new password, by a mailed link. */
 export function ResetPasswordForm({ token }: { readonly token: string }) {
   const [password, setPassword] = useState('');
-  const [wrong, setWrong] = useState<FieldMessages>({});
-  const form = useFocusOnWrong(wrong);
   const reset = useResetPassword();
 
-  function submit(event: FormEvent) {
-    event.preventDefault();
-    const checked = checkForm(resetPasswordRequest, { token, password });
-    setWrong(checked.ok ? {} : checked.fields);
-    if (!checked.ok) return;
-    reset.mutate(checked.value, { onError: (error) => setWrong(fieldMessagesOf(error)) });
-  }
+  const { form, wrong, submit } = useCheckedForm(resetPasswordRequest, { token, password }, reset.mutate);
 
   if (reset.isSuccess) {
     return (

@@ -1,12 +1,10 @@
-import { useState, type FormEvent } from 'react';
+import { useState } from 'react';
 import { signInRequest } from '#shared/contracts/session.ts';
-import { checkForm } from '../../lib/check-form.ts';
-import { fieldMessagesOf, type FieldMessages } from '../../lib/field-messages.ts';
 import { sayError } from '../../lib/say-error.ts';
 import { Button } from '../../ui/button.tsx';
 import { Notice } from '../../ui/notice.tsx';
 import { TextField } from '../../ui/text-field.tsx';
-import { useFocusOnWrong } from '../../ui/use-focus-on-wrong.ts';
+import { useCheckedForm } from '../../ui/use-checked-form.ts';
 import { useSignIn } from './api/sign-in.ts';
 
 interface SignInFormProps {
@@ -17,17 +15,9 @@ interface SignInFormProps {
 export function SignInForm({ email: knownEmail = '' }: SignInFormProps) {
   const [email, setEmail] = useState(knownEmail);
   const [password, setPassword] = useState('');
-  const [wrong, setWrong] = useState<FieldMessages>({});
-  const form = useFocusOnWrong(wrong);
   const signIn = useSignIn();
 
-  function submit(event: FormEvent) {
-    event.preventDefault();
-    const checked = checkForm(signInRequest, { email, password });
-    setWrong(checked.ok ? {} : checked.fields);
-    if (!checked.ok) return;
-    signIn.mutate(checked.value, { onError: (error) => setWrong(fieldMessagesOf(error)) });
-  }
+  const { form, wrong, submit } = useCheckedForm(signInRequest, { email, password }, signIn.mutate);
 
   return (
     <form ref={form} onSubmit={submit} noValidate>

@@ -1,14 +1,12 @@
-import { useState, type FormEvent } from 'react';
+import { useState } from 'react';
 import { LIMITS } from '#shared/contracts/limits.ts';
 import { signUpRequest, type SignUpRequest } from '#shared/contracts/session.ts';
-import { checkForm } from '../../lib/check-form.ts';
-import { fieldMessagesOf, type FieldMessages } from '../../lib/field-messages.ts';
 import { sayError } from '../../lib/say-error.ts';
 import { Button } from '../../ui/button.tsx';
 import { Choice } from '../../ui/choice.tsx';
 import { Notice } from '../../ui/notice.tsx';
 import { TextField } from '../../ui/text-field.tsx';
-import { useFocusOnWrong } from '../../ui/use-focus-on-wrong.ts';
+import { useCheckedForm } from '../../ui/use-checked-form.ts';
 import { useSignUp } from './api/sign-up.ts';
 
 const BLANK: SignUpRequest = { shopName: '', name: '', email: '', password: '', unit: 'in' };
@@ -16,18 +14,10 @@ const BLANK: SignUpRequest = { shopName: '', name: '', email: '', password: '', 
 /** Opens a shop with its first person, the owner. */
 export function SignUpForm() {
   const [entry, setEntry] = useState(BLANK);
-  const [wrong, setWrong] = useState<FieldMessages>({});
-  const form = useFocusOnWrong(wrong);
   const signUp = useSignUp();
   const set = (key: keyof SignUpRequest) => (value: string) => setEntry((now) => ({ ...now, [key]: value }));
 
-  function submit(event: FormEvent) {
-    event.preventDefault();
-    const checked = checkForm(signUpRequest, entry);
-    setWrong(checked.ok ? {} : checked.fields);
-    if (!checked.ok) return;
-    signUp.mutate(checked.value, { onError: (error) => setWrong(fieldMessagesOf(error)) });
-  }
+  const { form, wrong, submit } = useCheckedForm(signUpRequest, entry, signUp.mutate);
 
   return (
     <form ref={form} onSubmit={submit} noValidate>
