@@ -1,5 +1,5 @@
 import type { DrawingPen } from './drawing-pen.ts';
-import { drawn, faceOf, refused, type Drawn } from './entity-plane.ts';
+import { drawn, refused, type Drawn } from './entity-plane.ts';
 import type { EntityTags } from './entity-tags.ts';
 
 /**
@@ -13,9 +13,6 @@ export function drawArc(tags: EntityTags, pen: DrawingPen, isCircle: boolean): D
   let radius = NaN;
   let from = isCircle ? 0 : NaN;
   let to = isCircle ? 360 : NaN;
-  let nx = 0;
-  let ny = 0;
-  let nz = 1;
   for (let i = 0; i < tags.count; i++)
     switch (tags.codes[i]!) {
       case 10:
@@ -36,20 +33,11 @@ export function drawArc(tags: EntityTags, pen: DrawingPen, isCircle: boolean): D
       case 51:
         if (!isCircle) to = tags.number(i);
         break;
-      case 210:
-        nx = tags.number(i);
-        break;
-      case 220:
-        ny = tags.number(i);
-        break;
-      case 230:
-        nz = tags.number(i);
-        break;
     }
   tags.need(x, y, radius, from, to);
+  const face = tags.facing();
   if (tags.fault !== null) return refused(tags.fault.reason);
   if (!(radius > 0)) return refused('bad-size');
-  const face = faceOf(nx, ny, nz);
   if (face === 'tilted') return refused('tilted');
   if (face === 'down') pen.turnOver();
   pen.arc(x, y, radius, from, to);

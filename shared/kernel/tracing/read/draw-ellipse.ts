@@ -1,5 +1,5 @@
 import type { DrawingPen } from './drawing-pen.ts';
-import { drawn, faceOf, refused, type Drawn } from './entity-plane.ts';
+import { drawn, refused, type Drawn } from './entity-plane.ts';
 import type { EntityTags } from './entity-tags.ts';
 import { FLAT, WHOLE_TURN } from './read-tolerances.ts';
 
@@ -19,9 +19,6 @@ export function drawEllipse(tags: EntityTags, pen: DrawingPen): Drawn {
   let ratio = NaN;
   let from = 0;
   let to = TURN;
-  let nx = 0;
-  let ny = 0;
-  let nz = 1;
   for (let i = 0; i < tags.count; i++)
     switch (tags.codes[i]!) {
       case 10:
@@ -51,21 +48,12 @@ export function drawEllipse(tags: EntityTags, pen: DrawingPen): Drawn {
       case 42:
         to = tags.number(i);
         break;
-      case 210:
-        nx = tags.number(i);
-        break;
-      case 220:
-        ny = tags.number(i);
-        break;
-      case 230:
-        nz = tags.number(i);
-        break;
     }
   tags.need(x, y, ux, uy, ratio);
+  const face = tags.facing();
   if (tags.fault !== null) return refused(tags.fault.reason);
   const major = Math.hypot(ux, uy);
   if (!(ratio > 0) || !(major > 0)) return refused('bad-size');
-  const face = faceOf(nx, ny, nz);
   if (face === 'tilted' || Math.abs(uz) > FLAT * major) return refused('tilted');
   const side = face === 'up' ? ratio : -ratio;
   let sweep = to - from;

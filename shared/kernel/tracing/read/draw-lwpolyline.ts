@@ -1,5 +1,5 @@
 import type { DrawingPen } from './drawing-pen.ts';
-import { faceOf, refused, type Drawn } from './entity-plane.ts';
+import { refused, type Drawn } from './entity-plane.ts';
 import type { EntityTags } from './entity-tags.ts';
 import type { VertexRow } from './vertex-row.ts';
 
@@ -20,9 +20,6 @@ export function drawLwpolyline(tags: EntityTags, pen: DrawingPen, row: VertexRow
   let height = 0;
   let told = 0;
   let wide = false;
-  let nx = 0;
-  let ny = 0;
-  let nz = 1;
   for (let i = 0; i < tags.count; i++)
     switch (tags.codes[i]!) {
       case 10:
@@ -55,21 +52,12 @@ export function drawLwpolyline(tags: EntityTags, pen: DrawingPen, row: VertexRow
       case 90:
         told = tags.cut ? tags.whole(i) : 0;
         break;
-      case 210:
-        nx = tags.number(i);
-        break;
-      case 220:
-        ny = tags.number(i);
-        break;
-      case 230:
-        nz = tags.number(i);
-        break;
     }
   tags.need(x, y);
+  const face = tags.facing();
   if (tags.fault !== null) return refused(tags.fault.reason);
   row.add(x, y, bulge);
   if (tags.cut && row.count < told) return refused('cut-off');
-  const face = faceOf(nx, ny, nz);
   if (face === 'tilted') return refused('tilted');
   if (face === 'down') pen.turnOver();
   row.draw(pen, (flags & CLOSED) !== 0);

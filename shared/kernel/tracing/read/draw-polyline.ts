@@ -1,5 +1,5 @@
 import type { DrawingPen } from './drawing-pen.ts';
-import { faceOf, refused, type Drawn } from './entity-plane.ts';
+import { refused, type Drawn } from './entity-plane.ts';
 import type { RefusedReason } from './entity-reasons.ts';
 import type { EntityTags } from './entity-tags.ts';
 import { FLAT } from './read-tolerances.ts';
@@ -27,9 +27,6 @@ export function drawPolyline(
   let flags = 0;
   let height = 0;
   let wide = false;
-  let nx = 0;
-  let ny = 0;
-  let nz = 1;
   for (let i = 0; i < tags.count; i++)
     switch (tags.codes[i]!) {
       case 70:
@@ -42,17 +39,9 @@ export function drawPolyline(
       case 41:
         wide = tags.number(i) !== 0 || wide;
         break;
-      case 210:
-        nx = tags.number(i);
-        break;
-      case 220:
-        ny = tags.number(i);
-        break;
-      case 230:
-        nz = tags.number(i);
-        break;
     }
   const inSpace = (flags & IN_SPACE) !== 0;
+  const facing = tags.facing();
   const vertices = readVertices(reader, tags, vertexTags, row);
   const hasEnd = reader.code === 0 && reader.is('SEQEND');
   if (hasEnd) vertexTags.collect(reader);
@@ -60,7 +49,7 @@ export function drawPolyline(
   if ((flags & MESH) !== 0) return refuse('three-dimensional');
   if (tags.fault !== null) return refuse(tags.fault.reason);
   if (!hasEnd && reader.code !== 0) return refuse('cut-off');
-  const face = inSpace ? 'up' : faceOf(nx, ny, nz);
+  const face = inSpace ? 'up' : facing;
   if (face === 'tilted') return refuse('tilted');
   if (!vertices.flat) return refuse('not-flat');
   if (face === 'down') pen.turnOver();

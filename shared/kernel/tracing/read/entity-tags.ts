@@ -1,3 +1,4 @@
+import { faceOf } from './entity-plane.ts';
 import { parseNumber } from './parse-number.ts';
 import { lineOf, type FilePlace, type PairRows, type TagReader } from './tag-reader.ts';
 
@@ -28,6 +29,8 @@ export class EntityTags {
   /** The file ended within this entity. */
   cut = false;
   #bytes: Uint8Array = new Uint8Array(0);
+  /** Pairs of the extrusion, groups 210, 220 and 230; −1 where there is none. */
+  #extrusion: [x: number, y: number, z: number] = [-1, -1, -1];
   #from: FilePlace = { at: 0, line: 0 };
   readonly #rows: PairRows = {
     count: 0,
@@ -55,6 +58,7 @@ export class EntityTags {
     reader.brokenLine = 0;
     const more = reader.readPairs(this.#rows);
     const { count, codes } = this.#rows;
+    this.#extrusion[0] = this.#extrusion[1] = this.#extrusion[2] = -1;
     let paper = -1;
     let invisible = -1;
     for (let i = 0; i < count; i++) {
@@ -64,6 +68,9 @@ export class EntityTags {
         this.layerEnd = this.endOf(i);
       } else if (code === 67) paper = i;
       else if (code === 60) invisible = i;
+      else if (code === 210) this.#extrusion[0] = i;
+      else if (code === 220) this.#extrusion[1] = i;
+      else if (code === 230) this.#extrusion[2] = i;
     }
     this.cut = !more;
     if (!more) reader.code = -1;
@@ -88,6 +95,13 @@ export class EntityTags {
       return NaN;
     }
     return value;
+  }
+
+  /** Which way the entity's extrusion points: up where none is given (DXF Reference, groups 210, 220, 230). */
+  facing(): 'up' | 'down' | 'tilted' {
+    const [x, y, z] = this.#extrusion;
+    if (x < 0 && y < 0 && z < 0) return 'up';
+    return faceOf(x < 0 ? 0 : this.number(x), y < 0 ? 0 : this.number(y), z < 0 ? 1 : this.number(z));
   }
 
   /** Where the value of pair i lies. */

@@ -1,4 +1,4 @@
-import { faceOf, refused, type Drawn } from './entity-plane.ts';
+import { refused, type Drawn } from './entity-plane.ts';
 import type { EntityTags } from './entity-tags.ts';
 import type { NameTable } from './name-table.ts';
 import { AS_DRAWN, placeWithin, turn, turnedOver, type Placement } from './placement.ts';
@@ -33,9 +33,6 @@ export function readInsert(tags: EntityTags, names: NameTable): Insert | Drawn {
   let rows = 1;
   let columnStep = 0;
   let rowStep = 0;
-  let nx = 0;
-  let ny = 0;
-  let nz = 1;
   for (let i = 0; i < tags.count; i++)
     switch (tags.codes[i]!) {
       case 2:
@@ -71,20 +68,11 @@ export function readInsert(tags: EntityTags, names: NameTable): Insert | Drawn {
       case 45:
         rowStep = tags.number(i);
         break;
-      case 210:
-        nx = tags.number(i);
-        break;
-      case 220:
-        ny = tags.number(i);
-        break;
-      case 230:
-        nz = tags.number(i);
-        break;
     }
   tags.need(x, y);
+  const face = tags.facing();
   if (tags.fault !== null) return refused(tags.fault.reason);
   if (scaleX === 0 || scaleY === 0) return refused('bad-size');
-  const face = faceOf(nx, ny, nz);
   if (face === 'tilted') return refused('tilted');
   const [cos, sin] = turn(angle);
   const own: Placement = { a: cos * scaleX, b: sin * scaleX, c: -sin * scaleY, d: cos * scaleY, e: x, f: y };
